@@ -1,0 +1,183 @@
+import type { Arm } from './network/arm.ts';
+import type { DesignRecord, Span } from './record/design-record.ts';
+
+/**
+ * The dossier: everything computed from one record, as plain data. Page, worker, command line and report read this and
+ * compute nothing. SI units; no NaN, no Infinity: what doesn't exist is null.
+ */
+export interface Dossier {
+  readonly schema: 'ferrule-dossier/1';
+  /** Version of Ferrule that computed it. */
+  readonly version: string;
+  readonly record: DesignRecord;
+  /** SHA-256 (FIPS 180-4) of the record's RFC 8785 form without its sign-off; 64 hex digits. */
+  readonly digest: string;
+  /** Numbered A1... in order. */
+  readonly assumptions: readonly string[];
+  /** Every network that exists, in the order in which they are considered. */
+  readonly options: readonly Option[];
+  /** Forms without a network, with the inequality that fails. */
+  readonly absent: readonly Absent[];
+  /** Cascade only. */
+  readonly sections: SectionTable | null;
+  /** Id of the first option that meets everything; null when none does. */
+  readonly proposed: string | null;
+  /** Id of the option that the rest of the dossier is about; null when there is no option at all. */
+  readonly chosen: string | null;
+  /** Who chose: the engineer, the proposal, or (none meets everything) the one that comes nearest. */
+  readonly chosenBy: 'engineer' | 'proposal' | 'nearest';
+  /** The chosen option's sweep over the span shown. */
+  readonly response: Response | null;
+  readonly evidence: Evidence | null;
+  /** Of the chosen network and of the work; safety included. */
+  readonly cautions: readonly Caution[];
+  /** Only those really applied, each with what it was applied for. */
+  readonly references: readonly Reference[];
+}
+
+export interface Option {
+  /** Stable name of the network for these terminations: selection in the record refers to it. */
+  readonly id: string;
+  /** For people: "Series L, shunt C". */
+  readonly title: string;
+  readonly arms: readonly Arm[];
+  /** Reference designators in the order of `arms`: L1, C1, ... */
+  readonly designators: readonly string[];
+  /** Number of cascaded sections the network stands for; 0 when no part is needed. */
+  readonly sections: number;
+  readonly form: 'low-pass' | 'high-pass' | 'band-pass' | 'all-pass';
+  /** Impedance seen from the source at the design frequency, Ω. */
+  readonly seen: { readonly r: number; readonly x: number };
+  /** At the design frequency, 0 to 1. */
+  readonly transducerGain: number;
+  /** |Γ| at the design frequency for the aim in force, 0 to 1. */
+  readonly reflection: number;
+  /** Least return loss over the required band, dB (at most 200); null without a band. */
+  readonly worstReturnLossDb: number | null;
+  /** Where it occurs, Hz. */
+  readonly worstAtHz: number | null;
+  readonly halfPower: HalfPower;
+  /** Q of the section between its two resistances, halved; null when no part is needed. */
+  readonly loadedQ: number | null;
+  /** design frequency / loadedQ, Hz. */
+  readonly bandwidthFromQHz: number | null;
+  /** How the two half-power figures compare, in words. */
+  readonly bandwidthNote: string;
+  /** Transducer gain at 2f0 and 3f0 below that at f0, dB (negative: above; at most 200). */
+  readonly harmonicDb: readonly { readonly order: 2 | 3; readonly attenuationDb: number }[];
+  readonly dc: {
+    /** A series capacitor stands between source and load. */
+    readonly blocked: boolean;
+    /** A shunt inductor shorts DC to ground as seen from that end. */
+    readonly sourceShorted: boolean;
+    readonly loadShorted: boolean;
+    readonly words: string;
+  };
+  readonly meets: boolean;
+  /** One per requirement assessed, met or not, in words. */
+  readonly checks: readonly Check[];
+  /** Reasons in words why it falls short; when it meets everything, what it meets. */
+  readonly reasons: readonly string[];
+  /** Rules of thumb that apply, with the reason. They never hide an option. */
+  readonly cautions: readonly string[];
+}
+
+export interface Check {
+  readonly subject: 'return loss' | 'DC block' | 'DC at the source' | 'DC at the load' | 'part values';
+  readonly verdict: 'meets' | 'falls short';
+  readonly reason: string;
+}
+
+export interface HalfPower {
+  /** Edge 3.0103 dB below the peak nearest the design frequency, Hz; null: there is none on that side. */
+  readonly lowHz: number | null;
+  readonly highHz: number | null;
+  /** highHz - lowHz; null when an edge is absent. */
+  readonly bandwidthHz: number | null;
+  /** Frequency of the peak, Hz, and the transducer gain there. */
+  readonly peakHz: number;
+  readonly peakGain: number;
+  /** "102.2 MHz to 201.0 MHz", "none below: low-pass", ... */
+  readonly words: string;
+}
+
+export interface Absent {
+  readonly form: string;
+  /** The inequality that fails, with its numbers. */
+  readonly why: string;
+}
+
+export interface SectionTable {
+  readonly rows: readonly SectionRow[];
+  /** Smallest number of sections that holds the return loss; null when six don't. */
+  readonly smallest: number | null;
+  /** Best worst-case return loss of all rows, dB; null without a band. */
+  readonly bestReturnLossDb: number | null;
+  /** One sentence: which number holds it, or that none does and by how much. */
+  readonly words: string;
+}
+
+export interface SectionRow {
+  readonly id: string;
+  readonly sections: number;
+  readonly form: 'low-pass' | 'high-pass';
+  /** Which end has the shunt arm. */
+  readonly shuntAt: 'source' | 'load';
+  readonly parts: number;
+  /** Q of every section. */
+  readonly sectionQ: number;
+  readonly worstReturnLossDb: number | null;
+  readonly halfPower: HalfPower;
+  readonly holds: boolean | null;
+}
+
+/** Equal lengths; ascending frequency. Every figure finite: return loss and attenuation stop at 200 dB, VSWR at 1e6. */
+export interface Response {
+  readonly spanHz: Span;
+  readonly frequencyHz: readonly number[];
+  readonly returnLossDb: readonly number[];
+  readonly vswr: readonly number[];
+  readonly mismatchLossDb: readonly number[];
+  /** 10 log10 of transducer gain: 0 or negative. */
+  readonly transducerGainDb: readonly number[];
+  /** Reflection coefficient for the aim in force. */
+  readonly gammaRe: readonly number[];
+  readonly gammaIm: readonly number[];
+}
+
+export interface Evidence {
+  /** Frequencies at which every route was evaluated, Hz: design frequency first, then band edges. */
+  readonly frequenciesHz: readonly number[];
+  readonly routes: readonly Route[];
+  readonly checks: readonly EvidenceCheck[];
+  readonly pass: boolean;
+}
+
+/** One independent way to the same numbers, at the design frequency. */
+export interface Route {
+  readonly name: string;
+  /** How it computes, in one sentence. */
+  readonly how: string;
+  readonly seen: { readonly r: number; readonly x: number } | null;
+  readonly transducerGain: number | null;
+}
+
+export interface EvidenceCheck {
+  /** "impedance seen", "transducer gain", "power balance", "element values by the Q method" */
+  readonly subject: string;
+  /** Largest relative difference over routes and frequencies. */
+  readonly spread: number;
+  readonly tolerance: number;
+  readonly pass: boolean;
+  readonly note: string;
+}
+
+export interface Caution {
+  readonly kind: 'safety' | 'practice';
+  readonly text: string;
+}
+
+export interface Reference {
+  readonly title: string;
+  readonly appliedFor: string;
+}

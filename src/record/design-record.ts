@@ -1,0 +1,76 @@
+import type { Termination } from '../network/termination.ts';
+
+export const methods = ['two-element', 'resistive-pair', 'cascade'] as const;
+/** Which sheet the record belongs to. */
+export type Method = (typeof methods)[number];
+
+/** Conjugate: looking into the network one sees ZS*. Reflectionless: one sees ZS. */
+export type Aim = 'conjugate' | 'reflectionless';
+
+/** A closed interval; unit by context (Hz, H or F). `low` <= `high`. */
+export interface Span {
+  readonly low: number;
+  readonly high: number;
+}
+
+export interface Signature {
+  readonly name: string;
+  readonly role: string;
+  /** ISO 8601 calendar date, or '' while unsigned. */
+  readonly date: string;
+}
+
+/**
+ * The design record: inputs and decisions, never results. Published as JSON Schema in public/schema/.
+ * SI units throughout.
+ */
+export interface DesignRecord {
+  readonly schema: 'ferrule-record/1';
+  readonly identity: {
+    readonly title: string;
+    readonly number: string;
+    readonly revision: string;
+    /** ISO 8601 calendar date. */
+    readonly date: string;
+    /** Change ticket; '' when none. */
+    readonly ticket: string;
+    /** Legal owner of the document (ISO 7200); '' when none. */
+    readonly owner: string;
+  };
+  readonly requirement: {
+    readonly frequencyHz: number;
+    /** Band to hold; null: the design frequency alone. Always holds `frequencyHz`. */
+    readonly bandHz: Span | null;
+    /** Least return loss over the band, dB; null: not required. */
+    readonly returnLossDb: number | null;
+    /** DC must be blocked between source and load. */
+    readonly blockDc: boolean;
+    /** Ends that carry DC, which the network must not short to ground. */
+    readonly keepDc: 'none' | 'source' | 'load' | 'both';
+    /** Practicable range of inductance, H. */
+    readonly inductorH: Span;
+    /** Practicable range of capacitance, F. */
+    readonly capacitorF: Span;
+    /** Available power of the source, W; null: not stated. */
+    readonly powerW: number | null;
+  };
+  readonly source: Termination;
+  readonly load: Termination;
+  readonly aim: Aim;
+  readonly method: Method;
+  /** Cascade only: number of sections (1 to 6), or the smallest that holds the requirement. */
+  readonly sections: number | 'auto';
+  /** Sweep shown, Hz; null: chosen from the band. */
+  readonly sweepHz: Span | null;
+  readonly selection: {
+    /** Id of the network chosen by the engineer; null: the proposed one. */
+    readonly option: string | null;
+    /** Why, in the engineer's words. */
+    readonly reason: string;
+  };
+  readonly signOff: {
+    readonly prepared: Signature;
+    readonly checked: Signature;
+    readonly approved: Signature;
+  };
+}

@@ -1,5 +1,6 @@
 import type { Arm } from './network/arm.ts';
-import type { DesignRecord, Span } from './record/design-record.ts';
+import type { Span } from './quantity/span.ts';
+import type { DesignRecord } from './record/design-record.ts';
 
 /**
  * The dossier: everything computed from one record, as plain data. Page, worker, command line and report read this and

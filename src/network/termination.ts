@@ -1,3 +1,6 @@
+/** Conjugate: looking into the network one sees ZS*. Reflectionless: one sees ZS. Both are the same for a real source. */
+export type Aim = 'conjugate' | 'reflectionless';
+
 /** What a termination does away from the design frequency. */
 export type Behaviour = 'constant' | 'series' | 'parallel';
 

@@ -1,17 +1,9 @@
-import type { Termination } from '../network/termination.ts';
+import type { Aim, Termination } from '../network/termination.ts';
+import type { Span } from '../quantity/span.ts';
 
 export const methods = ['two-element', 'resistive-pair', 'cascade'] as const;
 /** Which sheet the record belongs to. */
 export type Method = (typeof methods)[number];
-
-/** Conjugate: looking into the network one sees ZS*. Reflectionless: one sees ZS. */
-export type Aim = 'conjugate' | 'reflectionless';
-
-/** A closed interval; unit by context (Hz, H or F). `low` <= `high`. */
-export interface Span {
-  readonly low: number;
-  readonly high: number;
-}
 
 export interface Signature {
   readonly name: string;

@@ -1,0 +1,56 @@
+import { defineConfig, globalIgnores } from 'eslint/config';
+import tseslint from 'typescript-eslint';
+
+/** Rules that find mistakes; how code looks is Prettier's business, who may import whom that of test/house. */
+export default defineConfig(
+  globalIgnores(['dist/', '.astro/', 'coverage/']),
+  { linterOptions: { reportUnusedDisableDirectives: 'error' } },
+  {
+    files: ['**/*.{ts,js,mjs}'],
+    extends: [tseslint.configs.strictTypeChecked],
+    languageOptions: { parserOptions: { projectService: true } },
+    rules: {
+      eqeqeq: 'error',
+      'no-console': ['error', { allow: ['error'] }],
+      'no-control-regex': 'error',
+      'no-duplicate-imports': ['error', { allowSeparateTypeImports: true }],
+      'no-param-reassign': 'error',
+      'object-shorthand': 'error',
+      'prefer-const': 'error',
+      '@typescript-eslint/consistent-type-imports': 'error',
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/switch-exhaustiveness-check': 'error',
+      // Numbers stand in messages everywhere here, and they are formatted on purpose.
+      '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
+      // `array[i]!` in a loop over the array's own length is the plain way to say it under noUncheckedIndexedAccess.
+      '@typescript-eslint/no-non-null-assertion': 'off',
+      // An arrow that calls one procedure reads well without braces.
+      '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
+    },
+  },
+  {
+    // The core knows neither a browser nor Node: of a host's globals, only those that every host has.
+    files: ['src/**/*.ts'],
+    ignores: ['src/cli/**', 'src/workers/**', 'src/pages/**', 'src/layouts/**'],
+    languageOptions: {
+      parserOptions: { lib: ['es2023'] },
+      globals: { TextEncoder: 'readonly', TextDecoder: 'readonly' },
+    },
+    rules: { 'no-undef': 'error' },
+  },
+  {
+    files: ['test/**'],
+    rules: {
+      'no-console': 'off',
+      // Files read back, pages evaluated and deliberately broken input are of no type.
+      '@typescript-eslint/no-unsafe-argument': 'off',
+      '@typescript-eslint/no-unsafe-assignment': 'off',
+      '@typescript-eslint/no-unsafe-member-access': 'off',
+    },
+  },
+  {
+    // These don't belong to the program that tsconfig.json describes.
+    files: ['**/*.{js,mjs}'],
+    extends: [tseslint.configs.disableTypeChecked],
+  },
+);

@@ -1,0 +1,62 @@
+import { bisect, goldenMaximum } from './search.ts';
+
+/** 3.0103 dB as a power ratio. */
+const halfPowerRatio = 10 ** -0.30103;
+
+/** Edges 3.0103 dB below the peak of transducer gain nearest the design frequency; null where there is none. */
+export interface HalfPowerEdges {
+  readonly lowHz: number | null;
+  readonly highHz: number | null;
+  readonly peakHz: number;
+  readonly peakGain: number;
+}
+
+/**
+ * Frequencies at which edges are looked for: log-spaced away from f0, each step 2 % of the distance from f0 so that
+ * both a band of parts per million and one of several decades are resolved; 1e-6·f0 to 1e6·f0.
+ */
+export function edgeGrid(f0: number): Float64Array {
+  const offsets: number[] = [];
+  for (let u = 1e-8; u < Math.log(1e6); u *= 1.02) offsets.push(u);
+  const n = offsets.length;
+  const grid = new Float64Array(2 * n + 1);
+  grid[n] = f0;
+  offsets.forEach((u, k) => {
+    grid[n + 1 + k] = f0 * Math.exp(u);
+    grid[n - 1 - k] = f0 * Math.exp(-u);
+  });
+  return grid;
+}
+
+/**
+ * Half-power edges of a gain curve sampled on `edgeGrid`, refined with `gainAt`.
+ *
+ * @param frequencyHz ascending, the design frequency in the middle
+ * @param gain        transducer gain at each
+ * @param gainAt      the same at any frequency, Hz
+ */
+export function halfPowerEdges(
+  frequencyHz: Float64Array,
+  gain: Float64Array,
+  gainAt: (hz: number) => number,
+): HalfPowerEdges {
+  const last = frequencyHz.length - 1;
+  let top = last / 2;
+  while (top < last && gain[top + 1]! > gain[top]!) top += 1;
+  while (top > 0 && gain[top - 1]! > gain[top]!) top -= 1;
+  // A match at f0 is the peak; that rounding lifts a neighbour by a part in 1e12 doesn't move it.
+  if (gain[top]! < gain[last / 2]! * (1 + 1e-12)) top = last / 2;
+  const peak =
+    top === 0 || top === last || top === last / 2
+      ? { at: frequencyHz[top]!, value: gain[top]! }
+      : goldenMaximum(gainAt, frequencyHz[top - 1]!, frequencyHz[top + 1]!);
+  const half = peak.value * halfPowerRatio;
+
+  const edge = (step: 1 | -1): number | null => {
+    for (let k = top; k + step >= 0 && k + step <= last; k += step) {
+      if (gain[k + step]! < half) return bisect((hz) => gainAt(hz) - half, frequencyHz[k]!, frequencyHz[k + step]!);
+    }
+    return null;
+  };
+  return { lowHz: edge(-1), highHz: edge(1), peakHz: peak.at, peakGain: peak.value };
+}

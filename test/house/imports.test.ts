@@ -57,12 +57,6 @@ describe('the house', () => {
   it.each(keepers)('imports $packages only in $room', ({ packages, room }) => {
     expect(imports.filter(({ from, to }) => packages.test(to) && !room.test(from))).toEqual([]);
   });
-
-  it('resolves every relative import to a file of its own', () => {
-    const known = new Set(files);
-    const relative = imports.filter(({ to }) => /^(src|components)\//.test(to));
-    expect(relative.filter(({ to }) => /\.(ts|mjs|astro|css)$/.test(to) && !known.has(to))).toEqual([]);
-  });
 });
 
 describe('cyclesIn(imports)', () => {

@@ -45,7 +45,7 @@ export function cyclesIn(imports: readonly Import[]): readonly (readonly string[
     const start = path.indexOf(file);
     if (start >= 0) cycles.push([...path.slice(start), file]);
     if (start >= 0 || done.has(file)) return;
-    for (const { to } of next.get(file) ?? []) walk(to, [...path, file]);
+    for (const to of next.get(file) ?? []) walk(to, [...path, file]);
     done.add(file);
   };
   for (const file of next.keys()) walk(file, []);

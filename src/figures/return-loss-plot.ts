@@ -1,0 +1,65 @@
+import type { Response } from '../dossier.ts';
+import type { DesignRecord } from '../record/design-record.ts';
+import { formatFixed, formatQuantity, formatRead } from '../quantity/format.ts';
+import { chartFrame, chartSize, type Key, type Size } from './chart-frame.ts';
+import { curve } from './curve.ts';
+import { n, path, rectangle, stroke } from './draw.ts';
+import type { Figure, Shape } from './figure.ts';
+import { designMark } from './design-mark.ts';
+import { hatch } from './hatch.ts';
+
+/** A match at one frequency has a return loss without end there; beyond this no one reads a difference. */
+const highest = 40;
+const edge = { stroke: 'limit', width: stroke.thin } as const;
+
+/**
+ * Return loss against frequency; the requirement is a hatched region that the curve must stay out of: the band, up to
+ * the return loss asked for.
+ */
+export function returnLossPlot(
+  response: Response,
+  requirement: DesignRecord['requirement'],
+  size: Size = chartSize,
+): Figure {
+  const needed = requirement.returnLossDb;
+  const best = Math.max(...response.returnLossDb);
+  const top = Math.max(10, (needed ?? 0) + 6, Math.min(highest, best));
+  const high = Math.ceil(top / 10) * 10;
+  const cut = best > high ? `; above ${formatFixed(high, 0)} dB not drawn` : '';
+  const title = 'Return loss';
+  const key: Key | undefined =
+    needed === null
+      ? undefined
+      : {
+          text: `required: at least ${formatRead(needed, 'dB')}`,
+          tone: 'limit',
+          sample: (x, y, X, Y) => [hatch(x, y, X, Y, 3.5), rectangle(x, y, X - x, Y - y, edge)],
+        };
+  const axisTitle = `Return loss, dB (larger is better${cut})`;
+  const frame = chartFrame(size, response.spanHz, { low: 0, high }, axisTitle, key);
+  const shapes: Shape[] = [...frame.shapes];
+  let limit = 'No return loss is required.';
+
+  if (needed !== null) {
+    const band = requirement.bandHz ?? { low: requirement.frequencyHz, high: requirement.frequencyHz };
+    const inside = (hertz: number): number => Math.min(frame.right, Math.max(frame.left, frame.x(hertz)));
+    let [x, X] = [inside(band.low), inside(band.high)];
+    if (X - x < 3) [x, X] = [(x + X) / 2 - 1.5, (x + X) / 2 + 1.5];
+    const y = frame.y(needed);
+    shapes.push(hatch(x, y, X, frame.bottom));
+    shapes.push(path(`M${n(x)} ${n(frame.bottom)}L${n(x)} ${n(y)}L${n(X)} ${n(y)}L${n(X)} ${n(frame.bottom)}`, edge));
+    limit =
+      `Required: at least ${formatRead(needed, 'dB')} ` +
+      (requirement.bandHz === null
+        ? `at ${formatRead(band.low, 'Hz')}.`
+        : `from ${formatRead(band.low, 'Hz')} to ${formatRead(band.high, 'Hz')}.`);
+  }
+  shapes.push(...designMark(frame, requirement.frequencyHz));
+  const d = curve(frame, response.frequencyHz, response.returnLossDb);
+  if (d !== '') shapes.push(path(d, { stroke: 'accent', width: stroke.heavy }));
+  const worst = Math.min(...response.returnLossDb);
+  const description =
+    `Return loss from ${formatQuantity(response.spanHz.low, 'Hz')} to ${formatQuantity(response.spanHz.high, 'Hz')}: ` +
+    `between ${formatFixed(worst, 2)} dB and ${formatFixed(best, 2)} dB. ${limit}`;
+  return { ...size, title, description, shapes };
+}

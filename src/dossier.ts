@@ -1,6 +1,9 @@
+import type { Evidence } from './evidence/evidence.ts';
 import type { Arm } from './network/arm.ts';
 import type { Span } from './quantity/span.ts';
 import type { DesignRecord } from './record/design-record.ts';
+
+export type { Evidence, EvidenceCheck, Route } from './evidence/evidence.ts';
 
 /**
  * The dossier: everything computed from one record, as plain data. Page, worker, command line and report read this and
@@ -144,33 +147,6 @@ export interface Response {
   /** Reflection coefficient for the aim in force. */
   readonly gammaRe: readonly number[];
   readonly gammaIm: readonly number[];
-}
-
-export interface Evidence {
-  /** Frequencies at which every route was evaluated, Hz: design frequency first, then band edges. */
-  readonly frequenciesHz: readonly number[];
-  readonly routes: readonly Route[];
-  readonly checks: readonly EvidenceCheck[];
-  readonly pass: boolean;
-}
-
-/** One independent way to the same numbers, at the design frequency. */
-export interface Route {
-  readonly name: string;
-  /** How it computes, in one sentence. */
-  readonly how: string;
-  readonly seen: { readonly r: number; readonly x: number } | null;
-  readonly transducerGain: number | null;
-}
-
-export interface EvidenceCheck {
-  /** "impedance seen", "transducer gain", "power balance", "element values by the Q method" */
-  readonly subject: string;
-  /** Largest relative difference over routes and frequencies. */
-  readonly spread: number;
-  readonly tolerance: number;
-  readonly pass: boolean;
-  readonly note: string;
 }
 
 export interface Caution {

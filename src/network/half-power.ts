@@ -1,8 +1,5 @@
 import { bisect, goldenMaximum } from './search.ts';
 
-/** 3.0103 dB as a power ratio. */
-const halfPowerRatio = 10 ** -0.30103;
-
 /** Edges 3.0103 dB below the peak of transducer gain nearest the design frequency; null where there is none. */
 export interface HalfPowerEdges {
   readonly lowHz: number | null;
@@ -50,7 +47,7 @@ export function halfPowerEdges(
     top === 0 || top === last || top === last / 2
       ? { at: frequencyHz[top]!, value: gain[top]! }
       : goldenMaximum(gainAt, frequencyHz[top - 1]!, frequencyHz[top + 1]!);
-  const half = peak.value * halfPowerRatio;
+  const half = peak.value / 2;
 
   const edge = (step: 1 | -1): number | null => {
     for (let k = top; k + step >= 0 && k + step <= last; k += step) {

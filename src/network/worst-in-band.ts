@@ -23,11 +23,7 @@ export function logGrid(lowHz: number, highHz: number, points: number): Float64A
  * @param gammaSquared |Γ|² at each
  * @param at           |Γ|² at any frequency, Hz
  */
-export function worstInBand(
-  frequencyHz: Float64Array,
-  gammaSquared: Float64Array,
-  at: (hz: number) => number,
-): Worst {
+export function worstInBand(frequencyHz: Float64Array, gammaSquared: Float64Array, at: (hz: number) => number): Worst {
   let worst: Worst = { gammaSquared: gammaSquared[0]!, atHz: frequencyHz[0]! };
   const consider = (value: number, hz: number): void => {
     if (value > worst.gammaSquared) worst = { gammaSquared: value, atHz: hz };

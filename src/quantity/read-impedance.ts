@@ -32,7 +32,8 @@ function isGrouped(text: string): boolean {
 }
 
 function readPolar(given: string): Reading<Rectangular> {
-  const match = /^([^∠<]+)[∠<]\s*([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:e[+-]?\d+)?)\s*(°|deg|rad)?\s*(?:Ω|ohms?)?$/iu.exec(given);
+  const match =
+    /^([^∠<]+)[∠<]\s*([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:e[+-]?\d+)?)\s*(°|deg|rad)?\s*(?:Ω|ohms?)?$/iu.exec(given);
   if (match === null) return refuse('not a magnitude and an angle', would);
   const [, size = '', angleText = '', angleUnit = '°'] = match;
   const magnitude = readQuantity(size, 'Ω');

@@ -47,11 +47,7 @@ export function readQuantity(text: string, unit: Unit): Reading<number> {
   }
   const scale = readSuffix(suffix, unit);
   if (scale === null) return refuse(`"${suffix}" is not a prefix with ${unit}`, would);
-  return finite(
-    `${sign}${digits.replace(',', '.')}e${String(Number(exponent) + scale.exponent)}`,
-    unit,
-    scale.prefix,
-  );
+  return finite(`${sign}${digits.replace(',', '.')}e${String(Number(exponent) + scale.exponent)}`, unit, scale.prefix);
 }
 
 function finite(literal: string, unit: Unit, prefix: string): Reading<number> {

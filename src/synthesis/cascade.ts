@@ -1,5 +1,5 @@
 import type { Complex } from 'complex.js';
-import type { Absence, Candidate, Synthesis } from './candidate.ts';
+import type { Absence, Candidate } from './candidate.ts';
 import { chainArms, chainBetween, sectionQ, whyNoChain, type ShuntAt } from './resistance-chain.ts';
 import { sameArms, titleOf } from './title.ts';
 
@@ -24,7 +24,7 @@ export function cascade(
   load: Complex,
   frequencyHz: number,
   sections: readonly number[],
-): Synthesis & { readonly candidates: readonly CascadeCandidate[] } {
+): { readonly candidates: readonly CascadeCandidate[]; readonly absent: readonly Absence[] } {
   const candidates: CascadeCandidate[] = [];
   const absent: Absence[] = [];
   const chains = (['load', 'source'] as const).map((shuntAt) => chainBetween(target, load, shuntAt));

@@ -18,7 +18,8 @@ export function twoElement(target: Complex, load: Complex, frequencyHz: number):
     const q = sectionQ(chain, 1);
     if (q === null) {
       absent.push({
-        form: shuntAt === 'load' ? 'series arm, then shunt arm at the load' : 'shunt arm at the source, then series arm',
+        form:
+          shuntAt === 'load' ? 'series arm, then shunt arm at the load' : 'shunt arm at the source, then series arm',
         why: whyNoChain(chain),
       });
       continue;

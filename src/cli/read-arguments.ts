@@ -1,0 +1,114 @@
+import { readFileSync, statSync } from 'node:fs';
+import { resolve } from 'node:path';
+import { parseArgs } from 'node:util';
+import { InputError } from '../quantity/problem.ts';
+import type { DesignRecord } from '../record/design-record.ts';
+import { readDraft } from '../record/draft.ts';
+import { fieldNames, type Fields } from '../record/fields.ts';
+import { readRecord } from '../record/read-record.ts';
+
+/** Files are named from where the person stands: npm changes the folder and says where it was. */
+export const fromHere = (path: string): string => resolve(process.env['INIT_CWD'] ?? '.', path);
+
+/**
+ * The record that a command line describes: a file's name, or the fields as options.
+ *
+ * @param args  arguments after the command
+ * @param extra names of the command's own text options
+ * @throws InputError with what was read, why it won't do and what would
+ */
+export function readArguments<Extra extends string = never>(
+  args: readonly string[],
+  extra: readonly Extra[] = [],
+): { readonly record: DesignRecord; readonly options: Partial<Record<Extra, string>> } {
+  const { values, positionals } = parse(args, extra);
+  const options: Partial<Record<Extra, string>> = {};
+  for (const name of extra) {
+    const value = values[name];
+    if (value !== undefined) options[name] = value;
+  }
+  const typed = Object.keys(values).filter((name) => !(extra as readonly string[]).includes(name));
+  if (positionals.length > 1) {
+    throw problem(positionals.slice(1).join(' '), 'more than one record is named', 'give one file');
+  }
+  const [file] = positionals;
+  if (file === undefined) {
+    if (typed.length === 0) {
+      throw problem('', 'nothing is asked', 'give --frequency, --source and --load, or a record file');
+    }
+    return { record: fromFields(values as Fields), options };
+  }
+  if (typed.length > 0) {
+    throw problem(`--${typed[0]!}`, 'a record holds all of its fields', 'give a record or options, not both');
+  }
+  return { record: readRecord(readTextFile(file)), options };
+}
+
+function parse(
+  args: readonly string[],
+  extra: readonly string[],
+): {
+  values: Partial<Record<string, string>>;
+  positionals: readonly string[];
+} {
+  const names = [...fieldNames, 'behaviour', ...extra];
+  const known = new Set<string>(names);
+  // A value that begins with a minus sign, as in --load -5, is a value: joined so that it isn't taken for an option.
+  const joined: string[] = [];
+  for (let k = 0; k < args.length; k += 1) {
+    const here = args[k]!;
+    const name = here.startsWith('--') ? here.slice(2) : '';
+    if (name === 'block-dc' && !['yes', 'no'].includes(args[k + 1] ?? '')) {
+      joined.push('--block-dc=yes');
+    } else if (known.has(name)) {
+      const next = args[k + 1];
+      if (next === undefined || next.startsWith('--')) throw problem(here, 'no value follows', 'give one after it');
+      joined.push(`${here}=${next}`);
+      k += 1;
+    } else if (here.startsWith('-') && !known.has(name.split('=')[0]!)) {
+      throw problem(here, 'this option is unknown', `give one of --${names.join(', --')}`);
+    } else joined.push(here);
+  }
+  const parsed = parseArgs({
+    args: joined,
+    allowPositionals: true,
+    options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
+  });
+  return { values: parsed.values as Partial<Record<string, string>>, positionals: parsed.positionals };
+}
+
+function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: string }): DesignRecord {
+  const { record, problems } = readDraft({
+    date: new Date().toISOString().slice(0, 10),
+    ...(fields.sections === undefined ? {} : { method: 'cascade' }),
+    ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
+    ...fields,
+  });
+  if (record !== null) return record;
+  throw new InputError(...problems.map((found) => ({ ...found, field: `--${found.field}` })));
+}
+
+/** Longest file read as text, bytes. */
+const mostBytes = 64e6;
+
+/** @throws InputError when it can't be read */
+export function readTextFile(file: string): string {
+  const path = fromHere(file);
+  try {
+    if (statSync(path).size > mostBytes) throw problem(file, 'over 64 MB', 'give a design record', 'file');
+    return readFileSync(path, 'utf8');
+  } catch (error) {
+    if (error instanceof InputError) throw error;
+    const code = (error as NodeJS.ErrnoException).code;
+    const why =
+      code === 'ENOENT'
+        ? 'no such file'
+        : code === 'EISDIR'
+          ? 'this is a folder'
+          : `it can't be read (${code ?? 'unknown'})`;
+    throw problem(file, why, 'give the path of a design record', 'file');
+  }
+}
+
+const problem = (read: string, why: string, would: string, field = 'command line'): InputError =>
+  new InputError({ field, read, why, would });

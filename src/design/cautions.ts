@@ -1,0 +1,34 @@
+import type { Caution, Option } from '../dossier.ts';
+import { solveNodal } from '../evidence/nodal.ts';
+import { terminationAt } from '../network/termination-at.ts';
+import { formatQuantity } from '../quantity/format.ts';
+import type { DesignRecord } from '../record/design-record.ts';
+
+/** Cautions of the chosen network and of the work: safety first, then rules of thumb. */
+export function cautionsOf(record: DesignRecord, chosen: Option | undefined): Caution[] {
+  const { powerW, frequencyHz } = record.requirement;
+  const safety: string[] = [];
+  if (powerW !== null && chosen !== undefined) {
+    const { nodes } = solveNodal(
+      chosen.arms,
+      terminationAt(record.source, frequencyHz, frequencyHz),
+      terminationAt(record.load, frequencyHz, frequencyHz),
+      frequencyHz,
+      powerW,
+    );
+    const volts = Math.max(...nodes.map((node) => node.abs()));
+    safety.push(
+      `With ${formatQuantity(powerW, 'W', 3)} available, a node of this network reaches ${formatQuantity(volts, 'V', 3)} peak to ground at the design frequency, matched; a mismatched load can raise it. RF voltage burns skin at contact: switch off before touching.`,
+    );
+  } else {
+    safety.push('RF voltage burns skin at contact: switch off before touching a network that carries power.');
+  }
+  safety.push(
+    'Capacitors hold charge after switch-off; discharge them before work.',
+    'Human exposure to fields, and any transmission, are subject to local codes and licences: transmit into a dummy load unless licensed, and leave the assessment to qualified people.',
+  );
+  return [
+    ...safety.map((text): Caution => ({ kind: 'safety', text })),
+    ...(chosen?.cautions ?? []).map((text): Caution => ({ kind: 'practice', text })),
+  ];
+}

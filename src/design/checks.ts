@@ -1,0 +1,62 @@
+import type { Check } from '../dossier.ts';
+import type { Arm } from '../network/arm.ts';
+import type { DcPath } from '../network/dc-path.ts';
+import { returnLossDb } from '../network/figures-of-merit.ts';
+import type { Worst } from '../network/worst-in-band.ts';
+import { impracticable } from '../parts/practicable.ts';
+import { formatQuantity } from '../quantity/format.ts';
+import type { DesignRecord } from '../record/design-record.ts';
+import { decibelPair, returnLossWords } from './words.ts';
+
+/** Rounding in a return loss that doesn't make it fall short, dB. */
+const slackDb = 1e-9;
+
+/** One verdict per thing required, with its reason in words. What isn't required isn't assessed. */
+export function checksOf(
+  { requirement, aim }: DesignRecord,
+  arms: readonly Arm[],
+  designators: readonly string[],
+  worst: Worst,
+  dc: DcPath,
+): Check[] {
+  const checks: Check[] = [];
+  const add = (subject: Check['subject'], good: boolean, reason: string): void => {
+    checks.push({ subject, verdict: good ? 'meets' : 'falls short', reason });
+  };
+
+  if (requirement.returnLossDb !== null) {
+    const worstDb = returnLossDb(worst.gammaSquared);
+    const [found, asked] = decibelPair(worstDb, requirement.returnLossDb);
+    const good = worstDb >= requirement.returnLossDb - slackDb;
+    const shown = worstDb > 100 ? returnLossWords(worstDb) : found;
+    const kind = aim === 'conjugate' ? '' : ' (reflectionless aim)';
+    add(
+      'return loss',
+      good,
+      `return loss${kind} ${shown} at worst (${formatQuantity(worst.atHz, 'Hz', 5)}), ${good ? 'at least' : 'below'} the ${asked} required`,
+    );
+  }
+  if (requirement.blockDc) {
+    add(
+      'DC block',
+      dc.blocked,
+      dc.blocked ? 'a series capacitor blocks DC' : 'no series capacitor: DC passes from source to load',
+    );
+  }
+  for (const end of ['source', 'load'] as const) {
+    if (requirement.keepDc !== end && requirement.keepDc !== 'both') continue;
+    const shorted = end === 'source' ? dc.sourceShorted : dc.loadShorted;
+    add(
+      `DC at the ${end}`,
+      !shorted,
+      shorted ? `a shunt inductor shorts the DC at the ${end} to ground` : `DC at the ${end} is not shorted`,
+    );
+  }
+  const out = impracticable(arms, designators, requirement.inductorH, requirement.capacitorF);
+  add(
+    'part values',
+    out.length === 0,
+    out.length === 0 ? 'part values are practicable' : `out of the practicable range: ${out.join('; ')}`,
+  );
+  return checks;
+}

@@ -1,0 +1,44 @@
+import type { Response } from '../dossier.ts';
+import type { Arm } from '../network/arm.ts';
+import { attenuationDb, mismatchLossDb, returnLossDb, vswr } from '../network/figures-of-merit.ts';
+import { prepareLadder } from '../network/ladder.ts';
+import { endsOver, sweep } from '../network/sweep.ts';
+import { logGrid } from '../network/worst-in-band.ts';
+import type { Span } from '../quantity/span.ts';
+import type { DesignRecord } from '../record/design-record.ts';
+
+const points = 201;
+
+/** The span swept when none is asked for: half an octave to either side of f0, and the band with as much again. */
+export function sweepSpan({ sweepHz, requirement: { frequencyHz, bandHz } }: DesignRecord): Span {
+  if (sweepHz !== null) return sweepHz;
+  const low = bandHz === null ? frequencyHz : bandHz.low;
+  const high = bandHz === null ? frequencyHz : bandHz.high;
+  const margin = Math.max(high / low, Math.SQRT2);
+  return { low: Math.max(low / margin, frequencyHz / 1000), high: Math.min(high * margin, frequencyHz * 1000) };
+}
+
+/** The chosen network over the span shown; the design frequency and the band's edges are among the samples. */
+export function responseOf(record: DesignRecord, arms: readonly Arm[]): Response {
+  const { frequencyHz: f0, bandHz } = record.requirement;
+  const span = sweepSpan(record);
+  const marks = [f0, bandHz?.low ?? f0, bandHz?.high ?? f0].filter((hz) => span.low <= hz && hz <= span.high);
+  const frequencyHz = Float64Array.from(new Set([...logGrid(span.low, span.high, points), ...marks])).sort();
+  const { gain, gammaRe, gammaIm } = sweep(
+    prepareLadder(arms),
+    endsOver(record.source, record.load, f0, frequencyHz),
+    record.aim,
+  );
+  const squared = Array.from(gammaRe, (re, k) => re * re + gammaIm[k]! * gammaIm[k]!);
+  return {
+    spanHz: span,
+    frequencyHz: Array.from(frequencyHz),
+    returnLossDb: squared.map(returnLossDb),
+    vswr: squared.map((value) => vswr(Math.sqrt(value))),
+    // A lossless network passes all that isn't reflected, so for the conjugate aim the gain itself says it best.
+    mismatchLossDb: record.aim === 'conjugate' ? Array.from(gain, attenuationDb) : squared.map(mismatchLossDb),
+    transducerGainDb: Array.from(gain, (value) => 0 - attenuationDb(Math.min(1, value))),
+    gammaRe: Array.from(gammaRe),
+    gammaIm: Array.from(gammaIm),
+  };
+}

@@ -1,0 +1,42 @@
+import type { DcPath } from '../network/dc-path.ts';
+import type { Termination } from '../network/termination.ts';
+import { formatFixed, formatImpedanceRead, formatQuantity } from '../quantity/format.ts';
+import type { Span } from '../quantity/span.ts';
+
+/** "150.5 MHz to 152.0 MHz" */
+export const frequencySpan = ({ low, high }: Span): string =>
+  `${formatQuantity(low, 'Hz')} to ${formatQuantity(high, 'Hz')}`;
+
+/** Two decibel figures that must not look the same when they aren't: two decimals, or as many as tell them apart. */
+export function decibelPair(a: number, b: number): readonly [string, string] {
+  let decimals = 2;
+  while (a !== b && decimals < 9 && formatFixed(a, decimals) === formatFixed(b, decimals)) decimals += 1;
+  return [`${formatFixed(a, decimals)} dB`, `${formatFixed(b, decimals)} dB`];
+}
+
+/** A return loss in words: beyond 100 dB the figure is rounding. */
+export const returnLossWords = (db: number): string => (db > 100 ? 'over 100 dB' : `${formatFixed(db, 2)} dB`);
+
+export function dcWords({ blocked, sourceShorted, loadShorted }: DcPath): string {
+  const ends = [sourceShorted ? 'source' : '', loadShorted ? 'load' : ''].filter((end) => end !== '');
+  return [
+    blocked ? 'series path blocked' : 'series path open to DC',
+    ends.length === 0 ? 'no short to ground' : `shorted to ground at the ${ends.join(' and the ')}`,
+  ].join('; ');
+}
+
+/** What a termination is taken to be away from the design frequency. */
+export function behaviourWords(end: 'source' | 'load', { r, x, behaviour }: Termination, f0: number): string {
+  const z = formatImpedanceRead(r, x);
+  if (x === 0) return `The ${end} is ${z} at every frequency.`;
+  if (behaviour === 'constant') return `The ${end} is ${z} at every frequency swept (held constant).`;
+  const omega = 2 * Math.PI * f0;
+  if (behaviour === 'series') {
+    const part = x > 0 ? formatQuantity(x / omega, 'H') : formatQuantity(-1 / (omega * x), 'F');
+    return `The ${end} is ${z} at the design frequency and varies as ${formatQuantity(r, 'Ω')} in series with ${part}.`;
+  }
+  const size = r * r + x * x;
+  const b = -x / size;
+  const part = b > 0 ? formatQuantity(b / omega, 'F') : formatQuantity(-1 / (omega * b), 'H');
+  return `The ${end} is ${z} at the design frequency and varies as ${formatQuantity(size / r, 'Ω')} in parallel with ${part}.`;
+}

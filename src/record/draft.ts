@@ -1,0 +1,120 @@
+import { formatImpedanceRead, formatRead } from '../quantity/format.ts';
+import { InputError, type Problem } from '../quantity/problem.ts';
+import { readImpedance } from '../quantity/read-impedance.ts';
+import { readQuantity } from '../quantity/read-quantity.ts';
+import { readSpan } from '../quantity/read-span.ts';
+import type { Reading } from '../quantity/reading.ts';
+import type { Span } from '../quantity/span.ts';
+import type { Unit } from '../quantity/unit.ts';
+import { checkRecord } from './check-record.ts';
+import type { DesignRecord } from './design-record.ts';
+import { defaults, fieldNames, pathOf, type FieldName, type Fields } from './fields.ts';
+
+export interface Draft {
+  /** null while a field can't be used. */
+  readonly record: DesignRecord | null;
+  /** `field` is the name of a field; at most one each. */
+  readonly problems: readonly Problem[];
+  /** What was understood of quantities, in engineering notation. */
+  readonly understood: Partial<Record<FieldName, string>>;
+}
+
+const examples = {
+  band: '150.5M..152M',
+  sweep: '100M..200M',
+  inductors: '1n..10u',
+  capacitors: '1p..100n',
+} as const;
+
+/** Typed texts, of the sheet or of the command line, as a design record. */
+export function readDraft(given: Fields): Draft {
+  const fields: Record<FieldName, string> = { ...defaults, ...given };
+  const problems: Problem[] = [];
+  const understood: Partial<Record<FieldName, string>> = {};
+
+  const take = <T>(name: FieldName, reading: Reading<T>, words: (value: T) => string): T | undefined => {
+    if (reading.ok) {
+      understood[name] = words(reading.value);
+      return reading.value;
+    }
+    problems.push({ field: name, read: fields[name], why: reading.why, would: reading.would });
+    return undefined;
+  };
+  const quantity = (name: FieldName, unit: Unit): number | undefined =>
+    take(name, readQuantity(fields[name], unit), (value) => formatRead(value, unit));
+  const optional = (name: FieldName, unit: Unit): number | null | undefined =>
+    fields[name].trim() === '' ? null : quantity(name, unit);
+  const range = (name: keyof typeof examples, unit: Unit): Span | undefined =>
+    take(
+      name,
+      readSpan(fields[name], unit, examples[name]),
+      ({ low, high }) => `${formatRead(low, unit)} to ${formatRead(high, unit)}`,
+    );
+  const optionalRange = (name: 'band' | 'sweep'): Span | null | undefined =>
+    fields[name].trim() === '' ? null : range(name, 'Hz');
+  const impedance = (name: 'source' | 'load') => {
+    const z = take(name, readImpedance(fields[name]), ({ r, x }) => formatImpedanceRead(r, x));
+    return z === undefined ? undefined : { ...z, behaviour: fields[`${name}-behaviour`] };
+  };
+  const signature = (name: 'prepared' | 'checked' | 'approved') => ({
+    name: fields[`${name}-name`],
+    role: fields[`${name}-role`],
+    date: fields[`${name}-date`].trim(),
+  });
+  const yesNo = (name: FieldName): boolean | string => ({ yes: true, no: false })[fields[name]] ?? fields[name];
+
+  const candidate = {
+    schema: 'ferrule-record/1',
+    identity: {
+      title: fields.title,
+      number: fields.number,
+      revision: fields.revision,
+      date: fields.date.trim(),
+      ticket: fields.ticket,
+      owner: fields.owner,
+    },
+    requirement: {
+      frequencyHz: quantity('frequency', 'Hz'),
+      bandHz: optionalRange('band'),
+      returnLossDb: optional('return-loss', 'dB'),
+      blockDc: yesNo('block-dc'),
+      keepDc: fields['keep-dc'],
+      inductorH: range('inductors', 'H'),
+      capacitorF: range('capacitors', 'F'),
+      powerW: optional('power', 'W'),
+    },
+    source: impedance('source'),
+    load: impedance('load'),
+    aim: fields.aim,
+    method: fields.method,
+    sections: /^\d+$/u.test(fields.sections.trim()) ? Number(fields.sections) : fields.sections.trim(),
+    sweepHz: optionalRange('sweep'),
+    selection: { option: fields.choice === '' ? null : fields.choice, reason: fields.reason },
+    signOff: { prepared: signature('prepared'), checked: signature('checked'), approved: signature('approved') },
+  };
+
+  try {
+    const record = checkRecord(candidate);
+    return { record: problems.length === 0 ? record : null, problems, understood };
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    return { record: null, problems: [...problems, ...fromRecord(error.problems, fields, problems)], understood };
+  }
+}
+
+/** Problems of the record, told of the field in which its text was typed. */
+function fromRecord(
+  found: readonly Problem[],
+  fields: Record<FieldName, string>,
+  known: readonly Problem[],
+): readonly Problem[] {
+  const taken = new Set(known.map(({ field }) => field));
+  return found.flatMap((problem) => {
+    const field =
+      fieldNames.find((name) => pathOf[name] === problem.field) ??
+      fieldNames.find((name) => problem.field.startsWith(`${pathOf[name]}.`));
+    if (field === undefined || taken.has(field)) return [];
+    taken.add(field);
+    return [{ ...problem, field, read: fields[field] }];
+  });
+}

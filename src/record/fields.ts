@@ -1,0 +1,128 @@
+import { formatRead } from '../quantity/format.ts';
+import type { Span } from '../quantity/span.ts';
+import type { Unit } from '../quantity/unit.ts';
+import type { DesignRecord } from './design-record.ts';
+
+/**
+ * The fields in which a record is typed: on the sheet, in its address and on the command line (`--frequency`), all by
+ * the same names. Each leads to the place in the record that it fills.
+ */
+export const pathOf = {
+  method: 'method',
+  frequency: 'requirement.frequencyHz',
+  source: 'source',
+  'source-behaviour': 'source.behaviour',
+  load: 'load',
+  'load-behaviour': 'load.behaviour',
+  aim: 'aim',
+  band: 'requirement.bandHz',
+  'return-loss': 'requirement.returnLossDb',
+  'block-dc': 'requirement.blockDc',
+  'keep-dc': 'requirement.keepDc',
+  inductors: 'requirement.inductorH',
+  capacitors: 'requirement.capacitorF',
+  power: 'requirement.powerW',
+  sections: 'sections',
+  sweep: 'sweepHz',
+  choice: 'selection.option',
+  reason: 'selection.reason',
+  title: 'identity.title',
+  number: 'identity.number',
+  revision: 'identity.revision',
+  date: 'identity.date',
+  ticket: 'identity.ticket',
+  owner: 'identity.owner',
+  'prepared-name': 'signOff.prepared.name',
+  'prepared-role': 'signOff.prepared.role',
+  'prepared-date': 'signOff.prepared.date',
+  'checked-name': 'signOff.checked.name',
+  'checked-role': 'signOff.checked.role',
+  'checked-date': 'signOff.checked.date',
+  'approved-name': 'signOff.approved.name',
+  'approved-role': 'signOff.approved.role',
+  'approved-date': 'signOff.approved.date',
+} as const;
+
+export type FieldName = keyof typeof pathOf;
+export type Fields = Partial<Record<FieldName, string>>;
+export const fieldNames = Object.keys(pathOf) as FieldName[];
+
+/** What a field holds where nothing is typed. The practicable ranges are those of src/parts/practicable.ts. */
+export const defaults: Record<FieldName, string> = {
+  ...(Object.fromEntries(fieldNames.map((name) => [name, ''])) as Record<FieldName, string>),
+  method: 'two-element',
+  'source-behaviour': 'series',
+  'load-behaviour': 'series',
+  aim: 'conjugate',
+  'block-dc': 'no',
+  'keep-dc': 'none',
+  inductors: '1n..10u',
+  capacitors: '1p..100n',
+  sections: 'auto',
+  title: 'Matching network',
+  number: 'unnumbered',
+  revision: 'A',
+};
+
+/** A record as the texts of its fields: reading them again gives the same record. */
+export function fieldsOf(record: DesignRecord): Record<FieldName, string> {
+  const { identity, requirement, source, load, selection, signOff } = record;
+  return {
+    method: record.method,
+    frequency: plain(requirement.frequencyHz, 'Hz'),
+    source: impedanceText(source),
+    'source-behaviour': source.behaviour,
+    load: impedanceText(load),
+    'load-behaviour': load.behaviour,
+    aim: record.aim,
+    band: spanText(requirement.bandHz, 'Hz'),
+    'return-loss': requirement.returnLossDb === null ? '' : String(requirement.returnLossDb),
+    'block-dc': requirement.blockDc ? 'yes' : 'no',
+    'keep-dc': requirement.keepDc,
+    inductors: spanText(requirement.inductorH, 'H'),
+    capacitors: spanText(requirement.capacitorF, 'F'),
+    power: requirement.powerW === null ? '' : plain(requirement.powerW, 'W'),
+    sections: String(record.sections),
+    sweep: spanText(record.sweepHz, 'Hz'),
+    choice: selection.option ?? '',
+    reason: selection.reason,
+    ...identity,
+    'prepared-name': signOff.prepared.name,
+    'prepared-role': signOff.prepared.role,
+    'prepared-date': signOff.prepared.date,
+    'checked-name': signOff.checked.name,
+    'checked-role': signOff.checked.role,
+    'checked-date': signOff.checked.date,
+    'approved-name': signOff.approved.name,
+    'approved-role': signOff.approved.role,
+    'approved-date': signOff.approved.date,
+  };
+}
+
+/** Engineering notation where it says the value exactly, the number itself where it doesn't. */
+function plain(value: number, unit: Unit): string {
+  const written = formatRead(value, unit);
+  const [mantissa = '', prefixed = ''] = written.replace('−', '-').split(' ');
+  const exponent = exponents[prefixed.slice(0, prefixed.length - unit.length)];
+  return exponent !== undefined && Number(`${mantissa}e${String(exponent)}`) === value ? written : String(value);
+}
+
+const exponents: Readonly<Record<string, number>> = {
+  T: 12,
+  G: 9,
+  M: 6,
+  k: 3,
+  '': 0,
+  m: -3,
+  µ: -6,
+  n: -9,
+  p: -12,
+  f: -15,
+  a: -18,
+};
+
+const impedanceText = ({ r, x }: { readonly r: number; readonly x: number }): string =>
+  x === 0 ? String(r) : `${String(r)}${x < 0 ? '-' : '+'}j${String(Math.abs(x))}`;
+
+const spanText = (span: Span | null, unit: Unit): string =>
+  span === null ? '' : `${plain(span.low, unit)} to ${plain(span.high, unit)}`;

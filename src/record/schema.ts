@@ -1,0 +1,202 @@
+import * as v from 'valibot';
+import { mostSections } from '../synthesis/cascade.ts';
+import type { DesignRecord } from './design-record.ts';
+import { methods } from './design-record.ts';
+
+/**
+ * What a record may hold. The same schema reads records, checks the sheet's fields and writes the published JSON
+ * Schema. Messages are the two later parts of a problem: why it won't do; what would.
+ */
+
+/** Limits of what is computed, wide of any lumped circuit; inside them no figure leaves double precision. */
+export const limits = {
+  frequencyHz: { low: 1, high: 1e12 },
+  resistanceOhm: { low: 1e-6, high: 1e9 },
+  reactanceOhm: 1e9,
+  inductorH: { low: 1e-15, high: 1e6 },
+  capacitorF: { low: 1e-18, high: 1e3 },
+  powerW: 1e5,
+  returnLossDb: 100,
+  nameLetters: 120,
+  reasonLetters: 4000,
+} as const;
+
+const number = (what: string): v.NumberSchema<string> =>
+  v.number(`${what} is not a number; give a plain number in SI units`);
+
+const between = (what: string, low: number, high: number, words: string) =>
+  v.pipe(
+    number(what),
+    v.minValue(low, `${what} is out of range; give ${words}`),
+    v.maxValue(high, `${what} is out of range; give ${words}`),
+  );
+
+const frequency = (what: string) =>
+  between(what, limits.frequencyHz.low, limits.frequencyHz.high, 'a frequency from 1 Hz to 1 THz');
+
+const span = (what: string, low: number, high: number, words: string) =>
+  v.pipe(
+    v.strictObject({
+      low: between(`the lower end of ${what}`, low, high, words),
+      high: between(`the upper end of ${what}`, low, high, words),
+    }),
+    v.check(({ low: a, high: b }) => a <= b, `${what} is upside down; give the lower end first`),
+  );
+
+const text = (what: string, letters: number) =>
+  v.pipe(
+    v.string(`${what} is not text; give it in quotes`),
+    v.maxLength(letters, `${what} is too long; give at most ${String(letters)} letters`),
+    // Control characters break a line of a form and can't be printed; a new line is the one that a reason may have.
+    v.check(
+      // eslint-disable-next-line no-control-regex -- these are what is looked for
+      (value) => !/[\u0000-\u0009\u000b-\u001f\u007f-\u009f]/u.test(value),
+      `${what} holds a control character; leave it out`,
+    ),
+    v.check((value) => value.isWellFormed(), `${what} holds half a character; type it again`),
+  );
+
+const date = (what: string, empty: boolean) =>
+  v.pipe(
+    v.string(`${what} is not text; give it in quotes`),
+    v.check(
+      (value) => (empty && value === '') || isDate(value),
+      `${what} is not a calendar date; write it as 2026-03-31`,
+    ),
+  );
+
+function isDate(value: string): boolean {
+  if (!/^\d{4}-\d{2}-\d{2}$/u.test(value)) return false;
+  const parsed = new Date(`${value}T00:00:00Z`);
+  return !Number.isNaN(parsed.getTime()) && parsed.toISOString().startsWith(value);
+}
+
+const termination = (what: string) =>
+  v.strictObject({
+    r: v.pipe(
+      number(`the ${what}'s resistance`),
+      v.gtValue(0, `the ${what}'s resistance must be above zero for power to flow; give R > 0, as in 9.4-j61`),
+      v.minValue(limits.resistanceOhm.low, `the ${what}'s resistance is out of range; give 1 µΩ to 1 GΩ`),
+      v.maxValue(limits.resistanceOhm.high, `the ${what}'s resistance is out of range; give 1 µΩ to 1 GΩ`),
+    ),
+    x: between(`the ${what}'s reactance`, -limits.reactanceOhm, limits.reactanceOhm, '−1 GΩ to 1 GΩ'),
+    behaviour: v.picklist(
+      ['constant', 'series', 'parallel'],
+      `the ${what}'s behaviour is unknown; give constant, series or parallel`,
+    ),
+  });
+
+const signature = (what: string) =>
+  v.strictObject({
+    name: text(`the name under ${what}`, limits.nameLetters),
+    role: text(`the role under ${what}`, limits.nameLetters),
+    date: date(`the date under ${what}`, true),
+  });
+
+export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
+  v.strictObject({
+    schema: v.literal('ferrule-record/1', 'this schema is unknown; give "ferrule-record/1"'),
+    identity: v.strictObject({
+      title: text('the title', limits.nameLetters),
+      number: text('the document number', limits.nameLetters),
+      revision: text('the revision', limits.nameLetters),
+      date: date('the date of issue', false),
+      ticket: text('the change ticket', limits.nameLetters),
+      owner: text('the legal owner', limits.nameLetters),
+    }),
+    requirement: v.strictObject({
+      frequencyHz: frequency('the design frequency'),
+      bandHz: v.nullable(
+        span('the band', limits.frequencyHz.low, limits.frequencyHz.high, 'frequencies from 1 Hz to 1 THz'),
+      ),
+      returnLossDb: v.nullable(
+        v.pipe(
+          number('the return loss'),
+          v.gtValue(0, 'a return loss is above 0 dB; give 0 to 100 dB, larger is better'),
+          v.maxValue(limits.returnLossDb, 'the return loss is out of range; give 0 to 100 dB, larger is better'),
+        ),
+      ),
+      blockDc: v.boolean('whether DC is to be blocked is not yes or no; give true or false'),
+      keepDc: v.picklist(
+        ['none', 'source', 'load', 'both'],
+        'the ends that carry DC are unknown; give none, source, load or both',
+      ),
+      inductorH: span('the range of inductance', limits.inductorH.low, limits.inductorH.high, 'values such as 1n..10u'),
+      capacitorF: span(
+        'the range of capacitance',
+        limits.capacitorF.low,
+        limits.capacitorF.high,
+        'values such as 1p..100n',
+      ),
+      powerW: v.nullable(
+        v.pipe(
+          number('the power'),
+          v.gtValue(0, 'the power must be above zero; give watts, or leave it out'),
+          v.maxValue(limits.powerW, 'the power is out of range; give at most 100 kW'),
+        ),
+      ),
+    }),
+    source: termination('source'),
+    load: termination('load'),
+    aim: v.picklist(['conjugate', 'reflectionless'], 'the aim is unknown; give conjugate or reflectionless'),
+    method: v.picklist(methods, `the method is unknown; give ${methods.join(', ')}`),
+    sections: v.union(
+      [v.literal('auto'), v.pipe(v.number(), v.integer(), v.minValue(1), v.maxValue(mostSections))],
+      `the number of sections is out of range; give auto or a whole number from 1 to ${String(mostSections)}`,
+    ),
+    sweepHz: v.nullable(
+      v.pipe(
+        span('the sweep', limits.frequencyHz.low, limits.frequencyHz.high, 'frequencies from 1 Hz to 1 THz'),
+        v.check(({ low, high }) => low < high, 'the sweep has no width; give two different frequencies'),
+      ),
+    ),
+    selection: v.strictObject({
+      option: v.nullable(text('the chosen network', limits.nameLetters)),
+      reason: text('the reason', limits.reasonLetters),
+    }),
+    signOff: v.strictObject({
+      prepared: signature('prepared'),
+      checked: signature('checked'),
+      approved: signature('approved'),
+    }),
+  }),
+  v.forward(
+    v.check(({ requirement: { bandHz, frequencyHz } }) => {
+      return bandHz === null || (bandHz.low <= frequencyHz && frequencyHz <= bandHz.high);
+    }, 'the band does not hold the design frequency; widen the band or move the frequency'),
+    ['requirement', 'bandHz'],
+  ),
+  v.forward(
+    v.check(({ sweepHz, requirement: { frequencyHz } }) => {
+      return sweepHz === null || (sweepHz.low <= frequencyHz && frequencyHz <= sweepHz.high);
+    }, 'the sweep does not hold the design frequency; widen the sweep'),
+    ['sweepHz'],
+  ),
+  v.forward(
+    v.check(({ sweepHz, requirement: { frequencyHz } }) => {
+      return sweepHz === null || (sweepHz.low >= frequencyHz / 1000 && sweepHz.high <= frequencyHz * 1000);
+    }, 'the sweep reaches too far; stay within a thousand times the design frequency'),
+    ['sweepHz'],
+  ),
+  v.forward(
+    v.check(({ requirement: { bandHz, frequencyHz } }) => {
+      return bandHz === null || (bandHz.low >= frequencyHz / 1000 && bandHz.high <= frequencyHz * 1000);
+    }, 'the band reaches too far; stay within a thousand times the design frequency'),
+    ['requirement', 'bandHz'],
+  ),
+  v.forward(
+    v.check(
+      ({ method, source, load }) => method !== 'resistive-pair' || (source.x === 0 && load.x === 0),
+      'the Q method takes two resistances; leave the reactance out, or use complex terminations',
+    ),
+    ['method'],
+  ),
+  v.forward(
+    v.check(
+      ({ method, sections, requirement: { bandHz, returnLossDb } }) =>
+        method !== 'cascade' || sections !== 'auto' || (bandHz !== null && returnLossDb !== null),
+      'the smallest number of sections needs something to hold; give a band and a return loss, or a number of sections',
+    ),
+    ['sections'],
+  ),
+);

@@ -24,9 +24,14 @@ export function design(record: DesignRecord): Dossier {
   const f0 = record.requirement.frequencyHz;
   const load = terminationAt(record.load, f0, f0);
   const target = targetOf(terminationAt(record.source, f0, f0), record.aim);
-  const { candidates, absent } = synthesise(record, target, load);
+  const { candidates, absent, cascades } = synthesise(record, target, load);
   const figuresOf = bandSweeper(record);
-  const options = candidates.map((candidate) => assess(record, load, candidate, figuresOf));
+  const assessed = candidates.map((candidate) => assess(record, load, candidate, figuresOf));
+  const { sections } = record;
+  const options =
+    cascades === null || sections === 'auto'
+      ? assessed
+      : assessed.filter((option) => option.sections === sections || option.sections === 0);
   const proposed = options.find(({ meets }) => meets);
   const picked = pickedBy(record, options);
   const chosen = picked ?? proposed ?? nearest(options);
@@ -40,7 +45,7 @@ export function design(record: DesignRecord): Dossier {
     assumptions: assumptionsOf(record),
     options,
     absent: absent.map(({ form, why }) => ({ form, why })),
-    sections: record.method === 'cascade' ? sectionTable(record, target, load, figuresOf) : null,
+    sections: cascades === null ? null : sectionTable(record, cascades, assessed),
     proposed: proposed?.id ?? null,
     chosen: chosen?.id ?? null,
     chosenBy: picked !== undefined ? 'engineer' : proposed !== undefined ? 'proposal' : 'nearest',

@@ -66,7 +66,11 @@ function parse(
       joined.push(`${here}=${next}`);
       k += 1;
     } else if (here.startsWith('-') && !known.has(name.split('=')[0]!)) {
-      throw problem(here, 'this option is unknown', `give one of --${names.join(', --')}`);
+      throw problem(
+        here,
+        'this option is unknown',
+        'give --frequency, --source, --load or another that README.md lists',
+      );
     } else joined.push(here);
   }
   const parsed = parseArgs({

@@ -2,6 +2,7 @@ import type { Arm } from '../network/arm.ts';
 import { edgeGrid, halfPowerEdges } from '../network/half-power.ts';
 import { prepareLadder } from '../network/ladder.ts';
 import { endsOver, sweep, sweepInto, type Ends, type SweepResult } from '../network/sweep.ts';
+import { fillTermination } from '../network/termination-at.ts';
 import { logGrid, worstInBand, type Worst } from '../network/worst-in-band.ts';
 import type { Form } from '../network/form.ts';
 import type { HalfPower } from '../dossier.ts';
@@ -26,6 +27,7 @@ export function bandSweeper(record: DesignRecord): (arms: readonly Arm[], form: 
   const { frequencyHz: f0, bandHz } = record.requirement;
   const wide = endsOver(source, load, f0, edgeGrid(f0));
   const band = bandHz === null ? null : endsOver(source, load, f0, logGrid(bandHz.low, bandHz.high, bandPoints));
+  const one = endsOver(source, load, f0, Float64Array.of(f0));
 
   return (arms, form) => {
     const ladder = prepareLadder(arms);
@@ -35,7 +37,10 @@ export function bandSweeper(record: DesignRecord): (arms: readonly Arm[], form: 
       gammaIm: new Float64Array(1),
     };
     const at = (hz: number): void => {
-      sweepInto(ladder, endsOver(source, load, f0, Float64Array.of(hz)), aim, single);
+      one.frequencyHz[0] = hz;
+      fillTermination(source, f0, one.frequencyHz, one.rs, one.xs);
+      fillTermination(load, f0, one.frequencyHz, one.rl, one.xl);
+      sweepInto(ladder, one, aim, single);
     };
     const gainAt = (hz: number): number => {
       at(hz);

@@ -1,34 +1,33 @@
-import type { Complex } from 'complex.js';
-import type { SectionRow, SectionTable } from '../dossier.ts';
-import { returnLossDb } from '../network/figures-of-merit.ts';
-import { formOf } from '../network/form.ts';
+import type { Option, SectionRow, SectionTable } from '../dossier.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import { cascade } from '../synthesis/cascade.ts';
-import type { bandSweeper } from './band-figures.ts';
-import { allSections } from './method.ts';
+import type { CascadeCandidate } from '../synthesis/cascade.ts';
 import { decibelPair } from './words.ts';
 
-/** One to six sections, in every form that exists, against the return loss to hold. */
+/**
+ * One to six sections, in every form that exists, against the return loss to hold.
+ *
+ * @param candidates of every number of sections
+ * @param options    the same networks, assessed, in the same order
+ */
 export function sectionTable(
-  record: DesignRecord,
-  target: Complex,
-  load: Complex,
-  figuresOf: ReturnType<typeof bandSweeper>,
+  { requirement }: DesignRecord,
+  candidates: readonly CascadeCandidate[],
+  options: readonly Option[],
 ): SectionTable {
-  const { frequencyHz, returnLossDb: asked } = record.requirement;
-  const rows = cascade(target, load, frequencyHz, allSections).candidates.map((candidate): SectionRow => {
-    const { worst, halfPower } = figuresOf(candidate.arms, formOf(candidate.arms));
-    const worstDb = worst === null ? null : returnLossDb(worst.gammaSquared);
+  const asked = requirement.returnLossDb;
+  const rows = candidates.map((candidate, k): SectionRow => {
+    const option = options[k]!;
+    const returnLoss = option.checks.find(({ subject }) => subject === 'return loss');
     return {
-      id: candidate.id,
-      sections: candidate.sections,
+      id: option.id,
+      sections: option.sections,
       form: candidate.pass,
       shuntAt: candidate.shuntAt,
-      parts: candidate.arms.length,
+      parts: option.arms.length,
       sectionQ: candidate.sectionQ,
-      worstReturnLossDb: worstDb,
-      halfPower,
-      holds: worstDb === null || asked === null ? null : worstDb >= asked - 1e-9,
+      worstReturnLossDb: option.worstReturnLossDb,
+      halfPower: option.halfPower,
+      holds: option.worstReturnLossDb === null || returnLoss === undefined ? null : returnLoss.verdict === 'meets',
     };
   });
   const holding = rows.filter(({ holds }) => holds === true).map(({ sections }) => sections);
@@ -46,5 +45,7 @@ function words(smallest: number | null, best: number | null, asked: number | nul
     return `Six sections do not hold ${required} over the band: the best of all reaches ${found}, ${decibelPair(asked - best, 0)[0]} short.`;
   }
   if (smallest === 0) return `No part is needed: the terminations hold ${required} as they are.`;
-  return `${String(smallest)} section${smallest === 1 ? ' is' : 's are'} the smallest number that holds ${required} over the band.`;
+  return smallest === 1
+    ? `1 section holds ${required} over the band.`
+    : `${String(smallest)} sections are the smallest number that holds ${required} over the band.`;
 }

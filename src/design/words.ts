@@ -3,9 +3,12 @@ import type { Termination } from '../network/termination.ts';
 import { formatFixed, formatImpedanceRead, formatQuantity } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 
-/** "150.5 MHz to 152.0 MHz" */
-export const frequencySpan = ({ low, high }: Span): string =>
-  `${formatQuantity(low, 'Hz')} to ${formatQuantity(high, 'Hz')}`;
+/** "150.5 MHz to 152.0 MHz"; a narrow span with as many digits as show its width. */
+export function frequencySpan({ low, high }: Span): string {
+  const width = high > low ? Math.ceil(-Math.log10((high - low) / high)) : 0;
+  const digits = Math.min(12, Math.max(4, width + 2));
+  return `${formatQuantity(low, 'Hz', digits)} to ${formatQuantity(high, 'Hz', digits)}`;
+}
 
 /** Two decibel figures that must not look the same when they aren't: two decimals, or as many as tell them apart. */
 export function decibelPair(a: number, b: number): readonly [string, string] {

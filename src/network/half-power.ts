@@ -1,4 +1,4 @@
-import { bisect, goldenMaximum } from './search.ts';
+import { zeroBetween, goldenMaximum } from './search.ts';
 
 /** Edges 3.0103 dB below the peak of transducer gain nearest the design frequency; null where there is none. */
 export interface HalfPowerEdges {
@@ -9,12 +9,12 @@ export interface HalfPowerEdges {
 }
 
 /**
- * Frequencies at which edges are looked for: log-spaced away from f0, each step 2 % of the distance from f0 so that
+ * Frequencies at which edges are looked for: log-spaced away from f0, each step 3 % of the distance from f0 so that
  * both a band of parts per million and one of several decades are resolved; 1e-6·f0 to 1e6·f0.
  */
 export function edgeGrid(f0: number): Float64Array {
   const offsets: number[] = [];
-  for (let u = 1e-8; u < Math.log(1e6); u *= 1.02) offsets.push(u);
+  for (let u = 1e-6; u < Math.log(1e6); u *= 1.03) offsets.push(u);
   const n = offsets.length;
   const grid = new Float64Array(2 * n + 1);
   grid[n] = f0;
@@ -51,7 +51,8 @@ export function halfPowerEdges(
 
   const edge = (step: 1 | -1): number | null => {
     for (let k = top; k + step >= 0 && k + step <= last; k += step) {
-      if (gain[k + step]! < half) return bisect((hz) => gainAt(hz) - half, frequencyHz[k]!, frequencyHz[k + step]!);
+      if (gain[k + step]! < half)
+        return zeroBetween((hz) => gainAt(hz) - half, frequencyHz[k]!, frequencyHz[k + step]!);
     }
     return null;
   };

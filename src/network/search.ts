@@ -1,14 +1,20 @@
-/** Where a function that changes sign between two points is zero, to the last bit or 200 halvings. */
-export function bisect(f: (x: number) => number, from: number, to: number): number {
+/**
+ * Where a function that changes sign between two points is zero: regula falsi with the Illinois correction (a stale end's
+ * value is halved), to a part in 1e14 of the abscissa.
+ */
+export function zeroBetween(f: (x: number) => number, from: number, to: number): number {
   let [a, b] = [from, to];
-  const positiveAtA = f(a) >= 0;
-  for (let k = 0; k < 200; k += 1) {
-    const middle = a + (b - a) / 2;
-    if (middle === a || middle === b) break;
-    if (f(middle) >= 0 === positiveAtA) a = middle;
-    else b = middle;
+  let [fa, fb] = [f(a), f(b)];
+  for (let k = 0; k < 200 && fb !== 0 && Math.abs(b - a) > 1e-14 * Math.abs(b); k += 1) {
+    const secant = b - (fb * (b - a)) / (fb - fa);
+    // Where rounding leaves the secant on an end, halve.
+    const c = secant === a || secant === b ? a + (b - a) / 2 : secant;
+    const fc = f(c);
+    if (fc * fb < 0) [a, fa] = [b, fb];
+    else fa /= 2;
+    [b, fb] = [c, fc];
   }
-  return a;
+  return b;
 }
 
 /** Largest value of a function with one hump between two points (golden section, to 1e-10 of the interval). */

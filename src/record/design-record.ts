@@ -51,7 +51,7 @@ export interface DesignRecord {
   readonly aim: Aim;
   readonly method: Method;
   /** Cascade only: number of sections (1 to 6), or the smallest that holds the requirement. */
-  readonly sections: number | 'auto';
+  readonly sections: 'auto' | 1 | 2 | 3 | 4 | 5 | 6;
   /** Sweep shown, Hz; null: chosen from the band. */
   readonly sweepHz: Span | null;
   readonly selection: {

@@ -1,0 +1,5 @@
+import { writeFileSync } from 'node:fs';
+import { jsonSchema } from './json-schema.ts';
+
+/** Writes the published JSON Schema of the record from the schema that reads records. */
+writeFileSync(new URL('../../public/schema/ferrule-record-1.json', import.meta.url), jsonSchema());

@@ -1,0 +1,5 @@
+/** One of several texts that a field can have, and the words that stand for it. */
+export interface Choice {
+  readonly value: string;
+  readonly words: string;
+}

@@ -1,0 +1,17 @@
+import type { Option } from '../../src/dossier.ts';
+import type { Arm } from '../../src/network/arm.ts';
+import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
+
+/** "17.2 dB"; figures stop at 200 dB, and say so. */
+export const decibels = (value: number, decimals = 1): string =>
+  value >= 200 ? '200 dB or more' : `${formatFixed(value, decimals)} dB`;
+
+/** "140.2 nH" */
+export const partValue = ({ part, value }: Arm): string => formatQuantity(value, part === 'inductor' ? 'H' : 'F');
+
+/** "L1 140.2 nH", one for every part, source side first. */
+export const partWords = ({ arms, designators }: Option): readonly string[] =>
+  arms.map((arm, index) => `${designators[index] ?? ''} ${partValue(arm)}`);
+
+/** "2 parts" */
+export const count = (number: number, noun: string): string => `${String(number)} ${noun}${number === 1 ? '' : 's'}`;

@@ -1,0 +1,146 @@
+import { LitElement, css, html, nothing, type TemplateResult } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import type { Dossier, Evidence } from '../../src/dossier.ts';
+import { formatFixed, formatImpedance, formatQuantity } from '../../src/quantity/format.ts';
+import { base } from '../base/base.styles.ts';
+import { table } from '../base/table.styles.ts';
+import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { powerOfTen } from './power-of-ten.ts';
+
+/** Part 5: independent routes to the same numbers, what was assumed, what the work refers to. */
+@customElement('evidence-part')
+export class EvidencePart extends LitElement {
+  static override styles = [
+    base,
+    table,
+    verdictStyles,
+    css`
+      .scroll + .scroll,
+      h3 {
+        margin-top: 1.5rem;
+      }
+
+      p {
+        margin-bottom: 0.75rem;
+      }
+
+      .how,
+      .note {
+        display: block;
+        max-width: 46ch;
+        color: var(--muted);
+        font-size: var(--small);
+        line-height: 1.4;
+      }
+
+      .assumptions {
+        margin-top: 0.375rem;
+      }
+
+      .assumptions li {
+        display: grid;
+        grid-template-columns: 2.25rem minmax(0, 1fr);
+        max-width: 76ch;
+        margin-top: 0.25rem;
+      }
+
+      .assumptions span {
+        color: var(--muted);
+      }
+
+      dl div {
+        max-width: 76ch;
+        margin-top: 0.375rem;
+      }
+
+      dd {
+        color: var(--muted);
+        font-size: var(--small);
+      }
+
+      sup {
+        font-size: 0.75em;
+        line-height: 0;
+      }
+    `,
+  ];
+
+  @property({ attribute: false }) dossier: Dossier | null = null;
+
+  override render() {
+    if (this.dossier === null) return nothing;
+    const { evidence, assumptions, references } = this.dossier;
+    return html`
+      ${evidence === null ? html`<p>No network, nothing to prove.</p>` : routes(evidence)}
+      <h3>Assumptions</h3>
+      <ol class="assumptions">
+        ${assumptions.map((text, index) => html`<li><span>A${index + 1}</span> ${text}</li>`)}
+      </ol>
+      <h3>Referred to</h3>
+      <dl>
+        ${references.map(({ title, appliedFor }) => html`<div><dt>${title}</dt><dd>${appliedFor}</dd></div>`)}
+      </dl>
+    `;
+  }
+}
+
+function routes({ frequenciesHz, routes, checks }: Evidence): TemplateResult {
+  const [design, ...others] = frequenciesHz.map((hertz) => formatQuantity(hertz, 'Hz', 6));
+  return html`
+    <p>
+      Each route computes on its own. At ${design}${others.length === 0 ? '' : `, and compared at ${others.join(' and ')} too`}:
+    </p>
+    <div class="scroll" tabindex="0" role="group" aria-label="Routes">
+      <table>
+        <thead>
+          <tr>
+            <th scope="col">Route</th>
+            <th scope="col" class="number">Seen from the source</th>
+            <th scope="col" class="number">Transducer gain</th>
+          </tr>
+        </thead>
+        <tbody>
+          ${routes.map(
+            ({ name, how, seen, transducerGain }) => html`
+              <tr>
+                <th scope="row">${name}<span class="how">${how}</span></th>
+                <td class="number">${seen === null ? 'not by this route' : formatImpedance(seen.r, seen.x, 10)}</td>
+                <td class="number">${transducerGain === null ? 'not by this route' : formatFixed(transducerGain, 12)}</td>
+              </tr>
+            `,
+          )}
+        </tbody>
+      </table>
+    </div>
+    <div class="scroll" tabindex="0" role="group" aria-label="Spread of the routes">
+      <table>
+        <thead>
+          <tr>
+            <th scope="col">Compared</th>
+            <th scope="col" class="number">Spread</th>
+            <th scope="col" class="number">Tolerance</th>
+            <th scope="col">Outcome</th>
+          </tr>
+        </thead>
+        <tbody>
+          ${checks.map(
+            ({ subject, spread, tolerance, pass, note }) => html`
+              <tr>
+                <th scope="row">${subject}<span class="note">${note}</span></th>
+                <td class="number">${powerOfTen(spread)}</td>
+                <td class="number">${powerOfTen(tolerance)}</td>
+                <td>${pass ? verdictMark('meets', 'pass') : verdictMark('falls short', 'fail')}</td>
+              </tr>
+            `,
+          )}
+        </tbody>
+      </table>
+    </div>
+  `;
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'evidence-part': EvidencePart;
+  }
+}

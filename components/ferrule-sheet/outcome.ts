@@ -1,0 +1,36 @@
+import type { Dossier } from '../../src/dossier.ts';
+import { formatQuantity } from '../../src/quantity/format.ts';
+import { decibels, partWords } from '../base/words.ts';
+import type { Settled } from './settle.ts';
+
+/** What the sheet came to, in two or three sentences. */
+export function outcome(dossier: Dossier): string {
+  const { options, chosen, record } = dossier;
+  const shown = options.find(({ id }) => id === chosen);
+  if (shown === undefined) return 'No network of these forms matches these terminations.';
+  const meeting = options.filter(({ meets }) => meets).length;
+  const by = { engineer: 'Chosen', proposal: 'Proposed', nearest: 'Nearest' }[dossier.chosenBy];
+  const values = shown.arms.length === 0 || shown.arms.length > 4 ? '' : ` (${partWords(shown).join(', ')})`;
+  const band = record.requirement.bandHz;
+  const held =
+    shown.worstReturnLossDb === null || band === null
+      ? ''
+      : ` Its return loss is ${decibels(shown.worstReturnLossDb)} at worst from ${formatQuantity(band.low, 'Hz')} to ${formatQuantity(band.high, 'Hz')}.`;
+  return `${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`;
+}
+
+function howMany(meeting: number, all: number): string {
+  if (all === 1) return meeting === 1 ? 'The one network meets everything asked.' : 'The one network falls short.';
+  if (meeting === 0) return `None of ${String(all)} networks meets everything asked.`;
+  return `${String(meeting)} of ${String(all)} networks ${meeting === 1 ? 'meets' : 'meet'} everything asked.`;
+}
+
+/** "Series L" in the middle of a sentence is "series L". */
+const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
+
+/** What is given, in one line, from what was understood. */
+export function givenLine({ understood }: Settled): string {
+  const { frequency, source, load, band } = understood;
+  const ends = [source, load].filter((text) => text !== undefined).join(' to ');
+  return [frequency, ends, band, understood['return-loss']].filter((text) => text !== undefined && text !== '').join(', ');
+}

@@ -1,0 +1,78 @@
+import type { Option } from '../../src/dossier.ts';
+import type { Method } from '../../src/record/design-record.ts';
+import { count } from '../base/words.ts';
+import type { Verdict } from '../verdict-mark/verdict-mark.ts';
+import type { Settled } from './settle.ts';
+
+interface Judged {
+  readonly verdict: Verdict;
+  /** What the verdict is, in a word or two. */
+  readonly words: string;
+}
+
+/** A part of the document. Parts are numbered by their place in the list. */
+export interface Part {
+  readonly name: 'Given' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Record and report';
+  /** Numbers in the basis of calculation. */
+  readonly basis: (method: Method) => readonly string[];
+  readonly judge: (state: Settled) => Judged;
+}
+
+const chosenOf = ({ dossier }: Settled): Option | undefined => dossier?.options.find(({ id }) => id === dossier.chosen);
+const unassessed: Judged = { verdict: 'not assessed', words: 'not assessed' };
+const judged = (good: boolean): Judged => {
+  const verdict = good ? 'meets' : 'falls short';
+  return { verdict, words: verdict };
+};
+
+export const parts: readonly Part[] = [
+  {
+    name: 'Given',
+    basis: () => ['B1', 'B2'],
+    judge: ({ problems }) => {
+      const wrong = Object.keys(problems).length;
+      if (wrong === 0) return { verdict: 'meets', words: 'can be read' };
+      return { verdict: 'falls short', words: wrong === 1 ? '1 entry to correct' : `${String(wrong)} entries to correct` };
+    },
+  },
+  {
+    name: 'Options',
+    basis: (method) => ({ 'two-element': ['B3', 'B4', 'B5'], 'resistive-pair': ['B6', 'B5'], cascade: ['B7', 'B5'] })[method],
+    judge: ({ dossier }) => {
+      if (dossier === null || dossier.options.length === 0) return unassessed;
+      const meeting = dossier.options.filter(({ meets }) => meets).length;
+      const words = `${String(meeting)} of ${count(dossier.options.length, 'network')}`;
+      return meeting > 0 ? { verdict: 'meets', words: `${words} meet${meeting === 1 ? 's' : ''}` } : { verdict: 'falls short', words: 'none meets' };
+    },
+  },
+  {
+    name: 'Network',
+    basis: () => ['B8', 'B9'],
+    judge: (state) => {
+      const chosen = chosenOf(state);
+      return chosen === undefined ? unassessed : judged(chosen.meets);
+    },
+  },
+  {
+    name: 'Response',
+    basis: () => ['B10', 'B11', 'B12'],
+    judge: (state) => {
+      const check = chosenOf(state)?.checks.find(({ subject }) => subject === 'return loss');
+      return check === undefined ? unassessed : judged(check.verdict === 'meets');
+    },
+  },
+  {
+    name: 'Evidence',
+    basis: () => ['B14', 'B15', 'B16'],
+    judge: ({ dossier }) => (dossier?.evidence ? judged(dossier.evidence.pass) : unassessed),
+  },
+  {
+    name: 'Record and report',
+    basis: () => ['B17'],
+    judge: ({ dossier }) => {
+      const signOff = dossier?.record.signOff;
+      const signed = signOff === undefined ? 0 : Object.values(signOff).filter(({ name, date }) => name !== '' && date !== '').length;
+      return signed === 3 ? { verdict: 'meets', words: 'names and dates given' } : { verdict: 'not assessed', words: 'not signed off' };
+    },
+  },
+];

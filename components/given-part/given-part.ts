@@ -1,0 +1,131 @@
+import { LitElement, html, nothing, type TemplateResult } from 'lit';
+import { customElement, property, state } from 'lit/decorators.js';
+import type { FieldName } from '../../src/record/fields.ts';
+import type { Method } from '../../src/record/design-record.ts';
+import { base } from '../base/base.styles.ts';
+import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import '../choice-field/choice-field.ts';
+import '../radio-field/radio-field.ts';
+import '../text-field/text-field.ts';
+import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { aims, behaviours, blocks, keeps } from './choices.ts';
+import { styles } from './given-part.styles.ts';
+
+/** Part 1: what is asked for. On a narrow screen it folds into one line. */
+@customElement('given-part')
+export class GivenPart extends LitElement {
+  static override styles = [base, verdictStyles, styles];
+
+  @property({ type: Number }) number = 1;
+  @property() method: Method = 'two-element';
+  @property({ attribute: false }) state: FieldState = emptyFieldState;
+  /** With a real source both aims are the same. */
+  @property({ type: Boolean }) realSource = false;
+  /** What is given, in one line. */
+  @property() summary = '';
+
+  @state() private unfolded = false;
+
+  override render() {
+    const wrong = Object.keys(this.state.problems).length;
+    return html`
+      <section aria-labelledby="heading">
+        <h2 id="heading"><span class="number" aria-hidden="true">${this.number}</span> Given</h2>
+        <button
+          type="button"
+          class="fold"
+          aria-expanded=${this.unfolded ? 'true' : 'false'}
+          aria-controls="form"
+          @click=${() => (this.unfolded = !this.unfolded)}
+        >
+          <span class="summary">
+            <span class="number">${this.number}</span> Given
+            <span class="line">${wrong === 0 ? this.summary : verdictMark('falls short', wrongWords(wrong))}</span>
+          </span>
+          <span class="act">${this.unfolded ? 'Close' : 'Change'}</span>
+        </button>
+        <div id="form" class=${this.unfolded ? 'form unfolded' : 'form'}>${this.interface()} ${this.requirement()}</div>
+      </section>
+    `;
+  }
+
+  private interface(): TemplateResult {
+    const pair = this.method === 'resistive-pair';
+    return html`
+      <div class="group">
+        ${this.text('frequency', 'Design frequency', 'f0')}
+        ${this.text('source', pair ? 'Source resistance' : 'Source impedance', pair ? 'RS' : 'ZS')}
+        ${pair ? nothing : this.behaviour('source-behaviour', 'Source')}
+        ${this.text('load', pair ? 'Load resistance' : 'Load impedance', pair ? 'RL' : 'ZL')}
+        ${pair ? nothing : this.behaviour('load-behaviour', 'Load')}
+        <radio-field
+          name="aim"
+          label="Aim: the network presents to the source"
+          .choices=${aims}
+          .value=${this.state.fields.aim ?? ''}
+          .note=${this.realSource ? 'The source is real: both are the same.' : ''}
+          .problem=${this.state.problems.aim ?? ''}
+        ></radio-field>
+      </div>
+    `;
+  }
+
+  private requirement(): TemplateResult {
+    const { understood } = this.state;
+    const folded = ['inductors', 'capacitors', 'power'] as const;
+    return html`
+      <h3>Required</h3>
+      <div class="group">
+        ${this.text('band', 'Band to hold', '', 'None: the design frequency alone.')}
+        ${this.text('return-loss', 'Return loss over the band, at least', '', 'Not required.')}
+        ${this.choice('block-dc', 'DC from source to load', blocks)} ${this.choice('keep-dc', 'DC fed to an end', keeps)}
+      </div>
+      <details ?open=${folded.some((name) => this.state.problems[name] !== undefined)}>
+        <summary>
+          Parts and power
+          <span class="muted">${[understood.inductors, understood.capacitors, understood.power].filter(Boolean).join('; ')}</span>
+        </summary>
+        <div class="group">
+          ${this.text('inductors', 'Practicable inductors')} ${this.text('capacitors', 'Practicable capacitors')}
+          ${this.text('power', 'Available power', '', 'Not stated.')}
+        </div>
+      </details>
+    `;
+  }
+
+  private behaviour(name: FieldName, end: string): TemplateResult {
+    return this.choice(name, 'away from f₀', behaviours, end);
+  }
+
+  private text(name: FieldName, label: string, symbol = '', empty = ''): TemplateResult {
+    const { fields, understood, problems } = this.state;
+    return html`<text-field
+      .name=${name}
+      .label=${label}
+      .symbol=${symbol}
+      .empty=${empty}
+      .value=${fields[name] ?? ''}
+      .understood=${understood[name] ?? ''}
+      .problem=${problems[name] ?? ''}
+    ></text-field>`;
+  }
+
+  private choice(name: FieldName, label: string, choices: typeof keeps, of = ''): TemplateResult {
+    return html`<choice-field
+      .name=${name}
+      .label=${label}
+      .of=${of}
+      .choices=${choices}
+      .value=${this.state.fields[name] ?? ''}
+      .problem=${this.state.problems[name] ?? ''}
+    ></choice-field>`;
+  }
+}
+
+const wrongWords = (count: number): string => (count === 1 ? '1 entry to correct' : `${String(count)} entries to correct`);
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'given-part': GivenPart;
+  }
+}

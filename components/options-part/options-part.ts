@@ -1,0 +1,119 @@
+import { LitElement, html, nothing, type TemplateResult } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import { live } from 'lit/directives/live.js';
+import { repeat } from 'lit/directives/repeat.js';
+import type { Dossier, Option } from '../../src/dossier.ts';
+import '../area-field/area-field.ts';
+import { base } from '../base/base.styles.ts';
+import { fieldChange } from '../base/field-change.ts';
+import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import { count, decibels, partWords } from '../base/words.ts';
+import '../sections-table/sections-table.ts';
+import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { styles } from './options-part.styles.ts';
+import { thumbnail } from './thumbnail.ts';
+
+/**
+ * Part 2: every network that exists with its verdict, and every form that doesn't with the reason.
+ * @fires field-change  `choice` or `reason`
+ */
+@customElement('options-part')
+export class OptionsPart extends LitElement {
+  static override styles = [base, verdictStyles, styles];
+
+  @property({ attribute: false }) dossier: Dossier | null = null;
+  @property({ attribute: false }) state: FieldState = emptyFieldState;
+  /** Why the engineer's choice is not in force; '' when it is. */
+  @property() notice = '';
+
+  override render() {
+    if (this.dossier === null) return nothing;
+    const { options, absent, sections } = this.dossier;
+    return html`
+      ${sections === null
+        ? nothing
+        : html`<sections-table .table=${sections} .state=${this.state} .chosen=${this.dossier.chosen ?? ''}></sections-table>`}
+      ${this.notice === '' ? nothing : html`<p class="notice">${this.notice}</p>`}
+      <fieldset>
+        <legend class="unseen">Choose a network</legend>
+        <ol>
+          ${repeat(
+            options,
+            ({ id }) => id,
+            (option, index) => this.option(option, index),
+          )}
+        </ol>
+      </fieldset>
+      ${absent.length === 0
+        ? nothing
+        : html`<h3>Forms without a network</h3>
+            <dl class="absent">
+              ${absent.map(({ form, why }) => html`<div><dt>${form}</dt><dd>${why}</dd></div>`)}
+            </dl>`}
+      <area-field
+        name="reason"
+        label="Why this one (printed in the report)"
+        .value=${this.state.fields.reason ?? ''}
+        .problem=${this.state.problems.reason ?? ''}
+      ></area-field>
+    `;
+  }
+
+  private option(option: Option, index: number): TemplateResult {
+    const { chosen, proposed } = this.dossier!;
+    const input = `network-${String(index)}`;
+    return html`
+      <li class=${option.id === chosen ? 'option chosen' : 'option'}>
+        <input
+          type="radio"
+          name="network"
+          id=${input}
+          aria-describedby="verdict-${index} reason-${index}"
+          .checked=${live(option.id === chosen)}
+          @change=${() => this.dispatchEvent(fieldChange('choice', option.id))}
+        />
+        <div class="content">
+          <label class="drawing" for=${input} aria-hidden="true">${thumbnail(option.arms)}</label>
+          <div class="text">
+            <div class="head">
+              <label class="title" for=${input}>${option.title}</label>
+              ${option.id === proposed ? html`<span class="proposed">proposed</span>` : nothing}
+              <span id="verdict-${index}">${verdictMark(option.meets ? 'meets' : 'falls short')}</span>
+            </div>
+            <p class="values">
+              ${option.arms.length === 0
+                ? 'No part is needed.'
+                : partWords(option).map((words) => html`<span class="value">${words}</span> `)}
+            </p>
+            ${figures(option)}
+            <p class="reason" id="reason-${index}">${option.reasons.join('; ')}</p>
+          </div>
+        </div>
+      </li>
+    `;
+  }
+}
+
+/** The figures by which networks are compared, the same for each and in the same columns. */
+function figures(option: Option): TemplateResult {
+  const [second, third] = option.harmonicDb;
+  return html`<dl>
+    <div>
+      <dt>Worst return loss</dt>
+      <dd>${option.worstReturnLossDb === null ? 'no band' : decibels(option.worstReturnLossDb)}</dd>
+    </div>
+    <div class="wide"><dt>Half-power band</dt><dd>${option.halfPower.words}</dd></div>
+    <div>
+      <dt>At 2<i>f</i><sub>0</sub>, 3<i>f</i><sub>0</sub></dt>
+      <dd>${[second, third].map((item) => (item === undefined ? '' : decibels(item.attenuationDb))).join(', ')}</dd>
+    </div>
+    <div><dt>Form</dt><dd>${option.form}, ${count(option.arms.length, 'part')}</dd></div>
+    <div class="wide"><dt>DC path</dt><dd>${option.dc.words}</dd></div>
+  </dl>`;
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'options-part': OptionsPart;
+  }
+}

@@ -1,0 +1,40 @@
+import type { Dossier } from '../../src/dossier.ts';
+import type { DesignRecord } from '../../src/record/design-record.ts';
+
+export type Paper = 'A4' | 'Letter';
+
+/** Name of a document's files, from its number and revision: "TG-041_A". */
+export function fileStem({ identity: { number, revision } }: DesignRecord): string {
+  const safe = (text: string): string => text.trim().replace(/[^\p{L}\p{N}.-]+/gu, '-').replace(/^[-.]+|[-.]+$/gu, '');
+  return [safe(number), safe(revision)].filter((text) => text !== '').join('_') || 'design';
+}
+
+export const recordFile = (record: DesignRecord): Blob =>
+  new Blob([`${JSON.stringify(record, null, 2)}\n`], { type: 'application/json' });
+
+/** The report; its writer and the fonts are fetched when one is asked for, not before. */
+export async function reportFile(dossier: Dossier, paper: Paper): Promise<Blob> {
+  const [{ report }, regular, bold] = await Promise.all([
+    import('../../src/report/report.ts'),
+    font('regular'),
+    font('bold'),
+  ]);
+  const bytes = await report(dossier, { paper, fonts: { regular, bold } });
+  return new Blob([new Uint8Array(bytes)], { type: 'application/pdf' });
+}
+
+async function font(weight: 'regular' | 'bold'): Promise<Uint8Array> {
+  const answer = await fetch(`${import.meta.env.BASE_URL}fonts/ferrule-${weight}.ttf`);
+  if (!answer.ok) throw new Error(`the font can't be fetched (${String(answer.status)}); connect once and try again`);
+  return new Uint8Array(await answer.arrayBuffer());
+}
+
+/** Hands a file to the browser's downloads. */
+export function save(file: Blob, name: string): void {
+  const link = document.createElement('a');
+  link.href = URL.createObjectURL(file);
+  link.download = name;
+  link.click();
+  // The download has its own hold on the data by the next turn of the loop, in every browser after a second.
+  setTimeout(() => URL.revokeObjectURL(link.href), 1000);
+}

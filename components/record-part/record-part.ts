@@ -1,0 +1,137 @@
+import { LitElement, html, nothing, type TemplateResult } from 'lit';
+import { customElement, property, state } from 'lit/decorators.js';
+import type { Dossier } from '../../src/dossier.ts';
+import type { FieldName } from '../../src/record/fields.ts';
+import '../area-field/area-field.ts';
+import { base } from '../base/base.styles.ts';
+import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import { field } from '../base/field.styles.ts';
+import '../copy-button/copy-button.ts';
+import '../text-field/text-field.ts';
+import { fileStem, recordFile, reportFile, save, type Paper } from './files.ts';
+import { styles } from './record-part.styles.ts';
+
+const signers = ['prepared', 'checked', 'approved'] as const;
+
+/**
+ * Part 6: what identifies the document, who signs it, and the ways in and out.
+ * @fires field-change  identity and sign-off
+ * @fires open-file     detail: a File that the user picked
+ */
+@customElement('record-part')
+export class RecordPart extends LitElement {
+  static override styles = [base, field, styles];
+
+  @property({ attribute: false }) dossier: Dossier | null = null;
+  @property({ attribute: false }) state: FieldState = emptyFieldState;
+  /** The dossier is of an earlier entry: nothing may be issued from it. */
+  @property({ type: Boolean }) stale = false;
+  /** Outcome of opening a file, in one line. */
+  @property() opened = '';
+  /** Address that holds the whole sheet. */
+  @property({ attribute: false }) link: () => string = () => '';
+
+  @state() private paper: Paper = 'A4';
+  @state() private said = '';
+
+  override render() {
+    return html`
+      <div class="identity">
+        ${this.text('title', 'Title', 'wide')} ${this.text('number', 'Document number')} ${this.text('revision', 'Revision')}
+        ${this.text('date', 'Date of issue')} ${this.text('ticket', 'Change ticket')} ${this.text('owner', 'Legal owner')}
+      </div>
+      <h3>Sign-off</h3>
+      ${signers.map(
+        (signer) => html`
+          <fieldset class="signer">
+            <legend>${signer.charAt(0).toUpperCase()}${signer.slice(1)}</legend>
+            ${this.text(`${signer}-name`, 'Name')} ${this.text(`${signer}-role`, 'Role')} ${this.text(`${signer}-date`, 'Date')}
+          </fieldset>
+        `,
+      )}
+      <h3>Report and record</h3>
+      <div class="actions">
+        <fieldset class="paper">
+          <legend class="unseen">Paper</legend>
+          ${(['A4', 'Letter'] as const).map((paper) => this.sheetOf(paper))}
+        </fieldset>
+        <button type="button" class="main" aria-disabled=${this.stale} @click=${this.report}>Download the report (PDF)</button>
+      </div>
+      <div class="actions">
+        <button type="button" aria-disabled=${this.stale} @click=${this.record}>Download the record (JSON)</button>
+        <label class="button">
+          <input class="unseen" type="file" accept=".json,application/json" @change=${this.pick} />
+          Open a record…
+        </label>
+        <copy-button label="Copy a link to this sheet" .text=${this.link}></copy-button>
+      </div>
+      <p class="said" role="status">${this.said || this.opened}</p>
+      ${this.dossier === null ? nothing : this.digest(this.dossier.digest)}
+    `;
+  }
+
+  private text(name: FieldName, label: string, part = ''): TemplateResult {
+    const { fields, problems } = this.state;
+    return html`<text-field
+      class=${part}
+      .name=${name}
+      .label=${label}
+      .value=${fields[name] ?? ''}
+      .problem=${problems[name] ?? ''}
+    ></text-field>`;
+  }
+
+  private sheetOf(paper: Paper): TemplateResult {
+    return html`<label>
+      <input type="radio" name="paper" .checked=${paper === this.paper} @change=${() => (this.paper = paper)} /> ${paper}
+    </label>`;
+  }
+
+  private digest(digest: string): TemplateResult {
+    return html`<p class="digest">
+      Digest of the record (SHA-256, sign-off left out): <code>${digest.match(/.{8}/gu)?.join(' ')}</code>
+      <copy-button label="Copy" .text=${() => digest}></copy-button>
+    </p>`;
+  }
+
+  private async report() {
+    if (!this.ready()) return;
+    const { dossier, paper } = this;
+    this.said = 'Writing the report…';
+    try {
+      const file = await reportFile(dossier!, paper);
+      save(file, `${fileStem(dossier!.record)}.pdf`);
+      this.said = 'The report is written.';
+    } catch (error) {
+      this.said = `The report could not be written: ${error instanceof Error ? error.message : String(error)}`;
+    }
+  }
+
+  private record() {
+    if (!this.ready()) return;
+    save(recordFile(this.dossier!.record), `${fileStem(this.dossier!.record)}.json`);
+    this.said = 'The record is saved.';
+  }
+
+  /** Says why nothing is issued while an entry can't be read. */
+  private ready(): boolean {
+    const ready = this.dossier !== null && !this.stale;
+    if (!ready) this.said = `Nothing is issued until every entry can be read. ${Object.values(this.state.problems)[0] ?? ''}`;
+    return ready;
+  }
+
+  private pick(event: Event) {
+    const input = event.target as HTMLInputElement;
+    const file = input.files?.[0];
+    this.said = '';
+    if (file !== undefined) this.dispatchEvent(new CustomEvent('open-file', { detail: file }));
+    // The same file, corrected, can be picked again.
+    input.value = '';
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'record-part': RecordPart;
+  }
+}

@@ -1,0 +1,126 @@
+import { LitElement, html, nothing, type TemplateResult } from 'lit';
+import { customElement, property, state } from 'lit/decorators.js';
+import type { Dossier, Option, Response } from '../../src/dossier.ts';
+import { gainPlot } from '../../src/figures/gain-plot.ts';
+import { reflectionPlane } from '../../src/figures/reflection-plane.ts';
+import { returnLossPlot } from '../../src/figures/return-loss-plot.ts';
+import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
+import { base } from '../base/base.styles.ts';
+import { drawing } from '../base/drawing.ts';
+import { fieldChange } from '../base/field-change.ts';
+import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import '../copy-button/copy-button.ts';
+import '../response-table/response-table.ts';
+import '../text-field/text-field.ts';
+import { styles } from './response-part.styles.ts';
+import { narrower, spanText, wider } from './span-steps.ts';
+
+/** Below this width of the column, px, a chart is drawn with fewer ticks instead of smaller letters. */
+const roomy = 560;
+const large = { width: 520, height: 200 };
+const small = { width: 290, height: 190 };
+
+/**
+ * Part 4: return loss and transducer gain over a span that the engineer sets, the half-power band both ways.
+ * @fires field-change  `sweep`
+ */
+@customElement('response-part')
+export class ResponsePart extends LitElement {
+  static override styles = [base, styles];
+
+  @property({ attribute: false }) dossier: Dossier | null = null;
+  @property({ attribute: false }) state: FieldState = emptyFieldState;
+
+  @state() private size = large;
+  @state() private open: 'none' | 'plane' = 'none';
+  private readonly watch = new ResizeObserver(([entry]) => {
+    if (entry !== undefined) this.size = entry.contentRect.width < roomy ? small : large;
+  });
+
+  override connectedCallback() {
+    super.connectedCallback();
+    this.watch.observe(this);
+  }
+
+  override disconnectedCallback() {
+    super.disconnectedCallback();
+    this.watch.disconnect();
+  }
+
+  override render() {
+    const option = this.dossier?.options.find(({ id }) => id === this.dossier?.chosen);
+    const response = this.dossier?.response;
+    if (!this.dossier || !response || option === undefined) return html`<p>No network, no response.</p>`;
+    const { requirement } = this.dossier.record;
+    return html`
+      ${this.span(response)}
+      <figure>${drawing(returnLossPlot(response, requirement, this.size))}</figure>
+      <figure>${drawing(gainPlot(response, requirement, option.halfPower, this.size))}</figure>
+      ${halfPower(option)}
+      <response-table .response=${response} .requirement=${requirement}></response-table>
+      <details @toggle=${this.toggle}>
+        <summary>Reflection coefficient in its plane</summary>
+        ${this.open === 'plane' ? html`<figure class="plane">${drawing(reflectionPlane(response, requirement))}</figure>` : nothing}
+      </details>
+    `;
+  }
+
+  private toggle(event: Event) {
+    this.open = (event.target as HTMLDetailsElement).open ? 'plane' : 'none';
+  }
+
+  private span({ spanHz }: Response): TemplateResult {
+    const { fields, understood, problems } = this.state;
+    const say = (text: string) => () => this.dispatchEvent(fieldChange('sweep', text));
+    const shown = `${formatQuantity(spanHz.low, 'Hz')} to ${formatQuantity(spanHz.high, 'Hz')}`;
+    return html`<div class="span">
+      <text-field
+        name="sweep"
+        label="Span of the sweep"
+        .empty=${`Chosen from the band: ${shown}.`}
+        .value=${fields.sweep ?? ''}
+        .understood=${understood.sweep ?? ''}
+        .problem=${problems.sweep ?? ''}
+      ></text-field>
+      <div class="steps">
+        <button type="button" @click=${say(spanText(wider(spanHz)))}>Wider</button>
+        <button type="button" @click=${say(spanText(narrower(spanHz, this.dossier!.record.requirement.frequencyHz)))}>
+          Narrower
+        </button>
+        <button type="button" aria-disabled=${(fields.sweep ?? '') === '' ? 'true' : 'false'} @click=${say('')}>
+          As the band
+        </button>
+      </div>
+    </div>`;
+  }
+}
+
+/** The two figures for one bandwidth, side by side, and how far the quick one can be trusted. */
+function halfPower(option: Option): TemplateResult {
+  const { bandwidthFromQHz, loadedQ, halfPower: swept } = option;
+  const estimate =
+    bandwidthFromQHz === null || loadedQ === null ? 'none: no part is needed' : formatQuantity(bandwidthFromQHz, 'Hz');
+  const measured = swept.bandwidthHz === null ? 'an edge is absent' : formatQuantity(swept.bandwidthHz, 'Hz');
+  return html`
+    <h3>Half-power bandwidth</h3>
+    <div class="both">
+      <dl>
+        <dt>From the loaded <i>Q</i></dt>
+        <dd class="figure">${estimate}</dd>
+        <dd>${loadedQ === null ? nothing : html`<i>f</i><sub>0</sub>/<i>Q</i><sub>L</sub>, <i>Q</i><sub>L</sub> = ${formatFixed(loadedQ, 3)}`}</dd>
+      </dl>
+      <dl>
+        <dt>From the sweep</dt>
+        <dd class="figure">${measured}</dd>
+        <dd>${swept.words}</dd>
+      </dl>
+    </div>
+    <p>${option.bandwidthNote}</p>
+  `;
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'response-part': ResponsePart;
+  }
+}

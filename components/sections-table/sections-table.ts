@@ -1,0 +1,112 @@
+import { LitElement, css, html, nothing } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import type { SectionTable } from '../../src/dossier.ts';
+import { formatFixed } from '../../src/quantity/format.ts';
+import { base } from '../base/base.styles.ts';
+import type { Choice } from '../base/choice.ts';
+import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import { table } from '../base/table.styles.ts';
+import { decibels } from '../base/words.ts';
+import '../radio-field/radio-field.ts';
+import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+
+const numbers: readonly Choice[] = [
+  { value: 'auto', words: 'the smallest that holds the band' },
+  ...['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value })),
+];
+
+/** What each number of sections comes to, and the choice of one. */
+@customElement('sections-table')
+export class SectionsTable extends LitElement {
+  static override styles = [
+    base,
+    table,
+    verdictStyles,
+    css`
+      :host {
+        margin-bottom: 1.75rem;
+      }
+
+      .words {
+        margin-bottom: 0.75rem;
+      }
+
+      .chosen {
+        background: var(--tint);
+      }
+
+      th:first-child,
+      td:first-child {
+        padding-left: 0.375rem;
+      }
+
+      .chosen th {
+        font-weight: 700;
+      }
+
+      radio-field {
+        margin-top: 0.75rem;
+      }
+    `,
+  ];
+
+  @property({ attribute: false }) table: SectionTable | null = null;
+  @property({ attribute: false }) state: FieldState = emptyFieldState;
+  /** Id of the network that the document is about. */
+  @property() chosen = '';
+
+  override render() {
+    if (this.table === null) return nothing;
+    return html`
+      <p class="words">${this.table.words}</p>
+      <div class="scroll" tabindex="0" role="group" aria-label="Number of sections against what they hold">
+        <table>
+          <thead>
+            <tr>
+              <th scope="col">Sections</th>
+              <th scope="col">Form</th>
+              <th scope="col">Shunt arm at</th>
+              <th scope="col" class="number">Parts</th>
+              <th scope="col" class="number"><i>Q</i> of each</th>
+              <th scope="col" class="number">Worst return loss</th>
+              <th scope="col">Half-power band</th>
+              <th scope="col">The band</th>
+            </tr>
+          </thead>
+          <tbody>
+            ${this.table.rows.map(
+              (row) => html`
+                <tr class=${row.id === this.chosen ? 'chosen' : ''}>
+                  <th scope="row">${row.sections}</th>
+                  <td>${row.form}</td>
+                  <td>${row.shuntAt}</td>
+                  <td class="number">${row.parts}</td>
+                  <td class="number">${formatFixed(row.sectionQ, 3)}</td>
+                  <td class="number">${row.worstReturnLossDb === null ? 'no band' : decibels(row.worstReturnLossDb)}</td>
+                  <td>${row.halfPower.words}</td>
+                  <td>
+                    ${row.holds === null ? verdictMark('not assessed') : row.holds ? verdictMark('meets', 'held') : verdictMark('falls short', 'not held')}
+                  </td>
+                </tr>
+              `,
+            )}
+          </tbody>
+        </table>
+      </div>
+      <radio-field
+        name="sections"
+        label="Number of sections"
+        inline
+        .choices=${numbers}
+        .value=${this.state.fields.sections ?? 'auto'}
+        .problem=${this.state.problems.sections ?? ''}
+      ></radio-field>
+    `;
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'sections-table': SectionsTable;
+  }
+}

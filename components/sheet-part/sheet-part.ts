@@ -1,0 +1,58 @@
+import { LitElement, html, nothing } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import { base } from '../base/base.styles.ts';
+import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';
+import { styles } from './sheet-part.styles.ts';
+
+/**
+ * One numbered part of the document: its number and its formulas in the margin, its name and verdict as a heading.
+ * @slot  the part's content
+ */
+@customElement('sheet-part')
+export class SheetPart extends LitElement {
+  static override styles = [base, verdictStyles, styles];
+
+  @property({ type: Number }) number = 0;
+  @property() name = '';
+  @property() verdict: Verdict = 'not assessed';
+  @property() words = '';
+  /** Numbers in the basis of calculation that the part rests on: "B3". */
+  @property({ attribute: false }) basis: readonly string[] = [];
+  /** The figures belong to an earlier entry: the one typed now can't be read. */
+  @property({ type: Boolean, reflect: true }) stale = false;
+
+  override render() {
+    return html`
+      <section aria-labelledby="heading">
+        <div class="margin">
+          <span class="number" aria-hidden="true">${this.number}</span>
+          ${this.basis.length === 0
+            ? nothing
+            : html`<p class="basis" aria-label="Basis of calculation">
+                ${this.basis.map((item) => html`<a href="${import.meta.env.BASE_URL}basis/#${item}">${item}</a> `)}
+              </p>`}
+        </div>
+        <div class="body">
+          <header>
+            <h2 id="heading" tabindex="-1"><span class="unseen">${this.number}</span> ${this.name}</h2>
+            ${verdictMark(this.verdict, this.words || this.verdict)}
+          </header>
+          ${this.stale ? html`<p class="stale">Of the last entry that could be read.</p>` : nothing}
+          <slot></slot>
+        </div>
+      </section>
+    `;
+  }
+
+  /** Brings the part into view and moves the reading position to its heading. */
+  reveal() {
+    this.scrollIntoView({ block: 'start' });
+    this.renderRoot.querySelector<HTMLElement>('#heading')?.focus({ preventScroll: true });
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'sheet-part': SheetPart;
+  }
+}

@@ -29,6 +29,11 @@ export default defineConfig(
     },
   },
   {
+    // Lit calls an element's listeners on the element itself.
+    files: ['components/**'],
+    rules: { '@typescript-eslint/unbound-method': 'off' },
+  },
+  {
     // The core knows neither a browser nor Node: of a host's globals, only those that every host has.
     files: ['src/**/*.ts'],
     ignores: ['src/cli/**', 'src/workers/**', 'src/pages/**', 'src/layouts/**'],

@@ -6,6 +6,7 @@ import { cyclesIn, importsIn, sourceFiles } from './imports.ts';
  * each other.
  */
 const floors = [
+  ['src/version.ts'],
   ['src/quantity/'],
   ['src/network/'],
   ['src/synthesis/'],
@@ -13,6 +14,7 @@ const floors = [
   ['src/evidence/'],
   ['src/record/'],
   ['src/dossier.ts'],
+  ['src/design/'],
   ['src/design.ts'],
   ['src/figures/'],
   ['src/report/'],

@@ -1,11 +1,12 @@
+import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 
-const root = new URL('..', import.meta.url).pathname;
+const root = fileURLToPath(new URL('..', import.meta.url));
 
-/** A folder of tests; their names end in .test.ts. */
+/** A folder of tests; their names end in .test.ts. The core has no state that one file could leave to the next. */
 const project = (name: string, settings: object = {}) => ({
   root,
-  test: { name, include: [`test/${name}/**/*.test.ts`], environment: 'node', ...settings },
+  test: { name, include: [`test/${name}/**/*.test.ts`], environment: 'node', isolate: false, ...settings },
 });
 
 export default defineConfig({

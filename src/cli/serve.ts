@@ -46,7 +46,7 @@ const policy = [
   "base-uri 'none'",
   "form-action 'none'",
   "frame-ancestors 'none'",
-  "img-src 'self' data: blob:",
+  "img-src 'self' data:",
   "object-src 'none'",
 ].join('; ');
 

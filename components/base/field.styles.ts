@@ -23,8 +23,8 @@ export const field = css`
   textarea {
     display: block;
     width: 100%;
-    min-height: 2rem;
-    padding: 0.125rem 0.375rem;
+    min-height: 1.875rem;
+    padding: 0.0625rem 0.375rem;
     margin: 0;
     border: 0;
     border-bottom: 1px solid var(--field);

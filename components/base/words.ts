@@ -13,5 +13,9 @@ export const partValue = ({ part, value }: Arm): string => formatQuantity(value,
 export const partWords = ({ arms, designators }: Option): readonly string[] =>
   arms.map((arm, index) => `${designators[index] ?? ''} ${partValue(arm)}`);
 
+/** A number stays with its unit at the end of a line. */
+export const unbroken = (text: string): string =>
+  text.replace(/(\d) (?=(?:[GMkmµnp]?(?:Hz|Ω|H|F|W|V)|dB|%)(?![\p{L}\p{N}]))/gu, '$1\u00a0');
+
 /** "2 parts" */
 export const count = (number: number, noun: string): string => `${String(number)} ${noun}${number === 1 ? '' : 's'}`;

@@ -5,6 +5,7 @@ import { base } from '../base/base.styles.ts';
 import type { Choice } from '../base/choice.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { field } from '../base/field.styles.ts';
+import { symbol } from '../base/symbol.ts';
 
 /**
  * One of a few, in a list that folds. A text from a link that is none of them stays, as a choice of its own.
@@ -17,6 +18,7 @@ export class ChoiceField extends LitElement {
 
   @property() name: FieldName = 'source-behaviour';
   @property() label = '';
+  @property() symbol = '';
   /** Said before the label to those who don't see where the field stands. */
   @property() of = '';
   @property({ attribute: false }) choices: readonly Choice[] = [];
@@ -26,7 +28,10 @@ export class ChoiceField extends LitElement {
   override render() {
     const known = this.choices.some((choice) => choice.value === this.value);
     return html`
-      <label for="select">${this.of === '' ? nothing : html`<span class="unseen">${this.of}</span>`} ${this.label}</label>
+      <label for="select"
+        >${this.of === '' ? nothing : html`<span class="unseen">${this.of}</span>`}
+        ${this.label}${this.symbol === '' ? nothing : html` ${symbol(this.symbol)}`}</label
+      >
       <select
         id="select"
         aria-describedby=${this.problem === '' ? nothing : 'note'}

@@ -14,8 +14,9 @@ export class CopyButton extends LitElement {
 
       button {
         min-height: 1.75rem;
-        padding: 0 0.5rem;
-        border-color: transparent;
+        padding: 0;
+        border: 0;
+        background: none;
         color: var(--accent);
         font-size: var(--small);
         text-decoration: underline;

@@ -1,9 +1,10 @@
 import { LitElement, css, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Dossier, Evidence } from '../../src/dossier.ts';
-import { formatFixed, formatImpedance, formatQuantity } from '../../src/quantity/format.ts';
+import { formatFixed, formatImpedance, formatRead } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { table } from '../base/table.styles.ts';
+import { unbroken } from '../base/words.ts';
 import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
 import { powerOfTen } from './power-of-ten.ts';
 
@@ -24,13 +25,23 @@ export class EvidencePart extends LitElement {
         margin-bottom: 0.75rem;
       }
 
-      .how,
-      .note {
-        display: block;
-        max-width: 46ch;
+      tr.words {
+        border: 0;
+      }
+
+      .words td {
+        padding-top: 0;
         color: var(--muted);
         font-size: var(--small);
         line-height: 1.4;
+      }
+
+      tr:first-child > * {
+        padding-bottom: 0.125rem;
+      }
+
+      thead tr:first-child > * {
+        padding-bottom: 0.4rem;
       }
 
       .assumptions {
@@ -74,21 +85,28 @@ export class EvidencePart extends LitElement {
       ${evidence === null ? html`<p>No network, nothing to prove.</p>` : routes(evidence)}
       <h3>Assumptions</h3>
       <ol class="assumptions">
-        ${assumptions.map((text, index) => html`<li><span>A${index + 1}</span> ${text}</li>`)}
+        ${assumptions.map((text, index) => html`<li><span>A${index + 1}</span> ${unbroken(text)}</li>`)}
       </ol>
       <h3>Referred to</h3>
       <dl>
-        ${references.map(({ title, appliedFor }) => html`<div><dt>${title}</dt><dd>${appliedFor}</dd></div>`)}
+        ${references.map(
+          ({ title, appliedFor }) =>
+            html`<div>
+              <dt>${title}</dt>
+              <dd>${appliedFor}</dd>
+            </div>`,
+        )}
       </dl>
     `;
   }
 }
 
 function routes({ frequenciesHz, routes, checks }: Evidence): TemplateResult {
-  const [design, ...others] = frequenciesHz.map((hertz) => formatQuantity(hertz, 'Hz', 6));
+  const [design = '', ...ends] = frequenciesHz.map((hertz) => formatRead(hertz, 'Hz'));
   return html`
     <p>
-      Each route computes on its own. At ${design}${others.length === 0 ? '' : `, and compared at ${others.join(' and ')} too`}:
+      Each route computes on its own. Figures at ${unbroken(design)}; compared
+      there${ends.length === 0 ? '' : unbroken(` and at ${ends.join(' and ')}`)}.
     </p>
     <div class="scroll" tabindex="0" role="group" aria-label="Routes">
       <table>
@@ -99,17 +117,22 @@ function routes({ frequenciesHz, routes, checks }: Evidence): TemplateResult {
             <th scope="col" class="number">Transducer gain</th>
           </tr>
         </thead>
-        <tbody>
-          ${routes.map(
-            ({ name, how, seen, transducerGain }) => html`
+        ${routes.map(
+          ({ name, how, seen, transducerGain }) => html`
+            <tbody>
               <tr>
-                <th scope="row">${name}<span class="how">${how}</span></th>
+                <th scope="row">${name}</th>
                 <td class="number">${seen === null ? 'not by this route' : formatImpedance(seen.r, seen.x, 10)}</td>
-                <td class="number">${transducerGain === null ? 'not by this route' : formatFixed(transducerGain, 12)}</td>
+                <td class="number">
+                  ${transducerGain === null ? 'not by this route' : formatFixed(transducerGain, 12)}
+                </td>
               </tr>
-            `,
-          )}
-        </tbody>
+              <tr class="words">
+                <td colspan="3">${how}</td>
+              </tr>
+            </tbody>
+          `,
+        )}
       </table>
     </div>
     <div class="scroll" tabindex="0" role="group" aria-label="Spread of the routes">
@@ -122,18 +145,21 @@ function routes({ frequenciesHz, routes, checks }: Evidence): TemplateResult {
             <th scope="col">Outcome</th>
           </tr>
         </thead>
-        <tbody>
-          ${checks.map(
-            ({ subject, spread, tolerance, pass, note }) => html`
+        ${checks.map(
+          ({ subject, spread, tolerance, pass, note }) => html`
+            <tbody>
               <tr>
-                <th scope="row">${subject}<span class="note">${note}</span></th>
+                <th scope="row">${subject}</th>
                 <td class="number">${powerOfTen(spread)}</td>
                 <td class="number">${powerOfTen(tolerance)}</td>
                 <td>${pass ? verdictMark('meets', 'pass') : verdictMark('falls short', 'fail')}</td>
               </tr>
-            `,
-          )}
-        </tbody>
+              <tr class="words">
+                <td colspan="4">${note}</td>
+              </tr>
+            </tbody>
+          `,
+        )}
       </table>
     </div>
   `;

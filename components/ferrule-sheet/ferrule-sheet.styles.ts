@@ -26,10 +26,6 @@ export const styles = css`
     padding-inline: 4px;
   }
 
-  .contents {
-    padding-top: 0.75rem;
-  }
-
   title-block {
     margin-bottom: 2rem;
     padding-left: 3.25rem;

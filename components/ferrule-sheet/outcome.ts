@@ -1,6 +1,6 @@
 import type { Dossier } from '../../src/dossier.ts';
 import { formatQuantity } from '../../src/quantity/format.ts';
-import { decibels, partWords } from '../base/words.ts';
+import { decibels, partWords, unbroken } from '../base/words.ts';
 import type { Settled } from './settle.ts';
 
 /** What the sheet came to, in two or three sentences. */
@@ -10,13 +10,18 @@ export function outcome(dossier: Dossier): string {
   if (shown === undefined) return 'No network of these forms matches these terminations.';
   const meeting = options.filter(({ meets }) => meets).length;
   const by = { engineer: 'Chosen', proposal: 'Proposed', nearest: 'Nearest' }[dossier.chosenBy];
-  const values = shown.arms.length === 0 || shown.arms.length > 4 ? '' : ` (${partWords(shown).join(', ')})`;
+  const values =
+    shown.arms.length === 0 || shown.arms.length > 4
+      ? ''
+      : ` (${partWords(shown)
+          .map((words) => words.replaceAll(' ', '\u00a0'))
+          .join(', ')})`;
   const band = record.requirement.bandHz;
   const held =
     shown.worstReturnLossDb === null || band === null
       ? ''
       : ` Its return loss is ${decibels(shown.worstReturnLossDb)} at worst from ${formatQuantity(band.low, 'Hz')} to ${formatQuantity(band.high, 'Hz')}.`;
-  return `${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`;
+  return unbroken(`${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`);
 }
 
 function howMany(meeting: number, all: number): string {
@@ -32,5 +37,7 @@ const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text
 export function givenLine({ understood }: Settled): string {
   const { frequency, source, load, band } = understood;
   const ends = [source, load].filter((text) => text !== undefined).join(' to ');
-  return [frequency, ends, band, understood['return-loss']].filter((text) => text !== undefined && text !== '').join(', ');
+  return [frequency, ends, band, understood['return-loss']]
+    .filter((text) => text !== undefined && text !== '')
+    .join(', ');
 }

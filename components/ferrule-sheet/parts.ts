@@ -32,17 +32,23 @@ export const parts: readonly Part[] = [
     judge: ({ problems }) => {
       const wrong = Object.keys(problems).length;
       if (wrong === 0) return { verdict: 'meets', words: 'can be read' };
-      return { verdict: 'falls short', words: wrong === 1 ? '1 entry to correct' : `${String(wrong)} entries to correct` };
+      return {
+        verdict: 'falls short',
+        words: wrong === 1 ? '1 entry to correct' : `${String(wrong)} entries to correct`,
+      };
     },
   },
   {
     name: 'Options',
-    basis: (method) => ({ 'two-element': ['B3', 'B4', 'B5'], 'resistive-pair': ['B6', 'B5'], cascade: ['B7', 'B5'] })[method],
+    basis: (method) =>
+      ({ 'two-element': ['B3', 'B4', 'B5'], 'resistive-pair': ['B6', 'B5'], cascade: ['B7', 'B5'] })[method],
     judge: ({ dossier }) => {
       if (dossier === null || dossier.options.length === 0) return unassessed;
       const meeting = dossier.options.filter(({ meets }) => meets).length;
       const words = `${String(meeting)} of ${count(dossier.options.length, 'network')}`;
-      return meeting > 0 ? { verdict: 'meets', words: `${words} meet${meeting === 1 ? 's' : ''}` } : { verdict: 'falls short', words: 'none meets' };
+      return meeting > 0
+        ? { verdict: 'meets', words: `${words} meet${meeting === 1 ? 's' : ''}` }
+        : { verdict: 'falls short', words: 'none meets' };
     },
   },
   {
@@ -71,8 +77,13 @@ export const parts: readonly Part[] = [
     basis: () => ['B17'],
     judge: ({ dossier }) => {
       const signOff = dossier?.record.signOff;
-      const signed = signOff === undefined ? 0 : Object.values(signOff).filter(({ name, date }) => name !== '' && date !== '').length;
-      return signed === 3 ? { verdict: 'meets', words: 'names and dates given' } : { verdict: 'not assessed', words: 'not signed off' };
+      const signed =
+        signOff === undefined
+          ? 0
+          : Object.values(signOff).filter(({ name, date }) => name !== '' && date !== '').length;
+      return signed === 3
+        ? { verdict: 'meets', words: 'names and dates given' }
+        : { verdict: 'not assessed', words: 'not signed off' };
     },
   },
 ];

@@ -1,11 +1,6 @@
 import { css } from 'lit';
 
 export const styles = css`
-  section {
-    padding-top: 0.75rem;
-    border-top: 1px solid var(--ink);
-  }
-
   h2 {
     margin-bottom: 0.75rem;
     font-size: 1.25rem;
@@ -26,7 +21,7 @@ export const styles = css`
 
   .group {
     display: grid;
-    gap: 0.375rem;
+    gap: 0.5rem;
   }
 
   choice-field + text-field,

@@ -3,6 +3,7 @@ import { customElement, property, state } from 'lit/decorators.js';
 import type { FieldName } from '../../src/record/fields.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import { base } from '../base/base.styles.ts';
+import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import '../choice-field/choice-field.ts';
 import '../radio-field/radio-field.ts';
@@ -78,12 +79,15 @@ export class GivenPart extends LitElement {
       <div class="group">
         ${this.text('band', 'Band to hold', '', 'None: the design frequency alone.')}
         ${this.text('return-loss', 'Return loss over the band, at least', '', 'Not required.')}
-        ${this.choice('block-dc', 'DC from source to load', blocks)} ${this.choice('keep-dc', 'DC fed to an end', keeps)}
+        ${this.choice('block-dc', 'DC from source to load', blocks)}
+        ${this.choice('keep-dc', 'DC fed to an end', keeps)}
       </div>
       <details ?open=${folded.some((name) => this.state.problems[name] !== undefined)}>
         <summary>
           Parts and power
-          <span class="muted">${[understood.inductors, understood.capacitors, understood.power].filter(Boolean).join('; ')}</span>
+          <span class="muted"
+            >${[understood.inductors, understood.capacitors, understood.power].filter(Boolean).join('; ')}</span
+          >
         </summary>
         <div class="group">
           ${this.text('inductors', 'Practicable inductors')} ${this.text('capacitors', 'Practicable capacitors')}
@@ -94,7 +98,7 @@ export class GivenPart extends LitElement {
   }
 
   private behaviour(name: FieldName, end: string): TemplateResult {
-    return this.choice(name, 'away from f₀', behaviours, end);
+    return this.choice(name, 'away from', behaviours, end, 'f0');
   }
 
   private text(name: FieldName, label: string, symbol = '', empty = ''): TemplateResult {
@@ -110,10 +114,11 @@ export class GivenPart extends LitElement {
     ></text-field>`;
   }
 
-  private choice(name: FieldName, label: string, choices: typeof keeps, of = ''): TemplateResult {
+  private choice(name: FieldName, label: string, choices: readonly Choice[], of = '', symbol = ''): TemplateResult {
     return html`<choice-field
       .name=${name}
       .label=${label}
+      .symbol=${symbol}
       .of=${of}
       .choices=${choices}
       .value=${this.state.fields[name] ?? ''}
@@ -122,7 +127,8 @@ export class GivenPart extends LitElement {
   }
 }
 
-const wrongWords = (count: number): string => (count === 1 ? '1 entry to correct' : `${String(count)} entries to correct`);
+const wrongWords = (count: number): string =>
+  count === 1 ? '1 entry to correct' : `${String(count)} entries to correct`;
 
 declare global {
   interface HTMLElementTagNameMap {

@@ -32,7 +32,6 @@ export const styles = css`
 
   dl div {
     display: flex;
-    flex-wrap: wrap;
     justify-content: space-between;
     gap: 0 1rem;
     padding: 0.4rem 0;
@@ -43,6 +42,7 @@ export const styles = css`
   }
 
   dt {
+    flex: none;
     color: var(--muted);
   }
 

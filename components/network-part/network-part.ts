@@ -6,7 +6,7 @@ import { formatFixed, formatImpedance } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { drawing } from '../base/drawing.ts';
 import { table } from '../base/table.styles.ts';
-import { partValue } from '../base/words.ts';
+import { partValue, unbroken } from '../base/words.ts';
 import '../copy-button/copy-button.ts';
 import { styles } from './network-part.styles.ts';
 
@@ -30,9 +30,11 @@ export class NetworkPart extends LitElement {
         <div>
           <div class="line">
             <h3>Parts</h3>
-            ${option.arms.length === 0
-              ? nothing
-              : html`<copy-button label="Copy the parts list" .text=${() => partsText(option)}></copy-button>`}
+            ${
+              option.arms.length === 0
+                ? nothing
+                : html`<copy-button label="Copy the parts list" .text=${() => partsText(option)}></copy-button>`
+            }
           </div>
           ${option.arms.length === 0 ? html`<p>No part is needed: the source sees the load as it is.</p>` : parts(option)}
         </div>
@@ -42,7 +44,13 @@ export class NetworkPart extends LitElement {
             <copy-button label="Copy the figures" .text=${() => this.figuresText(option)}></copy-button>
           </div>
           <dl>
-            ${this.figures(option).map(([name, value]) => html`<div><dt>${name}</dt><dd>${value}</dd></div>`)}
+            ${this.figures(option).map(
+              ([name, value]) =>
+                html`<div>
+                  <dt>${name}</dt>
+                  <dd>${value}</dd>
+                </div>`,
+            )}
           </dl>
         </div>
       </div>
@@ -73,7 +81,7 @@ export class NetworkPart extends LitElement {
     const list = [...safety, ...new Set([...practice, ...option.cautions])];
     return html`<h3>Cautions</h3>
       <ul class="cautions">
-        ${list.map((text) => html`<li>${text}</li>`)}
+        ${list.map((text) => html`<li>${unbroken(text)}</li>`)}
       </ul>`;
   }
 }
@@ -104,9 +112,7 @@ function parts(option: Option): TemplateResult {
 
 /** For a spreadsheet: one part a line, source side first, columns by tabs. */
 const partsText = (option: Option): string =>
-  option.arms
-    .map((arm, index) => [option.designators[index], arm.arm, arm.part, partValue(arm)].join('\t'))
-    .join('\n');
+  option.arms.map((arm, index) => [option.designators[index], arm.arm, arm.part, partValue(arm)].join('\t')).join('\n');
 
 declare global {
   interface HTMLElementTagNameMap {

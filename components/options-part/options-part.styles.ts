@@ -56,10 +56,6 @@ export const styles = css`
     gap: 0 0.75rem;
   }
 
-  .head .verdict {
-    margin-left: auto;
-  }
-
   .head > :last-child {
     margin-left: auto;
   }
@@ -69,7 +65,7 @@ export const styles = css`
     cursor: pointer;
   }
 
-  .proposed {
+  .tag {
     padding: 0 0.4em;
     border: 1px solid var(--accent);
     color: var(--accent);
@@ -100,6 +96,24 @@ export const styles = css`
   dt sub {
     font-size: 0.75em;
     line-height: 0;
+  }
+
+  dl .wide {
+    grid-column: 1 / -1;
+  }
+
+  .wide dt,
+  .wide dd {
+    display: inline;
+  }
+
+  .wide dd {
+    margin-left: 0.5em;
+  }
+
+  .absent dt::first-letter,
+  .reason::first-letter {
+    text-transform: uppercase;
   }
 
   .reason {
@@ -136,6 +150,20 @@ export const styles = css`
 
   .absent dd {
     color: var(--muted);
+  }
+
+  .others {
+    margin-top: 0.75rem;
+  }
+
+  .others ol {
+    margin-top: 0.75rem;
+  }
+
+  summary {
+    min-height: 1.5rem;
+    font-weight: 700;
+    cursor: pointer;
   }
 
   area-field {

@@ -1,5 +1,5 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
-import { customElement, property } from 'lit/decorators.js';
+import { customElement, property, state } from 'lit/decorators.js';
 import { live } from 'lit/directives/live.js';
 import { repeat } from 'lit/directives/repeat.js';
 import type { Dossier, Option } from '../../src/dossier.ts';
@@ -7,7 +7,7 @@ import '../area-field/area-field.ts';
 import { base } from '../base/base.styles.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
-import { count, decibels, partWords } from '../base/words.ts';
+import { count, decibels, partWords, unbroken } from '../base/words.ts';
 import '../sections-table/sections-table.ts';
 import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
 import { styles } from './options-part.styles.ts';
@@ -26,30 +26,55 @@ export class OptionsPart extends LitElement {
   /** Why the engineer's choice is not in force; '' when it is. */
   @property() notice = '';
 
+  /** The networks of another number of sections are spread out too. */
+  @state() private open = false;
+
   override render() {
     if (this.dossier === null) return nothing;
-    const { options, absent, sections } = this.dossier;
+    const { options, absent, sections, chosen } = this.dossier;
+    // Of many sections only the chosen number is spread out; the table above has them all.
+    const number = sections === null ? undefined : options.find(({ id }) => id === chosen)?.sections;
+    const others = options.filter((option) => number !== undefined && option.sections !== number);
     return html`
-      ${sections === null
-        ? nothing
-        : html`<sections-table .table=${sections} .state=${this.state} .chosen=${this.dossier.chosen ?? ''}></sections-table>`}
+      ${
+        sections === null
+          ? nothing
+          : html`<sections-table
+              .table=${sections}
+              .state=${this.state}
+              .chosen=${this.dossier.chosen ?? ''}
+            ></sections-table>`
+      }
       ${this.notice === '' ? nothing : html`<p class="notice">${this.notice}</p>`}
       <fieldset>
         <legend class="unseen">Choose a network</legend>
-        <ol>
-          ${repeat(
-            options,
-            ({ id }) => id,
-            (option, index) => this.option(option, index),
-          )}
-        </ol>
+        ${this.list(options.filter((option) => !others.includes(option)))}
+        ${
+          others.length === 0
+            ? nothing
+            : html`<details
+                class="others"
+                @toggle=${(event: Event) => (this.open = (event.target as HTMLDetailsElement).open)}
+              >
+                <summary>${count(others.length, 'network')} of another number of sections</summary>
+                ${this.open ? this.list(others) : nothing}
+              </details>`
+        }
       </fieldset>
-      ${absent.length === 0
-        ? nothing
-        : html`<h3>Forms without a network</h3>
-            <dl class="absent">
-              ${absent.map(({ form, why }) => html`<div><dt>${form}</dt><dd>${why}</dd></div>`)}
-            </dl>`}
+      ${
+        absent.length === 0
+          ? nothing
+          : html`<h3>Forms without a network</h3>
+              <dl class="absent">
+                ${absent.map(
+                  ({ form, why }) =>
+                    html`<div>
+                      <dt>${form}</dt>
+                      <dd>${unbroken(why)}</dd>
+                    </div>`,
+                )}
+              </dl>`
+      }
       <area-field
         name="reason"
         label="Why this one (printed in the report)"
@@ -59,16 +84,26 @@ export class OptionsPart extends LitElement {
     `;
   }
 
-  private option(option: Option, index: number): TemplateResult {
-    const { chosen, proposed } = this.dossier!;
-    const input = `network-${String(index)}`;
+  private list(options: readonly Option[]): TemplateResult {
+    return html`<ol>
+      ${repeat(
+        options,
+        ({ id }) => id,
+        (option) => this.option(option),
+      )}
+    </ol>`;
+  }
+
+  private option(option: Option): TemplateResult {
+    const { chosen, chosenBy, proposed } = this.dossier!;
+    const input = `network-${option.id}`;
     return html`
       <li class=${option.id === chosen ? 'option chosen' : 'option'}>
         <input
           type="radio"
           name="network"
           id=${input}
-          aria-describedby="verdict-${index} reason-${index}"
+          aria-describedby="verdict-${option.id} reason-${option.id}"
           .checked=${live(option.id === chosen)}
           @change=${() => this.dispatchEvent(fieldChange('choice', option.id))}
         />
@@ -77,16 +112,19 @@ export class OptionsPart extends LitElement {
           <div class="text">
             <div class="head">
               <label class="title" for=${input}>${option.title}</label>
-              ${option.id === proposed ? html`<span class="proposed">proposed</span>` : nothing}
-              <span id="verdict-${index}">${verdictMark(option.meets ? 'meets' : 'falls short')}</span>
+              ${option.id === proposed ? html`<span class="tag">proposed</span>` : nothing}
+              ${option.id === chosen && chosenBy !== 'proposal' ? html`<span class="tag">${chosenBy === 'engineer' ? 'chosen' : 'nearest'}</span>` : nothing}
+              <span id="verdict-${option.id}">${verdictMark(option.meets ? 'meets' : 'falls short')}</span>
             </div>
             <p class="values">
-              ${option.arms.length === 0
-                ? 'No part is needed.'
-                : partWords(option).map((words) => html`<span class="value">${words}</span> `)}
+              ${
+                option.arms.length === 0
+                  ? 'No part is needed.'
+                  : partWords(option).map((words) => html`<span class="value">${words}</span> `)
+              }
             </p>
             ${figures(option)}
-            <p class="reason" id="reason-${index}">${option.reasons.join('; ')}</p>
+            <p class="reason" id="reason-${option.id}">${unbroken(option.reasons.join('; '))}</p>
           </div>
         </div>
       </li>
@@ -96,19 +134,28 @@ export class OptionsPart extends LitElement {
 
 /** The figures by which networks are compared, the same for each and in the same columns. */
 function figures(option: Option): TemplateResult {
-  const [second, third] = option.harmonicDb;
+  const harmonics = option.harmonicDb.map(({ attenuationDb }) => decibels(attenuationDb)).join(', ');
   return html`<dl>
     <div>
       <dt>Worst return loss</dt>
       <dd>${option.worstReturnLossDb === null ? 'no band' : decibels(option.worstReturnLossDb)}</dd>
     </div>
-    <div class="wide"><dt>Half-power band</dt><dd>${option.halfPower.words}</dd></div>
     <div>
-      <dt>At 2<i>f</i><sub>0</sub>, 3<i>f</i><sub>0</sub></dt>
-      <dd>${[second, third].map((item) => (item === undefined ? '' : decibels(item.attenuationDb))).join(', ')}</dd>
+      <dt>Half-power band</dt>
+      <dd>${option.halfPower.words}</dd>
     </div>
-    <div><dt>Form</dt><dd>${option.form}, ${count(option.arms.length, 'part')}</dd></div>
-    <div class="wide"><dt>DC path</dt><dd>${option.dc.words}</dd></div>
+    <div>
+      <dt>Attenuation 2<i>f</i><sub>0</sub>, 3<i>f</i><sub>0</sub></dt>
+      <dd>${harmonics}</dd>
+    </div>
+    <div>
+      <dt>Form</dt>
+      <dd>${option.form}, ${count(option.arms.length, 'part')}</dd>
+    </div>
+    <div class="wide">
+      <dt>DC path</dt>
+      <dd>${option.dc.words}</dd>
+    </div>
   </dl>`;
 }
 

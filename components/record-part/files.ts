@@ -5,7 +5,11 @@ export type Paper = 'A4' | 'Letter';
 
 /** Name of a document's files, from its number and revision: "TG-041_A". */
 export function fileStem({ identity: { number, revision } }: DesignRecord): string {
-  const safe = (text: string): string => text.trim().replace(/[^\p{L}\p{N}.-]+/gu, '-').replace(/^[-.]+|[-.]+$/gu, '');
+  const safe = (text: string): string =>
+    text
+      .trim()
+      .replace(/[^\p{L}\p{N}.-]+/gu, '-')
+      .replace(/^[-.]+|[-.]+$/gu, '');
   return [safe(number), safe(revision)].filter((text) => text !== '').join('_') || 'design';
 }
 

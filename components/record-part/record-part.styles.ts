@@ -17,7 +17,7 @@ export const styles = css`
   }
 
   .identity .wide {
-    grid-column: span 1;
+    grid-column: 1 / -1;
   }
 
   .signer {

@@ -37,15 +37,17 @@ export class RecordPart extends LitElement {
   override render() {
     return html`
       <div class="identity">
-        ${this.text('title', 'Title', 'wide')} ${this.text('number', 'Document number')} ${this.text('revision', 'Revision')}
-        ${this.text('date', 'Date of issue')} ${this.text('ticket', 'Change ticket')} ${this.text('owner', 'Legal owner')}
+        ${this.text('title', 'Title', 'wide')} ${this.text('number', 'Document number')}
+        ${this.text('revision', 'Revision')} ${this.text('date', 'Date of issue')}
+        ${this.text('ticket', 'Change ticket')} ${this.text('owner', 'Legal owner')}
       </div>
       <h3>Sign-off</h3>
       ${signers.map(
         (signer) => html`
           <fieldset class="signer">
             <legend>${signer.charAt(0).toUpperCase()}${signer.slice(1)}</legend>
-            ${this.text(`${signer}-name`, 'Name')} ${this.text(`${signer}-role`, 'Role')} ${this.text(`${signer}-date`, 'Date')}
+            ${this.text(`${signer}-name`, 'Name')} ${this.text(`${signer}-role`, 'Role')}
+            ${this.text(`${signer}-date`, 'Date')}
           </fieldset>
         `,
       )}
@@ -55,7 +57,9 @@ export class RecordPart extends LitElement {
           <legend class="unseen">Paper</legend>
           ${(['A4', 'Letter'] as const).map((paper) => this.sheetOf(paper))}
         </fieldset>
-        <button type="button" class="main" aria-disabled=${this.stale} @click=${this.report}>Download the report (PDF)</button>
+        <button type="button" class="main" aria-disabled=${this.stale} @click=${this.report}>
+          Download the report (PDF)
+        </button>
       </div>
       <div class="actions">
         <button type="button" aria-disabled=${this.stale} @click=${this.record}>Download the record (JSON)</button>
@@ -83,7 +87,8 @@ export class RecordPart extends LitElement {
 
   private sheetOf(paper: Paper): TemplateResult {
     return html`<label>
-      <input type="radio" name="paper" .checked=${paper === this.paper} @change=${() => (this.paper = paper)} /> ${paper}
+      <input type="radio" name="paper" .checked=${paper === this.paper} @change=${() => (this.paper = paper)} />
+      ${paper}
     </label>`;
   }
 
@@ -116,7 +121,8 @@ export class RecordPart extends LitElement {
   /** Says why nothing is issued while an entry can't be read. */
   private ready(): boolean {
     const ready = this.dossier !== null && !this.stale;
-    if (!ready) this.said = `Nothing is issued until every entry can be read. ${Object.values(this.state.problems)[0] ?? ''}`;
+    if (!ready)
+      this.said = `Nothing is issued until every entry can be read. ${Object.values(this.state.problems)[0] ?? ''}`;
     return ready;
   }
 

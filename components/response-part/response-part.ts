@@ -8,8 +8,8 @@ import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { drawing } from '../base/drawing.ts';
 import { fieldChange } from '../base/field-change.ts';
+import { unbroken } from '../base/words.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
-import '../copy-button/copy-button.ts';
 import '../response-table/response-table.ts';
 import '../text-field/text-field.ts';
 import { styles } from './response-part.styles.ts';
@@ -87,9 +87,7 @@ export class ResponsePart extends LitElement {
         <button type="button" @click=${say(spanText(narrower(spanHz, this.dossier!.record.requirement.frequencyHz)))}>
           Narrower
         </button>
-        <button type="button" aria-disabled=${(fields.sweep ?? '') === '' ? 'true' : 'false'} @click=${say('')}>
-          As the band
-        </button>
+        <button type="button" ?hidden=${(fields.sweep ?? '') === ''} @click=${say('')}>As the band</button>
       </div>
     </div>`;
   }
@@ -107,7 +105,9 @@ function halfPower(option: Option): TemplateResult {
       <dl>
         <dt>From the loaded <i>Q</i></dt>
         <dd class="figure">${estimate}</dd>
-        <dd>${loadedQ === null ? nothing : html`<i>f</i><sub>0</sub>/<i>Q</i><sub>L</sub>, <i>Q</i><sub>L</sub> = ${formatFixed(loadedQ, 3)}`}</dd>
+        <dd>
+          ${loadedQ === null ? nothing : html`<i>f</i><sub>0</sub>/<i>Q</i><sub>L</sub>, <i>Q</i><sub>L</sub> = ${formatFixed(loadedQ, 3)}`}
+        </dd>
       </dl>
       <dl>
         <dt>From the sweep</dt>
@@ -115,7 +115,7 @@ function halfPower(option: Option): TemplateResult {
         <dd>${swept.words}</dd>
       </dl>
     </div>
-    <p>${option.bandwidthNote}</p>
+    <p>${unbroken(option.bandwidthNote)}</p>
   `;
 }
 

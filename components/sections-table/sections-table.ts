@@ -1,7 +1,7 @@
 import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { SectionTable } from '../../src/dossier.ts';
-import { formatFixed } from '../../src/quantity/format.ts';
+import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
@@ -9,6 +9,8 @@ import { table } from '../base/table.styles.ts';
 import { decibels } from '../base/words.ts';
 import '../radio-field/radio-field.ts';
 import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+
+const edge = (hertz: number | null): string => (hertz === null ? 'none' : formatQuantity(hertz, 'Hz'));
 
 const numbers: readonly Choice[] = [
   { value: 'auto', words: 'the smallest that holds the band' },
@@ -31,6 +33,14 @@ export class SectionsTable extends LitElement {
         margin-bottom: 0.75rem;
       }
 
+      table {
+        font-size: var(--small);
+      }
+
+      td {
+        white-space: nowrap;
+      }
+
       .chosen {
         background: var(--tint);
       }
@@ -38,6 +48,10 @@ export class SectionsTable extends LitElement {
       th:first-child,
       td:first-child {
         padding-left: 0.375rem;
+      }
+
+      .chosen th:first-child {
+        box-shadow: inset 3px 0 0 var(--accent);
       }
 
       .chosen th {
@@ -69,21 +83,28 @@ export class SectionsTable extends LitElement {
               <th scope="col" class="number">Parts</th>
               <th scope="col" class="number"><i>Q</i> of each</th>
               <th scope="col" class="number">Worst return loss</th>
-              <th scope="col">Half-power band</th>
+              <th scope="col" class="number">Half-power from</th>
+              <th scope="col" class="number">to</th>
               <th scope="col">The band</th>
             </tr>
           </thead>
           <tbody>
             ${this.table.rows.map(
               (row) => html`
-                <tr class=${row.id === this.chosen ? 'chosen' : ''}>
+                <tr
+                  class=${row.id === this.chosen ? 'chosen' : ''}
+                  aria-current=${row.id === this.chosen ? 'true' : nothing}
+                >
                   <th scope="row">${row.sections}</th>
                   <td>${row.form}</td>
                   <td>${row.shuntAt}</td>
                   <td class="number">${row.parts}</td>
                   <td class="number">${formatFixed(row.sectionQ, 3)}</td>
-                  <td class="number">${row.worstReturnLossDb === null ? 'no band' : decibels(row.worstReturnLossDb)}</td>
-                  <td>${row.halfPower.words}</td>
+                  <td class="number">
+                    ${row.worstReturnLossDb === null ? 'no band' : decibels(row.worstReturnLossDb)}
+                  </td>
+                  <td class="number">${edge(row.halfPower.lowHz)}</td>
+                  <td class="number">${edge(row.halfPower.highHz)}</td>
                   <td>
                     ${row.holds === null ? verdictMark('not assessed') : row.holds ? verdictMark('meets', 'held') : verdictMark('falls short', 'not held')}
                   </td>

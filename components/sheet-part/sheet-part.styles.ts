@@ -30,6 +30,7 @@ export const styles = css`
   .basis a {
     min-height: 1.5rem;
     color: var(--muted);
+    text-decoration-color: var(--hairline);
   }
 
   header {
@@ -51,6 +52,15 @@ export const styles = css`
     outline: none;
   }
 
+  /* Read out always, seen only where the margin is gone. */
+  .inline {
+    position: absolute;
+    width: 1px;
+    height: 1px;
+    overflow: hidden;
+    clip-path: inset(50%);
+  }
+
   .stale {
     margin: -0.5rem 0 1rem;
     font-weight: 700;
@@ -65,16 +75,25 @@ export const styles = css`
       grid-template-columns: minmax(0, 1fr);
     }
 
+    .number {
+      display: none;
+    }
+
+    .inline {
+      position: static;
+      clip-path: none;
+      margin-right: 0.375rem;
+      color: var(--accent);
+    }
+
     .margin {
-      display: flex;
-      align-items: baseline;
-      justify-content: space-between;
+      order: 1;
     }
 
     .basis {
       flex-direction: row;
-      gap: 0.75rem;
-      margin: 0;
+      gap: 1rem;
+      margin-top: 1rem;
     }
   }
 `;

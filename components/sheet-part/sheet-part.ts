@@ -26,15 +26,17 @@ export class SheetPart extends LitElement {
       <section aria-labelledby="heading">
         <div class="margin">
           <span class="number" aria-hidden="true">${this.number}</span>
-          ${this.basis.length === 0
-            ? nothing
-            : html`<p class="basis" aria-label="Basis of calculation">
-                ${this.basis.map((item) => html`<a href="${import.meta.env.BASE_URL}basis/#${item}">${item}</a> `)}
-              </p>`}
+          ${
+            this.basis.length === 0
+              ? nothing
+              : html`<p class="basis" aria-label="Basis of calculation">
+                  ${this.basis.map((item) => html`<a href="${import.meta.env.BASE_URL}basis/#${item}">${item}</a> `)}
+                </p>`
+          }
         </div>
         <div class="body">
           <header>
-            <h2 id="heading" tabindex="-1"><span class="unseen">${this.number}</span> ${this.name}</h2>
+            <h2 id="heading" tabindex="-1"><span class="inline">${this.number}</span> ${this.name}</h2>
             ${verdictMark(this.verdict, this.words || this.verdict)}
           </header>
           ${this.stale ? html`<p class="stale">Of the last entry that could be read.</p>` : nothing}

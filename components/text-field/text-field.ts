@@ -41,7 +41,9 @@ export class TextField extends LitElement {
         aria-invalid=${this.problem === '' ? nothing : 'true'}
         @input=${this.say}
       />
-      <p id="note" class=${this.problem === '' ? 'note' : 'note problem'}>${this.problem || this.understood || this.empty}</p>
+      <p id="note" class=${this.problem === '' ? 'note' : 'note problem'}>
+        ${this.problem || this.understood || this.empty}
+      </p>
     `;
   }
 

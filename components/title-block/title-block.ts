@@ -33,7 +33,13 @@ export class TitleBlock extends LitElement {
         <p class="sheet">Calculation sheet: ${this.sheet.toLowerCase()}</p>
         <h1>${title || 'Untitled'}</h1>
         <dl>
-          ${rows.map(([name, text]) => html`<div><dt>${name}</dt><dd>${text}</dd></div>`)}
+          ${rows.map(
+            ([name, text]) =>
+              html`<div>
+                <dt>${name}</dt>
+                <dd>${text}</dd>
+              </div>`,
+          )}
         </dl>
       </header>
       ${this.outcome === '' ? nothing : html`<p class="outcome">${this.outcome}</p>`}

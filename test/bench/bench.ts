@@ -1,7 +1,15 @@
 import { formatFigure, type Figure } from './figure.ts';
+import { benchKeystroke } from './keystroke.ts';
+import { benchLoad } from './load.ts';
+import { benchReport } from './report.ts';
 import { benchSweep } from './sweep.ts';
 
 /** Prints each figure with its budget beside it. Figures are for reading: a miss doesn't fail the command. */
-const benches: readonly (() => readonly Figure[] | Promise<readonly Figure[]>)[] = [benchSweep];
+const benches: readonly (() => readonly Figure[] | Promise<readonly Figure[]>)[] = [
+  benchSweep,
+  benchLoad,
+  benchKeystroke,
+  benchReport,
+];
 
 for (const bench of benches) for (const figure of await bench()) console.log(formatFigure(figure));

@@ -12,7 +12,7 @@ export interface Size {
 }
 
 /** Size that both a page's column and a report's text width take without shrinking the lettering. */
-export const chartSize: Size = { width: 480, height: 220 };
+export const chartSize: Size = { width: 480, height: 170 };
 
 export const lettering = 8;
 
@@ -45,9 +45,11 @@ export interface Frame {
  */
 export function chartFrame(size: Size, span: Span, values: Span, axisTitle: string, key?: Key): Frame {
   const left = 32;
-  const right = size.width - 12;
-  const top = 38;
-  const bottom = size.height - 30;
+  const right = size.width - 1;
+  const keyWidth = key === undefined ? 0 : 22 + textWidth(key.text, lettering);
+  const beside = textWidth(axisTitle, lettering, true) + 12 + keyWidth < right;
+  const top = beside ? 28 : 40;
+  const bottom = size.height - 28;
   const axis = frequencyAxis(span, Math.max(2, Math.floor((right - left) / 60)));
   const x = (hertz: number): number => left + axis.at(hertz) * (right - left);
   const y = (value: number): number => bottom - ((value - values.low) / (values.high - values.low)) * (bottom - top);
@@ -60,14 +62,13 @@ export function chartFrame(size: Size, span: Span, values: Span, axisTitle: stri
   }
   for (const tick of axis.ticks) {
     shapes.push(line(x(tick.hertz), top, x(tick.hertz), bottom, grid));
-    shapes.push(label(x(tick.hertz), bottom + 11, tick.text, lettering, 'middle', 'muted'));
+    const middle = Math.min(x(tick.hertz), right - textWidth(tick.text, lettering) / 2);
+    shapes.push(label(middle, bottom + 11, tick.text, lettering, 'middle', 'muted'));
   }
   shapes.push(rectangle(left, top, right - left, bottom - top, { stroke: 'muted', width: stroke.thin }));
   shapes.push(label(0, 9, axisTitle, lettering, 'start', 'ink', true));
   if (key !== undefined) {
-    const width = 22 + textWidth(key.text, lettering);
-    const beside = textWidth(axisTitle, lettering) * 1.05 + 12 + width < right;
-    const [keyX, keyY] = beside ? [right - width, 9] : [0, 21];
+    const [keyX, keyY] = beside ? [right - keyWidth, 9] : [0, 22];
     shapes.push(...key.sample(keyX, keyY - 6, keyX + 17, keyY + 1));
     shapes.push(label(keyX + 22, keyY, key.text, lettering, 'start', key.tone));
   }

@@ -13,6 +13,6 @@ export function designMark(frame: Frame, hertz: number): readonly Shape[] {
   const centre = Math.min(frame.right - half, Math.max(frame.left + half, x));
   return [
     line(x, frame.top, x, frame.bottom, { stroke: 'muted', width: stroke.thin, dash: [7, 2, 1.5, 2] }),
-    label(centre, frame.top - 4, text, lettering, 'middle', 'muted'),
+    label(centre, frame.top - 5, text, lettering, 'middle', 'muted'),
   ];
 }

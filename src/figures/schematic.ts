@@ -37,7 +37,7 @@ export function schematic(
   const shapes: Shape[] = [];
   const write = (x: number, y: number, name: string, value: string, anchor: 'start' | 'middle'): number => {
     shapes.push(label(x, y, name, size, anchor, 'ink', true), label(x, y + leading, value, size, anchor));
-    return Math.max(textWidth(name, size), textWidth(value, size));
+    return Math.max(textWidth(name, size, true), textWidth(value, size));
   };
   /** A part between the wire and earth, its label to the right; gives the label's right-hand edge. */
   const hang = (x: number, kind: 'inductor' | 'capacitor' | 'load', name: string, value: string): number => {
@@ -52,7 +52,7 @@ export function schematic(
   const feed = generator(sourceX, middleY);
   shapes.push(...feed.shapes, earth(sourceX, earthY), line(sourceX, middleY + feed.reach, sourceX, earthY, wire));
   shapes.push(line(sourceX, wireY, sourceX, middleY - feed.reach, wire));
-  const sourceWidth = Math.max(textWidth('Source', size), textWidth(sourceText, size));
+  const sourceWidth = Math.max(textWidth('Source', size, true), textWidth(sourceText, size));
   const inner = impedance(0, 0, 'across').reach;
   const sourceCentre = Math.max(sourceX + 8 + inner, sourceWidth / 2 + 2);
   write(sourceCentre, wireY - 23, 'Source', sourceText, 'middle');
@@ -72,7 +72,7 @@ export function schematic(
     const name = designators[index] ?? '';
     const value = formatQuantity(arm.value, arm.part === 'inductor' ? 'H' : 'F');
     if (arm.arm === 'series') {
-      const half = Math.max(textWidth(name, size), textWidth(value, size)) / 2;
+      const half = Math.max(textWidth(name, size, true), textWidth(value, size)) / 2;
       const reach = part(arm.part, 0, 0, 'across').reach;
       // A capacitor is short: it keeps a winding's distance to the junction before it.
       const x = Math.max(end + 8 + Math.max(reach, 8), over + gap + half);

@@ -1,0 +1,73 @@
+import type { Dossier } from '../../dossier.ts';
+import type { Signature } from '../../record/design-record.ts';
+import { plain, text, type Block, type Row } from '../page/block.ts';
+import { orNotStated, sentence } from './words.ts';
+
+/** Safety before practice. */
+export function cautions({ cautions: list }: Dossier): readonly Block[] {
+  const heading: Block = { kind: 'heading', number: 9, text: 'Cautions' };
+  if (list.length === 0) return [heading, text('None beyond the usual care with radio-frequency power.')];
+  const ordered = [...list.filter(({ kind }) => kind === 'safety'), ...list.filter(({ kind }) => kind === 'practice')];
+  return [
+    heading,
+    {
+      kind: 'list',
+      entries: ordered.map(({ kind, text: words }, k) => ({
+        mark: `C${String(k + 1)}`,
+        paragraph:
+          kind === 'safety'
+            ? { spans: [{ text: 'Safety. ', bold: true }, { text: sentence(words) }] }
+            : { spans: [{ text: sentence(words) }] },
+      })),
+    },
+  ];
+}
+
+export function references({ references: list }: Dossier): readonly Block[] {
+  return [
+    { kind: 'heading', number: 10, text: 'Standards and literature applied' },
+    {
+      kind: 'table',
+      columns: [
+        { title: 'Reference', share: 58 },
+        { title: 'Applied for', share: 42 },
+      ],
+      rows: list.map(({ title, appliedFor }) => ({ cells: [[plain(title)], [plain(appliedFor)]] })),
+    },
+  ];
+}
+
+/** Name, role, date and room for a hand-written signature. */
+export function signOff({ record }: Dossier): readonly Block[] {
+  const row = (duty: string, { name, role, date }: Signature): Row => ({
+    cells: [
+      [{ spans: [{ text: duty, bold: true }] }],
+      [plain(name.trim())],
+      [plain(role.trim())],
+      [plain(date.trim())],
+      [],
+    ],
+  });
+  const { prepared, checked, approved } = record.signOff;
+  return [
+    { kind: 'heading', number: 11, text: 'Sign-off' },
+    {
+      ...text(
+        `Revision ${orNotStated(record.identity.revision)}. The digest at the foot of every page is the SHA-256 (FIPS 180-4) of this design’s record in RFC 8785 form, its sign-off left out: the same inputs and decisions give the same digest.`,
+      ),
+      keep: true,
+    },
+    {
+      kind: 'table',
+      columns: [
+        { title: 'Duty', share: 14 },
+        { title: 'Name', share: 24 },
+        { title: 'Role', share: 20 },
+        { title: 'Date', share: 14 },
+        { title: 'Signature', share: 28 },
+      ],
+      rows: [row('Prepared', prepared), row('Checked', checked), row('Approved', approved)],
+      rowHeight: 34,
+    },
+  ];
+}

@@ -1,0 +1,62 @@
+import type { Dossier, Option } from '../../dossier.ts';
+import { schematic } from '../../figures/schematic.ts';
+import { formatImpedance, formatQuantity } from '../../quantity/format.ts';
+import { plain, text, type Block } from '../page/block.ts';
+import { chosenOption, reasonsOf, sentence, valueOf } from './words.ts';
+
+/** The chosen network: who chose it and why, its schematic, and the parts to order. */
+export function network(dossier: Dossier): readonly Block[] {
+  const option = chosenOption(dossier.options, dossier.chosen);
+  const heading: Block = { kind: 'heading', number: 5, text: 'Chosen network' };
+  if (option === undefined) return [heading, text('There is no network to choose.')];
+  const { source, load, requirement } = dossier.record;
+  const f0 = formatQuantity(requirement.frequencyHz, 'Hz', 5);
+  return [
+    heading,
+    { kind: 'text', paragraph: { spans: [{ text: sentence(option.title), bold: true }] }, keep: true },
+    { ...text(why(dossier, option)), keep: true },
+    {
+      kind: 'picture',
+      figure: schematic(option.arms, option.designators, source, load),
+      caption: `Figure 1. Chosen network; at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}.`,
+      scale: 1,
+    },
+    { kind: 'heading', text: 'Parts to order' },
+    ...(option.arms.length === 0 ? [text('None: the terminations are connected directly.')] : [partsList(option)]),
+  ];
+}
+
+function why({ chosenBy, record, options }: Dossier, option: Option): string {
+  if (chosenBy === 'proposal') {
+    return `Proposed: the first of ${String(options.length)} in the order considered that meets everything required. ${note(record.selection.reason)}`;
+  }
+  if (chosenBy === 'nearest') {
+    return `No option meets everything required; this one comes nearest. ${reasonsOf(option)} ${note(record.selection.reason)}`;
+  }
+  const by = record.signOff.prepared.name.trim();
+  const who = by === '' ? 'Chosen by the engineer' : `Chosen by the engineer (prepared by ${by})`;
+  const reason = record.selection.reason.trim();
+  return `${who}. ${reason === '' ? 'No reason was written down.' : `Reason given: “${reason}”`}`;
+}
+
+const note = (reason: string): string => (reason.trim() === '' ? '' : `Note by the engineer: “${reason.trim()}”`);
+
+function partsList({ arms, designators }: Option): Block {
+  return {
+    kind: 'table',
+    columns: [
+      { title: 'Designator', share: 20 },
+      { title: 'Kind', share: 24 },
+      { title: 'Arm, from the source', share: 32 },
+      { title: 'Value', share: 24, align: 'end' },
+    ],
+    rows: arms.map((arm, k) => ({
+      cells: [
+        [{ spans: [{ text: designators[k] ?? '', bold: true }] }],
+        [plain(arm.part)],
+        [plain(`${String(k + 1)}, ${arm.arm}`)],
+        [plain(valueOf(arm))],
+      ],
+    })),
+  };
+}

@@ -1,0 +1,80 @@
+import type { Dossier, Response } from '../../dossier.ts';
+import { returnLossWords } from '../../design/words.ts';
+import { gainPlot } from '../../figures/gain-plot.ts';
+import { reflectionPlane } from '../../figures/reflection-plane.ts';
+import { returnLossPlot } from '../../figures/return-loss-plot.ts';
+import { formatFixed, formatQuantity, formatRead } from '../../quantity/format.ts';
+import { plain, text, type Block } from '../page/block.ts';
+import { chosenOption, sampleAt, spanRead } from './words.ts';
+
+/** The sweep in pictures, and its figures at the frequencies that the requirement names. */
+export function response(dossier: Dossier): readonly Block[] {
+  const heading: Block = { kind: 'heading', number: 6, text: 'Response' };
+  const option = chosenOption(dossier.options, dossier.chosen);
+  const { response: swept, record } = dossier;
+  if (option === undefined || swept === null) return [heading, text('Without a network there is no response.')];
+  const { requirement } = record;
+  const span = `${formatQuantity(swept.spanHz.low, 'Hz')} to ${formatQuantity(swept.spanHz.high, 'Hz')}`;
+  return [
+    heading,
+    { ...text(`Swept from ${span}, ${String(swept.frequencyHz.length)} points.`), keep: true },
+    ...figuresAt(swept, requirement),
+    {
+      kind: 'picture',
+      figure: returnLossPlot(swept, requirement),
+      caption:
+        requirement.returnLossDb === null
+          ? 'Figure 2. Return loss.'
+          : `Figure 2. Return loss; the hatched region is the requirement${requirement.bandHz === null ? '' : ` (${spanRead(requirement.bandHz, 'Hz')})`} and must stay free.`,
+      scale: 1.1,
+    },
+    {
+      kind: 'picture',
+      figure: gainPlot(swept, requirement, option.halfPower),
+      caption: `Figure 3. Transducer gain; half-power band: ${option.halfPower.words}.`,
+      scale: 1.1,
+    },
+    {
+      kind: 'picture',
+      figure: reflectionPlane(swept, requirement),
+      caption: `Figure 4. Reflection coefficient at the source for the ${record.aim} aim.`,
+      scale: 1.1,
+    },
+  ];
+}
+
+function figuresAt(swept: Response, { frequencyHz, bandHz }: Dossier['record']['requirement']): readonly Block[] {
+  const named: readonly (readonly [string, number])[] = [
+    ...(bandHz === null ? [] : ([['Lower band edge', bandHz.low]] as const)),
+    ['Design frequency', frequencyHz],
+    ...(bandHz === null ? [] : ([['Upper band edge', bandHz.high]] as const)),
+  ];
+  const rows = named.flatMap(([name, hertz]) => {
+    const k = sampleAt(swept, hertz);
+    if (k < 0) return [];
+    const ratio = swept.vswr[k] ?? 0;
+    const figures = [
+      formatRead(hertz, 'Hz'),
+      returnLossWords(swept.returnLossDb[k] ?? 0),
+      ratio >= 1e4 ? '> 10 000' : formatFixed(ratio, 3),
+      `${formatFixed(swept.mismatchLossDb[k] ?? 0, 3)} dB`,
+      `${formatFixed(swept.transducerGainDb[k] ?? 0, 3)} dB`,
+    ];
+    return [{ cells: [[plain(name)], ...figures.map((figure) => [plain(figure)])] }];
+  });
+  if (rows.length === 0) return [];
+  return [
+    {
+      kind: 'table',
+      columns: [
+        { title: 'At', share: 22 },
+        { title: 'Frequency', share: 17, align: 'end' },
+        { title: 'Return loss', share: 15, align: 'end' },
+        { title: 'VSWR', share: 12, align: 'end' },
+        { title: 'Mismatch loss', share: 17, align: 'end' },
+        { title: 'Transducer gain', share: 18, align: 'end' },
+      ],
+      rows,
+    },
+  ];
+}

@@ -1,0 +1,61 @@
+import type { Dossier, Option } from '../../dossier.ts';
+import { returnLossWords } from '../../design/words.ts';
+import { returnLossDb } from '../../network/figures-of-merit.ts';
+import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/format.ts';
+import { plain, type Block } from '../page/block.ts';
+import { chosenOption, partsOf, reasonsOf } from './words.ts';
+
+/** The answer first: whether the chosen network meets what was asked, why, and its leading figures. */
+export function verdict(dossier: Dossier): readonly Block[] {
+  const option = chosenOption(dossier.options, dossier.chosen);
+  if (option === undefined) {
+    return bar('No network', [
+      'No network of the kind asked for matches these terminations; the reasons follow in part 4.',
+    ]);
+  }
+  const proof = dossier.evidence?.pass === false ? ['Verification fails: see part 7 before using any figure.'] : [];
+  const words = option.meets ? [reasonsOf(option)] : [reasonsOf(option), shortfall(dossier)];
+  return [
+    ...bar(option.meets ? 'Meets the requirement' : 'Falls short of the requirement', [
+      `${option.title}: ${partsOf(option)}.`,
+      ...words,
+      ...proof,
+    ]),
+    { kind: 'facts', columns: 4, entries: figures(dossier, option) },
+  ];
+}
+
+function shortfall({ proposed, options }: Dossier): string {
+  const other = chosenOption(options, proposed);
+  const instead = other === undefined ? 'No option meets everything.' : `${other.title} would meet everything.`;
+  return `${instead} Issuing this document needs a written deviation.`;
+}
+
+function bar(headline: string, words: readonly string[]): readonly Block[] {
+  return [
+    {
+      kind: 'text',
+      paragraph: { spans: [{ text: headline, bold: true }], style: 'lead' },
+      bar: true,
+      opens: true,
+      keep: true,
+    },
+    ...words.map((text): Block => ({ kind: 'text', paragraph: plain(text), bar: true, keep: true })),
+  ];
+}
+
+function figures({ record }: Dossier, option: Option): { readonly name: string; readonly value: string }[] {
+  const worst = option.worstReturnLossDb;
+  const f0 = formatQuantity(record.requirement.frequencyHz, 'Hz', 5);
+  return [
+    {
+      name: worst === null ? `Return loss at ${f0}` : 'Worst return loss in the band',
+      value: worst === null ? atDesignFrequency(option) : returnLossWords(worst),
+    },
+    { name: `Impedance seen at ${f0}`, value: formatImpedance(option.seen.r, option.seen.x) },
+    { name: `Transducer gain at ${f0}`, value: formatFixed(option.transducerGain, 6) },
+    { name: 'Half-power band', value: option.halfPower.words },
+  ];
+}
+
+const atDesignFrequency = ({ reflection }: Option): string => returnLossWords(returnLossDb(reflection ** 2));

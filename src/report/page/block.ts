@@ -1,0 +1,85 @@
+import type { Figure, Tone } from '../../figures/figure.ts';
+import type { Style } from './style.ts';
+
+/** A report's content before it has places: what follows what, and what stays together. */
+export type Block = Heading | Text | List | Facts | Table | Picture;
+
+export interface Span {
+  readonly text: string;
+  readonly bold?: boolean;
+  readonly tone?: Tone;
+}
+
+export interface Paragraph {
+  readonly spans: readonly Span[];
+  readonly style?: Style;
+}
+
+/** Opens a numbered part, or (without number) a division of one. Never stands alone at the foot of a page. */
+export interface Heading {
+  readonly kind: 'heading';
+  readonly number?: number;
+  readonly text: string;
+}
+
+export interface Text {
+  readonly kind: 'text';
+  readonly paragraph: Paragraph;
+  /** A bar at its left, for a verdict. */
+  readonly bar?: boolean;
+  /** Stands apart from what is before it. */
+  readonly opens?: boolean;
+  /** Stays with what follows. */
+  readonly keep?: boolean;
+}
+
+/** Paragraphs behind hanging marks: A1, A2, ... */
+export interface List {
+  readonly kind: 'list';
+  readonly entries: readonly { readonly mark: string; readonly paragraph: Paragraph }[];
+}
+
+/** Name over value, so many in a row. A value that counts pages is written once there are pages. */
+export interface Facts {
+  readonly kind: 'facts';
+  readonly columns: number;
+  readonly entries: readonly { readonly name: string; readonly value: string | ((sheets: number) => string) }[];
+}
+
+export interface Column {
+  readonly title: string;
+  /** Share of the text width. */
+  readonly share: number;
+  readonly align?: 'end';
+}
+
+export type Cell = readonly (Paragraph | Picture)[];
+
+export interface Row {
+  readonly cells: readonly Cell[];
+  /** A bar in the margin beside it. */
+  readonly marked?: boolean;
+  /** Set under the cells of the columns from the one of this index on, over their whole width. */
+  readonly below?: { readonly from: number; readonly paragraphs: readonly Paragraph[] };
+}
+
+export interface Table {
+  readonly kind: 'table';
+  readonly columns: readonly Column[];
+  readonly rows: readonly Row[];
+  /** Least height of a row, pt: room for a signature. */
+  readonly rowHeight?: number;
+}
+
+export interface Picture {
+  readonly kind: 'picture';
+  readonly figure: Figure;
+  readonly caption?: string;
+  /** Largest scale at which it is drawn; smaller where the width asks for it. */
+  readonly scale: number;
+}
+
+export const plain = (text: string, style?: Style): Paragraph =>
+  style === undefined ? { spans: [{ text }] } : { spans: [{ text }], style };
+
+export const text = (content: string, style?: Style): Text => ({ kind: 'text', paragraph: plain(content, style) });

@@ -1,0 +1,70 @@
+import type { Dossier } from '../dossier.ts';
+import { blocks } from './content/blocks.ts';
+import { missingNote } from './content/title-block.ts';
+import { orNotStated, titleOf } from './content/words.ts';
+import { addFurniture, frameOf } from './page/furniture.ts';
+import { lettering, missing, type Lettering } from './page/lettering.ts';
+import { paginate } from './page/paginate.ts';
+import { setBlock } from './page/set-block.ts';
+import { readTypeface } from './page/typeface.ts';
+import { writePdf } from './pdf/write-pdf.ts';
+
+export interface ReportOptions {
+  readonly paper: 'a4' | 'letter';
+  /** TrueType files of the two weights. */
+  readonly fonts: { readonly regular: Uint8Array; readonly bold: Uint8Array };
+}
+
+/**
+ * The design report of a dossier, as a PDF file. The same dossier gives the same bytes: dates come from the record,
+ * never from a clock.
+ *
+ * @throws RangeError when a font isn't a TrueType file with a character map
+ */
+export async function report(dossier: Dossier, { paper, fonts }: ReportOptions): Promise<Uint8Array> {
+  const faces = { regular: readTypeface(fonts.regular), bold: readTypeface(fonts.bold) };
+  const letters = noting(lettering(faces.regular, faces.bold));
+  const frame = frameOf(paper);
+  const width = frame.right - frame.left;
+  const { record, digest, version } = dossier;
+  const { identity, signOff } = record;
+  const pieces = blocks(dossier).flatMap((block) => setBlock(block, frame.left, width, letters));
+  if (letters.lacks()) pieces.push(...setBlock(missingNote(missing), frame.left, width, letters));
+  const sheets = paginate(pieces, frame.top, frame.bottom);
+  const number = identity.number.trim() === '' ? 'No document number' : identity.number;
+  addFurniture(
+    sheets,
+    frame,
+    { number, revision: orNotStated(identity.revision), title: titleOf(record), digest },
+    letters,
+  );
+  const author = signOff.prepared.name.trim() || identity.owner.trim();
+  return writePdf(sheets, [frame.width, frame.height], faces, letters, {
+    title: titleOf(record),
+    subject: `Design report ${identity.number} revision ${identity.revision}`.replace(/\s+/gu, ' ').trim(),
+    author,
+    creator: `Ferrule ${version}`,
+    digest,
+    date: dateOf(identity.date),
+  });
+}
+
+/** Lettering that remembers whether a character had to be replaced. */
+function noting(letters: Lettering): Lettering & { readonly lacks: () => boolean } {
+  let lacks = false;
+  return {
+    width: letters.width,
+    printable: (text) => {
+      const out = letters.printable(text);
+      if (out.includes(missing) && !text.includes(missing)) lacks = true;
+      return out;
+    },
+    lacks: () => lacks,
+  };
+}
+
+/** Midnight UTC of an ISO 8601 calendar date; null where there is none. */
+function dateOf(date: string): Date | null {
+  const time = /^\d{4}-\d{2}-\d{2}$/u.test(date) ? Date.parse(`${date}T00:00:00Z`) : Number.NaN;
+  return Number.isNaN(time) ? null : new Date(time);
+}

@@ -8,6 +8,7 @@ import { cyclesIn, importsIn, sourceFiles } from './imports.ts';
 const floors = [
   ['src/version.ts'],
   ['src/quantity/'],
+  ['src/measured/'],
   ['src/network/'],
   ['src/synthesis/'],
   ['src/parts/'],

@@ -51,8 +51,9 @@ export function halfPowerEdges(
 
   const edge = (step: 1 | -1): number | null => {
     for (let k = top; k + step >= 0 && k + step <= last; k += step) {
-      if (gain[k + step]! < half)
-        return zeroBetween((hz) => gainAt(hz) - half, frequencyHz[k]!, frequencyHz[k + step]!);
+      if (gain[k + step]! >= half) continue;
+      // The peak may be narrower than the grid: its own sample can lie below half of it.
+      return zeroBetween((hz) => gainAt(hz) - half, k === top ? peak.at : frequencyHz[k]!, frequencyHz[k + step]!);
     }
     return null;
   };

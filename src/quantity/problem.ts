@@ -18,12 +18,17 @@ export class InputError extends Error {
   }
 }
 
-const longest = 60;
-
-/** One line for page, command line and report: `load "abc": not an impedance; write it as 9.4-j61`. */
+/**
+ * One line for page, command line and report: `load "abc": not an impedance; write it as 9.4-j61`. Field and reason may
+ * quote what was read too.
+ */
 export function formatProblem({ field, read, why, would }: Problem): string {
+  const shown = oneLine(read, 60);
+  return `${oneLine(field, 60)}${shown === '' ? '' : ` "${shown}"`}: ${oneLine(why, 120)}; ${would}`;
+}
+
+function oneLine(text: string, longest: number): string {
   // eslint-disable-next-line no-control-regex -- control characters from a file must not reach a terminal
-  const oneLine = read.replace(/[\s\u0000-\u001f\u007f-\u009f]+/gu, ' ').trim();
-  const shown = oneLine.length > longest ? `${oneLine.slice(0, longest)}…` : oneLine;
-  return `${field}${shown === '' ? '' : ` "${shown}"`}: ${why}; ${would}`;
+  const line = text.replace(/[\s\u0000-\u001f\u007f-\u009f]+/gu, ' ').trim();
+  return line.length > longest ? `${line.slice(0, longest).toWellFormed()}…` : line;
 }

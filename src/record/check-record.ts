@@ -32,11 +32,13 @@ function problemOf(issue: v.BaseIssue<unknown>): Problem {
 function shown(value: unknown): string {
   if (typeof value === 'string') return value;
   if (value === undefined) return '';
+  // JSON's 1e400 is read as infinity, which is nothing to show.
+  if (typeof value === 'number') return Number.isFinite(value) ? String(value) : '';
   if (typeof value === 'object' && value !== null) {
     if ('low' in value && 'high' in value && Object.keys(value).length === 2) {
-      return `${String(value.low)}..${String(value.high)}`;
+      return `${shown(value.low)}..${shown(value.high)}`;
     }
     return Array.isArray(value) ? 'a list' : '';
   }
-  return String(value);
+  return JSON.stringify(value);
 }

@@ -1,6 +1,7 @@
 import { InputError } from '../quantity/problem.ts';
 import { checkRecord } from './check-record.ts';
 import type { DesignRecord } from './design-record.ts';
+import { repeatedName } from './repeated-name.ts';
 
 /** Largest record read, in characters: a hundred times what its fields can hold without being an attack. */
 const longest = 1_000_000;
@@ -8,7 +9,7 @@ const longest = 1_000_000;
 /**
  * Reads a design record from its JSON text.
  *
- * @throws InputError: too long, not JSON, or not a record
+ * @throws InputError: too long, not JSON, a field given twice, or not a record
  */
 export function readRecord(text: string): DesignRecord {
   if (text.length > longest) {
@@ -28,6 +29,15 @@ export function readRecord(text: string): DesignRecord {
       read: text,
       why: 'not JSON',
       would: 'give a design record as Ferrule saved it',
+    });
+  }
+  const twice = repeatedName(text);
+  if (twice !== null) {
+    throw new InputError({
+      field: twice,
+      read: '',
+      why: 'this field is given twice',
+      would: 'keep the one that is meant',
     });
   }
   return checkRecord(value);

@@ -43,16 +43,17 @@ const span = (what: string, low: number, high: number, words: string) =>
     v.check(({ low: a, high: b }) => a <= b, `${what} is upside down; give the lower end first`),
   );
 
-const text = (what: string, letters: number) =>
+/* eslint-disable no-control-regex -- these are what is looked for */
+const controls = /[\u0000-\u001f\u007f-\u009f\u2028\u2029]/u;
+const controlsButNewLine = /[\u0000-\u0009\u000b-\u001f\u007f-\u009f]/u;
+/* eslint-enable no-control-regex */
+
+const text = (what: string, letters: number, refused = controls) =>
   v.pipe(
     v.string(`${what} is not text; give it in quotes`),
     v.maxLength(letters, `${what} is too long; give at most ${String(letters)} letters`),
     // Control characters break a line of a form and can't be printed; a new line is the one that a reason may have.
-    v.check(
-      // eslint-disable-next-line no-control-regex -- these are what is looked for
-      (value) => !/[\u0000-\u0009\u000b-\u001f\u007f-\u009f]/u.test(value),
-      `${what} holds a control character; leave it out`,
-    ),
+    v.check((value) => !refused.test(value), `${what} holds a control character; leave it out`),
     v.check((value) => value.isWellFormed(), `${what} holds half a character; type it again`),
   );
 
@@ -116,7 +117,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
           v.maxValue(limits.returnLossDb, 'the return loss is out of range; give 0 to 100 dB, larger is better'),
         ),
       ),
-      blockDc: v.boolean('whether DC is to be blocked is not yes or no; give true or false'),
+      blockDc: v.boolean('whether DC is to be blocked is not yes or no; give yes or no, in a record true or false'),
       keepDc: v.picklist(
         ['none', 'source', 'load', 'both'],
         'the ends that carry DC are unknown; give none, source, load or both',
@@ -152,7 +153,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     ),
     selection: v.strictObject({
       option: v.nullable(text('the chosen network', limits.nameLetters)),
-      reason: text('the reason', limits.reasonLetters),
+      reason: text('the reason', limits.reasonLetters, controlsButNewLine),
     }),
     signOff: v.strictObject({
       prepared: signature('prepared'),

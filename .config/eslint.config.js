@@ -24,6 +24,8 @@ export default defineConfig(
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
       // `array[i]!` in a loop over the array's own length is the plain way to say it under noUncheckedIndexedAccess.
       '@typescript-eslint/no-non-null-assertion': 'off',
+      // ... and it stays where undefined would be taken too.
+      '@typescript-eslint/no-unnecessary-type-assertion': 'off',
       // An arrow that calls one procedure reads well without braces.
       '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
     },

@@ -12,7 +12,7 @@ export interface Size {
 }
 
 /** Size that both a page's column and a report's text width take without shrinking the lettering. */
-export const chartSize: Size = { width: 480, height: 170 };
+export const chartSize: Size = { width: 480, height: 160 };
 
 export const lettering = 8;
 

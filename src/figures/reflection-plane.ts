@@ -7,10 +7,10 @@ import { circle, label, line, n, path, rectangle, stroke } from './draw.ts';
 import type { Figure, Shape } from './figure.ts';
 
 const width = 480;
-const height = 190;
-const middle = 88;
-const wholeRadius = 80;
-const centreRadius = 60;
+const height = 172;
+const middle = 76;
+const wholeRadius = 72;
+const centreRadius = 56;
 /** A required circle larger than this is plain enough without its enlargement. */
 const largeEnough = 0.4;
 
@@ -36,7 +36,7 @@ export function reflectionPlane(response: Response, requirement: DesignRecord['r
     ...marks.flatMap(({ mark, re, im }) =>
       Math.hypot(re, im) > rim ? [] : [marker(mark, x + (radius * re) / rim, middle - (radius * im) / rim)],
     ),
-    label(x, middle + wholeRadius + 16, `|Γ| ≤ ${formatRim(rim)}`, lettering, 'middle', 'muted'),
+    label(x, middle + wholeRadius + 15, `|Γ| ≤ ${formatRim(rim)}`, lettering, 'middle', 'muted'),
   ];
   const shapes: Shape[] = [...plane(wholeRadius + 4, wholeRadius, 1)];
   let legendX = 2 * wholeRadius + 40;

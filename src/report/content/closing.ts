@@ -13,7 +13,7 @@ export function cautions({ cautions: list }: Dossier): readonly Block[] {
     {
       kind: 'list',
       entries: ordered.map(({ kind, text: words }, k) => ({
-        mark: `C${String(k + 1)}`,
+        mark: `9.${String(k + 1)}`,
         paragraph:
           kind === 'safety'
             ? { spans: [{ text: 'Safety. ', bold: true }, { text: sentence(words) }] }

@@ -31,7 +31,8 @@ export function response(dossier: Dossier): readonly Block[] {
     {
       kind: 'picture',
       figure: gainPlot(swept, requirement, option.halfPower),
-      caption: `Figure 3. Transducer gain; half-power band: ${option.halfPower.words}.`,
+      caption:
+        'Figure 3. Transducer gain; the dashed line lies 3.01 dB below the peak, with the half-power edges on it.',
       scale: 1.1,
     },
     {

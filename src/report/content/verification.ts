@@ -66,39 +66,35 @@ export function bandwidth({ options, chosen }: Dossier): readonly Block[] {
   const option = chosenOption(options, chosen);
   if (option === undefined) return [heading, text('Without a network there is no bandwidth.')];
   const { loadedQ, bandwidthFromQHz, halfPower, bandwidthNote } = option;
-  const edge = (hertz: number | null): string => (hertz === null ? 'none' : formatQuantity(hertz, 'Hz', 5));
   return [
     heading,
     {
       kind: 'table',
       columns: [
         { title: 'Figure', share: 40 },
-        { title: 'Bandwidth', share: 20, align: 'end' },
-        { title: 'Lower edge', share: 20, align: 'end' },
-        { title: 'Upper edge', share: 20, align: 'end' },
+        { title: 'Bandwidth', share: 16, align: 'end' },
+        { title: 'Edges', share: 44 },
       ],
       rows: [
         {
           cells: [
             [plain(loadedQ === null ? 'From loaded Q' : `From loaded Q: f₀/QL, QL = ${formatFixed(loadedQ, 3)}`)],
             [plain(bandwidthFromQHz === null ? 'none' : formatQuantity(bandwidthFromQHz, 'Hz'))],
-            [plain('–')],
-            [plain('–')],
+            [plain('not given by this rule')],
           ],
         },
         {
           cells: [
             [plain('From the sweep, 3.01 dB below the peak')],
             [plain(halfPower.bandwidthHz === null ? 'not bounded' : formatQuantity(halfPower.bandwidthHz, 'Hz'))],
-            [plain(edge(halfPower.lowHz))],
-            [plain(edge(halfPower.highHz))],
+            [plain(halfPower.words)],
           ],
         },
       ],
     },
     text(bandwidthNote),
     text(
-      `Peak: ${formatFixed(0 - attenuationDb(halfPower.peakGain), 3)} dB at ${formatQuantity(halfPower.peakHz, 'Hz', 5)}. Edges: ${halfPower.words}.`,
+      `Peak: ${formatFixed(0 - attenuationDb(halfPower.peakGain), 3)} dB at ${formatQuantity(halfPower.peakHz, 'Hz', 5)}.`,
     ),
   ];
 }

@@ -1,0 +1,48 @@
+import { readFileSync, writeFileSync } from 'node:fs';
+import { design } from '../design.ts';
+import { InputError } from '../quantity/problem.ts';
+import { report } from '../report/report.ts';
+import { fromHere, readArguments } from './read-arguments.ts';
+import { run } from './run.ts';
+
+function paperOf(name: string): 'a4' | 'letter' {
+  const paper = name.trim().toLowerCase();
+  if (paper === 'a4' || paper === 'letter') return paper;
+  throw problem('--paper', name, 'no such paper', 'give a4 or letter');
+}
+
+const font = (weight: 'regular' | 'bold'): Uint8Array =>
+  readFileSync(new URL(`../../public/fonts/ferrule-${weight}.ttf`, import.meta.url));
+
+/** @throws InputError when the file can't be written */
+function write(out: string, bytes: Uint8Array): void {
+  try {
+    writeFileSync(fromHere(out), bytes);
+  } catch (error) {
+    const code = (error as NodeJS.ErrnoException).code ?? 'unknown';
+    const reasons: Partial<Record<string, string>> = { ENOENT: 'there is no such folder', EISDIR: 'this is a folder' };
+    throw problem(
+      '--out',
+      out,
+      reasons[code] ?? `it can't be written (${code})`,
+      'give a file in a folder that can be written to',
+    );
+  }
+}
+
+const problem = (field: string, read: string, why: string, would: string): InputError =>
+  new InputError({ field, read, why, would });
+
+/** Two terminations, or a record, in; the design report as a PDF file at --out. */
+// Last in the file: it runs at once, and by then what it calls is defined.
+await run(async (args) => {
+  const { record, options } = readArguments(args, ['out', 'paper']);
+  const { out } = options;
+  if (out === undefined || out === '') {
+    throw problem('--out', '', 'no file is named to write the report to', 'give one, as in --out report.pdf');
+  }
+  const paper = paperOf(options.paper ?? 'a4');
+  const fonts = { regular: font('regular'), bold: font('bold') };
+  write(out, await report(design(record), { paper, fonts }));
+  return `Wrote ${out}\n`;
+});

@@ -1,4 +1,4 @@
-import { Complex } from 'complex.js';
+import type { Complex } from 'complex.js';
 
 /**
  * Solves A·x = b by Gaussian elimination with partial pivoting. A nodal matrix has a dozen rows at most; a matrix

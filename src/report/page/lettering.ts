@@ -14,7 +14,7 @@ export interface Lettering {
 /** Joiners, direction marks and the like: they draw nothing, and left out they change no letter. */
 const invisible = /[\u00ad\u034f\u061c\u200b-\u200f\u202a-\u202e\u2060-\u206f\ufe00-\ufe0f\ufeff]/gu;
 // eslint-disable-next-line no-control-regex -- a control character in a name must not reach the page
-const blank = /[^\S\u00a0]|[\u0000-\u001f\u007f-\u009f]/gu;
+const blank = /(?:[^\S\u00a0]|[\u0000-\u001f\u007f-\u009f])+/gu;
 /** A space that belongs to a quantity: before its unit, and around the sign of an impedance. */
 const beforeUnit = /(?<=\d) (?=(?:[TGMkmµnpfa]?(?:Hz|Ω|H|F|W|V|A)|dB|%)(?![\p{L}\d]))/gu;
 const aroundSign = /(?<=[\d∞]) ([−+]) (?=j\d)/gu;

@@ -99,12 +99,15 @@ export function fieldsOf(record: DesignRecord): Record<FieldName, string> {
   };
 }
 
-/** Engineering notation where it says the value exactly, the number itself where it doesn't. */
+/**
+ * Engineering notation where it says the value exactly, the number itself where it doesn't. Its unit stands with it, so
+ * that a span's lower end isn't read with the prefix of the upper one.
+ */
 function plain(value: number, unit: Unit): string {
   const written = formatRead(value, unit);
   const [mantissa = '', prefixed = ''] = written.replace('−', '-').split(' ');
   const exponent = exponents[prefixed.slice(0, prefixed.length - unit.length)];
-  return exponent !== undefined && Number(`${mantissa}e${String(exponent)}`) === value ? written : String(value);
+  return exponent !== undefined && Number(`${mantissa}e${String(exponent)}`) === value ? written : `${String(value)} ${unit}`;
 }
 
 const exponents: Readonly<Record<string, number>> = {

@@ -1,3 +1,4 @@
+// @ts-check
 /**
  * First step of every npm script that runs the project's own code: installs the packages when they lack, then hands
  * over to a TypeScript file. Plain JavaScript without imports of its own, because it starts on the Node that is on the

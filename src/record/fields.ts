@@ -107,7 +107,9 @@ function plain(value: number, unit: Unit): string {
   const written = formatRead(value, unit);
   const [mantissa = '', prefixed = ''] = written.replace('−', '-').split(' ');
   const exponent = exponents[prefixed.slice(0, prefixed.length - unit.length)];
-  return exponent !== undefined && Number(`${mantissa}e${String(exponent)}`) === value ? written : `${String(value)} ${unit}`;
+  return exponent !== undefined && Number(`${mantissa}e${String(exponent)}`) === value
+    ? written
+    : `${String(value)} ${unit}`;
 }
 
 const exponents: Readonly<Record<string, number>> = {

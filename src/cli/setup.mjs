@@ -80,9 +80,6 @@ if (!isInstalled()) install();
 if (process.versions.node.split('.')[0] === '24') {
   module.enableCompileCache(join(modules, '.cache', 'ferrule'));
   const program = resolve(root, file);
-  // npm moves to the project's folder; a file named on the command line is meant from where it was typed.
-  const typedIn = process.env['INIT_CWD'];
-  if (typedIn !== undefined && process.cwd() === root) process.chdir(typedIn);
   process.argv.splice(1, process.argv.length, program, ...args);
   await import(pathToFileURL(program).href);
 } else {

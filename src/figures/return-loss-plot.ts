@@ -7,6 +7,7 @@ import { n, path, rectangle, stroke } from './draw.ts';
 import type { Figure, Shape } from './figure.ts';
 import { designMark } from './design-mark.ts';
 import { hatch } from './hatch.ts';
+import { smoothReturnLoss } from './smooth-return-loss.ts';
 
 /** A match at one frequency has a return loss without end there; beyond this no one reads a difference. */
 const highest = 40;
@@ -55,7 +56,8 @@ export function returnLossPlot(
         : `from ${formatRead(band.low, 'Hz')} to ${formatRead(band.high, 'Hz')}.`);
   }
   shapes.push(...designMark(frame, requirement.frequencyHz));
-  const d = curve(frame, response.frequencyHz, response.returnLossDb);
+  const { hertz, decibels } = smoothReturnLoss(response);
+  const d = curve(frame, hertz, decibels);
   if (d !== '') shapes.push(path(d, { stroke: 'accent', width: stroke.heavy }));
   const worst = Math.min(...response.returnLossDb);
   const description =

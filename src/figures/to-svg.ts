@@ -6,8 +6,8 @@ const colours: Record<Tone, string> = {
   ink: 'var(--ink, #16191d)',
   muted: 'var(--muted, #565d66)',
   faint: 'var(--faint, #c9cdd2)',
-  accent: 'var(--accent, #0b4f6c)',
-  limit: 'var(--limit, #a3291f)',
+  accent: 'var(--accent, #0b5a6b)',
+  limit: 'var(--limit, #16191d)',
 };
 
 const escape = (text: string): string =>

@@ -33,6 +33,8 @@ export function references({ references: list }: Dossier): readonly Block[] {
         { title: 'Applied for', share: 42 },
       ],
       rows: list.map(({ title, appliedFor }) => ({ cells: [[plain(title)], [plain(appliedFor)]] })),
+      // A sheet with nothing but signatures on it could be put under any other report.
+      together: true,
     },
   ];
 }

@@ -113,7 +113,7 @@ function sectionsTable({ rows, words }: SectionTable): readonly Block[] {
         { title: 'Sections', share: 34, align: 'end' },
         { title: 'Parts', share: 22, align: 'end' },
         { title: 'Form', share: 38 },
-        { title: 'Shunt\u00a0arm at', share: 38 },
+        { title: 'Shunt arm\u00a0at', share: 38 },
         { title: 'Q of a\u00a0section', share: 34, align: 'end' },
         { title: 'Worst return\u00a0loss', share: 46, align: 'end' },
         { title: 'Holds', share: 24 },

@@ -67,6 +67,8 @@ export interface Table {
   readonly kind: 'table';
   readonly columns: readonly Column[];
   readonly rows: readonly Row[];
+  /** Stays whole, and with what follows. */
+  readonly together?: boolean;
   /** Least height of a row, pt: room for a signature. */
   readonly rowHeight?: number;
 }

@@ -35,7 +35,7 @@ export function setTable(table: Table, x: number, width: number, letters: Letter
       before: 0,
       height: full,
       items: [...items.map((item) => shift(item, pad)), ...(row.marked === true ? [bar(x, full)] : []), foot],
-      keep: index < last && (index === 0 || index === last - 1),
+      keep: table.together === true || (index < last && (index === 0 || index === last - 1)),
       header,
     };
   });

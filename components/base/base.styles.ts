@@ -44,7 +44,6 @@ export const base = css`
   p,
   li {
     max-width: var(--measure);
-    text-wrap: pretty;
   }
 
   a {

@@ -32,7 +32,6 @@ export const field = css`
     background: var(--tint);
     color: var(--ink);
     font: inherit;
-    font-variant-numeric: inherit;
   }
 
   select {

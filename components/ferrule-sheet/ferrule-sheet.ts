@@ -1,11 +1,13 @@
 import { LitElement, html, nothing, type PropertyValues, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import { guard } from 'lit/directives/guard.js';
 import type { Method } from '../../src/record/design-record.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
 import { readRecord } from '../../src/record/read-record.ts';
 import { base } from '../base/base.styles.ts';
 import type { FieldChange } from '../base/field-change.ts';
+import type { ContentsEntry } from '../contents-rule/contents-rule.ts';
 import '../contents-rule/contents-rule.ts';
 import '../evidence-part/evidence-part.ts';
 import '../given-part/given-part.ts';
@@ -38,11 +40,15 @@ export class FerruleSheet extends LitElement {
   @property({ type: Object }) demo: Fields = {};
 
   @state() private settled!: Settled;
+  /** What the parts after the options show: the same, one frame later, so that the options answer a keystroke at once. */
+  @state() private following!: Settled;
   @state() private said = '';
   @state() private opened = '';
   @state() private dragging = false;
   private addressTimer = 0;
   private voiceTimer = 0;
+  private frame = 0;
+  private entries: readonly ContentsEntry[] = [];
 
   override connectedCallback() {
     super.connectedCallback();
@@ -60,77 +66,89 @@ export class FerruleSheet extends LitElement {
     removeEventListener('drop', this.drop);
     clearTimeout(this.addressTimer);
     clearTimeout(this.voiceTimer);
+    cancelAnimationFrame(this.frame);
   }
 
-  protected override willUpdate(changed: PropertyValues<this>) {
+  protected override willUpdate(changed: PropertyValues) {
     if (changed.has('demo')) this.readHash();
+    if (changed.has('following')) {
+      this.entries = parts.map((part, index) => ({
+        number: index + 1,
+        name: part.name,
+        ...part.judge(this.following),
+      }));
+    }
+  }
+
+  protected override updated() {
+    if (this.following === this.settled) return;
+    cancelAnimationFrame(this.frame);
+    this.frame = requestAnimationFrame(() => setTimeout(() => (this.following = this.settled)));
   }
 
   override render() {
-    const { settled } = this;
-    const { dossier, fields } = settled;
-    const judged = parts.map((part, index) => ({ number: index + 1, name: part.name, ...part.judge(settled) }));
     return html`
       <div class=${this.dragging ? 'sheet dragging' : 'sheet'} @field-change=${this.change}>
         <given-part
           class="given"
           .method=${this.method}
-          .state=${settled}
-          .summary=${givenLine(settled)}
-          .realSource=${dossier?.record.source.x === 0}
+          .state=${this.settled}
+          .summary=${givenLine(this.settled)}
+          .realSource=${this.settled.dossier?.record.source.x === 0}
         ></given-part>
         <div class="document">
-          <title-block
-            .sheet=${this.name}
-            .identity=${{
-              title: fields.title ?? '',
-              number: fields.number ?? '',
-              revision: fields.revision ?? '',
-              date: fields.date ?? '',
-              ticket: fields.ticket ?? '',
-            }}
-            .outcome=${dossier === null ? 'Nothing is computed yet: correct the entries marked under Given.' : outcome(dossier)}
-            ?stale=${settled.stale && dossier !== null}
-          ></title-block>
-          ${parts.map((part, index) =>
-            part.name === 'Given'
-              ? nothing
-              : html`<sheet-part
-                  .number=${index + 1}
-                  .name=${part.name}
-                  .basis=${part.basis(this.method)}
-                  .verdict=${judged[index]!.verdict}
-                  .words=${judged[index]!.words}
-                  ?stale=${settled.stale && dossier !== null && part.name !== 'Record and report'}
-                  >${this.body(part)}</sheet-part
-                >`,
-          )}
+          ${guard([this.following, this.name], () => this.renderTitle())}
+          ${parts.map((part, index) => (part.name === 'Given' ? nothing : this.renderPart(part, index + 1)))}
         </div>
-        <contents-rule class="contents" .entries=${judged} @reveal-part=${this.reveal}></contents-rule>
+        <contents-rule class="contents" .entries=${this.entries} @reveal-part=${this.reveal}></contents-rule>
         <p class="unseen" role="status">${this.said}</p>
       </div>
     `;
   }
 
-  private body({ name }: Part): TemplateResult | typeof nothing {
-    const { settled } = this;
-    const { dossier } = settled;
+  private renderTitle(): TemplateResult {
+    const { fields, dossier, stale } = this.following;
+    const { title = '', number = '', revision = '', date = '', ticket = '' } = fields;
+    return html`<title-block
+      .sheet=${this.name}
+      .identity=${{ title, number, revision, date, ticket }}
+      .outcome=${dossier === null ? 'Nothing is computed yet: correct the entries marked under Given.' : outcome(dossier)}
+      ?stale=${stale && dossier !== null}
+    ></title-block>`;
+  }
+
+  private renderPart(part: Part, number: number): TemplateResult {
+    const shown = part.name === 'Options' ? this.settled : this.following;
+    const { verdict, words } = part.judge(shown);
+    return html`<sheet-part
+      .number=${number}
+      .name=${part.name}
+      .basis=${part.basis(this.method)}
+      .verdict=${verdict}
+      .words=${words}
+      ?stale=${shown.stale && shown.dossier !== null && part.name !== 'Record and report'}
+      >${this.renderBody(part, shown)}</sheet-part
+    >`;
+  }
+
+  private renderBody({ name }: Part, shown: Settled): TemplateResult | typeof nothing {
+    const { dossier } = shown;
     switch (name) {
       case 'Given':
         return nothing;
       case 'Options':
-        return html`<options-part .dossier=${dossier} .state=${settled} .notice=${settled.notice}></options-part>`;
+        return html`<options-part .dossier=${dossier} .state=${shown} .notice=${shown.notice}></options-part>`;
       case 'Network':
         return html`<network-part .dossier=${dossier}></network-part>`;
       case 'Response':
-        return html`<response-part .dossier=${dossier} .state=${settled}></response-part>`;
+        return html`<response-part .dossier=${dossier} .state=${shown}></response-part>`;
       case 'Evidence':
         return html`<evidence-part .dossier=${dossier}></evidence-part>`;
       case 'Record and report':
         return html`<record-part
           .dossier=${dossier}
-          .state=${settled}
-          .stale=${settled.stale}
+          .state=${shown}
+          .stale=${shown.stale}
           .opened=${this.opened}
           .link=${this.link}
           @open-file=${(event: CustomEvent<File>) => this.open(event.detail)}
@@ -142,6 +160,7 @@ export class FerruleSheet extends LitElement {
 
   private take(fields: Fields) {
     this.settled = settle({ ...fields, method: this.method }, null);
+    this.following = this.settled;
   }
 
   private change(event: CustomEvent<FieldChange>) {

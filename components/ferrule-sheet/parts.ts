@@ -19,6 +19,15 @@ export interface Part {
 }
 
 const chosenOf = ({ dossier }: Settled): Option | undefined => dossier?.options.find(({ id }) => id === dossier.chosen);
+const always =
+  (numbers: readonly string[]): Part['basis'] =>
+  () =>
+    numbers;
+const optionsBasis: Record<Method, readonly string[]> = {
+  'two-element': ['B3', 'B4', 'B5'],
+  'resistive-pair': ['B6', 'B5'],
+  cascade: ['B7', 'B5'],
+};
 const unassessed: Judged = { verdict: 'not assessed', words: 'not assessed' };
 const judged = (good: boolean): Judged => {
   const verdict = good ? 'meets' : 'falls short';
@@ -28,7 +37,7 @@ const judged = (good: boolean): Judged => {
 export const parts: readonly Part[] = [
   {
     name: 'Given',
-    basis: () => ['B1', 'B2'],
+    basis: always(['B1', 'B2']),
     judge: ({ problems }) => {
       const wrong = Object.keys(problems).length;
       if (wrong === 0) return { verdict: 'meets', words: 'can be read' };
@@ -40,8 +49,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Options',
-    basis: (method) =>
-      ({ 'two-element': ['B3', 'B4', 'B5'], 'resistive-pair': ['B6', 'B5'], cascade: ['B7', 'B5'] })[method],
+    basis: (method) => optionsBasis[method],
     judge: ({ dossier }) => {
       if (dossier === null || dossier.options.length === 0) return unassessed;
       const meeting = dossier.options.filter(({ meets }) => meets).length;
@@ -53,7 +61,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Network',
-    basis: () => ['B8', 'B9'],
+    basis: always(['B8', 'B9']),
     judge: (state) => {
       const chosen = chosenOf(state);
       return chosen === undefined ? unassessed : judged(chosen.meets);
@@ -61,7 +69,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Response',
-    basis: () => ['B10', 'B11', 'B12'],
+    basis: always(['B10', 'B11', 'B12']),
     judge: (state) => {
       const check = chosenOf(state)?.checks.find(({ subject }) => subject === 'return loss');
       return check === undefined ? unassessed : judged(check.verdict === 'meets');
@@ -69,12 +77,12 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Evidence',
-    basis: () => ['B14', 'B15', 'B16'],
+    basis: always(['B14', 'B15', 'B16']),
     judge: ({ dossier }) => (dossier?.evidence ? judged(dossier.evidence.pass) : unassessed),
   },
   {
     name: 'Record and report',
-    basis: () => ['B17'],
+    basis: always(['B17']),
     judge: ({ dossier }) => {
       const signOff = dossier?.record.signOff;
       const signed =

@@ -9,7 +9,10 @@ export const styles = css`
     display: grid;
     grid-template-columns: 1.75rem minmax(0, 1fr);
     max-width: none;
-    padding: 0.875rem 0;
+    /* Contained, so that one network's figures cost the others no layout; wider by what a focus ring needs. */
+    contain: content;
+    margin-inline: -0.25rem;
+    padding: 0.875rem 0.25rem;
     border-top: 1px solid var(--hairline);
   }
 

@@ -1,7 +1,7 @@
 import type { Dossier } from '../../src/dossier.ts';
 import type { DesignRecord } from '../../src/record/design-record.ts';
 
-export type Paper = 'A4' | 'Letter';
+export type Paper = 'a4' | 'letter';
 
 /** Name of a document's files, from its number and revision: "TG-041_A". */
 export function fileStem({ identity: { number, revision } }: DesignRecord): string {

@@ -31,7 +31,7 @@ export class RecordPart extends LitElement {
   /** Address that holds the whole sheet. */
   @property({ attribute: false }) link: () => string = () => '';
 
-  @state() private paper: Paper = 'A4';
+  @state() private paper: Paper = 'a4';
   @state() private said = '';
 
   override render() {
@@ -55,7 +55,7 @@ export class RecordPart extends LitElement {
       <div class="actions">
         <fieldset class="paper">
           <legend class="unseen">Paper</legend>
-          ${(['A4', 'Letter'] as const).map((paper) => this.sheetOf(paper))}
+          ${(['a4', 'letter'] as const).map((paper) => this.sheetOf(paper))}
         </fieldset>
         <button type="button" class="main" aria-disabled=${this.stale} @click=${this.report}>
           Download the report (PDF)
@@ -88,7 +88,7 @@ export class RecordPart extends LitElement {
   private sheetOf(paper: Paper): TemplateResult {
     return html`<label>
       <input type="radio" name="paper" .checked=${paper === this.paper} @change=${() => (this.paper = paper)} />
-      ${paper}
+      ${paper === 'a4' ? 'A4' : 'Letter'}
     </label>`;
   }
 

@@ -3,6 +3,9 @@ import { css } from 'lit';
 export const styles = css`
   :host {
     container-type: inline-size;
+    /* A part out of view costs no layout while someone types in another. */
+    content-visibility: auto;
+    contain-intrinsic-block-size: auto 50rem;
   }
 
   section {

@@ -1,18 +1,18 @@
-import { css, html, svg, type TemplateResult } from 'lit';
+import { css, html, type TemplateResult } from 'lit';
 
 export type Verdict = 'meets' | 'falls short' | 'not assessed';
 
 /** A tick, a cross, a dash: told apart by shape, and always with words. */
 const marks = {
-  meets: svg`<path d="M1.5 6.5 4.5 9.5 10.5 2.5" />`,
-  'falls short': svg`<path d="M2 2 10 10M10 2 2 10" />`,
-  'not assessed': svg`<path d="M2 6H10" />`,
+  meets: 'M1.5 6.5 4.5 9.5 10.5 2.5',
+  'falls short': 'M2 2 10 10M10 2 2 10',
+  'not assessed': 'M2 6H10',
 } as const;
 
 /** @param words  instead of the verdict's own name */
 export function verdictMark(verdict: Verdict, words: string = verdict): TemplateResult {
   return html`<span class="verdict" data-verdict=${verdict}
-    ><svg viewBox="0 0 12 12" aria-hidden="true">${marks[verdict]}</svg> <span>${words}</span></span
+    ><svg viewBox="0 0 12 12" aria-hidden="true"><path d=${marks[verdict]} /></svg> <span>${words}</span></span
   >`;
 }
 

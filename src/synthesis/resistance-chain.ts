@@ -13,9 +13,11 @@ export interface Chain {
   readonly low: number;
   /** Parallel resistance, 1/G, of the end with the shunt arm, Ω. */
   readonly high: number;
+  /** high/low − 1, from the difference of the two: their quotient would leave no digit of a small one. */
+  readonly excess: number;
 }
 
-/** Rounding in high/low below which the two resistances are the same: Q would be less than 3e-7. */
+/** Rounding in two resistances that differ below which they are the same: Q would be less than 3e-7. */
 const equalWithin = 1e-13;
 /** Part of its terms below which an arm's immittance is rounding and the arm is left out. */
 const zeroWithin = 1e-12;
@@ -26,21 +28,23 @@ const zeroWithin = 1e-12;
  */
 export function chainBetween(target: Complex, load: Complex, shuntAt: ShuntAt): Chain {
   const [lowEnd, highEnd] = shuntAt === 'load' ? [target, load] : [load, target];
-  return { shuntAt, low: lowEnd.re, high: parallelResistance(highEnd) };
+  const low = lowEnd.re;
+  const apart = highEnd.re - low;
+  // 1/G = R + X²/R. Of equal resistances X alone decides, and is exact however small.
+  const reactive = (highEnd.im / highEnd.re) * highEnd.im;
+  const excess = (apart + reactive) / low;
+  const same = apart !== 0 && Math.abs(excess) < equalWithin;
+  return { shuntAt, low, high: highEnd.re + reactive, excess: same ? 0 : excess };
 }
-
-const parallelResistance = (z: Complex): number => (z.im === 0 ? z.re : z.re + (z.im / z.re) * z.im);
 
 /**
  * Q of each of n equal-ratio sections: sqrt((high/low)^(1/n) − 1).
  *
  * @returns null when the chain doesn't rise, so that no such network exists
  */
-export function sectionQ({ low, high }: Chain, sections: number): number | null {
-  const excess = high / low - 1;
-  if (Math.abs(excess) < equalWithin) return 0;
+export function sectionQ({ excess }: Chain, sections: number): number | null {
   if (excess < 0) return null;
-  return Math.sqrt(sections === 1 ? excess : Math.expm1(Math.log(high / low) / sections));
+  return Math.sqrt(sections === 1 ? excess : Math.expm1(Math.log1p(excess) / sections));
 }
 
 /**

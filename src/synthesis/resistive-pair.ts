@@ -7,7 +7,8 @@ import { titleOf } from './title.ts';
 export function pairQ(sourceOhm: number, loadOhm: number): number {
   const high = Math.max(sourceOhm, loadOhm);
   const low = Math.min(sourceOhm, loadOhm);
-  return high === low ? 0 : Math.sqrt(high / low - 1);
+  // The difference of two close resistances is exact; their quotient isn't.
+  return Math.sqrt((high - low) / low);
 }
 
 /**

@@ -164,7 +164,10 @@ function qMethod({ arms, source, load, f0 }: Subject): { route: Route; check: Ev
   const byQ = resistivePair(source.r, load.r, f0).candidates.find(alike);
   const general = twoElement(new Complex(source.r, 0), new Complex(load.r, 0), f0).candidates.find(alike);
   if (byQ === undefined || general === undefined) return null;
-  const spread = Math.max(0, ...byQ.arms.map((arm, k) => Math.abs(arm.value / general.arms[k]!.value - 1)));
+  const spread = Math.max(
+    0,
+    ...arms.flatMap(({ value }, k) => [byQ, general].map((found) => Math.abs(found.arms[k]!.value / value - 1))),
+  );
   const values = (found: readonly Arm[]): string =>
     found.length === 0
       ? 'no part'
@@ -181,7 +184,7 @@ function qMethod({ arms, source, load, f0 }: Subject): { route: Route; check: Ev
       'element values by the Q method',
       spread,
       valueTolerance,
-      'largest relative difference from the general equations',
+      'largest relative difference of the network from the Q method and from the general equations',
     ),
   };
 }

@@ -38,7 +38,7 @@ const dossiers: Readonly<Record<string, Dossier>> = {
   })),
 };
 
-describe('report(dossier, options)', () => {
+describe('report(dossier, options)', { timeout: 30_000 }, () => {
   it.each(Object.entries(dossiers))(
     'of %s sets everything inside the margins and nothing over another',
     async (_, dossier) => {

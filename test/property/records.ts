@@ -1,0 +1,92 @@
+import fc from 'fast-check';
+import { methods, type DesignRecord, type Signature } from '../../src/record/design-record.ts';
+import type { Span } from '../../src/quantity/span.ts';
+import { aim, logUniform, termination } from './arbitraries.ts';
+
+/** A value with few digits, as typed, or with all that a double has. */
+const value = (low: number, high: number): fc.Arbitrary<number> =>
+  fc
+    .tuple(logUniform(low, high), fc.constantFrom(3, 6, 17))
+    .map(([exact, digits]) => Math.min(high, Math.max(low, Number(exact.toPrecision(digits)))));
+
+const span = (low: number, high: number): fc.Arbitrary<Span> =>
+  fc.tuple(value(low, high), value(low, high)).map(([a, b]) => ({ low: Math.min(a, b), high: Math.max(a, b) }));
+
+/** A span of frequencies that holds f0 and has a width. */
+const around = (f0: number): fc.Arbitrary<Span> =>
+  fc
+    .tuple(value(1.001, 500), value(1.001, 500))
+    .map(([below, above]) => ({ low: Math.max(1, f0 / below), high: Math.min(1e12, f0 * above) }));
+
+/** Printable text of any script; in a reason, lines too. */
+const text = (mostLetters: number, lines = false): fc.Arbitrary<string> =>
+  fc
+    .string({ unit: 'grapheme', maxLength: 12 })
+    .map((letters) => letters.replace(/[\p{Cc}\p{Zl}\p{Zp}]/gu, ''))
+    .map((letters) => (lines ? `${letters}\n${letters}` : letters))
+    .filter((letters) => letters.length <= mostLetters);
+
+const date = fc.integer({ min: 0, max: 40_000 }).map((day) => new Date(day * 86_400_000).toISOString().slice(0, 10));
+
+const signature: fc.Arbitrary<Signature> = fc.record({
+  name: text(120),
+  role: text(120),
+  date: fc.oneof(fc.constant(''), date),
+});
+
+const nullable = <T>(arbitrary: fc.Arbitrary<T>): fc.Arbitrary<T | null> => fc.option(arbitrary, { nil: null });
+
+/** Any record that the schema admits; a wide range of quantities, a Q of up to `mostQ`. */
+export const anyRecord = (mostQ = 1e3): fc.Arbitrary<DesignRecord> =>
+  value(1e3, 1e10).chain((frequencyHz) =>
+    fc
+      .record({
+        schema: fc.constant('ferrule-record/1' as const),
+        identity: fc.record({
+          title: text(120),
+          number: text(120),
+          revision: text(120),
+          date,
+          ticket: text(120),
+          owner: text(120),
+        }),
+        requirement: fc.record({
+          frequencyHz: fc.constant(frequencyHz),
+          bandHz: nullable(around(frequencyHz)),
+          returnLossDb: nullable(value(0.1, 60)),
+          blockDc: fc.boolean(),
+          keepDc: fc.constantFrom('none' as const, 'source' as const, 'load' as const, 'both' as const),
+          inductorH: span(1e-12, 1e3),
+          capacitorF: span(1e-15, 1),
+          powerW: nullable(value(1e-6, 1e3)),
+        }),
+        source: termination(0.1, 1e5, mostQ),
+        load: termination(0.1, 1e5, mostQ),
+        aim,
+        method: fc.constantFrom(...methods),
+        sections: fc.constantFrom(
+          'auto' as const,
+          1 as const,
+          2 as const,
+          3 as const,
+          4 as const,
+          5 as const,
+          6 as const,
+        ),
+        sweepHz: nullable(around(frequencyHz)),
+        selection: fc.record({ option: fc.constant<string | null>(null), reason: text(4000, true) }),
+        signOff: fc.record({ prepared: signature, checked: signature, approved: signature }),
+      })
+      .map(agreeing),
+  );
+
+/** The same with the rules between fields kept. */
+function agreeing(record: DesignRecord): DesignRecord {
+  const { requirement, method, sections } = record;
+  const judged = requirement.bandHz !== null && requirement.returnLossDb !== null;
+  return {
+    ...record,
+    ...(method === 'resistive-pair' ? { source: { ...record.source, x: 0 }, load: { ...record.load, x: 0 } } : {}),
+    sections: method === 'cascade' && sections === 'auto' && !judged ? 2 : sections,
+  };
+}

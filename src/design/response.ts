@@ -29,6 +29,8 @@ export function responseOf(record: DesignRecord, arms: readonly Arm[]): Response
     endsOver(record.source, record.load, f0, frequencyHz),
     record.aim,
   );
+  // Rounding can leave a perfect match a part in 1e16 above 1.
+  const lossDb = Array.from(gain, (value) => attenuationDb(Math.min(1, value)));
   const squared = Array.from(gammaRe, (re, k) => re * re + gammaIm[k]! * gammaIm[k]!);
   return {
     spanHz: span,
@@ -36,8 +38,8 @@ export function responseOf(record: DesignRecord, arms: readonly Arm[]): Response
     returnLossDb: squared.map(returnLossDb),
     vswr: squared.map((value) => vswr(Math.sqrt(value))),
     // A lossless network passes all that isn't reflected, so for the conjugate aim the gain itself says it best.
-    mismatchLossDb: record.aim === 'conjugate' ? Array.from(gain, attenuationDb) : squared.map(mismatchLossDb),
-    transducerGainDb: Array.from(gain, (value) => 0 - attenuationDb(Math.min(1, value))),
+    mismatchLossDb: record.aim === 'conjugate' ? lossDb : squared.map(mismatchLossDb),
+    transducerGainDb: lossDb.map((db) => 0 - db),
     gammaRe: Array.from(gammaRe),
     gammaIm: Array.from(gammaIm),
   };

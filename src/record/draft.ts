@@ -61,7 +61,8 @@ export function readDraft(given: Fields): Draft {
     role: fields[`${name}-role`],
     date: fields[`${name}-date`].trim(),
   });
-  const yesNo = (name: FieldName): boolean | string => ({ yes: true, no: false })[fields[name]] ?? fields[name];
+  const yesNo = (name: FieldName): boolean | string =>
+    ['yes', 'no'].includes(fields[name]) ? fields[name] === 'yes' : fields[name];
 
   const candidate = {
     schema: 'ferrule-record/1',

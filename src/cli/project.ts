@@ -15,7 +15,9 @@ export interface Ran {
   readonly output: string;
 }
 
-/** Runs a program in the project's folder, quietly. */
+const longestMinutes = 15;
+
+/** Runs a program in the project's folder, quietly; one that doesn't come to an end is stopped. */
 export function run(
   command: string,
   args: readonly string[],
@@ -26,12 +28,16 @@ export function run(
       cwd: root,
       env: { ...process.env, ...env },
       stdio: ['ignore', 'pipe', 'pipe'],
+      timeout: longestMinutes * 60_000,
     });
     const chunks: Buffer[] = [];
     child.stdout.on('data', (chunk: Buffer) => chunks.push(chunk));
     child.stderr.on('data', (chunk: Buffer) => chunks.push(chunk));
     child.on('error', (error) => done({ ok: false, output: error.message }));
-    child.on('close', (code) => done({ ok: code === 0, output: Buffer.concat(chunks).toString() }));
+    child.on('close', (code, signal) => {
+      const end = signal === null ? '' : `\nstopped by ${signal}, after ${longestMinutes} minutes or from outside`;
+      done({ ok: code === 0, output: `${Buffer.concat(chunks).toString()}${end}` });
+    });
   });
 }
 

@@ -65,6 +65,8 @@ interface TraceEvent {
   readonly tid: number;
   readonly ts: number;
   readonly dur?: number;
+  /** Of `dur`, what the thread itself spent; the rest it waited for a processor. */
+  readonly tdur?: number;
   readonly args: { readonly name?: string; readonly data?: { readonly type?: string } };
 }
 

@@ -53,5 +53,7 @@ export function cascade(
       }
     }
   }
-  return { candidates, absent };
+  // Where an end leaves nothing of an outer arm, and where no part is needed at all, the simpler network stands first.
+  const ordered = candidates.toSorted((a, b) => a.sections - b.sections || a.arms.length - b.arms.length);
+  return { candidates: ordered, absent };
 }

@@ -5,7 +5,8 @@ import { sameArms, titleOf } from './title.ts';
 
 /**
  * Every lossless network of at most two elements between two complex terminations at one frequency: at most four, at
- * least one. A double root counts once; a network that two forms share is listed under the first.
+ * least one, those of fewest parts first. A double root counts once; a network that two forms share is listed under the
+ * first.
  *
  * @param target impedance to be seen from the source, Ω
  * @param load   Ω
@@ -36,5 +37,5 @@ export function twoElement(target: Complex, load: Complex, frequencyHz: number):
       });
     }
   }
-  return { candidates, absent };
+  return { candidates: candidates.toSorted((a, b) => a.arms.length - b.arms.length), absent };
 }

@@ -18,7 +18,9 @@ export function checkRecord(value: unknown): DesignRecord {
 
 function problemOf(issue: v.BaseIssue<unknown>): Problem {
   const field = v.getDotPath(issue) ?? 'record';
-  const read = shown(issue.input);
+  // A rule between fields is told of one of them: what stands in that one is what was read.
+  const place = issue.path?.at(-1);
+  const read = shown(place === undefined ? issue.input : place.value);
   if (issue.expected === 'never') {
     return { field, read, why: 'this field is unknown', would: 'leave it out or check its spelling' };
   }

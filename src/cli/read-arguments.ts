@@ -55,9 +55,13 @@ function parse(
   const known = new Set<string>(names);
   // A value that begins with a minus sign, as in --load -5, is a value: joined so that it isn't taken for an option.
   const joined: string[] = [];
+  const given = new Set<string>();
   for (let k = 0; k < args.length; k += 1) {
     const here = args[k]!;
     const name = here.startsWith('--') ? here.slice(2) : '';
+    const option = name.split('=')[0]!;
+    if (given.has(option)) throw problem(`--${option}`, 'this option is given twice', 'keep the one that is meant');
+    if (known.has(option)) given.add(option);
     if (name === 'block-dc' && !['yes', 'no'].includes(args[k + 1] ?? '')) {
       joined.push('--block-dc=yes');
     } else if (known.has(name)) {
@@ -65,7 +69,7 @@ function parse(
       if (next === undefined || next.startsWith('--')) throw problem(here, 'no value follows', 'give one after it');
       joined.push(`${here}=${next}`);
       k += 1;
-    } else if (here.startsWith('-') && !known.has(name.split('=')[0]!)) {
+    } else if (here.startsWith('-') && !known.has(option)) {
       throw problem(
         here,
         'this option is unknown',

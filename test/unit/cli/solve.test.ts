@@ -1,0 +1,114 @@
+import { execFile } from 'node:child_process';
+import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { afterAll, describe, expect, it } from 'vitest';
+import { design } from '../../../src/design.ts';
+import { readRecord } from '../../../src/record/read-record.ts';
+import { demoText } from '../record/demos.ts';
+import { recordOf } from '../record-of.ts';
+
+const program = fileURLToPath(new URL('../../../src/cli/solve.ts', import.meta.url));
+const folder = mkdtempSync(join(tmpdir(), 'ferrule-solve-'));
+afterAll(() => rmSync(folder, { recursive: true }));
+
+interface Ended {
+  readonly code: number;
+  readonly out: string;
+  readonly err: string;
+}
+
+const solve = (...args: string[]): Promise<Ended> =>
+  new Promise((done) => {
+    const env = { ...process.env, INIT_CWD: folder };
+    execFile(process.execPath, [program, ...args], { env, maxBuffer: 1e8 }, (error, out, err) => {
+      done({ code: error === null ? 0 : Number(error.code), out, err });
+    });
+  });
+
+const named = (name: string, content: string | Uint8Array): string => {
+  writeFileSync(join(folder, name), content);
+  return name;
+};
+
+/** Everything as it comes out of JSON. */
+const asJson = (value: unknown): unknown => JSON.parse(JSON.stringify(value)) as unknown;
+
+describe.concurrent('solve', { timeout: 30_000 }, () => {
+  it('prints the dossier of a record file named from where one stands, and nothing else', async ({ expect }) => {
+    const text = demoText('power-stage');
+    const { code, out, err } = await solve(named('power-stage.json', text));
+    expect([code, err]).toEqual([0, '']);
+    expect(JSON.parse(out)).toEqual(asJson(design(readRecord(text))));
+  });
+
+  it('prints the dossier of options, in the form that is promised', async ({ expect }) => {
+    const { code, out, err } = await solve('--frequency', '151.25M', '--source', '50', '--load', '9.4-j61');
+    expect([code, err]).toEqual([0, '']);
+    const dossier = JSON.parse(out);
+    expect(dossier.schema).toBe('ferrule-dossier/1');
+    expect(dossier.options).toHaveLength(4);
+    for (const option of dossier.options) {
+      expect(option).toMatchObject({
+        id: expect.any(String) as unknown,
+        seen: { r: expect.closeTo(50, 8) as unknown, x: expect.closeTo(0, 8) as unknown },
+        transducerGain: expect.closeTo(1, 9) as unknown,
+        reflection: expect.closeTo(0, 9) as unknown,
+        loadedQ: expect.any(Number) as unknown,
+        worstReturnLossDb: null,
+        meets: true,
+      });
+      expect(option.arms[0]).toEqual({
+        arm: expect.stringMatching(/^(series|shunt)$/) as unknown,
+        part: expect.stringMatching(/^(inductor|capacitor)$/) as unknown,
+        value: expect.any(Number) as unknown,
+      });
+      expect(Object.keys(option.halfPower)).toEqual(expect.arrayContaining(['lowHz', 'highHz']));
+    }
+    const { record } = dossier;
+    expect(record).toEqual(
+      recordOf({ frequency: '151.25M', source: '50', load: '9.4-j61', date: record.identity.date }),
+    );
+  });
+
+  it('computes a load equal to the source: no part, no NaN', async ({ expect }) => {
+    const { code, out } = await solve('--frequency', '1M', '--source', '50', '--load', '50', '--band', '0.9M..1.1M');
+    expect(code).toBe(0);
+    expect(out).not.toMatch(/NaN|Infinity|undefined/);
+    expect(JSON.parse(out).options).toMatchObject([{ id: 'direct', arms: [], loadedQ: null, meets: true }]);
+  });
+
+  it('computes an extreme ratio, 1 mΩ to 1 MΩ', async ({ expect }) => {
+    const { code, out } = await solve('--frequency', '1M', '--source', '1m', '--load', '1M', '--return-loss', '10');
+    expect(code).toBe(0);
+    expect(out).not.toMatch(/NaN|Infinity|undefined/);
+    expect(JSON.parse(out).options).toHaveLength(2);
+  });
+
+  it.each<[string, () => string[], RegExp]>([
+    ['zero resistance', () => ['--frequency', '1M', '--source', '0', '--load', '5'], /^--source "0": .*above zero/],
+    [
+      'more than one fault',
+      () => ['--frequency', '1e400', '--source', '50', '--load', 'NaN'],
+      /^--frequency "1e400": .* \(and 1 more\)$/,
+    ],
+    [
+      'a choice that is not there',
+      () => ['--frequency', '1M', '--source', '50', '--load', '5', '--choice', 'pi'],
+      /^choice "pi": no such network.*choose one of shunt-source-plus, shunt-source-minus$/,
+    ],
+    ['a deeply nested file', () => [named('deep.json', '['.repeat(100_000))], /^record "\[+…": not JSON/],
+    [
+      'an unknown field with a line in its name',
+      () => [named('odd.json', demoText('tide-gauge').replace('{', '{"two\\nlines":1,'))],
+      /^two lines.*unknown/,
+    ],
+  ])('exits 2 with one line on standard error for %s', async (_, args, line) => {
+    const { code, out, err } = await solve(...args());
+    expect([code, out]).toEqual([2, '']);
+    expect(err.endsWith('\n')).toBe(true);
+    expect(err.slice(0, -1)).toMatch(line);
+    expect(err.slice(0, -1)).not.toMatch(/[\p{Cc}\p{Zl}\p{Zp}]/u);
+  });
+});

@@ -32,7 +32,8 @@ export const styles = css`
   }
 
   title-block[stale] {
-    opacity: 0.55;
+    --muted: var(--stale);
+    color: var(--stale);
   }
 
   sheet-part {

@@ -1,6 +1,6 @@
 import type { Dossier } from '../../src/dossier.ts';
-import { formatQuantity } from '../../src/quantity/format.ts';
-import { decibels, partWords, unbroken } from '../base/words.ts';
+import { frequencySpan, returnLossWords } from '../../src/design/words.ts';
+import { partWords, unbroken } from '../base/words.ts';
 import type { Settled } from './settle.ts';
 
 /** What the sheet came to, in two or three sentences. */
@@ -20,7 +20,7 @@ export function outcome(dossier: Dossier): string {
   const held =
     shown.worstReturnLossDb === null || band === null
       ? ''
-      : ` Its return loss is ${decibels(shown.worstReturnLossDb)} at worst from ${formatQuantity(band.low, 'Hz')} to ${formatQuantity(band.high, 'Hz')}.`;
+      : ` Its return loss is ${returnLossWords(shown.worstReturnLossDb)} at worst from ${frequencySpan(band)}.`;
   return unbroken(`${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`);
 }
 

@@ -126,6 +126,10 @@ export const styles = css`
     line-height: 1.4;
   }
 
+  radio-field {
+    margin-bottom: 1.5rem;
+  }
+
   .notice {
     margin-bottom: 1rem;
     padding-left: 0.75rem;

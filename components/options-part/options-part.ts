@@ -2,20 +2,28 @@ import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
 import { live } from 'lit/directives/live.js';
 import { repeat } from 'lit/directives/repeat.js';
-import type { Dossier, Option } from '../../src/dossier.ts';
+import { returnLossWords } from '../../src/design/words.ts';
+import type { Absent, Dossier, Option } from '../../src/dossier.ts';
 import '../area-field/area-field.ts';
 import { base } from '../base/base.styles.ts';
+import type { Choice } from '../base/choice.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import { count, decibels, partWords, unbroken } from '../base/words.ts';
+import '../radio-field/radio-field.ts';
 import '../sections-table/sections-table.ts';
 import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
 import { styles } from './options-part.styles.ts';
 import { thumbnail } from './thumbnail.ts';
 
+const numbers: readonly Choice[] = [
+  { value: 'auto', words: 'the smallest that holds the band' },
+  ...['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value })),
+];
+
 /**
  * Part 2: every network that exists with its verdict, and every form that doesn't with the reason.
- * @fires field-change  `choice` or `reason`
+ * @fires field-change  `sections`, `choice` or `reason`
  */
 @customElement('options-part')
 export class OptionsPart extends LitElement {
@@ -30,22 +38,37 @@ export class OptionsPart extends LitElement {
   @state() private open = false;
 
   override render() {
-    if (this.dossier === null) return nothing;
-    const { options, absent, sections, chosen } = this.dossier;
+    const { fields, problems } = this.state;
+    return html`
+      ${this.dossier?.sections ? html`<sections-table .table=${this.dossier.sections} .chosen=${this.dossier.chosen ?? ''}></sections-table>` : nothing}
+      ${
+        fields.method === 'cascade'
+          ? html`<radio-field
+              name="sections"
+              label="Number of sections"
+              inline
+              .choices=${numbers}
+              .value=${fields.sections ?? ''}
+              .problem=${problems.sections ?? ''}
+            ></radio-field>`
+          : nothing
+      }
+      ${this.notice === '' ? nothing : html`<p class="notice">${this.notice}</p>`}
+      ${this.dossier === null ? nothing : this.networks(this.dossier)}
+      <area-field
+        name="reason"
+        label="Why this one (printed in the report)"
+        .value=${fields.reason ?? ''}
+        .problem=${problems.reason ?? ''}
+      ></area-field>
+    `;
+  }
+
+  private networks({ options, absent, sections, chosen }: Dossier): TemplateResult {
     // Of many sections only the chosen number is spread out; the table above has them all.
     const number = sections === null ? undefined : options.find(({ id }) => id === chosen)?.sections;
     const others = options.filter((option) => number !== undefined && option.sections !== number);
     return html`
-      ${
-        sections === null
-          ? nothing
-          : html`<sections-table
-              .table=${sections}
-              .state=${this.state}
-              .chosen=${this.dossier.chosen ?? ''}
-            ></sections-table>`
-      }
-      ${this.notice === '' ? nothing : html`<p class="notice">${this.notice}</p>`}
       <fieldset>
         <legend class="unseen">Choose a network</legend>
         ${this.list(options.filter((option) => !others.includes(option)))}
@@ -61,26 +84,7 @@ export class OptionsPart extends LitElement {
               </details>`
         }
       </fieldset>
-      ${
-        absent.length === 0
-          ? nothing
-          : html`<h3>Forms without a network</h3>
-              <dl class="absent">
-                ${absent.map(
-                  ({ form, why }) =>
-                    html`<div>
-                      <dt>${form}</dt>
-                      <dd>${unbroken(why)}</dd>
-                    </div>`,
-                )}
-              </dl>`
-      }
-      <area-field
-        name="reason"
-        label="Why this one (printed in the report)"
-        .value=${this.state.fields.reason ?? ''}
-        .problem=${this.state.problems.reason ?? ''}
-      ></area-field>
+      ${absent.length === 0 ? nothing : absence(absent)}
     `;
   }
 
@@ -97,6 +101,7 @@ export class OptionsPart extends LitElement {
   private option(option: Option): TemplateResult {
     const { chosen, chosenBy, proposed } = this.dossier!;
     const input = `network-${option.id}`;
+    const pick = () => this.dispatchEvent(fieldChange('choice', option.id));
     return html`
       <li class=${option.id === chosen ? 'option chosen' : 'option'}>
         <input
@@ -105,10 +110,10 @@ export class OptionsPart extends LitElement {
           id=${input}
           aria-describedby="verdict-${option.id} reason-${option.id}"
           .checked=${live(option.id === chosen)}
-          @change=${() => this.dispatchEvent(fieldChange('choice', option.id))}
+          @change=${pick}
         />
         <div class="content">
-          <label class="drawing" for=${input} aria-hidden="true">${thumbnail(option.arms)}</label>
+          <div class="drawing" aria-hidden="true" @click=${pick}>${thumbnail(option.arms)}</div>
           <div class="text">
             <div class="head">
               <label class="title" for=${input}>${option.title}</label>
@@ -132,13 +137,27 @@ export class OptionsPart extends LitElement {
   }
 }
 
+/** Forms that have no network, each with the inequality that fails. */
+function absence(absent: readonly Absent[]): TemplateResult {
+  return html`<h3>Forms without a network</h3>
+    <dl class="absent">
+      ${absent.map(
+        ({ form, why }) =>
+          html`<div>
+            <dt>${form}</dt>
+            <dd>${unbroken(why)}</dd>
+          </div>`,
+      )}
+    </dl>`;
+}
+
 /** The figures by which networks are compared, the same for each and in the same columns. */
 function figures(option: Option): TemplateResult {
   const harmonics = option.harmonicDb.map(({ attenuationDb }) => decibels(attenuationDb)).join(', ');
   return html`<dl>
     <div>
       <dt>Worst return loss</dt>
-      <dd>${option.worstReturnLossDb === null ? 'no band' : decibels(option.worstReturnLossDb)}</dd>
+      <dd>${option.worstReturnLossDb === null ? 'no band' : returnLossWords(option.worstReturnLossDb)}</dd>
     </div>
     <div>
       <dt>Half-power band</dt>

@@ -1,6 +1,9 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import { frequencySpan } from '../../src/design/words.ts';
 import type { Dossier, Option, Response } from '../../src/dossier.ts';
+import type { Span } from '../../src/quantity/span.ts';
+import type { DesignRecord } from '../../src/record/design-record.ts';
 import { gainPlot } from '../../src/figures/gain-plot.ts';
 import { reflectionPlane } from '../../src/figures/reflection-plane.ts';
 import { returnLossPlot } from '../../src/figures/return-loss-plot.ts';
@@ -32,7 +35,7 @@ export class ResponsePart extends LitElement {
   @property({ attribute: false }) state: FieldState = emptyFieldState;
 
   @state() private size = large;
-  @state() private open: 'none' | 'plane' = 'none';
+  @state() private open = false;
   private readonly watch = new ResizeObserver(([entry]) => {
     if (entry !== undefined) this.size = entry.contentRect.width < roomy ? small : large;
   });
@@ -49,46 +52,56 @@ export class ResponsePart extends LitElement {
 
   override render() {
     const option = this.dossier?.options.find(({ id }) => id === this.dossier?.chosen);
-    const response = this.dossier?.response;
-    if (!this.dossier || !response || option === undefined) return html`<p>No network, no response.</p>`;
-    const { requirement } = this.dossier.record;
+    const { response = null, record } = this.dossier ?? {};
     return html`
       ${this.span(response)}
+      ${
+        response === null || option === undefined || record === undefined
+          ? html`<p>No network, no response.</p>`
+          : this.response(response, option, record.requirement)
+      }
+    `;
+  }
+
+  private response(response: Response, option: Option, requirement: DesignRecord['requirement']): TemplateResult {
+    return html`
       <figure>${drawing(returnLossPlot(response, requirement, this.size))}</figure>
       <figure>${drawing(gainPlot(response, requirement, option.halfPower, this.size))}</figure>
       ${halfPower(option)}
       <response-table .response=${response} .requirement=${requirement}></response-table>
       <details @toggle=${this.toggle}>
         <summary>Reflection coefficient in its plane</summary>
-        ${this.open === 'plane' ? html`<figure class="plane">${drawing(reflectionPlane(response, requirement))}</figure>` : nothing}
+        ${this.open ? html`<figure class="plane">${drawing(reflectionPlane(response, requirement))}</figure>` : nothing}
       </details>
     `;
   }
 
   private toggle(event: Event) {
-    this.open = (event.target as HTMLDetailsElement).open ? 'plane' : 'none';
+    this.open = (event.target as HTMLDetailsElement).open;
   }
 
-  private span({ spanHz }: Response): TemplateResult {
+  private span(response: Response | null): TemplateResult {
     const { fields, understood, problems } = this.state;
-    const say = (text: string) => () => this.dispatchEvent(fieldChange('sweep', text));
-    const shown = `${formatQuantity(spanHz.low, 'Hz')} to ${formatQuantity(spanHz.high, 'Hz')}`;
     return html`<div class="span">
       <text-field
         name="sweep"
         label="Span of the sweep"
-        .empty=${`Chosen from the band: ${shown}.`}
+        .empty=${response === null ? '' : `Chosen from the band: ${frequencySpan(response.spanHz)}.`}
         .value=${fields.sweep ?? ''}
         .understood=${understood.sweep ?? ''}
         .problem=${problems.sweep ?? ''}
       ></text-field>
-      <div class="steps">
-        <button type="button" @click=${say(spanText(wider(spanHz)))}>Wider</button>
-        <button type="button" @click=${say(spanText(narrower(spanHz, this.dossier!.record.requirement.frequencyHz)))}>
-          Narrower
-        </button>
-        <button type="button" ?hidden=${(fields.sweep ?? '') === ''} @click=${say('')}>As the band</button>
-      </div>
+      ${response === null ? nothing : this.steps(response.spanHz)}
+    </div>`;
+  }
+
+  private steps(spanHz: Span): TemplateResult {
+    const say = (text: string) => () => this.dispatchEvent(fieldChange('sweep', text));
+    const inner = narrower(spanHz, this.dossier!.record.requirement.frequencyHz);
+    return html`<div class="steps">
+      <button type="button" @click=${say(spanText(wider(spanHz)))}>Wider</button>
+      <button type="button" @click=${say(spanText(inner))}>Narrower</button>
+      <button type="button" ?hidden=${(this.state.fields.sweep ?? '') === ''} @click=${say('')}>As the band</button>
     </div>`;
   }
 }

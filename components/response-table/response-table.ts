@@ -1,5 +1,6 @@
 import { LitElement, css, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import { returnLossWords } from '../../src/design/words.ts';
 import type { Response } from '../../src/dossier.ts';
 import type { DesignRecord } from '../../src/record/design-record.ts';
 import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
@@ -107,7 +108,7 @@ export class ResponseTable extends LitElement {
     const { frequencyHz, returnLossDb, vswr, mismatchLossDb, transducerGainDb } = this.response;
     return [
       formatQuantity(frequencyHz[index]!, 'Hz', 6),
-      `return loss ${decibels(returnLossDb[index]!, 2)}`,
+      `return loss ${returnLossWords(returnLossDb[index]!)}`,
       `VSWR ${formatFixed(vswr[index]!, 3)}`,
       `mismatch loss ${decibels(mismatchLossDb[index]!, 3)}`,
       `transducer gain ${decibels(transducerGainDb[index]!, 3)}`,

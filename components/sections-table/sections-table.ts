@@ -1,23 +1,15 @@
 import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
+import { returnLossWords } from '../../src/design/words.ts';
 import type { SectionTable } from '../../src/dossier.ts';
 import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
-import type { Choice } from '../base/choice.ts';
-import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import { table } from '../base/table.styles.ts';
-import { decibels } from '../base/words.ts';
-import '../radio-field/radio-field.ts';
 import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
 
 const edge = (hertz: number | null): string => (hertz === null ? 'none' : formatQuantity(hertz, 'Hz'));
 
-const numbers: readonly Choice[] = [
-  { value: 'auto', words: 'the smallest that holds the band' },
-  ...['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value })),
-];
-
-/** What each number of sections comes to, and the choice of one. */
+/** What each number of sections comes to. */
 @customElement('sections-table')
 export class SectionsTable extends LitElement {
   static override styles = [
@@ -26,7 +18,7 @@ export class SectionsTable extends LitElement {
     verdictStyles,
     css`
       :host {
-        margin-bottom: 1.75rem;
+        margin-bottom: 0.75rem;
       }
 
       .words {
@@ -57,15 +49,10 @@ export class SectionsTable extends LitElement {
       .chosen th {
         font-weight: 700;
       }
-
-      radio-field {
-        margin-top: 0.75rem;
-      }
     `,
   ];
 
   @property({ attribute: false }) table: SectionTable | null = null;
-  @property({ attribute: false }) state: FieldState = emptyFieldState;
   /** Id of the network that the document is about. */
   @property() chosen = '';
 
@@ -101,7 +88,7 @@ export class SectionsTable extends LitElement {
                   <td class="number">${row.parts}</td>
                   <td class="number">${formatFixed(row.sectionQ, 3)}</td>
                   <td class="number">
-                    ${row.worstReturnLossDb === null ? 'no band' : decibels(row.worstReturnLossDb)}
+                    ${row.worstReturnLossDb === null ? 'no band' : returnLossWords(row.worstReturnLossDb)}
                   </td>
                   <td class="number">${edge(row.halfPower.lowHz)}</td>
                   <td class="number">${edge(row.halfPower.highHz)}</td>
@@ -114,14 +101,6 @@ export class SectionsTable extends LitElement {
           </tbody>
         </table>
       </div>
-      <radio-field
-        name="sections"
-        label="Number of sections"
-        inline
-        .choices=${numbers}
-        .value=${this.state.fields.sections ?? 'auto'}
-        .problem=${this.state.problems.sections ?? ''}
-      ></radio-field>
     `;
   }
 }

@@ -70,7 +70,11 @@ export const styles = css`
   }
 
   :host([stale]) ::slotted(*) {
-    opacity: 0.55;
+    --ink: var(--stale);
+    --muted: var(--stale);
+    --accent: var(--stale);
+    --limit: var(--stale);
+    color: var(--stale);
   }
 
   @container (max-width: 36rem) {

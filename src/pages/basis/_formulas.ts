@@ -188,7 +188,10 @@ export const formulas: readonly Formula[] = [
   {
     number: 'B15',
     title: 'Route of evidence: S-parameters',
-    lines: ['G_T = frac((1 − |Γ_S|^2) |S_21|^2 (1 − |Γ_L|^2); |(1 − S_11 Γ_S)(1 − S_22 Γ_L) − S_12 S_21 Γ_S Γ_L|^2)'],
+    lines: [
+      'G_T = frac((1 − |Γ_S|^2) |S_21|^2 (1 − |Γ_L|^2); |D|^2)',
+      'D = (1 − S_11 Γ_S)(1 − S_22 Γ_L) − S_12 S_21 Γ_S Γ_L',
+    ],
     text: ['Scattering matrices of the arms in one real reference resistance, cascaded.'],
     symbols: [
       ['S_11, S_12, S_21, S_22', 'scattering parameters of the network', '1', ''],

@@ -84,8 +84,10 @@ export const base = css`
     color: var(--paper);
   }
 
-  button[aria-disabled='true'] {
-    border-style: dashed;
+  button[aria-disabled='true'],
+  button.main[aria-disabled='true'] {
+    border: 1px dashed var(--field);
+    background: none;
     color: var(--muted);
     cursor: default;
   }

@@ -5,6 +5,7 @@ export const field = css`
   label,
   .label {
     display: block;
+    padding-bottom: 0.1875rem;
     font-size: var(--small);
     color: var(--muted);
   }

@@ -82,7 +82,7 @@ export class EvidencePart extends LitElement {
     if (this.dossier === null) return nothing;
     const { evidence, assumptions, references } = this.dossier;
     return html`
-      ${evidence === null ? html`<p>No network, nothing to prove.</p>` : routes(evidence)}
+      ${evidence === null ? nothing : routes(evidence)}
       <h3>Assumptions</h3>
       <ol class="assumptions">
         ${assumptions.map((text, index) => html`<li><span>A${index + 1}</span> ${unbroken(text)}</li>`)}

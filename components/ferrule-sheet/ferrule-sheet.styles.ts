@@ -31,11 +31,6 @@ export const styles = css`
     padding-left: 3.25rem;
   }
 
-  title-block[stale] {
-    --muted: var(--stale);
-    color: var(--stale);
-  }
-
   sheet-part {
     margin-bottom: 2.75rem;
     scroll-margin-top: 1rem;

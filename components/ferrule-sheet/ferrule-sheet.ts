@@ -20,7 +20,7 @@ import '../title-block/title-block.ts';
 import { pathOfMethod, readAddress, writeAddress } from './address.ts';
 import { styles } from './ferrule-sheet.styles.ts';
 import { givenLine, outcome } from './outcome.ts';
-import { parts, type Part } from './parts.ts';
+import { judge, parts, type Part } from './parts.ts';
 import { settle, type Settled } from './settle.ts';
 
 /** Pauses after the last keystroke, ms: before the address is written, and before the outcome is said aloud. */
@@ -75,7 +75,7 @@ export class FerruleSheet extends LitElement {
       this.entries = parts.map((part, index) => ({
         number: index + 1,
         name: part.name,
-        ...part.judge(this.following),
+        ...judge(part, this.following),
       }));
     }
   }
@@ -94,6 +94,8 @@ export class FerruleSheet extends LitElement {
           .method=${this.method}
           .state=${this.settled}
           .summary=${givenLine(this.settled)}
+          .judged=${judge(parts[0]!, this.settled)}
+          .basis=${parts[0]!.basis(this.method)}
           .realSource=${this.settled.dossier?.record.source.x === 0}
         ></given-part>
         <div class="document">
@@ -112,14 +114,14 @@ export class FerruleSheet extends LitElement {
     return html`<title-block
       .sheet=${this.name}
       .identity=${{ title, number, revision, date, ticket }}
-      .outcome=${dossier === null ? 'Nothing is computed yet: correct the entries marked under Given.' : outcome(dossier)}
+      .outcome=${dossier === null ? 'Nothing is computed yet: correct the entries that are marked.' : outcome(dossier)}
       ?stale=${stale && dossier !== null}
     ></title-block>`;
   }
 
   private renderPart(part: Part, number: number): TemplateResult {
     const shown = part.name === 'Options' ? this.settled : this.following;
-    const { verdict, words } = part.judge(shown);
+    const { verdict, words } = judge(part, shown);
     return html`<sheet-part
       .number=${number}
       .name=${part.name}

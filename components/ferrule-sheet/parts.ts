@@ -1,10 +1,11 @@
 import type { Option } from '../../src/dossier.ts';
 import type { Method } from '../../src/record/design-record.ts';
+import { fieldNames, pathOf, type FieldName } from '../../src/record/fields.ts';
 import { count } from '../base/words.ts';
 import type { Verdict } from '../verdict-mark/verdict-mark.ts';
 import type { Settled } from './settle.ts';
 
-interface Judged {
+export interface Judged {
   readonly verdict: Verdict;
   /** What the verdict is, in a word or two. */
   readonly words: string;
@@ -16,6 +17,8 @@ export interface Part {
   /** Numbers in the basis of calculation. */
   readonly basis: (method: Method) => readonly string[];
   readonly judge: (state: Settled) => Judged;
+  /** Its fields; the first part has all those that no other has. */
+  readonly fields: readonly FieldName[];
 }
 
 const chosenOf = ({ dossier }: Settled): Option | undefined => dossier?.options.find(({ id }) => id === dossier.chosen);
@@ -34,22 +37,34 @@ const judged = (good: boolean): Judged => {
   return { verdict, words: verdict };
 };
 
+const optionsFields: readonly FieldName[] = ['sections', 'choice', 'reason'];
+const responseFields: readonly FieldName[] = ['sweep'];
+const recordFields = fieldNames.filter((name) => /^(identity|signOff)\./u.test(pathOf[name]));
+const elsewhere = [...optionsFields, ...responseFields, ...recordFields];
+
+/** The verdict on a part: its own, unless a text in it can't be read or what it shows is of earlier texts. */
+export function judge(part: Part, state: Settled): Judged {
+  const wrong = part.fields.filter((name) => state.problems[name] !== undefined).length;
+  if (wrong > 0) {
+    return {
+      verdict: 'falls short',
+      words: wrong === 1 ? '1 entry to correct' : `${String(wrong)} entries to correct`,
+    };
+  }
+  return state.stale && part.name !== 'Given' ? unassessed : part.judge(state);
+}
+
 export const parts: readonly Part[] = [
   {
     name: 'Given',
     basis: always(['B1', 'B2']),
-    judge: ({ problems }) => {
-      const wrong = Object.keys(problems).length;
-      if (wrong === 0) return { verdict: 'meets', words: 'can be read' };
-      return {
-        verdict: 'falls short',
-        words: wrong === 1 ? '1 entry to correct' : `${String(wrong)} entries to correct`,
-      };
-    },
+    fields: fieldNames.filter((name) => !elsewhere.includes(name)),
+    judge: () => ({ verdict: 'meets', words: 'can be read' }),
   },
   {
     name: 'Options',
     basis: (method) => optionsBasis[method],
+    fields: optionsFields,
     judge: ({ dossier }) => {
       if (dossier === null || dossier.options.length === 0) return unassessed;
       const meeting = dossier.options.filter(({ meets }) => meets).length;
@@ -62,6 +77,7 @@ export const parts: readonly Part[] = [
   {
     name: 'Network',
     basis: always(['B8', 'B9']),
+    fields: [],
     judge: (state) => {
       const chosen = chosenOf(state);
       return chosen === undefined ? unassessed : judged(chosen.meets);
@@ -70,6 +86,7 @@ export const parts: readonly Part[] = [
   {
     name: 'Response',
     basis: always(['B10', 'B11', 'B12']),
+    fields: responseFields,
     judge: (state) => {
       const check = chosenOf(state)?.checks.find(({ subject }) => subject === 'return loss');
       return check === undefined ? unassessed : judged(check.verdict === 'meets');
@@ -78,11 +95,13 @@ export const parts: readonly Part[] = [
   {
     name: 'Evidence',
     basis: always(['B14', 'B15', 'B16']),
+    fields: [],
     judge: ({ dossier }) => (dossier?.evidence ? judged(dossier.evidence.pass) : unassessed),
   },
   {
     name: 'Record and report',
     basis: always(['B17']),
+    fields: recordFields,
     judge: ({ dossier }) => {
       const signOff = dossier?.record.signOff;
       const signed =

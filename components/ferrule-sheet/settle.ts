@@ -32,8 +32,13 @@ export function settle(fields: Fields, before: Settled | null): Settled {
     const lost = error.problems.some(({ field }) => field === 'choice');
     if (!lost) return { ...kept, problems: lines(error.problems) };
   }
-  const notice = 'The network chosen before doesn’t exist for these terminations; the proposal is shown.';
-  return { ...fresh, dossier: design({ ...record, selection: { ...record.selection, option: null } }), notice };
+  const dossier = design({ ...record, selection: { ...record.selection, option: null } });
+  const shown = dossier.chosenBy === 'proposal' ? 'the proposal' : 'the nearest';
+  return {
+    ...fresh,
+    dossier,
+    notice: `The network chosen before doesn’t exist for these terminations; ${shown} is shown.`,
+  };
 }
 
 const lines = (problems: readonly Problem[]): Partial<Record<FieldName, string>> =>

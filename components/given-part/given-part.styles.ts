@@ -13,6 +13,29 @@ export const styles = css`
     border-top: 1px solid var(--hairline);
   }
 
+  section {
+    position: relative;
+  }
+
+  .basis {
+    position: absolute;
+    top: 0.25rem;
+    right: 0;
+    font-size: var(--small);
+  }
+
+  .basis a {
+    margin-left: 0.5rem;
+    color: var(--muted);
+    text-decoration-color: var(--hairline);
+  }
+
+  .problem {
+    font-size: var(--small);
+    line-height: 1.35;
+    overflow-wrap: anywhere;
+  }
+
   .number {
     margin-right: 0.5rem;
     color: var(--accent);
@@ -72,6 +95,11 @@ export const styles = css`
       height: 1px;
       overflow: hidden;
       clip-path: inset(50%);
+    }
+
+    .basis {
+      position: static;
+      display: none;
     }
 
     .fold {

@@ -3,12 +3,13 @@ import { customElement, property, state } from 'lit/decorators.js';
 import type { FieldName } from '../../src/record/fields.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import { base } from '../base/base.styles.ts';
+import { basisLinks } from '../base/basis-links.ts';
 import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import '../choice-field/choice-field.ts';
 import '../radio-field/radio-field.ts';
 import '../text-field/text-field.ts';
-import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';
 import { aims, behaviours, blocks, keeps } from './choices.ts';
 import { styles } from './given-part.styles.ts';
 
@@ -24,14 +25,29 @@ export class GivenPart extends LitElement {
   @property({ type: Boolean }) realSource = false;
   /** What is given, in one line. */
   @property() summary = '';
+  /** Whether it can be read. */
+  @property({ attribute: false }) judged: { readonly verdict: Verdict; readonly words: string } = {
+    verdict: 'meets',
+    words: '',
+  };
+  /** Numbers in the basis of calculation that it rests on. */
+  @property({ attribute: false }) basis: readonly string[] = [];
 
   @state() private unfolded = false;
+  @state() private partsOpen = false;
+
+  /** What can't be read is never out of sight; what was opened stays open while it is corrected. */
+  protected override willUpdate() {
+    const { problems } = this.state;
+    if (problems.inductors ?? problems.capacitors ?? problems.power) this.partsOpen = true;
+  }
 
   override render() {
-    const wrong = Object.keys(this.state.problems).length;
+    const { verdict, words } = this.judged;
     return html`
       <section aria-labelledby="heading">
         <h2 id="heading"><span class="number" aria-hidden="true">${this.number}</span> Given</h2>
+        <p class="basis" aria-label="Basis of calculation">${basisLinks(this.basis)}</p>
         <button
           type="button"
           class="fold"
@@ -41,7 +57,7 @@ export class GivenPart extends LitElement {
         >
           <span class="summary">
             <span class="number">${this.number}</span> Given
-            <span class="line">${wrong === 0 ? this.summary : verdictMark('falls short', wrongWords(wrong))}</span>
+            <span class="line">${verdict === 'meets' ? this.summary : verdictMark(verdict, words)}</span>
           </span>
           <span class="act">${this.unfolded ? 'Close' : 'Change'}</span>
         </button>
@@ -59,6 +75,7 @@ export class GivenPart extends LitElement {
         ${pair ? nothing : this.behaviour('source-behaviour', 'Source')}
         ${this.text('load', pair ? 'Load resistance' : 'Load impedance', pair ? 'RL' : 'ZL')}
         ${pair ? nothing : this.behaviour('load-behaviour', 'Load')}
+        ${this.state.problems.method === undefined ? nothing : html`<p class="problem">${this.state.problems.method}</p>`}
         <radio-field
           name="aim"
           label="Aim: the network presents to the source"
@@ -73,7 +90,6 @@ export class GivenPart extends LitElement {
 
   private requirement(): TemplateResult {
     const { understood } = this.state;
-    const folded = ['inductors', 'capacitors', 'power'] as const;
     return html`
       <h3>Required</h3>
       <div class="group">
@@ -82,7 +98,10 @@ export class GivenPart extends LitElement {
         ${this.choice('block-dc', 'DC from source to load', blocks)}
         ${this.choice('keep-dc', 'DC fed to an end', keeps)}
       </div>
-      <details ?open=${folded.some((name) => this.state.problems[name] !== undefined)}>
+      <details
+        ?open=${this.partsOpen}
+        @toggle=${(event: Event) => (this.partsOpen = (event.target as HTMLDetailsElement).open)}
+      >
         <summary>
           Parts and power
           <span class="muted"
@@ -126,9 +145,6 @@ export class GivenPart extends LitElement {
     ></choice-field>`;
   }
 }
-
-const wrongWords = (count: number): string =>
-  count === 1 ? '1 entry to correct' : `${String(count)} entries to correct`;
 
 declare global {
   interface HTMLElementTagNameMap {

@@ -8,7 +8,7 @@ export const styles = css`
 
   .drawing svg {
     display: block;
-    zoom: 1.5;
+    zoom: 1.35;
     margin-inline: auto;
   }
 

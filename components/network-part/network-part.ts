@@ -19,8 +19,7 @@ export class NetworkPart extends LitElement {
 
   override render() {
     const option = this.dossier?.options.find(({ id }) => id === this.dossier?.chosen);
-    if (this.dossier === null) return nothing;
-    if (option === undefined) return html`<p>No network of these forms exists for these terminations.</p>`;
+    if (this.dossier === null || option === undefined) return nothing;
     const { source, load } = this.dossier.record;
     return html`
       <div class="drawing" tabindex="0" role="group" aria-label="Schematic">

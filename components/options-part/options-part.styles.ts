@@ -9,10 +9,10 @@ export const styles = css`
     display: grid;
     grid-template-columns: 1.75rem minmax(0, 1fr);
     max-width: none;
-    /* Contained, so that one network's figures cost the others no layout; wider by what a focus ring needs. */
+    /* One network's figures cost the others no layout; the focus ring at the edge keeps its room. */
     contain: content;
-    margin-inline: -0.25rem;
-    padding: 0.875rem 0.25rem;
+    overflow-clip-margin: 6px;
+    padding: 0.875rem 0;
     border-top: 1px solid var(--hairline);
   }
 
@@ -50,6 +50,10 @@ export const styles = css`
   .text {
     flex: 1 1 24rem;
     min-width: min(100%, 16rem);
+  }
+
+  .long .text {
+    flex-basis: 100%;
   }
 
   .head {
@@ -101,19 +105,14 @@ export const styles = css`
     line-height: 0;
   }
 
-  dl .wide {
-    grid-column: 1 / -1;
+  .form {
+    max-width: none;
+    margin-top: 0.375rem;
+    color: var(--muted);
+    font-size: var(--small);
   }
 
-  .wide dt,
-  .wide dd {
-    display: inline;
-  }
-
-  .wide dd {
-    margin-left: 0.5em;
-  }
-
+  .form::first-letter,
   .absent dt::first-letter,
   .reason::first-letter {
     text-transform: uppercase;
@@ -121,7 +120,7 @@ export const styles = css`
 
   .reason {
     max-width: 72ch;
-    margin-top: 0.5rem;
+    margin-top: 0.25rem;
     font-size: var(--small);
     line-height: 1.4;
   }

@@ -16,6 +16,9 @@ import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
 import { styles } from './options-part.styles.ts';
 import { thumbnail } from './thumbnail.ts';
 
+/** Above so many parts a drawing stands over the words, not beside them. */
+const spread = 4;
+
 const numbers: readonly Choice[] = [
   { value: 'auto', words: 'the smallest that holds the band' },
   ...['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value })),
@@ -112,7 +115,7 @@ export class OptionsPart extends LitElement {
           .checked=${live(option.id === chosen)}
           @change=${pick}
         />
-        <div class="content">
+        <div class=${option.arms.length > spread ? 'content long' : 'content'}>
           <div class="drawing" aria-hidden="true" @click=${pick}>${thumbnail(option.arms)}</div>
           <div class="text">
             <div class="head">
@@ -155,27 +158,20 @@ function absence(absent: readonly Absent[]): TemplateResult {
 function figures(option: Option): TemplateResult {
   const harmonics = option.harmonicDb.map(({ attenuationDb }) => decibels(attenuationDb)).join(', ');
   return html`<dl>
-    <div>
-      <dt>Worst return loss</dt>
-      <dd>${option.worstReturnLossDb === null ? 'no band' : returnLossWords(option.worstReturnLossDb)}</dd>
-    </div>
-    <div>
-      <dt>Half-power band</dt>
-      <dd>${option.halfPower.words}</dd>
-    </div>
-    <div>
-      <dt>Attenuation 2<i>f</i><sub>0</sub>, 3<i>f</i><sub>0</sub></dt>
-      <dd>${harmonics}</dd>
-    </div>
-    <div>
-      <dt>Form</dt>
-      <dd>${option.form}, ${count(option.arms.length, 'part')}</dd>
-    </div>
-    <div class="wide">
-      <dt>DC path</dt>
-      <dd>${option.dc.words}</dd>
-    </div>
-  </dl>`;
+      <div>
+        <dt>Worst return loss</dt>
+        <dd>${option.worstReturnLossDb === null ? 'no band' : returnLossWords(option.worstReturnLossDb)}</dd>
+      </div>
+      <div>
+        <dt>Half-power band</dt>
+        <dd>${option.halfPower.words}</dd>
+      </div>
+      <div>
+        <dt>Attenuation 2<i>f</i><sub>0</sub>, 3<i>f</i><sub>0</sub></dt>
+        <dd>${harmonics}</dd>
+      </div>
+    </dl>
+    <p class="form">${option.form}, ${count(option.arms.length, 'part')}. DC: ${option.dc.words}.</p>`;
 }
 
 declare global {

@@ -57,7 +57,7 @@ export class ResponsePart extends LitElement {
       ${this.span(response)}
       ${
         response === null || option === undefined || record === undefined
-          ? html`<p>No network, no response.</p>`
+          ? nothing
           : this.response(response, option, record.requirement)
       }
     `;

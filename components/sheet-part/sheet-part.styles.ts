@@ -6,6 +6,8 @@ export const styles = css`
     /* A part out of view costs no layout while someone types in another. */
     content-visibility: auto;
     contain-intrinsic-block-size: auto 50rem;
+    /* Room for focus rings at the edge. */
+    overflow-clip-margin: 6px;
   }
 
   section {
@@ -26,6 +28,7 @@ export const styles = css`
   .basis {
     display: flex;
     flex-direction: column;
+    align-items: flex-start;
     margin-top: 0.375rem;
     font-size: var(--small);
   }

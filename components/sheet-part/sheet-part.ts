@@ -1,6 +1,7 @@
 import { LitElement, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { base } from '../base/base.styles.ts';
+import { basisLinks } from '../base/basis-links.ts';
 import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';
 import { styles } from './sheet-part.styles.ts';
 
@@ -29,9 +30,7 @@ export class SheetPart extends LitElement {
           ${
             this.basis.length === 0
               ? nothing
-              : html`<p class="basis" aria-label="Basis of calculation">
-                  ${this.basis.map((item) => html`<a href="${import.meta.env.BASE_URL}basis/#${item}">${item}</a> `)}
-                </p>`
+              : html`<p class="basis" aria-label="Basis of calculation">${basisLinks(this.basis)}</p>`
           }
         </div>
         <div class="body">

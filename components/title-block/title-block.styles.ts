@@ -36,6 +36,16 @@ export const styles = css`
     overflow-wrap: anywhere;
   }
 
+  .stale {
+    margin-top: 1rem;
+    font-weight: 700;
+  }
+
+  .stale + .outcome {
+    margin-top: 0;
+    color: var(--stale);
+  }
+
   .outcome {
     margin-top: 1rem;
     font-size: 1.0625rem;

@@ -19,6 +19,8 @@ export class TitleBlock extends LitElement {
     readonly ticket: string;
   } = { title: '', number: '', revision: '', date: '', ticket: '' };
   @property() outcome = '';
+  /** The outcome is of an earlier entry: the one typed now can't be read. */
+  @property({ type: Boolean, reflect: true }) stale = false;
 
   override render() {
     const { title, number, revision, date, ticket } = this.identity;
@@ -42,7 +44,8 @@ export class TitleBlock extends LitElement {
           )}
         </dl>
       </header>
-      ${this.outcome === '' ? nothing : html`<p class="outcome">${this.outcome}</p>`}
+      ${this.stale ? html`<p class="stale">Of the last entry that could be read.</p>` : nothing}
+      <p class="outcome">${this.outcome}</p>
     `;
   }
 }

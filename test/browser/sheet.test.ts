@@ -141,7 +141,7 @@ describe('choosing a network', () => {
     await outcome(page, /Chosen/);
     await page.getByLabel('Load resistance').fill('5000');
     await page
-      .getByText('The network chosen before doesn’t exist for these terminations; the proposal is shown.')
+      .getByText('The network chosen before doesn’t exist for these terminations; the nearest is shown.')
       .waitFor();
     await page.getByLabel('Load resistance').fill('50');
     await outcome(page, /Chosen: shunt L, series C/);

@@ -1,77 +1,121 @@
-import { synthesise } from './design/method.ts';
-import { assess } from './design/option.ts';
+import type { Dossier, Option } from './dossier.ts';
 import { assumptionsOf } from './design/assumptions.ts';
-import { bandSweeper } from './design/band-figures.ts';
 import { cautionsOf } from './design/cautions.ts';
+import { ceilingOf } from './design/ceiling.ts';
+import { fittedNetworks, type FitControl, type FitStep } from './design/fitted.ts';
+import { closedForms, openQ } from './design/method.ts';
+import { minimumWords } from './design/minimum.ts';
+import { assess, assessor } from './design/option.ts';
+import { checkReach, reachOf } from './design/reach.ts';
 import { referencesOf } from './design/references.ts';
 import { responseOf } from './design/response.ts';
 import { sectionTable } from './design/section-table.ts';
-import type { Dossier, Option } from './dossier.ts';
 import { evidence } from './evidence/evidence.ts';
 import { terminationAt } from './network/termination-at.ts';
 import { InputError } from './quantity/problem.ts';
 import { digestOf } from './record/canonical.ts';
 import type { DesignRecord } from './record/design-record.ts';
+import { leastQ } from './synthesis/pi-tee.ts';
 import { targetOf } from './synthesis/target.ts';
 import { version } from './version.ts';
 
 /**
  * The one pipeline, used by page, worker and command line alike: a checked record in, everything computed from it out.
  *
- * @throws InputError when the record's selection names a network that doesn't exist for its terminations
+ * @throws InputError when a termination's data don't reach, or the record's selection names a network that isn't there
  */
 export function design(record: DesignRecord): Dossier {
+  const steps = designSteps(record, { stopped: false });
+  for (;;) {
+    const step = steps.next();
+    if (step.done === true) return step.value;
+  }
+}
+
+/** Whether a record takes seconds: such a one belongs in a worker. */
+export const takesLong = ({ method }: DesignRecord): boolean => method === 'fitted' || method === 'all';
+
+/** The pipeline in pieces, for a caller that shows progress or stops a search: what it has then is kept. */
+export function* designSteps(record: DesignRecord, control: FitControl): Generator<FitStep, Dossier> {
   const f0 = record.requirement.frequencyHz;
-  const load = terminationAt(record.load, f0, f0);
+  const reach = reachOf(record);
+  checkReach(record, reach);
+  const load = terminationAt(record.loads[0]!.termination, f0, f0);
   const target = targetOf(terminationAt(record.source, f0, f0), record.aim);
-  const { candidates, absent, cascades } = synthesise(record, target, load);
-  const figuresOf = bandSweeper(record);
-  const assessed = candidates.map((candidate) => assess(record, load, candidate, figuresOf));
-  const { sections } = record;
-  const options =
-    cascades === null || sections === 'auto'
-      ? assessed
-      : assessed.filter((option) => option.sections === sections || option.sections === 0);
+  const { candidates, absent } = closedForms(record, target, load);
+  const fitted = takesLong(record) ? yield* fittedNetworks(record, candidates, control) : [];
+  const { ceiling, noCeiling } = ceilingOf(record);
+  const judge = assessor(record, reach, ceiling);
+  const found = [...candidates, ...fitted];
+  const assessed = found.map((candidate) => assess(judge, candidate));
+  const options = listed(record, assessed);
   const proposed = options.find(({ meets }) => meets);
   const picked = pickedBy(record, options);
   const chosen = picked ?? proposed ?? nearest(options);
   const band = record.requirement.bandHz;
-  const subject = { source: record.source, load: record.load, f0 };
+  const states =
+    chosen === undefined
+      ? []
+      : record.loads.toSorted((a, b) => Number(b.name === chosen.worstState) - Number(a.name === chosen.worstState));
+  const checked =
+    chosen === undefined
+      ? null
+      : evidence(
+          states.map(({ termination }) => ({ arms: chosen.arms, source: record.source, load: termination, f0 })),
+          [...new Set(band === null ? [f0] : [f0, band.low, band.high])],
+          chosen.sections <= 1 && chosen.method !== 'fitted' && chosen.method !== 'equal-ripple',
+        );
+  const q =
+    record.method === 'pi' || record.method === 'tee'
+      ? openQ(leastQ(record.method, target, load))
+      : record.method === 'all'
+        ? openQ(leastQ('pi', target, load))
+        : null;
   return {
     schema: 'ferrule-dossier/1',
     version,
     record,
     digest: digestOf(record),
-    assumptions: assumptionsOf(record),
+    assumptions: assumptionsOf(record, q),
+    ceiling,
+    noCeiling,
     options,
     absent: absent.map(({ form, why }) => ({ form, why })),
-    sections: cascades === null ? null : sectionTable(record, cascades, assessed),
+    minimum: minimumWords(record, options),
+    sections: record.method === 'cascade' || record.method === 'equal-ripple' ? sectionTable(record, found, assessed) : null,
     proposed: proposed?.id ?? null,
     chosen: chosen?.id ?? null,
     chosenBy: picked !== undefined ? 'engineer' : proposed !== undefined ? 'proposal' : 'nearest',
-    response: chosen === undefined ? null : responseOf(record, chosen.arms),
-    evidence:
-      chosen === undefined
-        ? null
-        : evidence(
-            { ...subject, arms: chosen.arms },
-            [...new Set(band === null ? [f0] : [f0, band.low, band.high])],
-            chosen.sections <= 1,
-          ),
+    responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen.arms, reach)),
+    evidence: checked,
     cautions: cautionsOf(record, chosen),
-    references: referencesOf(record),
+    references: referencesOf(record, {
+      ceiling: ceiling !== null,
+      pairChecked: checked?.routes.some(({ name }) => name === 'Q method') ?? false,
+    }),
   };
+}
+
+/** The networks that the list shows, in its order: of all methods together, those of fewest parts come first. */
+function listed({ method, sections }: DesignRecord, assessed: readonly Option[]): readonly Option[] {
+  if (method === 'all') {
+    const byReturnLoss = (a: Option, b: Option): number => (b.worstReturnLossDb ?? 0) - (a.worstReturnLossDb ?? 0);
+    return assessed.toSorted((a, b) => a.arms.length - b.arms.length || byReturnLoss(a, b));
+  }
+  if (sections === 'auto' || (method !== 'cascade' && method !== 'equal-ripple')) return assessed;
+  return assessed.filter((option) => option.sections === sections || option.sections === 0);
 }
 
 function pickedBy({ selection }: DesignRecord, options: readonly Option[]): Option | undefined {
   if (selection.option === null) return undefined;
   const picked = options.find(({ id }) => id === selection.option);
   if (picked !== undefined) return picked;
+  const some = options.slice(0, 6).map(({ id }) => id);
   throw new InputError({
     field: 'choice',
     read: selection.option,
     why: 'no such network for these terminations',
-    would: `choose one of ${options.map(({ id }) => id).join(', ')}`,
+    would: some.length === 0 ? 'leave the choice open' : `choose one of ${some.join(', ')}${options.length > 6 ? ', …' : ''}`,
   });
 }
 

@@ -1,7 +1,7 @@
 import type { Evidence } from './evidence/evidence.ts';
 import type { Arm } from './network/arm.ts';
 import type { Span } from './quantity/span.ts';
-import type { DesignRecord } from './record/design-record.ts';
+import type { DesignRecord, Method } from './record/design-record.ts';
 
 export type { Evidence, EvidenceCheck, Route } from './evidence/evidence.ts';
 
@@ -18,11 +18,16 @@ export interface Dossier {
   readonly digest: string;
   /** Numbered A1... in order. */
   readonly assumptions: readonly string[];
+  readonly ceiling: Ceiling | null;
+  /** Why there is no ceiling; '' when there is one. */
+  readonly noCeiling: string;
   /** Every network that exists, in the order in which they are considered. */
   readonly options: readonly Option[];
   /** Forms without a network, with the inequality that fails. */
   readonly absent: readonly Absent[];
-  /** Cascade only. */
+  /** The least that holds the requirement, or by how much all fall short, in a sentence. */
+  readonly minimum: string;
+  /** Cascade and equal ripple. */
   readonly sections: SectionTable | null;
   /** Id of the first option that meets everything; null when none does. */
   readonly proposed: string | null;
@@ -30,8 +35,8 @@ export interface Dossier {
   readonly chosen: string | null;
   /** Who chose: the engineer, the proposal, or (none meets everything) the one that comes nearest. */
   readonly chosenBy: 'engineer' | 'proposal' | 'nearest';
-  /** The chosen option's sweep over the span shown. */
-  readonly response: Response | null;
+  /** The chosen option's sweep over the span shown, one a load state, the governing one first. */
+  readonly responses: readonly Response[];
   readonly evidence: Evidence | null;
   /** Of the chosen network and of the work; safety included. */
   readonly cautions: readonly Caution[];
@@ -47,9 +52,15 @@ export interface Option {
   readonly arms: readonly Arm[];
   /** Reference designators in the order of `arms`: L1, C1, ... */
   readonly designators: readonly string[];
-  /** Number of cascaded sections the network stands for; 0 when no part is needed. */
+  /** Which method found it. */
+  readonly method: Exclude<Method, 'all'>;
+  /** Number of cascaded sections the network stands for; 0 when no part is needed, or where sections have no meaning. */
   readonly sections: number;
   readonly form: 'low-pass' | 'high-pass' | 'band-pass' | 'all-pass';
+  /** Figures into every load state. Those of the option itself are of the state that governs: the worst one. */
+  readonly states: readonly StateFigures[];
+  /** Name of the state that governs; '' where there is only one without a name. */
+  readonly worstState: string;
   /** Impedance seen from the source at the design frequency, Ω. */
   readonly seen: { readonly r: number; readonly x: number };
   /** At the design frequency, 0 to 1. */
@@ -68,7 +79,11 @@ export interface Option {
   /** How the two half-power figures compare, in words. */
   readonly bandwidthNote: string;
   /** Transducer gain at 2f0 and 3f0 below that at f0, dB (negative: above; at most 200). */
-  readonly harmonicDb: readonly { readonly order: 2 | 3; readonly attenuationDb: number }[];
+  readonly harmonicDb: readonly Harmonic[];
+  /** Power lost in the parts at the design frequency with the stated Q, dB. */
+  readonly lossDb: number;
+  /** How far the worst return loss stays below the ceiling, dB; null without a ceiling. */
+  readonly ceilingGapDb: number | null;
   readonly dc: {
     /** A series capacitor stands between source and load. */
     readonly blocked: boolean;
@@ -84,6 +99,50 @@ export interface Option {
   readonly reasons: readonly string[];
   /** Rules of thumb that apply, with the reason. They never hide an option. */
   readonly cautions: readonly string[];
+}
+
+/** Transducer gain at a harmonic below that at f0, dB; null: outside the terminations' data. */
+export interface Harmonic {
+  readonly order: 2 | 3;
+  readonly attenuationDb: number | null;
+}
+
+/** One network into one load state; units and meaning as in `Option`. */
+export interface StateFigures {
+  readonly name: string;
+  readonly seen: { readonly r: number; readonly x: number };
+  readonly transducerGain: number;
+  readonly reflection: number;
+  readonly worstReturnLossDb: number | null;
+  readonly worstAtHz: number | null;
+  readonly halfPower: HalfPower;
+  readonly harmonicDb: readonly Harmonic[];
+}
+
+/**
+ * What no lossless network can beat over the band (Bode, Fano). Null where no end has reactance, or no band is given,
+ * or the aim isn't a matter of power.
+ */
+export interface Ceiling {
+  /** |Γ| with any number of sections. */
+  readonly bestReflection: number;
+  /** |Γ| with 1 to 6 resonators, the end's own counted. */
+  readonly perResonators: readonly number[];
+  readonly governs: 'load' | 'source';
+  /** Load state that governs; '' where there is only one without a name. */
+  readonly state: string;
+  /** Q of the governing end at the band's centre, and the band's fractional width. */
+  readonly q: number;
+  readonly fractionalWidth: number;
+  /** A fit stands for the termination, or it is held constant: the figure is an estimate. */
+  readonly estimate: boolean;
+  /** Least number of resonators (1 to 6) that can hold the return loss; null: none of them, or none required. */
+  readonly needs: number | null;
+  readonly verdict: 'out of reach' | 'within reach' | 'room to spare' | 'not assessed';
+  /** The verdict in a sentence, with its numbers. */
+  readonly words: string;
+  /** What stands for the termination, and how well it fits. */
+  readonly basis: string;
 }
 
 export interface Check {
@@ -137,6 +196,8 @@ export interface SectionRow {
 
 /** Equal lengths; ascending frequency. Every figure finite: return loss and attenuation stop at 200 dB, VSWR at 1e6. */
 export interface Response {
+  /** Load state; '' where there is only one without a name. */
+  readonly state: string;
   readonly spanHz: Span;
   readonly frequencyHz: readonly number[];
   readonly returnLossDb: readonly number[];

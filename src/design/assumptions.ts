@@ -1,22 +1,42 @@
+import { isOneImpedance } from '../network/termination.ts';
+import { formatQuantity, formatRead } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { behaviourWords } from './words.ts';
-import { formatQuantity } from '../quantity/format.ts';
 
-/** What the figures rest on, in the order in which a reviewer would question it. */
-export function assumptionsOf(record: DesignRecord): string[] {
-  const { source, load, aim, requirement } = record;
+/**
+ * What the figures rest on, in the order in which a reviewer would question it.
+ *
+ * @param q Q taken for Pi and T where the record leaves it open; null where there is none
+ */
+export function assumptionsOf(record: DesignRecord, q: number | null): string[] {
+  const { source, loads, aim, requirement, partQ, fit, method } = record;
   const { inductorH, capacitorF, frequencyHz } = requirement;
-  const sameAim = source.x === 0 ? ' With a real source both aims are the same.' : '';
+  const sameAim = isOneImpedance(source) && source.x === 0 ? ' With a real source both aims are the same.' : '';
+  const several = loads.length > 1;
   return [
     behaviourWords('source', source, frequencyHz),
-    behaviourWords('load', load, frequencyHz),
+    ...loads.map(({ name, termination }) =>
+      behaviourWords(name === '' ? 'load' : `load "${name}"`, termination, frequencyHz),
+    ),
+    ...(several
+      ? ['Closed forms are matched to the first load state; every figure is that of the state in which it is worst.']
+      : []),
     aim === 'conjugate'
-      ? `Aim: conjugate. At the design frequency the source sees ZS*, and all available power is delivered.${sameAim}`
-      : `Aim: reflectionless. At the design frequency the source sees ZS, so that no wave returns.${sameAim}`,
-    'Parts are ideal: lossless, of exact value, without strays. Loss, tolerance, stress and heat are not assessed here.',
+      ? `Aim: conjugate. At the design frequency the source is to see ZS*, and all available power is delivered.${sameAim}`
+      : `Aim: reflectionless. At the design frequency the source is to see ZS, so that no wave returns.${sameAim}`,
+    'Parts are ideal: lossless, of exact value, without strays. Tolerance, stress and heat are not assessed here.',
+    `The loss figure alone takes inductors with Q ${formatQuantity(partQ.inductor, '', 3)} and capacitors with Q ${formatQuantity(partQ.capacitor, '', 3)} at the design frequency.`,
+    ...(q === null || record.q !== null
+      ? []
+      : [`Pi and T: Q ${formatQuantity(q, '', 3)}, chosen as 1.5 times the least that exists, and at least 2.`]),
+    ...(method === 'fitted' || method === 'all'
+      ? [
+          `Fitted networks are the best of a seeded search (seed ${String(fit.seed)}${fit.steps === null ? '' : `, stopped after ${String(fit.steps)} steps`}) over band and states, inside the practicable ranges; a better one may exist.`,
+        ]
+      : []),
     'Terminations and parts are linear and do not change with power, temperature or time.',
     `Return loss, VSWR and mismatch loss are those at the source's terminals, for the aim above.`,
     `Transducer gain is load power over the source's available power. Harmonic figures take the terminations to behave at the harmonics as stated above.`,
-    `Practicable parts: inductors ${formatQuantity(inductorH.low, 'H', 3)} to ${formatQuantity(inductorH.high, 'H', 3)}, capacitors ${formatQuantity(capacitorF.low, 'F', 3)} to ${formatQuantity(capacitorF.high, 'F', 3)}.`,
+    `Practicable parts: inductors ${formatRead(inductorH.low, 'H')} to ${formatRead(inductorH.high, 'H')}, capacitors ${formatRead(capacitorF.low, 'F')} to ${formatRead(capacitorF.high, 'F')}.`,
   ];
 }

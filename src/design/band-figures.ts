@@ -1,19 +1,21 @@
+import type { HalfPower } from '../dossier.ts';
 import type { Arm } from '../network/arm.ts';
+import type { Form } from '../network/form.ts';
 import { edgeGrid, halfPowerEdges } from '../network/half-power.ts';
 import { prepareLadder } from '../network/ladder.ts';
 import { endsOver, sweep, sweepInto, type Ends, type SweepResult } from '../network/sweep.ts';
 import { fillTermination } from '../network/termination-at.ts';
+import type { Termination } from '../network/termination.ts';
 import { logGrid, worstInBand, type Worst } from '../network/worst-in-band.ts';
-import type { Form } from '../network/form.ts';
-import type { HalfPower } from '../dossier.ts';
+import { formatQuantity } from '../quantity/format.ts';
+import type { Span } from '../quantity/span.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { frequencySpan } from './words.ts';
-import { formatQuantity } from '../quantity/format.ts';
 
 /** Samples over the required band; every hump between them is refined. */
 const bandPoints = 101;
 
-/** What one network does at single frequencies and over the band. Γ is for the aim in force. */
+/** What one network does at single frequencies and over the band, into one load state. Γ is for the aim in force. */
 export interface BandFigures {
   readonly gainAt: (hz: number) => number;
   readonly gammaSquaredAt: (hz: number) => number;
@@ -21,11 +23,13 @@ export interface BandFigures {
   readonly halfPower: HalfPower;
 }
 
-/** A record's terminations over the grids that every network is swept on, worked out once. */
-export function bandSweeper(record: DesignRecord): (arms: readonly Arm[], form: Form) => BandFigures {
-  const { source, load, aim } = record;
+export type BandSweeper = (arms: readonly Arm[], form: Form) => BandFigures;
+
+/** The source and one load over the grids that every network is swept on, worked out once. */
+export function bandSweeper(record: DesignRecord, load: Termination, reach: Span | null): BandSweeper {
+  const { source, aim } = record;
   const { frequencyHz: f0, bandHz } = record.requirement;
-  const wide = endsOver(source, load, f0, edgeGrid(f0));
+  const wide = endsOver(source, load, f0, edgeGrid(f0, reach));
   const band = bandHz === null ? null : endsOver(source, load, f0, logGrid(bandHz.low, bandHz.high, bandPoints));
   const one = endsOver(source, load, f0, Float64Array.of(f0));
 
@@ -50,12 +54,12 @@ export function bandSweeper(record: DesignRecord): (arms: readonly Arm[], form: 
       at(hz);
       return single.gammaRe[0]! ** 2 + single.gammaIm[0]! ** 2;
     };
-    const edges = halfPowerEdges(wide.frequencyHz, sweep(ladder, wide, aim).gain, gainAt);
+    const edges = halfPowerEdges(wide.frequencyHz, sweep(ladder, wide, aim).gain, gainAt, f0);
     return {
       gainAt,
       gammaSquaredAt,
       worst: band === null ? null : worstOver(sweep(ladder, band, aim), band, gammaSquaredAt),
-      halfPower: { ...edges, bandwidthHz: width(edges.lowHz, edges.highHz), words: edgeWords(edges, form) },
+      halfPower: { ...edges, bandwidthHz: width(edges.lowHz, edges.highHz), words: edgeWords(edges, form, reach) },
     };
   };
 }
@@ -71,9 +75,10 @@ const width = (low: number | null, high: number | null): number | null =>
 function edgeWords(
   { lowHz, highHz }: { readonly lowHz: number | null; readonly highHz: number | null },
   form: Form,
+  reach: Span | null,
 ): string {
   if (lowHz !== null && highHz !== null) return frequencySpan({ low: lowHz, high: highHz });
-  const why = form === 'all-pass' ? 'no part limits it' : form;
+  const why = reach !== null ? 'within the data' : form === 'all-pass' ? 'no part limits it' : form;
   if (lowHz === null && highHz === null) return `no edge on either side: ${why}`;
   if (lowHz === null) return `none below (${why}); up to ${formatQuantity(highHz!, 'Hz')}`;
   return `from ${formatQuantity(lowHz, 'Hz')}; none above (${why})`;

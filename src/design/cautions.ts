@@ -9,16 +9,15 @@ export function cautionsOf(record: DesignRecord, chosen: Option | undefined): Ca
   const { powerW, frequencyHz } = record.requirement;
   const safety: string[] = [];
   if (powerW !== null && chosen !== undefined) {
-    const { nodes } = solveNodal(
-      chosen.arms,
-      terminationAt(record.source, frequencyHz, frequencyHz),
-      terminationAt(record.load, frequencyHz, frequencyHz),
-      frequencyHz,
-      powerW,
+    const source = terminationAt(record.source, frequencyHz, frequencyHz);
+    const volts = Math.max(
+      ...record.loads.flatMap(({ termination }) => {
+        const load = terminationAt(termination, frequencyHz, frequencyHz);
+        return solveNodal(chosen.arms, source, load, frequencyHz, powerW).nodes.map((node) => node.abs());
+      }),
     );
-    const volts = Math.max(...nodes.map((node) => node.abs()));
     safety.push(
-      `With ${formatQuantity(powerW, 'W', 3)} available, a node of this network reaches ${formatQuantity(volts, 'V', 3)} peak to ground at the design frequency, matched; a mismatched load can raise it. RF voltage burns skin at contact: switch off before touching.`,
+      `With ${formatQuantity(powerW, 'W', 3)} available, a node of this network reaches ${formatQuantity(volts, 'V', 3)} peak to ground at the design frequency into the loads as given; another load can raise it. RF voltage burns skin at contact: switch off before touching.`,
     );
   } else {
     safety.push('RF voltage burns skin at contact: switch off before touching a network that carries power.');

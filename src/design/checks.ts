@@ -11,12 +11,16 @@ import { decibelPair, returnLossWords } from './words.ts';
 /** Rounding in a return loss that doesn't make it fall short, dB. */
 const slackDb = 1e-9;
 
+/** Whether a return loss is at least the one asked for, dB. */
+export const holds = (foundDb: number, askedDb: number): boolean => foundDb >= askedDb - slackDb;
+
 /** One verdict per thing required, with its reason in words. What isn't required isn't assessed. */
 export function checksOf(
   { requirement, aim }: DesignRecord,
   arms: readonly Arm[],
   designators: readonly string[],
   worst: Worst,
+  state: string,
   dc: DcPath,
 ): Check[] {
   const checks: Check[] = [];
@@ -27,13 +31,13 @@ export function checksOf(
   if (requirement.returnLossDb !== null) {
     const worstDb = returnLossDb(worst.gammaSquared);
     const [found, asked] = decibelPair(worstDb, requirement.returnLossDb);
-    const good = worstDb >= requirement.returnLossDb - slackDb;
+    const good = holds(worstDb, requirement.returnLossDb);
     const shown = worstDb > 100 ? returnLossWords(worstDb) : found;
     const kind = aim === 'conjugate' ? '' : ' (reflectionless aim)';
     add(
       'return loss',
       good,
-      `return loss${kind} ${shown} at worst (${formatQuantity(worst.atHz, 'Hz', 5)}), ${good ? 'at least' : 'below'} the ${asked} required`,
+      `return loss${kind} ${shown} at worst (${formatQuantity(worst.atHz, 'Hz', 5)}${state === '' ? '' : `, ${state}`}), ${good ? 'at least' : 'below'} the ${asked} required`,
     );
   }
   if (requirement.blockDc) {

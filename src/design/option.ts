@@ -1,61 +1,89 @@
 import type { Complex } from 'complex.js';
-import type { Option } from '../dossier.ts';
+import type { Ceiling, Harmonic, Option, StateFigures } from '../dossier.ts';
 import { dcPath } from '../network/dc-path.ts';
 import { attenuationDb, highestDb, returnLossDb } from '../network/figures-of-merit.ts';
 import { formOf } from '../network/form.ts';
 import { ladderInput } from '../network/ladder-input.ts';
+import { prepareLadder } from '../network/ladder.ts';
+import { endsOver, sweep } from '../network/sweep.ts';
+import { isResistive, terminationAt } from '../network/termination-at.ts';
+import type { Termination } from '../network/termination.ts';
 import { designatorsOf } from '../parts/designators.ts';
 import { rulesOfThumb } from '../parts/rules-of-thumb.ts';
-import { formatFixed, formatQuantity } from '../quantity/format.ts';
+import type { Span } from '../quantity/span.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import type { Candidate } from '../synthesis/candidate.ts';
-import type { BandFigures, bandSweeper } from './band-figures.ts';
+import { bandSweeper, type BandFigures, type BandSweeper } from './band-figures.ts';
+import { bandwidthNote } from './bandwidth-note.ts';
 import { checksOf } from './checks.ts';
+import type { FoundCandidate } from './method.ts';
 import { dcWords } from './words.ts';
 
-/** Difference between the two half-power figures above which the estimate is said not to hold. */
-const estimateWithin = 0.1;
+/** All that assessing a network needs of the record, worked out once. */
+export interface Assessor {
+  readonly record: DesignRecord;
+  readonly reach: Span | null;
+  readonly ceiling: Ceiling | null;
+  readonly states: readonly {
+    readonly name: string;
+    readonly termination: Termination;
+    readonly load: Complex;
+    readonly figuresOf: BandSweeper;
+  }[];
+}
 
-/** Everything that the options list says of one network. */
-export function assess(
-  record: DesignRecord,
-  load: Complex,
-  candidate: Candidate,
-  figuresOf: ReturnType<typeof bandSweeper>,
-): Option {
-  const { id, title, arms, sections, sectionQ } = candidate;
+export function assessor(record: DesignRecord, reach: Span | null, ceiling: Ceiling | null): Assessor {
+  const f0 = record.requirement.frequencyHz;
+  return {
+    record,
+    reach,
+    ceiling,
+    states: record.loads.map(({ name, termination }) => ({
+      name,
+      termination,
+      load: terminationAt(termination, f0, f0),
+      figuresOf: bandSweeper(record, termination, reach),
+    })),
+  };
+}
+
+/** Everything that the options list says of one network: the figures of its worst state, and of each. */
+export function assess({ record, reach, ceiling, states }: Assessor, candidate: FoundCandidate): Option {
+  const { id, title, arms, sections, sectionQ, method } = candidate;
   const f0 = record.requirement.frequencyHz;
   const designators = designatorsOf(arms);
   const form = formOf(arms);
-  const figures = figuresOf(arms, form);
-  const seen = ladderInput(arms, load, f0);
-  const gain = figures.gainAt(f0);
-  const gammaSquared = figures.gammaSquaredAt(f0);
+  const assessed = states.map(({ name, load, figuresOf }) => {
+    const figures = figuresOf(arms, form);
+    const seen = ladderInput(arms, load, f0);
+    return { figures, state: stateFigures(name, { r: seen.re, x: seen.im }, figures, f0, reach) };
+  });
+  const governing = assessed.reduce((a, b) => (rank(b.state) < rank(a.state) ? b : a));
+  const { state, figures } = governing;
   const dc = dcPath(arms);
   const loadedQ = sectionQ === 0 ? null : sectionQ / 2;
   const bandwidthFromQHz = loadedQ === null ? null : f0 / loadedQ;
-  const checks = checksOf(record, arms, designators, figures.worst ?? { gammaSquared, atHz: f0 }, dc);
+  const worst = figures.worst ?? { gammaSquared: state.reflection ** 2, atHz: f0 };
+  const checks = checksOf(record, arms, designators, worst, state.name, dc);
   const short = checks.filter(({ verdict }) => verdict === 'falls short');
+  const { name, ...figuresOfWorst } = state;
+  const ceilingDb = ceiling === null ? null : returnLossDb(ceiling.bestReflection ** 2);
   return {
     id,
     title,
+    method,
     arms,
     designators,
     sections,
     form,
-    seen: { r: seen.re, x: seen.im },
-    transducerGain: Math.min(1, gain),
-    reflection: Math.sqrt(gammaSquared),
-    worstReturnLossDb: figures.worst === null ? null : returnLossDb(figures.worst.gammaSquared),
-    worstAtHz: figures.worst?.atHz ?? null,
-    halfPower: figures.halfPower,
+    states: assessed.map((each) => each.state),
+    worstState: name,
+    ...figuresOfWorst,
+    lossDb: lossDb(record, states[assessed.indexOf(governing)]!.termination, arms),
+    ceilingGapDb:
+      ceilingDb === null || state.worstReturnLossDb === null ? null : ceilingDb - state.worstReturnLossDb,
     loadedQ,
     bandwidthFromQHz,
-    bandwidthNote: bandwidthNote(bandwidthFromQHz, figures, record, sections),
-    harmonicDb: ([2, 3] as const).map((order) => ({
-      order,
-      attenuationDb: Math.max(-highestDb, attenuationDb(figures.gainAt(order * f0)) - attenuationDb(gain)),
-    })),
+    bandwidthNote: bandwidthNote(bandwidthFromQHz, state.halfPower, sections, !record.loads.every(({ termination }) => isResistive(termination)) || !isResistive(record.source)),
     dc: { ...dc, words: dcWords(dc) },
     meets: short.length === 0,
     checks,
@@ -64,33 +92,38 @@ export function assess(
   };
 }
 
-/** How f0/Q_L and the sweep compare and, where they differ, why. */
-function bandwidthNote(
-  fromQ: number | null,
-  { halfPower }: BandFigures,
-  { source, load }: DesignRecord,
-  sections: number,
-): string {
-  if (fromQ === null) return 'No section has a Q: there is nothing to estimate from.';
-  if (halfPower.bandwidthHz === null) {
-    return 'The estimate assumes an edge on either side; the sweep finds none on one side, so the two do not compare.';
-  }
-  const difference = fromQ / halfPower.bandwidthHz - 1;
-  if (Math.abs(difference) <= estimateWithin) {
-    return `The estimate is within 10 % of the sweep (${percent(difference)}).`;
-  }
-  const reactive = source.x !== 0 || load.x !== 0;
-  const causes = [
-    sections > 1 ? `it takes one section alone, and ${String(sections)} sections shape the band together` : '',
-    reactive ? "it leaves out the energy stored in the terminations' reactance" : '',
-    sections === 1 && !reactive
-      ? 'it assumes a resonance whose edges lie close to it on either side; this Q is low'
-      : '',
-  ].filter((cause) => cause !== '');
-  return `The estimate does not hold (${percent(difference)} against the sweep): ${causes.join('; ')}.`;
+/** The lower, the worse: by the band where there is one, at the design frequency otherwise. */
+const rank = ({ worstReturnLossDb, reflection }: StateFigures): number => worstReturnLossDb ?? returnLossDb(reflection ** 2);
+
+function stateFigures(
+  name: string,
+  seen: { readonly r: number; readonly x: number },
+  figures: BandFigures,
+  f0: number,
+  reach: Span | null,
+): StateFigures {
+  const gain = figures.gainAt(f0);
+  return {
+    name,
+    seen,
+    transducerGain: Math.min(1, gain),
+    reflection: Math.sqrt(figures.gammaSquaredAt(f0)),
+    worstReturnLossDb: figures.worst === null ? null : returnLossDb(figures.worst.gammaSquared),
+    worstAtHz: figures.worst?.atHz ?? null,
+    halfPower: figures.halfPower,
+    harmonicDb: ([2, 3] as const).map((order): Harmonic => {
+      const hz = order * f0;
+      if (reach !== null && hz > reach.high) return { order, attenuationDb: null };
+      const db = attenuationDb(figures.gainAt(hz)) - attenuationDb(gain);
+      return { order, attenuationDb: Math.max(-highestDb, db) };
+    }),
+  };
 }
 
-const percent = (fraction: number): string =>
-  Math.abs(fraction) < 10
-    ? `${fraction > 0 ? '+' : ''}${formatFixed(100 * fraction, 0)} %`
-    : `${formatQuantity(1 + fraction, '', 2)} times`;
+/** What the stated Q of the parts costs at the design frequency, dB. */
+function lossDb({ source, aim, partQ, requirement }: DesignRecord, load: Termination, arms: FoundCandidate['arms']): number {
+  const f0 = requirement.frequencyHz;
+  const ends = endsOver(source, load, f0, Float64Array.of(f0));
+  const gain = (ladder: FoundCandidate['arms']): number => sweep(prepareLadder(ladder), ends, aim).gain[0]!;
+  return attenuationDb(gain(arms.map((arm) => ({ ...arm, q: partQ[arm.part] })))) - attenuationDb(gain(arms));
+}

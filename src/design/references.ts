@@ -1,33 +1,64 @@
 import type { Reference } from '../dossier.ts';
-import type { DesignRecord } from '../record/design-record.ts';
+import { isMeasured } from '../network/termination.ts';
+import type { DesignRecord, Method } from '../record/design-record.ts';
+
+const gonzalez: Reference = {
+  title: 'G. Gonzalez, Microwave Transistor Amplifiers, 2nd ed., Prentice Hall 1997, ch. 2',
+  appliedFor: 'two-element networks between complex terminations',
+};
+const bowick = (appliedFor: string): Reference => ({ title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4', appliedFor });
+const qMethod = bowick('the single-parameter Q method (common practice)');
+const piTee = bowick('Pi and T networks of a chosen Q');
+const cascade = bowick('sections in cascade through equal resistance ratios');
+const matthaei: Reference = {
+  title: 'G. L. Matthaei, Proc. IEEE 52, 1964',
+  appliedFor: 'equal-ripple ladders between resistances',
+};
+const fitted: Reference = {
+  title: 'J. Nocedal and S. J. Wright, Numerical Optimization, 2nd ed., Springer 2006, ch. 6',
+  appliedFor: 'search of the fitted networks',
+};
+
+const ofMethod: Readonly<Record<Method, readonly Reference[]>> = {
+  'two-element': [gonzalez],
+  'resistive-pair': [qMethod],
+  pi: [piTee],
+  tee: [piTee],
+  cascade: [cascade],
+  'equal-ripple': [matthaei],
+  fitted: [fitted],
+  all: [gonzalez, piTee, cascade, matthaei, fitted],
+};
 
 /** Standards and published methods really applied to this record, each with what it was applied for. */
-export function referencesOf({ method, source, load }: DesignRecord): Reference[] {
-  const q = 'the single-parameter Q method (common practice)';
-  const methodReference: Record<DesignRecord['method'], Reference> = {
-    'two-element': {
-      title: 'G. Gonzalez, Microwave Transistor Amplifiers, 2nd ed., Prentice Hall 1997, ch. 2',
-      appliedFor: 'two-element networks between complex terminations',
-    },
-    'resistive-pair': { title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4', appliedFor: q },
-    cascade: {
-      title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4',
-      appliedFor: 'sections in cascade through equal resistance ratios',
-    },
-  };
-  const references: Reference[] = [
-    methodReference[method],
+export function referencesOf(
+  { method, source, loads }: DesignRecord,
+  { ceiling, pairChecked }: { readonly ceiling: boolean; readonly pairChecked: boolean },
+): Reference[] {
+  const measured = [source, ...loads.map(({ termination }) => termination)].filter(isMeasured);
+  const touchstone = measured.some(({ measured: { name } }) => /\.s\d+p\b/iu.test(name));
+  return [
+    ...ofMethod[method],
+    ...(pairChecked && method !== 'resistive-pair' ? [qMethod] : []),
+    ...(ceiling
+      ? [{ title: 'H. W. Bode 1945; R. M. Fano, J. Franklin Institute 249, 1950', appliedFor: 'the ceiling over the band' }]
+      : []),
+    ...(measured.length > 0
+      ? [
+          {
+            title: 'F. N. Fritsch and J. Butland, SIAM J. Sci. Stat. Comput. 5, 1984',
+            appliedFor: 'interpolation between measured samples',
+          },
+        ]
+      : []),
+    ...(touchstone ? [{ title: 'Touchstone, IBIS Open Forum', appliedFor: 'measured data' }] : []),
     {
       title: 'D. M. Pozar, Microwave Engineering, 4th ed., Wiley 2012, ch. 4 and 12',
-      appliedFor: 'S-parameters of the arms and transducer gain (second route of the evidence)',
+      appliedFor: 'S-parameters of the arms and transducer gain (third route of the evidence)',
     },
     { title: 'IEC 60617', appliedFor: 'graphical symbols of the schematic' },
     { title: 'ISO 7200', appliedFor: 'data fields of the title block' },
     { title: 'RFC 8785', appliedFor: 'canonical form of the record' },
     { title: 'FIPS 180-4', appliedFor: 'SHA-256 digest of the record' },
   ];
-  if (method !== 'resistive-pair' && source.x === 0 && load.x === 0) {
-    references.splice(1, 0, { title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4', appliedFor: q });
-  }
-  return references;
 }

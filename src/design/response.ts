@@ -5,34 +5,43 @@ import { prepareLadder } from '../network/ladder.ts';
 import { endsOver, sweep } from '../network/sweep.ts';
 import { logGrid } from '../network/worst-in-band.ts';
 import type { Span } from '../quantity/span.ts';
-import type { DesignRecord } from '../record/design-record.ts';
+import type { DesignRecord, LoadState } from '../record/design-record.ts';
 
 const points = 201;
 
 /** The span swept when none is asked for: half an octave to either side of f0, and the band with as much again. */
-export function sweepSpan({ sweepHz, requirement: { frequencyHz, bandHz } }: DesignRecord): Span {
+export function sweepSpan({ sweepHz, requirement: { frequencyHz, bandHz } }: DesignRecord, reach: Span | null): Span {
   if (sweepHz !== null) return sweepHz;
   const low = bandHz === null ? frequencyHz : bandHz.low;
   const high = bandHz === null ? frequencyHz : bandHz.high;
   const margin = Math.max(high / low, Math.SQRT2);
-  return { low: Math.max(low / margin, frequencyHz / 1000), high: Math.min(high * margin, frequencyHz * 1000) };
+  return {
+    low: Math.max(low / margin, frequencyHz / 1000, reach?.low ?? 0),
+    high: Math.min(high * margin, frequencyHz * 1000, reach?.high ?? Infinity),
+  };
 }
 
 /** The chosen network over the span shown; the design frequency and the band's edges are among the samples. */
-export function responseOf(record: DesignRecord, arms: readonly Arm[]): Response {
+export function responseOf(
+  record: DesignRecord,
+  { name, termination }: LoadState,
+  arms: readonly Arm[],
+  reach: Span | null,
+): Response {
   const { frequencyHz: f0, bandHz } = record.requirement;
-  const span = sweepSpan(record);
+  const span = sweepSpan(record, reach);
   const marks = [f0, bandHz?.low ?? f0, bandHz?.high ?? f0].filter((hz) => span.low <= hz && hz <= span.high);
   const frequencyHz = Float64Array.from(new Set([...logGrid(span.low, span.high, points), ...marks])).sort();
   const { gain, gammaRe, gammaIm } = sweep(
     prepareLadder(arms),
-    endsOver(record.source, record.load, f0, frequencyHz),
+    endsOver(record.source, termination, f0, frequencyHz),
     record.aim,
   );
   // Rounding can leave a perfect match a part in 1e16 above 1.
   const lossDb = Array.from(gain, (value) => attenuationDb(Math.min(1, value)));
   const squared = Array.from(gammaRe, (re, k) => re * re + gammaIm[k]! * gammaIm[k]!);
   return {
+    state: name,
     spanHz: span,
     frequencyHz: Array.from(frequencyHz),
     returnLossDb: squared.map(returnLossDb),

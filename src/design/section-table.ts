@@ -1,6 +1,6 @@
 import type { Option, SectionRow, SectionTable } from '../dossier.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import type { CascadeCandidate } from '../synthesis/cascade.ts';
+import type { FoundCandidate } from './method.ts';
 import { decibelPair } from './words.ts';
 
 /**
@@ -11,24 +11,28 @@ import { decibelPair } from './words.ts';
  */
 export function sectionTable(
   { requirement }: DesignRecord,
-  candidates: readonly CascadeCandidate[],
+  candidates: readonly FoundCandidate[],
   options: readonly Option[],
 ): SectionTable {
   const asked = requirement.returnLossDb;
-  const rows = candidates.map((candidate, k): SectionRow => {
+  const rows = candidates.flatMap((candidate, k): SectionRow[] => {
+    const { pass, shuntAt, sectionQ } = candidate;
+    if (pass === undefined || shuntAt === undefined) return [];
     const option = options[k]!;
     const returnLoss = option.checks.find(({ subject }) => subject === 'return loss');
-    return {
-      id: option.id,
-      sections: option.sections,
-      form: candidate.pass,
-      shuntAt: candidate.shuntAt,
-      parts: option.arms.length,
-      sectionQ: candidate.sectionQ,
-      worstReturnLossDb: option.worstReturnLossDb,
-      halfPower: option.halfPower,
-      holds: option.worstReturnLossDb === null || returnLoss === undefined ? null : returnLoss.verdict === 'meets',
-    };
+    return [
+      {
+        id: option.id,
+        sections: option.sections,
+        form: pass,
+        shuntAt,
+        parts: option.arms.length,
+        sectionQ,
+        worstReturnLossDb: option.worstReturnLossDb,
+        halfPower: option.halfPower,
+        holds: option.worstReturnLossDb === null || returnLoss === undefined ? null : returnLoss.verdict === 'meets',
+      },
+    ];
   });
   const holding = rows.filter(({ holds }) => holds === true).map(({ sections }) => sections);
   const smallest = holding.length === 0 ? null : Math.min(...holding);

@@ -1,5 +1,6 @@
 import type { DcPath } from '../network/dc-path.ts';
-import type { Termination } from '../network/termination.ts';
+import { modelWords } from '../network/read-model.ts';
+import { isMeasured, isModel, type MeasuredTermination, type Termination } from '../network/termination.ts';
 import { formatFixed, formatImpedanceRead, formatQuantity } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 
@@ -29,7 +30,10 @@ export function dcWords({ blocked, sourceShorted, loadShorted }: DcPath): string
 }
 
 /** What a termination is taken to be away from the design frequency. */
-export function behaviourWords(end: 'source' | 'load', { r, x, behaviour }: Termination, f0: number): string {
+export function behaviourWords(end: string, termination: Termination, f0: number): string {
+  if (isMeasured(termination)) return measuredWords(end, termination);
+  if (isModel(termination)) return `The ${end} is the circuit model ${modelWords(termination)}.`;
+  const { r, x, behaviour } = termination;
   const z = formatImpedanceRead(r, x);
   if (x === 0) return `The ${end} is ${z} at every frequency.`;
   if (behaviour === 'constant') return `The ${end} is ${z} at every frequency swept (held constant).`;
@@ -42,4 +46,14 @@ export function behaviourWords(end: 'source' | 'load', { r, x, behaviour }: Term
   const b = -x / size;
   const part = b > 0 ? formatQuantity(b / omega, 'F') : formatQuantity(-1 / (omega * b), 'H');
   return `The ${end} is ${z} at the design frequency and varies as ${formatQuantity(size / r, 'Ω')} in parallel with ${part}.`;
+}
+
+function measuredWords(end: string, { measured }: MeasuredTermination): string {
+  const { name, sha256, samples, frequencyHz, thinningError } = measured;
+  const span = frequencySpan({ low: frequencyHz[0]!, high: frequencyHz[frequencyHz.length - 1]! });
+  const thinned =
+    thinningError === 0 && samples === frequencyHz.length
+      ? ''
+      : ` ${String(frequencyHz.length)} samples of them are used; the curve through these passes every other within ${thinningError < 1e-4 ? '0.0001' : formatFixed(thinningError, 4)} in Γ.`;
+  return `The ${end} is measured: ${name}, SHA-256 ${sha256.slice(0, 16)}…, ${String(samples)} samples, ${span}; Γ is interpolated between samples and never extrapolated.${thinned}`;
 }

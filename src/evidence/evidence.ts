@@ -4,7 +4,7 @@ import { ladderInput } from '../network/ladder-input.ts';
 import { prepareLadder } from '../network/ladder.ts';
 import { endsOver, sweep } from '../network/sweep.ts';
 import { terminationAt } from '../network/termination-at.ts';
-import type { Termination } from '../network/termination.ts';
+import { isOneImpedance, type Termination } from '../network/termination.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import { pairQ, resistivePair } from '../synthesis/resistive-pair.ts';
 import { twoElement } from '../synthesis/two-element.ts';
@@ -47,7 +47,8 @@ interface Figures {
   readonly gain: number;
 }
 
-interface Subject {
+/** One network between a source and one load state. */
+export interface Subject {
   readonly arms: readonly Arm[];
   readonly source: Termination;
   readonly load: Termination;
@@ -104,11 +105,18 @@ const nodalAt = ({ arms, source, load, f0 }: Subject, hz: number): NodalSolution
 /**
  * Independent routes to the impedance seen and the transducer gain of one network, with the spread between them.
  *
+ * @param subjects      the network into each load state; the figures reported are those of the first
  * @param frequenciesHz where they are compared; the first is the design frequency
  * @param twoElement    the network is one of at most two elements, so that the Q method applies to a resistive pair
  */
-export function evidence(subject: Subject, frequenciesHz: readonly number[], twoElement: boolean): Evidence {
-  const figures = frequenciesHz.map((hz) => routes.map((route) => route.at(subject, hz)));
+export function evidence(
+  subjects: readonly Subject[],
+  frequenciesHz: readonly number[],
+  twoElement: boolean,
+): Evidence {
+  const figures = subjects.flatMap((subject) =>
+    frequenciesHz.map((hz) => routes.map((route) => route.at(subject, hz))),
+  );
   const reported = routes.map(({ name, how }, k): Route => {
     const { seen, gain } = figures[0]![k]!;
     return { name, how, seen: { r: seen.re, x: seen.im }, transducerGain: gain };
@@ -129,12 +137,14 @@ export function evidence(subject: Subject, frequenciesHz: readonly number[], two
     ),
     check(
       'power balance',
-      Math.max(...frequenciesHz.map((hz) => imbalance(nodalAt(subject, hz)))),
+      Math.max(
+        ...subjects.flatMap((subject) => frequenciesHz.map((hz) => imbalance(nodalAt(subject, hz)))),
+      ),
       routeTolerance,
       'available power against load + losses + reflected, from the nodal solution',
     ),
   ];
-  const pair = twoElement ? qMethod(subject) : null;
+  const pair = twoElement ? qMethod(subjects[0]!) : null;
   if (pair !== null) {
     reported.push(pair.route);
     checks.push(pair.check);
@@ -157,7 +167,7 @@ const imbalance = ({ availableW, loadW, lostW, reflectedW }: NodalSolution): num
 
 /** The single-parameter Q method beside the general equations; null when the pair isn't resistive. */
 function qMethod({ arms, source, load, f0 }: Subject): { route: Route; check: EvidenceCheck } | null {
-  if (source.x !== 0 || load.x !== 0) return null;
+  if (!isOneImpedance(source) || !isOneImpedance(load) || source.x !== 0 || load.x !== 0) return null;
   const alike = (candidate: { readonly arms: readonly Arm[] }): boolean =>
     candidate.arms.length === arms.length &&
     candidate.arms.every((arm, k) => arm.arm === arms[k]!.arm && arm.part === arms[k]!.part);

@@ -10,7 +10,7 @@ export interface DcPath {
 }
 
 /** @param arms source side first */
-export function dcPath(arms: readonly Arm[]): DcPath {
+export function dcPath(arms: readonly Omit<Arm, 'value'>[]): DcPath {
   return {
     blocked: arms.some(isBlock),
     sourceShorted: shortedFrom(arms),
@@ -18,9 +18,9 @@ export function dcPath(arms: readonly Arm[]): DcPath {
   };
 }
 
-const isBlock = ({ arm, part }: Arm): boolean => arm === 'series' && part === 'capacitor';
+const isBlock = ({ arm, part }: Omit<Arm, 'value'>): boolean => arm === 'series' && part === 'capacitor';
 
-function shortedFrom(arms: readonly Arm[]): boolean {
+function shortedFrom(arms: readonly Omit<Arm, 'value'>[]): boolean {
   const block = arms.findIndex(isBlock);
   const reached = block < 0 ? arms : arms.slice(0, block);
   return reached.some(({ arm, part }) => arm === 'shunt' && part === 'inductor');

@@ -1,3 +1,4 @@
+import type { Span } from '../quantity/span.ts';
 import { zeroBetween, goldenMaximum } from './search.ts';
 
 /** Edges 3.0103 dB below the peak of transducer gain nearest the design frequency; null where there is none. */
@@ -10,9 +11,9 @@ export interface HalfPowerEdges {
 
 /**
  * Frequencies at which edges are looked for: log-spaced away from f0, each step 3 % of the distance from f0 so that
- * both a band of parts per million and one of several decades are resolved; 1e-6·f0 to 1e6·f0.
+ * both a band of parts per million and one of several decades are resolved; 1e-6·f0 to 1e6·f0, within `range`.
  */
-export function edgeGrid(f0: number): Float64Array {
+export function edgeGrid(f0: number, range: Span | null = null): Float64Array {
   const offsets: number[] = [];
   for (let u = 1e-6; u < Math.log(1e6); u *= 1.03) offsets.push(u);
   const n = offsets.length;
@@ -22,29 +23,35 @@ export function edgeGrid(f0: number): Float64Array {
     grid[n + 1 + k] = f0 * Math.exp(u);
     grid[n - 1 - k] = f0 * Math.exp(-u);
   });
-  return grid;
+  if (range === null) return grid;
+  // The ends of the data are samples too: an edge may lie between the last step and them.
+  const within = grid.filter((hz) => range.low < hz && hz < range.high);
+  return Float64Array.of(...(range.low < f0 ? [Math.max(range.low, f0 * 1e-6)] : []), ...within, ...(range.high > f0 ? [range.high] : []));
 }
 
 /**
  * Half-power edges of a gain curve sampled on `edgeGrid`, refined with `gainAt`.
  *
- * @param frequencyHz ascending, the design frequency in the middle
+ * @param frequencyHz ascending, the design frequency among them
  * @param gain        transducer gain at each
  * @param gainAt      the same at any frequency, Hz
+ * @param f0          design frequency, Hz
  */
 export function halfPowerEdges(
   frequencyHz: Float64Array,
   gain: Float64Array,
   gainAt: (hz: number) => number,
+  f0: number,
 ): HalfPowerEdges {
   const last = frequencyHz.length - 1;
-  let top = last / 2;
+  const start = frequencyHz.indexOf(f0);
+  let top = start;
   while (top < last && gain[top + 1]! > gain[top]!) top += 1;
   while (top > 0 && gain[top - 1]! > gain[top]!) top -= 1;
   // A match at f0 is the peak; that rounding lifts a neighbour by a part in 1e12 doesn't move it.
-  if (gain[top]! < gain[last / 2]! * (1 + 1e-12)) top = last / 2;
+  if (gain[top]! < gain[start]! * (1 + 1e-12)) top = start;
   const peak =
-    top === 0 || top === last || top === last / 2
+    top === 0 || top === last || top === start
       ? { at: frequencyHz[top]!, value: gain[top]! }
       : goldenMaximum(gainAt, frequencyHz[top - 1]!, frequencyHz[top + 1]!);
   const half = peak.value / 2;

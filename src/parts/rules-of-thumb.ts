@@ -1,6 +1,6 @@
 import type { Arm } from '../network/arm.ts';
 import type { DcPath } from '../network/dc-path.ts';
-import { formatQuantity } from '../quantity/format.ts';
+import { formatFixed, formatQuantity } from '../quantity/format.ts';
 
 /** Board strays are of this order, F; a winding's own capacitance rules an RF inductor above this, H. */
 const strayF = 1e-12;
@@ -37,7 +37,7 @@ export function rulesOfThumb(
   if (dc.blocked) cautions.push('A series capacitor blocks DC between source and load.');
   if (sectionQ > 10) {
     cautions.push(
-      `Section Q ${formatQuantity(sectionQ, '', 3)} is above 10: losses of real parts will cost power, and small errors will move the match.`,
+      `Section Q ${formatFixed(sectionQ, sectionQ < 100 ? 1 : 0)} is above 10: losses of real parts will cost power, and small errors will move the match.`,
     );
   }
   return cautions;

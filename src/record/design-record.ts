@@ -1,9 +1,25 @@
 import type { Aim, Termination } from '../network/termination.ts';
 import type { Span } from '../quantity/span.ts';
 
-export const methods = ['two-element', 'resistive-pair', 'cascade'] as const;
-/** Which sheet the record belongs to. */
+export const methods = [
+  'two-element',
+  'resistive-pair',
+  'pi',
+  'tee',
+  'cascade',
+  'equal-ripple',
+  'fitted',
+  'all',
+] as const;
+/** How networks are found; `all`: every method, of every size. */
 export type Method = (typeof methods)[number];
+
+/** One state of the load: "free space", "in hand". */
+export interface LoadState {
+  /** '' where there is only one. */
+  readonly name: string;
+  readonly termination: Termination;
+}
 
 export interface Signature {
   readonly name: string;
@@ -47,11 +63,25 @@ export interface DesignRecord {
     readonly powerW: number | null;
   };
   readonly source: Termination;
-  readonly load: Termination;
+  /** Load states, one at least; the closed forms are matched to the first, every figure is the worst of all. */
+  readonly loads: readonly LoadState[];
   readonly aim: Aim;
   readonly method: Method;
-  /** Cascade only: number of sections (1 to 6), or the smallest that holds the requirement. */
+  /** Cascade and equal ripple: number of sections (1 to 6), or every number. */
   readonly sections: 'auto' | 1 | 2 | 3 | 4 | 5 | 6;
+  /** Pi and T: Q at the steeper end; null: chosen from the least that exists. */
+  readonly q: number | null;
+  readonly fit: {
+    /** Number of elements (2 to 8), or every number. */
+    readonly elements: 'auto' | 2 | 3 | 4 | 5 | 6 | 7 | 8;
+    readonly form: 'any' | 'low-pass' | 'high-pass';
+    readonly shuntInductor: boolean;
+    readonly seed: number;
+    /** Pieces of work after which the engineer stopped it; null: all. */
+    readonly steps: number | null;
+  };
+  /** Quality factors for which a loss is stated; every other figure takes parts as lossless. */
+  readonly partQ: { readonly inductor: number; readonly capacitor: number };
   /** Sweep shown, Hz; null: chosen from the band. */
   readonly sweepHz: Span | null;
   readonly selection: {

@@ -1,6 +1,5 @@
-import { formatImpedanceRead, formatRead } from '../quantity/format.ts';
+import { formatRead } from '../quantity/format.ts';
 import { InputError, type Problem } from '../quantity/problem.ts';
-import { readImpedance } from '../quantity/read-impedance.ts';
 import { readQuantity } from '../quantity/read-quantity.ts';
 import { readSpan } from '../quantity/read-span.ts';
 import type { Reading } from '../quantity/reading.ts';
@@ -8,6 +7,7 @@ import type { Span } from '../quantity/span.ts';
 import type { Unit } from '../quantity/unit.ts';
 import { checkRecord } from './check-record.ts';
 import type { DesignRecord } from './design-record.ts';
+import { readLoads, readTermination, terminationWords, type Attachments } from './read-termination.ts';
 import { defaults, fieldNames, pathOf, type FieldName, type Fields } from './fields.ts';
 
 export interface Draft {
@@ -27,7 +27,7 @@ const examples = {
 } as const;
 
 /** Typed texts, of the sheet or of the command line, as a design record. */
-export function readDraft(given: Fields): Draft {
+export function readDraft(given: Fields, attachments: Attachments = new Map()): Draft {
   const fields: Record<FieldName, string> = { ...defaults, ...given };
   const problems: Problem[] = [];
   const understood: Partial<Record<FieldName, string>> = {};
@@ -52,9 +52,18 @@ export function readDraft(given: Fields): Draft {
     );
   const optionalRange = (name: 'band' | 'sweep'): Span | null | undefined =>
     fields[name].trim() === '' ? null : range(name, 'Hz');
-  const impedance = (name: 'source' | 'load') => {
-    const z = take(name, readImpedance(fields[name]), ({ r, x }) => formatImpedanceRead(r, x));
-    return z === undefined ? undefined : { ...z, behaviour: fields[`${name}-behaviour`] };
+  const source = take(
+    'source',
+    readTermination(fields.source, fields['source-behaviour'], attachments),
+    terminationWords,
+  );
+  const loads = take('load', readLoads(fields.load, fields['load-behaviour'], attachments), (states) =>
+    states.map(({ name, termination }) => `${name === '' ? '' : `${name}: `}${terminationWords(termination)}`).join('; '),
+  );
+  const whole = (name: FieldName): number | string => (/^\d+$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim());
+  const plainNumber = (name: FieldName): number | string => {
+    const value = Number(fields[name].trim().replace(',', '.'));
+    return fields[name].trim() === '' || !Number.isFinite(value) ? fields[name] : value;
   };
   const signature = (name: 'prepared' | 'checked' | 'approved') => ({
     name: fields[`${name}-name`],
@@ -84,11 +93,20 @@ export function readDraft(given: Fields): Draft {
       capacitorF: range('capacitors', 'F'),
       powerW: optional('power', 'W'),
     },
-    source: impedance('source'),
-    load: impedance('load'),
+    source,
+    loads,
     aim: fields.aim,
     method: fields.method,
-    sections: /^\d+$/u.test(fields.sections.trim()) ? Number(fields.sections) : fields.sections.trim(),
+    sections: whole('sections'),
+    q: fields.q.trim() === '' ? null : plainNumber('q'),
+    fit: {
+      elements: whole('elements'),
+      form: fields['fit-form'],
+      shuntInductor: yesNo('shunt-inductor'),
+      seed: whole('seed'),
+      steps: fields.steps.trim() === '' ? null : whole('steps'),
+    },
+    partQ: { inductor: plainNumber('q-inductor'), capacitor: plainNumber('q-capacitor') },
     sweepHz: optionalRange('sweep'),
     selection: { option: fields.choice === '' ? null : fields.choice, reason: fields.reason },
     signOff: { prepared: signature('prepared'), checked: signature('checked'), approved: signature('approved') },

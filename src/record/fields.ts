@@ -1,3 +1,5 @@
+import { circuitModels } from '../network/circuit-model.ts';
+import { isMeasured, isModel, isOneImpedance, type Behaviour, type Termination } from '../network/termination.ts';
 import { formatRead } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 import type { Unit } from '../quantity/unit.ts';
@@ -12,8 +14,8 @@ export const pathOf = {
   frequency: 'requirement.frequencyHz',
   source: 'source',
   'source-behaviour': 'source.behaviour',
-  load: 'load',
-  'load-behaviour': 'load.behaviour',
+  load: 'loads',
+  'load-behaviour': 'loads.0.termination.behaviour',
   aim: 'aim',
   band: 'requirement.bandHz',
   'return-loss': 'requirement.returnLossDb',
@@ -23,6 +25,14 @@ export const pathOf = {
   capacitors: 'requirement.capacitorF',
   power: 'requirement.powerW',
   sections: 'sections',
+  q: 'q',
+  elements: 'fit.elements',
+  'fit-form': 'fit.form',
+  'shunt-inductor': 'fit.shuntInductor',
+  seed: 'fit.seed',
+  steps: 'fit.steps',
+  'q-inductor': 'partQ.inductor',
+  'q-capacitor': 'partQ.capacitor',
   sweep: 'sweepHz',
   choice: 'selection.option',
   reason: 'selection.reason',
@@ -59,6 +69,12 @@ export const defaults: Record<FieldName, string> = {
   inductors: '1n..10u',
   capacitors: '1p..100n',
   sections: 'auto',
+  elements: 'auto',
+  'fit-form': 'any',
+  'shunt-inductor': 'yes',
+  seed: '1',
+  'q-inductor': '50',
+  'q-capacitor': '300',
   title: 'Matching network',
   number: 'unnumbered',
   revision: 'A',
@@ -66,14 +82,14 @@ export const defaults: Record<FieldName, string> = {
 
 /** A record as the texts of its fields: reading them again gives the same record. */
 export function fieldsOf(record: DesignRecord): Record<FieldName, string> {
-  const { identity, requirement, source, load, selection, signOff } = record;
+  const { identity, requirement, source, loads, selection, signOff, fit, partQ } = record;
   return {
     method: record.method,
     frequency: plain(requirement.frequencyHz, 'Hz'),
-    source: impedanceText(source),
-    'source-behaviour': source.behaviour,
-    load: impedanceText(load),
-    'load-behaviour': load.behaviour,
+    source: terminationText(source),
+    'source-behaviour': behaviourOf([source]),
+    load: loads.map(({ name, termination }) => (name === '' ? '' : `${name} = `) + terminationText(termination)).join('\n'),
+    'load-behaviour': behaviourOf(loads.map(({ termination }) => termination)),
     aim: record.aim,
     band: spanText(requirement.bandHz, 'Hz'),
     'return-loss': requirement.returnLossDb === null ? '' : String(requirement.returnLossDb),
@@ -83,6 +99,14 @@ export function fieldsOf(record: DesignRecord): Record<FieldName, string> {
     capacitors: spanText(requirement.capacitorF, 'F'),
     power: requirement.powerW === null ? '' : plain(requirement.powerW, 'W'),
     sections: String(record.sections),
+    q: record.q === null ? '' : String(record.q),
+    elements: String(fit.elements),
+    'fit-form': fit.form,
+    'shunt-inductor': fit.shuntInductor ? 'yes' : 'no',
+    seed: String(fit.seed),
+    steps: fit.steps === null ? '' : String(fit.steps),
+    'q-inductor': String(partQ.inductor),
+    'q-capacitor': String(partQ.capacitor),
     sweep: spanText(record.sweepHz, 'Hz'),
     choice: selection.option ?? '',
     reason: selection.reason,
@@ -126,8 +150,24 @@ const exponents: Readonly<Record<string, number>> = {
   a: -18,
 };
 
-const impedanceText = ({ r, x }: { readonly r: number; readonly x: number }): string =>
-  x === 0 ? String(r) : `${String(r)}${x < 0 ? '-' : '+'}j${String(Math.abs(x))}`;
+/** Measured data go by their name: the text of a field can't hold them. */
+function terminationText(termination: Termination): string {
+  if (isMeasured(termination)) return termination.measured.name;
+  if (isModel(termination)) {
+    const { units } = circuitModels[termination.model];
+    const values = termination.values.map((value, k) => {
+      const unit = units[k]!;
+      return unit === '' ? String(value) : plain(value, unit).replace(/\s+/gu, '');
+    });
+    return [termination.model, ...values].join(' ');
+  }
+  const { r, x } = termination;
+  return x === 0 ? String(r) : `${String(r)}${x < 0 ? '-' : '+'}j${String(Math.abs(x))}`;
+}
+
+/** One choice serves every impedance of an end. */
+const behaviourOf = (terminations: readonly Termination[]): Behaviour =>
+  terminations.find(isOneImpedance)?.behaviour ?? 'series';
 
 const spanText = (span: Span | null, unit: Unit): string =>
   span === null ? '' : `${plain(span.low, unit)} to ${plain(span.high, unit)}`;

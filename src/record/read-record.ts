@@ -4,7 +4,7 @@ import type { DesignRecord } from './design-record.ts';
 import { repeatedName } from './repeated-name.ts';
 
 /** Largest record read, in characters: a hundred times what its fields can hold without being an attack. */
-const longest = 1_000_000;
+const longest = 3_000_000;
 
 /**
  * Reads a design record from its JSON text.
@@ -17,7 +17,7 @@ export function readRecord(text: string): DesignRecord {
       field: 'record',
       read: '',
       why: `${(text.length / 1e6).toFixed(1)} million characters are more than a record can have`,
-      would: 'give a design record of at most 1 million',
+      would: 'give a design record of at most 3 million',
     });
   }
   let value: unknown;

@@ -1,4 +1,7 @@
 import * as v from 'valibot';
+import { circuitModels, type CircuitModelName } from '../network/circuit-model.ts';
+import { isResistive } from '../network/termination-at.ts';
+import type { Termination } from '../network/termination.ts';
 import { mostSections } from '../synthesis/cascade.ts';
 import type { DesignRecord } from './design-record.ts';
 import { methods } from './design-record.ts';
@@ -18,6 +21,9 @@ export const limits = {
   powerW: 1e5,
   returnLossDb: 100,
   nameLetters: 120,
+  stateLetters: 40,
+  states: 8,
+  samples: 2001,
   reasonLetters: 4000,
 } as const;
 
@@ -72,7 +78,7 @@ function isDate(value: string): boolean {
   return !Number.isNaN(parsed.getTime()) && parsed.toISOString().startsWith(value);
 }
 
-const termination = (what: string) =>
+const oneImpedance = (what: string) =>
   v.strictObject({
     r: v.pipe(
       number(`the ${what}'s resistance`),
@@ -86,6 +92,69 @@ const termination = (what: string) =>
       `the ${what}'s behaviour is unknown; give constant, series or parallel`,
     ),
   });
+
+const modelNames = Object.keys(circuitModels) as CircuitModelName[];
+
+const model = (what: string) =>
+  v.pipe(
+    v.strictObject({
+      model: v.picklist(modelNames, `the ${what}'s model is unknown; give one of ${modelNames.join(', ')}`),
+      values: v.pipe(
+        v.array(between(`a value of the ${what}'s model`, 1e-18, 1e12, 'values above zero in SI units')),
+        v.minLength(2, `the ${what}'s model lacks values; give one for each of its parts`),
+        v.maxLength(4, `the ${what}'s model has too many values; give one for each of its parts`),
+      ),
+    }),
+    v.check(
+      ({ model: name, values }) => values.length === circuitModels[name].symbols.length,
+      `the ${what}'s model has not as many values as parts; give one for each of them`,
+    ),
+  );
+
+const samples = (what: string) =>
+  v.pipe(
+    v.array(number(`a sample of the ${what}`)),
+    v.minLength(2, `the ${what} has too few samples; give two or more`),
+    v.maxLength(limits.samples, `the ${what} has too many samples; give at most ${String(limits.samples)}`),
+  );
+
+const measured = (what: string) =>
+  v.strictObject({
+    measured: v.pipe(
+      v.strictObject({
+        name: text(`the name of the ${what}'s data`, limits.nameLetters),
+        sha256: v.pipe(v.string(), v.regex(/^[0-9a-f]{64}$/u, 'this is no SHA-256 digest; give 64 hex digits')),
+        samples: v.pipe(number('the number of samples'), v.integer(), v.minValue(2)),
+        thinningError: between('the thinning error', 0, 2, 'a distance between reflection coefficients'),
+        referenceOhm: between('the reference', limits.resistanceOhm.low, limits.resistanceOhm.high, '1 µΩ to 1 GΩ'),
+        frequencyHz: samples(what),
+        re: samples(what),
+        im: samples(what),
+      }),
+      v.check(
+        ({ frequencyHz, re, im }) => re.length === frequencyHz.length && im.length === frequencyHz.length,
+        `the ${what}'s columns differ in length; give as many of each`,
+      ),
+      v.check(
+        ({ frequencyHz }) => frequencyHz.every((hz, k) => hz >= 0 && (k === 0 || hz > frequencyHz[k - 1]!)),
+        `the ${what}'s frequencies do not ascend; give each once, ascending`,
+      ),
+      v.check(
+        ({ re, im }) => re.every((value, k) => Math.hypot(value, im[k]!) < 1),
+        `the ${what} reflects all power or more somewhere; give a passive termination`,
+      ),
+    ),
+  });
+
+/** The forms that a termination can have; which one is meant shows in its fields, so that messages speak of that one. */
+function termination(what: string): v.GenericSchema<unknown, Termination> {
+  const forms = { one: oneImpedance(what), model: model(what), measured: measured(what) };
+  const chosen = v.lazy((input): v.GenericSchema<unknown, Termination> => {
+    if (typeof input !== 'object' || input === null) return forms.one;
+    return 'model' in input ? forms.model : 'measured' in input ? forms.measured : forms.one;
+  });
+  return Object.assign(chosen, { forms: Object.values(forms) });
+}
 
 const signature = (what: string) =>
   v.strictObject({
@@ -138,13 +207,46 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       ),
     }),
     source: termination('source'),
-    load: termination('load'),
+    loads: v.pipe(
+      v.array(
+        v.strictObject({ name: text("the load state's name", limits.stateLetters), termination: termination('load') }),
+      ),
+      v.minLength(1, 'no load is given; give one state or more'),
+      v.maxLength(limits.states, `there are too many load states; give at most ${String(limits.states)}`),
+      v.check(
+        (loads) => new Set(loads.map(({ name }) => name)).size === loads.length,
+        'two load states have the same name; give each its own',
+      ),
+    ),
     aim: v.picklist(['conjugate', 'reflectionless'], 'the aim is unknown; give conjugate or reflectionless'),
     method: v.picklist(methods, `the method is unknown; give ${methods.join(', ')}`),
     sections: v.picklist(
       ['auto', 1, 2, 3, 4, 5, 6],
       `the number of sections is out of range; give auto or a whole number from 1 to ${String(mostSections)}`,
     ),
+    q: v.nullable(between('the chosen Q', 1e-3, 1e6, 'a Q from 0.001 to 1 000 000')),
+    fit: v.strictObject({
+      elements: v.picklist(
+        ['auto', 2, 3, 4, 5, 6, 7, 8],
+        'the number of elements is out of range; give auto or a whole number from 2 to 8',
+      ),
+      form: v.picklist(['any', 'low-pass', 'high-pass'], 'this form is unknown; give any, low-pass or high-pass'),
+      shuntInductor: v.boolean('whether shunt inductors are allowed is not yes or no; give yes or no'),
+      seed: v.pipe(
+        between('the seed', 0, 4294967295, 'a whole number from 0'),
+        v.integer('the seed is not whole; give a whole number from 0'),
+      ),
+      steps: v.nullable(
+        v.pipe(
+          between('the number of steps', 1, 1e6, 'a whole number from 1'),
+          v.integer('the number of steps is not whole; give a whole number from 1'),
+        ),
+      ),
+    }),
+    partQ: v.strictObject({
+      inductor: between("the inductors' Q", 1, 1e6, 'a Q from 1 to 1 000 000'),
+      capacitor: between("the capacitors' Q", 1, 1e6, 'a Q from 1 to 1 000 000'),
+    }),
     sweepHz: v.nullable(
       v.pipe(
         span('the sweep', limits.frequencyHz.low, limits.frequencyHz.high, 'frequencies from 1 Hz to 1 THz'),
@@ -187,7 +289,8 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
   ),
   v.forward(
     v.check(
-      ({ method, source, load }) => method !== 'resistive-pair' || (source.x === 0 && load.x === 0),
+      ({ method, source, loads }) =>
+        method !== 'resistive-pair' || (isResistive(source) && loads.every(({ termination: t }) => isResistive(t))),
       'the Q method takes two resistances; leave the reactance out, or use complex terminations',
     ),
     ['method'],
@@ -199,5 +302,12 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       'the smallest number of sections needs something to hold; give a band and a return loss, or a number of sections',
     ),
     ['sections'],
+  ),
+  v.forward(
+    v.check(
+      ({ method, requirement: { bandHz } }) => (method !== 'equal-ripple' && method !== 'fitted') || bandHz !== null,
+      'this method is for a band; give one',
+    ),
+    ['requirement', 'bandHz'],
   ),
 );

@@ -37,6 +37,9 @@ export function chainBetween(target: Complex, load: Complex, shuntAt: ShuntAt): 
   return { shuntAt, low, high: highEnd.re + reactive, excess: same ? 0 : excess };
 }
 
+/** 1/G of an impedance, Ω. */
+export const parallelResistance = (z: Complex): number => (z.im === 0 ? z.re : z.re + (z.im / z.re) * z.im);
+
 /**
  * Q of each of n equal-ratio sections: sqrt((high/low)^(1/n) − 1).
  *
@@ -85,13 +88,15 @@ export function chainArms(
   return chain.shuntAt === 'load' ? present : present.reverse();
 }
 
-const susceptance = (z: Complex): number => -z.im / (z.re * z.re + z.im * z.im);
+/** B of an impedance, S. */
+export const susceptance = (z: Complex): number => -z.im / (z.re * z.re + z.im * z.im);
 
-const sum = (a: number, b: number): number => (Math.abs(a + b) <= zeroWithin * (Math.abs(a) + Math.abs(b)) ? 0 : a + b);
+/** A sum that is exactly zero where only rounding is left. */
+export const sum = (a: number, b: number): number => (Math.abs(a + b) <= zeroWithin * (Math.abs(a) + Math.abs(b)) ? 0 : a + b);
 
 /** The condition RT <= 1/GL (or its dual RL <= 1/GT) that failed, with its numbers. */
 export function whyNoChain({ shuntAt, low, high }: Chain): string {
-  const numbers = `${formatQuantity(low, 'Ω')} > ${formatQuantity(high, 'Ω')} (ratio ${formatFixed(low / high, low / high < 1000 ? 3 : 0)})`;
+  const numbers = `${formatQuantity(low, 'Ω')} > ${formatQuantity(high, 'Ω')} (ratio ${low / high < 1000 ? formatFixed(low / high, 3) : low / high < 1e6 ? formatFixed(low / high, 0) : (low / high).toExponential(2)})`;
   return shuntAt === 'load'
     ? `needs RT ≤ 1/GL, the resistance to be seen at most the load's parallel resistance; here ${numbers}`
     : `needs RL ≤ 1/GT, the load's resistance at most the parallel resistance to be seen; here ${numbers}`;

@@ -1,0 +1,81 @@
+import { sha256 } from '@noble/hashes/sha2.js';
+import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
+import { lineProblem } from './line-problem.ts';
+import type { Measured } from './measured.ts';
+import { readTable } from './read-table.ts';
+import { readTouchstone } from './read-touchstone.ts';
+import { interpolate, slopesOf } from './shape-preserving.ts';
+
+/** Samples that a record carries; a longer sweep is thinned, and how well the rest stands for it is told. */
+const mostKept = 2001;
+
+/** Plain data of a measured one-port, as the record holds it. */
+export interface MeasuredData {
+  readonly name: string;
+  readonly sha256: string;
+  readonly samples: number;
+  readonly thinningError: number;
+  readonly referenceOhm: number;
+  readonly frequencyHz: readonly number[];
+  readonly re: readonly number[];
+  readonly im: readonly number[];
+}
+
+/**
+ * A termination from the text of a Touchstone file (by its ending) or of a table of frequency, R and X.
+ *
+ * @param port of a two-port file
+ * @throws InputError with the number of the line that can't be used
+ */
+export function measuredTermination(text: string, name: string, port: 1 | 2 = 1): { readonly measured: MeasuredData } {
+  const touchstone = /\.s\d+p$/iu.test(name) || /^\s*(?:!|#|\[version\])/iu.test(text);
+  const measured = touchstone ? readTouchstone(text, name, port) : readTable(text);
+  if (measured.frequencyHz.length < 2) {
+    throw lineProblem(0, 'one sample is too few to interpolate', 'give two frequencies or more');
+  }
+  measured.re.forEach((re, k) => {
+    if (Math.hypot(re, measured.im[k]!) >= 1) {
+      const hz = measured.frequencyHz[k]!;
+      throw lineProblem(
+        0,
+        `sample ${String(k + 1)} (${String(hz)} Hz) reflects all power or more`,
+        'give a passive termination, R > 0',
+      );
+    }
+  });
+  const { kept, error } = thin(measured);
+  const pick = (values: Float64Array): number[] => kept.map((k) => values[k]!);
+  return {
+    measured: {
+      name: port === 2 ? `${name} (port 2)` : name,
+      sha256: bytesToHex(sha256(utf8ToBytes(text))),
+      samples: measured.frequencyHz.length,
+      thinningError: error,
+      referenceOhm: measured.referenceOhm,
+      frequencyHz: pick(measured.frequencyHz),
+      re: pick(measured.re),
+      im: pick(measured.im),
+    },
+  };
+}
+
+/** Evenly chosen samples, first and last among them, and the largest |ΔΓ| of those left out. */
+function thin({ frequencyHz, re, im }: Measured): { readonly kept: readonly number[]; readonly error: number } {
+  const n = frequencyHz.length;
+  if (n <= mostKept) return { kept: Array.from({ length: n }, (_, k) => k), error: 0 };
+  const kept = Array.from({ length: mostKept }, (_, k) => Math.round((k * (n - 1)) / (mostKept - 1)));
+  const f = Float64Array.from(kept, (k) => frequencyHz[k]!);
+  const keptRe = Float64Array.from(kept, (k) => re[k]!);
+  const keptIm = Float64Array.from(kept, (k) => im[k]!);
+  const slopesRe = slopesOf(f, keptRe);
+  const slopesIm = slopesOf(f, keptIm);
+  let error = 0;
+  let interval = 0;
+  for (let k = 0; k < n; k += 1) {
+    while (interval < mostKept - 2 && f[interval + 1]! <= frequencyHz[k]!) interval += 1;
+    const dRe = interpolate(f, keptRe, slopesRe, interval, frequencyHz[k]!) - re[k]!;
+    const dIm = interpolate(f, keptIm, slopesIm, interval, frequencyHz[k]!) - im[k]!;
+    error = Math.max(error, Math.hypot(dRe, dIm));
+  }
+  return { kept, error };
+}

@@ -1,0 +1,68 @@
+import { normalise, readQuantity } from '../quantity/read-quantity.ts';
+import { lineProblem } from './line-problem.ts';
+import type { Measured } from './measured.ts';
+
+const headerUnits: Readonly<Record<string, string>> = { hz: '', khz: 'k', mhz: 'M', ghz: 'G' };
+
+/**
+ * Reads a pasted table of frequency, R and X, one sample a line: separated by blanks, tabs, semicolons, or commas where
+ * they aren't decimal ones. A first line of words may name the unit of frequency ("f/MHz R X"); otherwise frequencies
+ * are in hertz or carry their own prefix.
+ *
+ * @throws InputError with the number of the line that can't be used
+ */
+export function readTable(text: string): Measured {
+  const referenceOhm = 50;
+  const frequencyHz: number[] = [];
+  const re: number[] = [];
+  const im: number[] = [];
+  let prefix = '';
+  const lines = text.split(/\r\n|\r|\n/u);
+  for (const [index, raw] of lines.entries()) {
+    const line = index + 1;
+    const content = normalise(raw.replace(/[!#].*$/u, ''));
+    if (content === '') continue;
+    if (frequencyHz.length === 0 && /^[^\d+\-.]/u.test(content)) {
+      const unit = /\b([kMG]?Hz)\b/iu.exec(content)?.[1]?.toLowerCase();
+      if (unit !== undefined) prefix = headerUnits[unit] ?? '';
+      continue;
+    }
+    const cells = cellsOf(content);
+    if (cells.length !== 3) {
+      throw lineProblem(line, `${String(cells.length)} columns where 3 belong`, 'give frequency, R and X', content);
+    }
+    const [f, r, x] = [readQuantity(withPrefix(cells[0]!, prefix), 'Hz'), readQuantity(cells[1]!, 'Ω'), readQuantity(cells[2]!, 'Ω')];
+    for (const [k, reading] of [f, r, x].entries()) {
+      if (!reading.ok) throw lineProblem(line, reading.why, 'give frequency, R and X', cells[k]!);
+    }
+    if (!f.ok || !r.ok || !x.ok) continue;
+    const previous = frequencyHz[frequencyHz.length - 1];
+    if (f.value <= 0) throw lineProblem(line, 'the frequency must be above zero', 'give hertz, or a prefix', cells[0]!);
+    if (previous !== undefined && f.value <= previous) {
+      throw lineProblem(line, 'the frequency is not above the one before', 'give each frequency once, ascending', cells[0]!);
+    }
+    if (r.value <= 0) throw lineProblem(line, 'the resistance must be above zero', 'give R > 0', cells[1]!);
+    const d = (r.value + referenceOhm) ** 2 + x.value ** 2;
+    frequencyHz.push(f.value);
+    re.push((r.value ** 2 - referenceOhm ** 2 + x.value ** 2) / d);
+    im.push((2 * x.value * referenceOhm) / d);
+  }
+  if (frequencyHz.length < 2) {
+    throw lineProblem(0, `${String(frequencyHz.length)} samples are too few to interpolate`, 'give two lines or more');
+  }
+  return {
+    frequencyHz: Float64Array.from(frequencyHz),
+    re: Float64Array.from(re),
+    im: Float64Array.from(im),
+    referenceOhm,
+  };
+}
+
+function cellsOf(content: string): string[] {
+  if (/[;\t]/u.test(content)) return content.split(/[;\t]/u).map((cell) => cell.trim());
+  const byComma = content.split(',').map((cell) => cell.trim());
+  if (byComma.length === 3 && byComma.every((cell) => !/\s/u.test(cell))) return byComma;
+  return content.split(/\s+/u);
+}
+
+const withPrefix = (cell: string, prefix: string): string => (/[a-z]/iu.test(cell.replace(/\d[eE][+-]?\d/u, '')) ? cell : cell + prefix);

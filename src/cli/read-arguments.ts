@@ -1,6 +1,8 @@
 import { readFileSync, statSync } from 'node:fs';
-import { resolve } from 'node:path';
+import { basename, resolve } from 'node:path';
 import { parseArgs } from 'node:util';
+import { measuredTermination } from '../measured/measured-termination.ts';
+import type { MeasuredTermination } from '../network/termination.ts';
 import { InputError } from '../quantity/problem.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { readDraft } from '../record/draft.ts';
@@ -80,30 +82,64 @@ function parse(
   const parsed = parseArgs({
     args: joined,
     allowPositionals: true,
-    options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const }])),
+    options: Object.fromEntries(
+      names.map((name) => [name, { type: 'string' as const, multiple: name === 'load' }]),
+    ),
   });
-  return { values: parsed.values as Partial<Record<string, string>>, positionals: parsed.positionals };
+  const values = Object.fromEntries(
+    Object.entries(parsed.values).map(([name, value]) => [name, Array.isArray(value) ? value.join('\n') : String(value)]),
+  );
+  return { values, positionals: parsed.positionals };
 }
 
 function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: string }): DesignRecord {
-  const { record, problems } = readDraft({
-    date: new Date().toISOString().slice(0, 10),
-    ...(fields.sections === undefined ? {} : { method: 'cascade' }),
-    ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
-    ...fields,
-  });
+  const attachments = new Map<string, MeasuredTermination>();
+  const { record, problems } = readDraft(
+    {
+      date: new Date().toISOString().slice(0, 10),
+      ...(fields.sections !== undefined ? { method: 'cascade' } : fields.elements !== undefined ? { method: 'fitted' } : {}),
+      ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
+      ...fields,
+      ...(fields.source === undefined ? {} : { source: attach('source', fields.source, attachments) }),
+      ...(fields.load === undefined
+        ? {}
+        : {
+            load: fields.load
+              .split('\n')
+              .map((state) => attach('load', state, attachments))
+              .join('\n'),
+          }),
+    },
+    attachments,
+  );
   if (record !== null) return record;
   throw new InputError(...problems.map((found) => ({ ...found, field: `--${found.field}` })));
 }
 
+/** `NAME=FILE.s1p`, `FILE.s2p port 2`, `FILE.csv`: reads the file and leaves the name by which its data are known. */
+function attach(end: string, text: string, attachments: Map<string, MeasuredTermination>): string {
+  const match = /^([^=]*=)?\s*(.+?\.(?:s\d+p|csv|tsv|txt))(?:\s+port\s+(\d+))?\s*$/iu.exec(text);
+  if (match === null) return text;
+  const [, state = '', file = '', port = '1'] = match;
+  if (port !== '1' && port !== '2') throw problem(text, 'a two-port has ports 1 and 2', 'choose one of them', `--${end}`);
+  try {
+    const termination = measuredTermination(readTextFile(file), basename(file), port === '1' ? 1 : 2);
+    attachments.set(termination.measured.name, termination);
+    return `${state}${termination.measured.name}`;
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    throw new InputError(...error.problems.map((found) => ({ ...found, field: `--${end} ${file}, ${found.field}` })));
+  }
+}
+
 /** Longest file read as text, bytes. */
-const mostBytes = 64e6;
+const mostBytes = 512e6;
 
 /** @throws InputError when it can't be read */
 export function readTextFile(file: string): string {
   const path = fromHere(file);
   try {
-    if (statSync(path).size > mostBytes) throw problem(file, 'over 64 MB', 'give a design record', 'file');
+    if (statSync(path).size > mostBytes) throw problem(file, 'over 512 MB', 'give a smaller file', 'file');
     return readFileSync(path, 'utf8');
   } catch (error) {
     if (error instanceof InputError) throw error;
@@ -114,7 +150,7 @@ export function readTextFile(file: string): string {
         : code === 'EISDIR'
           ? 'this is a folder'
           : `it can't be read (${code ?? 'unknown'})`;
-    throw problem(file, why, 'give the path of a design record', 'file');
+    throw problem(file, why, 'give the path of a file', 'file');
   }
 }
 

@@ -1,9 +1,10 @@
-import { readFileSync, writeFileSync } from 'node:fs';
+import { readFileSync } from 'node:fs';
 import { design } from '../design.ts';
 import { InputError } from '../quantity/problem.ts';
 import { report } from '../report/report.ts';
-import { fromHere, readArguments } from './read-arguments.ts';
+import { readArguments } from './read-arguments.ts';
 import { run } from './run.ts';
+import { writeFile } from './write-file.ts';
 
 function paperOf(name: string): 'a4' | 'letter' {
   const paper = name.trim().toLowerCase();
@@ -13,22 +14,6 @@ function paperOf(name: string): 'a4' | 'letter' {
 
 const font = (weight: 'regular' | 'bold'): Uint8Array =>
   readFileSync(new URL(`../../public/fonts/ferrule-${weight}.ttf`, import.meta.url));
-
-/** @throws InputError when the file can't be written */
-function write(out: string, bytes: Uint8Array): void {
-  try {
-    writeFileSync(fromHere(out), bytes);
-  } catch (error) {
-    const code = (error as NodeJS.ErrnoException).code ?? 'unknown';
-    const reasons: Partial<Record<string, string>> = { ENOENT: 'there is no such folder', EISDIR: 'this is a folder' };
-    throw problem(
-      '--out',
-      out,
-      reasons[code] ?? `it can't be written (${code})`,
-      'give a file in a folder that can be written to',
-    );
-  }
-}
 
 const problem = (field: string, read: string, why: string, would: string): InputError =>
   new InputError({ field, read, why, would });
@@ -43,6 +28,6 @@ await run(async (args) => {
   }
   const paper = paperOf(options.paper ?? 'a4');
   const fonts = { regular: font('regular'), bold: font('bold') };
-  write(out, await report(design(record), { paper, fonts }));
+  writeFile('--out', out, await report(design(record), { paper, fonts }));
   return `Wrote ${out}\n`;
 });

@@ -57,3 +57,14 @@ export function terminationWords(termination: Termination): string {
 export function attachmentsOf(terminations: readonly Termination[]): Attachments {
   return new Map(terminations.filter(isMeasured).map((t) => [t.measured.name, t]));
 }
+
+/** A few letters for a drawing: "9.4 − j61 Ω", "rc-series", "measured". */
+export function terminationLabel(termination: Termination): string {
+  if (isMeasured(termination)) return 'measured';
+  if (isModel(termination)) return termination.model;
+  return formatImpedanceRead(termination.r, termination.x);
+}
+
+/** The same for load states: how many there are, where it isn't one. */
+export const loadLabel = (loads: readonly LoadState[]): string =>
+  loads.length === 1 ? terminationLabel(loads[0]!.termination) : `${String(loads.length)} states`;

@@ -82,11 +82,12 @@ export function* designSteps(record: DesignRecord, control: FitControl): Generat
     options,
     absent: absent.map(({ form, why }) => ({ form, why })),
     minimum: minimumWords(record, options),
-    sections: record.method === 'cascade' || record.method === 'equal-ripple' ? sectionTable(record, found, assessed) : null,
+    sections:
+      record.method === 'cascade' || record.method === 'equal-ripple' ? sectionTable(record, found, assessed) : null,
     proposed: proposed?.id ?? null,
     chosen: chosen?.id ?? null,
     chosenBy: picked !== undefined ? 'engineer' : proposed !== undefined ? 'proposal' : 'nearest',
-    responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen.arms, reach)),
+    responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen, reach)),
     evidence: checked,
     cautions: cautionsOf(record, chosen),
     references: referencesOf(record, {
@@ -115,7 +116,10 @@ function pickedBy({ selection }: DesignRecord, options: readonly Option[]): Opti
     field: 'choice',
     read: selection.option,
     why: 'no such network for these terminations',
-    would: some.length === 0 ? 'leave the choice open' : `choose one of ${some.join(', ')}${options.length > 6 ? ', …' : ''}`,
+    would:
+      some.length === 0
+        ? 'leave the choice open'
+        : `choose one of ${some.join(', ')}${options.length > 6 ? ', …' : ''}`,
   });
 }
 

@@ -13,7 +13,11 @@ export function jsonSchema(): string {
     // A termination is chosen by its fields; to a reader of the schema it is one of its forms.
     overrideSchema: ({ valibotSchema }) =>
       'forms' in valibotSchema
-        ? { anyOf: (valibotSchema.forms as GenericSchema[]).map((form) => withoutHead(toJsonSchema(form, { errorMode: 'ignore' }))) }
+        ? {
+            anyOf: (valibotSchema.forms as GenericSchema[]).map((form) =>
+              withoutHead(toJsonSchema(form, { errorMode: 'ignore' })),
+            ),
+          }
         : undefined,
   });
   const { $schema, ...rest } = schema;

@@ -82,12 +82,13 @@ function parse(
   const parsed = parseArgs({
     args: joined,
     allowPositionals: true,
-    options: Object.fromEntries(
-      names.map((name) => [name, { type: 'string' as const, multiple: name === 'load' }]),
-    ),
+    options: Object.fromEntries(names.map((name) => [name, { type: 'string' as const, multiple: name === 'load' }])),
   });
   const values = Object.fromEntries(
-    Object.entries(parsed.values).map(([name, value]) => [name, Array.isArray(value) ? value.join('\n') : String(value)]),
+    Object.entries(parsed.values).map(([name, value]) => [
+      name,
+      Array.isArray(value) ? value.join('\n') : String(value),
+    ]),
   );
   return { values, positionals: parsed.positionals };
 }
@@ -97,7 +98,11 @@ function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: st
   const { record, problems } = readDraft(
     {
       date: new Date().toISOString().slice(0, 10),
-      ...(fields.sections !== undefined ? { method: 'cascade' } : fields.elements !== undefined ? { method: 'fitted' } : {}),
+      ...(fields.sections !== undefined
+        ? { method: 'cascade' }
+        : fields.elements !== undefined
+          ? { method: 'fitted' }
+          : {}),
       ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
       ...fields,
       ...(fields.source === undefined ? {} : { source: attach('source', fields.source, attachments) }),
@@ -121,7 +126,8 @@ function attach(end: string, text: string, attachments: Map<string, MeasuredTerm
   const match = /^([^=]*=)?\s*(.+?\.(?:s\d+p|csv|tsv|txt))(?:\s+port\s+(\d+))?\s*$/iu.exec(text);
   if (match === null) return text;
   const [, state = '', file = '', port = '1'] = match;
-  if (port !== '1' && port !== '2') throw problem(text, 'a two-port has ports 1 and 2', 'choose one of them', `--${end}`);
+  if (port !== '1' && port !== '2')
+    throw problem(text, 'a two-port has ports 1 and 2', 'choose one of them', `--${end}`);
   try {
     const termination = measuredTermination(readTextFile(file), basename(file), port === '1' ? 1 : 2);
     attachments.set(termination.measured.name, termination);

@@ -20,7 +20,12 @@ await run((args) => {
     if (file === undefined) continue;
     const text = content(dossier);
     if (text === null) {
-      throw new InputError({ field: `--${option}`, read: file, why: 'no network was found', would: 'change what is asked' });
+      throw new InputError({
+        field: `--${option}`,
+        read: file,
+        why: 'no network was found',
+        would: 'change what is asked',
+      });
     }
     writeFile(`--${option}`, file, text);
   }

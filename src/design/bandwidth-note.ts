@@ -28,7 +28,9 @@ export function bandwidthNote(
   const causes = [
     sections > 1 ? `it takes one section alone, and ${String(sections)} sections shape the band together` : '',
     reactive ? "it leaves out the energy stored in the terminations' reactance" : '',
-    sections === 1 && !reactive ? 'it assumes a resonance whose edges lie close to it on either side; this Q is low' : '',
+    sections === 1 && !reactive
+      ? 'it assumes a resonance whose edges lie close to it on either side; this Q is low'
+      : '',
   ].filter((cause) => cause !== '');
   return `The estimate does not hold (${percent(difference)} against the sweep): ${causes.join('; ')}.`;
 }

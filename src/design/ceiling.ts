@@ -99,7 +99,10 @@ function verdict(
   }
   const with_ = `${figure(perResonators[needs - 1]!)} with ${needs === 1 ? "the end's own alone" : String(needs)}`;
   if (needs === 1) {
-    return { verdict: 'room to spare', words: `Room to spare: ${asked} needs one resonator (${with_}); the ceiling is ${top}.` };
+    return {
+      verdict: 'room to spare',
+      words: `Room to spare: ${asked} needs one resonator (${with_}); the ceiling is ${top}.`,
+    };
   }
   return {
     verdict: 'within reach',

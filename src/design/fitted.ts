@@ -1,6 +1,7 @@
 import { returnLossDb } from '../network/figures-of-merit.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import { fit, type Fitted } from '../synthesis/fit/fit.ts';
+import { fit } from '../synthesis/fit/fit.ts';
+import type { Fitted } from '../synthesis/fit/problem.ts';
 import { titleOf } from '../synthesis/title.ts';
 import type { FoundCandidate } from './method.ts';
 

@@ -79,7 +79,13 @@ function closedForm(method: ClosedMethod, record: DesignRecord, target: Complex,
       });
       // Band edges are there: the schema asks for them with this method.
       return named(
-        equalRipple(end(target.conjugate(), record.source), end(load, record.loads[0]!.termination), f0, bandHz!, allSections),
+        equalRipple(
+          end(target.conjugate(), record.source),
+          end(load, record.loads[0]!.termination),
+          f0,
+          bandHz!,
+          allSections,
+        ),
       );
     }
   }

@@ -79,11 +79,15 @@ export function assess({ record, reach, ceiling, states }: Assessor, candidate: 
     worstState: name,
     ...figuresOfWorst,
     lossDb: lossDb(record, states[assessed.indexOf(governing)]!.termination, arms),
-    ceilingGapDb:
-      ceilingDb === null || state.worstReturnLossDb === null ? null : ceilingDb - state.worstReturnLossDb,
+    ceilingGapDb: ceilingDb === null || state.worstReturnLossDb === null ? null : ceilingDb - state.worstReturnLossDb,
     loadedQ,
     bandwidthFromQHz,
-    bandwidthNote: bandwidthNote(bandwidthFromQHz, state.halfPower, sections, !record.loads.every(({ termination }) => isResistive(termination)) || !isResistive(record.source)),
+    bandwidthNote: bandwidthNote(
+      bandwidthFromQHz,
+      state.halfPower,
+      sections,
+      !record.loads.every(({ termination }) => isResistive(termination)) || !isResistive(record.source),
+    ),
     dc: { ...dc, words: dcWords(dc) },
     meets: short.length === 0,
     checks,
@@ -93,7 +97,8 @@ export function assess({ record, reach, ceiling, states }: Assessor, candidate: 
 }
 
 /** The lower, the worse: by the band where there is one, at the design frequency otherwise. */
-const rank = ({ worstReturnLossDb, reflection }: StateFigures): number => worstReturnLossDb ?? returnLossDb(reflection ** 2);
+const rank = ({ worstReturnLossDb, reflection }: StateFigures): number =>
+  worstReturnLossDb ?? returnLossDb(reflection ** 2);
 
 function stateFigures(
   name: string,
@@ -121,7 +126,11 @@ function stateFigures(
 }
 
 /** What the stated Q of the parts costs at the design frequency, dB. */
-function lossDb({ source, aim, partQ, requirement }: DesignRecord, load: Termination, arms: FoundCandidate['arms']): number {
+function lossDb(
+  { source, aim, partQ, requirement }: DesignRecord,
+  load: Termination,
+  arms: FoundCandidate['arms'],
+): number {
   const f0 = requirement.frequencyHz;
   const ends = endsOver(source, load, f0, Float64Array.of(f0));
   const gain = (ladder: FoundCandidate['arms']): number => sweep(prepareLadder(ladder), ends, aim).gain[0]!;

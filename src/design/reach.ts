@@ -7,7 +7,9 @@ import { frequencySpan } from './words.ts';
 
 /** Frequencies that every termination speaks of, Hz; null: all. */
 export function reachOf({ source, loads }: DesignRecord): Span | null {
-  const ranges = [source, ...loads.map(({ termination }) => termination)].map(rangeOf).filter((range) => range !== null);
+  const ranges = [source, ...loads.map(({ termination }) => termination)]
+    .map(rangeOf)
+    .filter((range) => range !== null);
   if (ranges.length === 0) return null;
   return {
     low: Math.max(...ranges.map(({ low }) => low)),
@@ -37,7 +39,10 @@ export function checkReach(record: DesignRecord, reach: Span | null): void {
   if (frequencyHz < reach.low || frequencyHz > reach.high) {
     throw outside('frequency', formatQuantity(frequencyHz, 'Hz'), `the design frequency is outside ${data}`);
   }
-  for (const [field, span] of [['band', bandHz], ['sweep', record.sweepHz]] as const) {
+  for (const [field, span] of [
+    ['band', bandHz],
+    ['sweep', record.sweepHz],
+  ] as const) {
     if (span !== null && (span.low < reach.low || span.high > reach.high)) {
       throw outside(field, frequencySpan(span), `it reaches outside ${data}`);
     }

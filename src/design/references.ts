@@ -6,7 +6,10 @@ const gonzalez: Reference = {
   title: 'G. Gonzalez, Microwave Transistor Amplifiers, 2nd ed., Prentice Hall 1997, ch. 2',
   appliedFor: 'two-element networks between complex terminations',
 };
-const bowick = (appliedFor: string): Reference => ({ title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4', appliedFor });
+const bowick = (appliedFor: string): Reference => ({
+  title: 'C. Bowick, RF Circuit Design, Sams 1982, ch. 4',
+  appliedFor,
+});
 const qMethod = bowick('the single-parameter Q method (common practice)');
 const piTee = bowick('Pi and T networks of a chosen Q');
 const cascade = bowick('sections in cascade through equal resistance ratios');
@@ -41,7 +44,12 @@ export function referencesOf(
     ...ofMethod[method],
     ...(pairChecked && method !== 'resistive-pair' ? [qMethod] : []),
     ...(ceiling
-      ? [{ title: 'H. W. Bode 1945; R. M. Fano, J. Franklin Institute 249, 1950', appliedFor: 'the ceiling over the band' }]
+      ? [
+          {
+            title: 'H. W. Bode 1945; R. M. Fano, J. Franklin Institute 249, 1950',
+            appliedFor: 'the ceiling over the band',
+          },
+        ]
       : []),
     ...(measured.length > 0
       ? [

@@ -1,5 +1,4 @@
-import type { Response } from '../dossier.ts';
-import type { Arm } from '../network/arm.ts';
+import type { HalfPower, Option, Response } from '../dossier.ts';
 import { attenuationDb, mismatchLossDb, returnLossDb, vswr } from '../network/figures-of-merit.ts';
 import { prepareLadder } from '../network/ladder.ts';
 import { endsOver, sweep } from '../network/sweep.ts';
@@ -8,6 +7,10 @@ import type { Span } from '../quantity/span.ts';
 import type { DesignRecord, LoadState } from '../record/design-record.ts';
 
 const points = 201;
+/** Samples put around a peak that the others are too far apart to show. */
+const peakPoints = 41;
+/** A half-power band narrower than this part of the span is such a peak. */
+const narrow = 1 / 20;
 
 /** The span swept when none is asked for: half an octave to either side of f0, and the band with as much again. */
 export function sweepSpan({ sweepHz, requirement: { frequencyHz, bandHz } }: DesignRecord, reach: Span | null): Span {
@@ -21,17 +24,21 @@ export function sweepSpan({ sweepHz, requirement: { frequencyHz, bandHz } }: Des
   };
 }
 
-/** The chosen network over the span shown; the design frequency and the band's edges are among the samples. */
+/**
+ * The chosen network over the span shown; the design frequency and the band's edges are among the samples, which are
+ * the same for every load state.
+ */
 export function responseOf(
   record: DesignRecord,
   { name, termination }: LoadState,
-  arms: readonly Arm[],
+  { arms, states }: Pick<Option, 'arms' | 'states'>,
   reach: Span | null,
 ): Response {
   const { frequencyHz: f0, bandHz } = record.requirement;
   const span = sweepSpan(record, reach);
   const marks = [f0, bandHz?.low ?? f0, bandHz?.high ?? f0].filter((hz) => span.low <= hz && hz <= span.high);
-  const frequencyHz = Float64Array.from(new Set([...logGrid(span.low, span.high, points), ...marks])).sort();
+  const peaks = states.flatMap(({ halfPower }) => aroundPeak(halfPower, span));
+  const frequencyHz = Float64Array.from(new Set([...logGrid(span.low, span.high, points), ...marks, ...peaks])).sort();
   const { gain, gammaRe, gammaIm } = sweep(
     prepareLadder(arms),
     endsOver(record.source, termination, f0, frequencyHz),
@@ -52,4 +59,13 @@ export function responseOf(
     gammaRe: Array.from(gammaRe),
     gammaIm: Array.from(gammaIm),
   };
+}
+
+/** Frequencies over four times the half-power band, where that is narrow, Hz. */
+function aroundPeak({ bandwidthHz, peakHz }: HalfPower, span: Span): readonly number[] {
+  if (bandwidthHz === null || bandwidthHz >= narrow * (span.high - span.low)) return [];
+  const step = (4 * bandwidthHz) / (peakPoints - 1);
+  return Array.from({ length: peakPoints }, (_, k) => peakHz + (k - (peakPoints - 1) / 2) * step).filter(
+    (hz) => span.low < hz && hz < span.high,
+  );
 }

@@ -20,6 +20,8 @@ export const lettering = 8;
 export interface Key {
   readonly text: string;
   readonly tone: Tone;
+  /** Width of the sample, pt. */
+  readonly reach: number;
   readonly sample: (x: number, y: number, X: number, Y: number) => readonly Shape[];
 }
 
@@ -32,6 +34,8 @@ export interface Frame {
   readonly x: (hertz: number) => number;
   readonly y: (value: number) => number;
   readonly valueSpan: Span;
+  /** Of the figure: as asked for, and higher by the rows of keys under the title. */
+  readonly height: number;
   readonly shapes: readonly Shape[];
 }
 
@@ -42,14 +46,25 @@ export interface Frame {
  * @param values     ends of the value axis
  * @param axisTitle  with its unit
  * @param key        what else is drawn, named beside the title or, where that is too narrow, under it
+ * @param curves     names of the curves where there are several, in rows under both
  */
-export function chartFrame(size: Size, span: Span, values: Span, axisTitle: string, key?: Key): Frame {
+export function chartFrame(
+  size: Size,
+  span: Span,
+  values: Span,
+  axisTitle: string,
+  key?: Key,
+  curves: readonly Key[] = [],
+): Frame {
   const left = 32;
   const right = size.width - 1;
-  const keyWidth = key === undefined ? 0 : 22 + textWidth(key.text, lettering);
+  const keyWidth = key === undefined ? 0 : widthOf(key);
   const beside = textWidth(axisTitle, lettering, true) + 12 + keyWidth < right;
-  const top = beside ? 28 : 40;
-  const bottom = size.height - 28;
+  const rows = keyRows(curves, right);
+  const above = rows.length * rowHeight;
+  const top = (beside ? 28 : 40) + above;
+  const height = size.height + above;
+  const bottom = height - 28;
   const axis = frequencyAxis(span, Math.max(2, Math.floor((right - left) / 60)));
   const x = (hertz: number): number => left + axis.at(hertz) * (right - left);
   const y = (value: number): number => bottom - ((value - values.low) / (values.high - values.low)) * (bottom - top);
@@ -69,9 +84,42 @@ export function chartFrame(size: Size, span: Span, values: Span, axisTitle: stri
   shapes.push(label(0, 9, axisTitle, lettering, 'start', 'ink', true));
   if (key !== undefined) {
     const [keyX, keyY] = beside ? [right - keyWidth, 9] : [0, 22];
-    shapes.push(...key.sample(keyX, keyY - 6, keyX + 17, keyY + 1));
-    shapes.push(label(keyX + 22, keyY, key.text, lettering, 'start', key.tone));
+    shapes.push(...drawKey(key, keyX, keyY));
   }
-  shapes.push(label((left + right) / 2, size.height - 5, `Frequency, ${axis.unit}`, lettering, 'middle', 'ink', true));
-  return { left, right, top, bottom, x, y, valueSpan: values, shapes };
+  rows.forEach((row, k) => {
+    const y = (beside ? 9 : 22) + (k + 1) * rowHeight;
+    let along = 0;
+    for (const curve of row) {
+      shapes.push(...drawKey(curve, along, y));
+      along += widthOf(curve) + 14;
+    }
+  });
+  shapes.push(label((left + right) / 2, height - 5, `Frequency, ${axis.unit}`, lettering, 'middle', 'ink', true));
+  return { left, right, top, bottom, x, y, valueSpan: values, height, shapes };
+}
+
+const rowHeight = 13;
+
+const widthOf = ({ text, reach }: Key): number => reach + 5 + textWidth(text, lettering);
+
+const drawKey = (key: Key, x: number, y: number): readonly Shape[] => [
+  ...key.sample(x, y - 6, x + key.reach, y + 1),
+  label(x + key.reach + 5, y, key.text, lettering, 'start', key.tone),
+];
+
+/** Keys in as few rows as their widths allow, in their order. */
+function keyRows(keys: readonly Key[], width: number): readonly (readonly Key[])[] {
+  const rows: Key[][] = [];
+  let used = 0;
+  for (const key of keys) {
+    const wide = widthOf(key) + 14;
+    const row = rows.at(-1);
+    if (row !== undefined && used + wide - 14 <= width) row.push(key);
+    else {
+      rows.push([key]);
+      used = 0;
+    }
+    used += wide;
+  }
+  return rows;
 }

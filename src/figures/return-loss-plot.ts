@@ -4,26 +4,31 @@ import { formatFixed, formatQuantity, formatRead } from '../quantity/format.ts';
 import { chartFrame, chartSize, type Key, type Size } from './chart-frame.ts';
 import { curve } from './curve.ts';
 import { n, path, rectangle, stroke } from './draw.ts';
+import { curveNumbers } from './curve-numbers.ts';
 import type { Figure, Shape } from './figure.ts';
 import { designMark } from './design-mark.ts';
 import { hatch } from './hatch.ts';
 import { smoothReturnLoss } from './smooth-return-loss.ts';
+import { described, stateKeys, stateStroke } from './states.ts';
 
 /** A match at one frequency has a return loss without end there; beyond this no one reads a difference. */
 const highest = 40;
 const edge = { stroke: 'limit', width: stroke.thin } as const;
 
 /**
- * Return loss against frequency; the requirement is a hatched region that the curve must stay out of: the band, up to
+ * Return loss against frequency; the requirement is a hatched region that the curves must stay out of: the band, up to
  * the return loss asked for.
+ *
+ * @param responses one a load state, one at least, over the same frequencies; the governing one first
  */
 export function returnLossPlot(
-  response: Response,
+  responses: readonly Response[],
   requirement: DesignRecord['requirement'],
   size: Size = chartSize,
 ): Figure {
   const needed = requirement.returnLossDb;
-  const best = Math.max(...response.returnLossDb);
+  const { spanHz } = responses[0]!;
+  const best = Math.max(...responses.flatMap(({ returnLossDb }) => returnLossDb));
   const top = Math.max(10, (needed ?? 0) + 6, Math.min(highest, best));
   const high = Math.ceil(top / 10) * 10;
   const cut = best > high ? `; above ${formatFixed(high, 0)} dB not drawn` : '';
@@ -34,10 +39,11 @@ export function returnLossPlot(
       : {
           text: `required: at least ${formatRead(needed, 'dB')}`,
           tone: 'limit',
+          reach: 17,
           sample: (x, y, X, Y) => [hatch(x, y, X, Y, 3.5), rectangle(x, y, X - x, Y - y, edge)],
         };
   const axisTitle = `Return loss, dB (larger is better${cut})`;
-  const frame = chartFrame(size, response.spanHz, { low: 0, high }, axisTitle, key);
+  const frame = chartFrame(size, spanHz, { low: 0, high }, axisTitle, key, stateKeys(responses));
   const shapes: Shape[] = [...frame.shapes];
   let limit = 'No return loss is required.';
 
@@ -56,12 +62,20 @@ export function returnLossPlot(
         : `from ${formatRead(band.low, 'Hz')} to ${formatRead(band.high, 'Hz')}.`);
   }
   shapes.push(...designMark(frame, requirement.frequencyHz));
-  const { hertz, decibels } = smoothReturnLoss(response);
-  const d = curve(frame, hertz, decibels);
-  if (d !== '') shapes.push(path(d, { stroke: 'accent', width: stroke.heavy }));
-  const worst = Math.min(...response.returnLossDb);
+  responses.forEach((response, k) => {
+    const { hertz, decibels } = smoothReturnLoss(response);
+    const d = curve(frame, hertz, decibels);
+    if (d !== '') shapes.push(path(d, stateStroke(k)));
+  });
+  shapes.push(
+    ...curveNumbers(
+      frame,
+      responses.map(({ frequencyHz, returnLossDb }) => ({ hertz: frequencyHz, values: returnLossDb })),
+    ),
+  );
+  const between = described(responses, ({ returnLossDb }) => returnLossDb);
   const description =
-    `Return loss from ${formatQuantity(response.spanHz.low, 'Hz')} to ${formatQuantity(response.spanHz.high, 'Hz')}: ` +
-    `between ${formatFixed(worst, 2)} dB and ${formatFixed(best, 2)} dB. ${limit}`;
-  return { ...size, title, description, shapes };
+    `Return loss from ${formatQuantity(spanHz.low, 'Hz')} to ${formatQuantity(spanHz.high, 'Hz')}: ` +
+    `${between}. ${limit}`;
+  return { width: size.width, height: frame.height, title, description, shapes };
 }

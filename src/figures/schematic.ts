@@ -1,6 +1,5 @@
 import type { Arm } from '../network/arm.ts';
-import type { Termination } from '../network/termination.ts';
-import { formatImpedanceRead, formatQuantity } from '../quantity/format.ts';
+import { formatQuantity } from '../quantity/format.ts';
 import { label, line, stroke } from './draw.ts';
 import type { Figure, Shape } from './figure.ts';
 import { earth, generator, impedance, junction, part } from './symbols.ts';
@@ -23,17 +22,15 @@ const gap = 9;
  *
  * @param arms         from source to load; values in H or F
  * @param designators  of the same length
- * @param source       the generator's internal impedance, Ω
- * @param load         Ω
+ * @param sourceText   the generator's internal impedance in a few letters: "50 Ω"
+ * @param loadText     the same of the load: "9.4 − j61 Ω", "2 states"
  */
 export function schematic(
   arms: readonly Arm[],
   designators: readonly string[],
-  source: Termination,
-  load: Termination,
+  sourceText: string,
+  loadText: string,
 ): Figure {
-  const sourceText = formatImpedanceRead(source.r, source.x);
-  const loadText = formatImpedanceRead(load.r, load.x);
   const shapes: Shape[] = [];
   const write = (x: number, y: number, name: string, value: string, anchor: 'start' | 'middle'): number => {
     shapes.push(label(x, y, name, size, anchor, 'ink', true), label(x, y + leading, value, size, anchor));

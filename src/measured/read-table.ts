@@ -31,7 +31,11 @@ export function readTable(text: string): Measured {
     if (cells.length !== 3) {
       throw lineProblem(line, `${String(cells.length)} columns where 3 belong`, 'give frequency, R and X', content);
     }
-    const [f, r, x] = [readQuantity(withPrefix(cells[0]!, prefix), 'Hz'), readQuantity(cells[1]!, 'Ω'), readQuantity(cells[2]!, 'Ω')];
+    const [f, r, x] = [
+      readQuantity(withPrefix(cells[0]!, prefix), 'Hz'),
+      readQuantity(cells[1]!, 'Ω'),
+      readQuantity(cells[2]!, 'Ω'),
+    ];
     for (const [k, reading] of [f, r, x].entries()) {
       if (!reading.ok) throw lineProblem(line, reading.why, 'give frequency, R and X', cells[k]!);
     }
@@ -39,7 +43,12 @@ export function readTable(text: string): Measured {
     const previous = frequencyHz[frequencyHz.length - 1];
     if (f.value <= 0) throw lineProblem(line, 'the frequency must be above zero', 'give hertz, or a prefix', cells[0]!);
     if (previous !== undefined && f.value <= previous) {
-      throw lineProblem(line, 'the frequency is not above the one before', 'give each frequency once, ascending', cells[0]!);
+      throw lineProblem(
+        line,
+        'the frequency is not above the one before',
+        'give each frequency once, ascending',
+        cells[0]!,
+      );
     }
     if (r.value <= 0) throw lineProblem(line, 'the resistance must be above zero', 'give R > 0', cells[1]!);
     const d = (r.value + referenceOhm) ** 2 + x.value ** 2;
@@ -65,4 +74,5 @@ function cellsOf(content: string): string[] {
   return content.split(/\s+/u);
 }
 
-const withPrefix = (cell: string, prefix: string): string => (/[a-z]/iu.test(cell.replace(/\d[eE][+-]?\d/u, '')) ? cell : cell + prefix);
+const withPrefix = (cell: string, prefix: string): string =>
+  /[a-z]/iu.test(cell.replace(/\d[eE][+-]?\d/u, '')) ? cell : cell + prefix;

@@ -28,7 +28,7 @@ export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Mea
   const re: number[] = [];
   const im: number[] = [];
   let line = header.line;
-  for (let start = header.start; start < text.length; ) {
+  for (let start = header.start; start < text.length;) {
     let end = text.indexOf('\n', start);
     if (end < 0) end = text.length;
     line += 1;
@@ -40,7 +40,11 @@ export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Mea
     const previous = frequencyHz[frequencyHz.length - 1];
     if (header.ports === 2 && header.version === 1 && count === 5 && previous !== undefined && hz <= previous) break;
     if (count !== columns) {
-      throw lineProblem(line, `${String(count)} numbers where ${String(columns)} belong`, 'give a frequency and its values on each line');
+      throw lineProblem(
+        line,
+        `${String(count)} numbers where ${String(columns)} belong`,
+        'give a frequency and its values on each line',
+      );
     }
     if (!(hz >= 0) || !Number.isFinite(hz)) throw lineProblem(line, 'the frequency is not one', 'give 0 or more');
     if (previous !== undefined && hz <= previous) {

@@ -50,8 +50,6 @@ export function interpolate(x: Float64Array, y: Float64Array, slopes: Float64Arr
   const t = (at - x[k]!) / h;
   const u = 1 - t;
   return (
-    u * u * (1 + 2 * t) * y[k]! +
-    t * t * (1 + 2 * u) * y[k + 1]! +
-    h * t * u * (u * slopes[k]! - t * slopes[k + 1]!)
+    u * u * (1 + 2 * t) * y[k]! + t * t * (1 + 2 * u) * y[k + 1]! + h * t * u * (u * slopes[k]! - t * slopes[k + 1]!)
   );
 }

@@ -66,7 +66,11 @@ export function readHeader(text: string, name: string): Header {
   while (start < text.length) {
     let end = text.indexOf('\n', start);
     if (end < 0) end = text.length;
-    const content = text.slice(start, Math.min(end, start + 4096)).replace(/!.*$/su, '').replace(/^\uFEFF/u, '').trim();
+    const content = text
+      .slice(start, Math.min(end, start + 4096))
+      .replace(/!.*$/su, '')
+      .replace(/^\uFEFF/u, '')
+      .trim();
     const word = /^\[([^\]]*)\]\s*(.*)$/su.exec(content);
     if (content !== '' && word === null && !content.startsWith('#') && awaited === 0 && !inInformation) {
       if (version === 2) throw lineProblem(line + 1, 'data before [Network Data]', 'give the keyword first', content);
@@ -108,11 +112,13 @@ export function readHeader(text: string, name: string): Header {
         break;
       case 'two-port data order':
       case 'two-port order':
-        if (rest !== '12_21' && rest !== '21_12') throw lineProblem(line, 'this order is unknown', 'give 12_21 or 21_12', rest);
+        if (rest !== '12_21' && rest !== '21_12')
+          throw lineProblem(line, 'this order is unknown', 'give 12_21 or 21_12', rest);
         order = rest;
         break;
       case 'number of frequencies':
-        if (!/^\d{1,9}$/u.test(rest) || Number(rest) === 0) throw lineProblem(line, 'not a count', 'give a whole number', rest);
+        if (!/^\d{1,9}$/u.test(rest) || Number(rest) === 0)
+          throw lineProblem(line, 'not a count', 'give a whole number', rest);
         frequencies = Number(rest);
         break;
       case 'reference':
@@ -148,7 +154,12 @@ function portsOf(name: string): 1 | 2 | null {
   if (ending === undefined) return null;
   if (ending === '1') return 1;
   if (ending === '2') return 2;
-  throw lineProblem(0, `a termination has one port, or is one of two, not ${ending}`, 'give an .s1p or .s2p file', name);
+  throw lineProblem(
+    0,
+    `a termination has one port, or is one of two, not ${ending}`,
+    'give an .s1p or .s2p file',
+    name,
+  );
 }
 
 function referencesOf(text: string, line: number): number[] {
@@ -157,7 +168,8 @@ function referencesOf(text: string, line: number): number[] {
     .filter((word) => word !== '')
     .map((word) => {
       const ohm = Number(word);
-      if (!Number.isFinite(ohm) || ohm <= 0) throw lineProblem(line, 'not a resistance', 'give one above zero a port', word);
+      if (!Number.isFinite(ohm) || ohm <= 0)
+        throw lineProblem(line, 'not a resistance', 'give one above zero a port', word);
       return ohm;
     });
 }

@@ -31,7 +31,12 @@ export function readOptionLine(text: string, line: number): TouchstoneOptions {
     else if (word === 'S' || word === 'Z' || word === 'Y') options = { ...options, parameter: word };
     else if (word === 'MA' || word === 'DB' || word === 'RI') options = { ...options, format: word };
     else if (word === 'G' || word === 'H') {
-      throw lineProblem(line, `${word} parameters have no reflection of one port`, 'save it as S, Z or Y parameters', word);
+      throw lineProblem(
+        line,
+        `${word} parameters have no reflection of one port`,
+        'save it as S, Z or Y parameters',
+        word,
+      );
     } else if (word === 'R' || /^R[\d.]/u.test(word)) {
       const given = word === 'R' ? (words[(k += 1)] ?? '') : word.slice(1);
       const referenceOhm = Number(given);

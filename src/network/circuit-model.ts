@@ -68,5 +68,10 @@ export function modelImpedance(model: CircuitModel, frequencyHz: number): Comple
   const bc = c === null ? 0 : omega * c;
   if (arrangement === 'parallel') return new Z(1 / r, bc - (l === null ? 0 : 1 / xl)).inverse();
   const series = new Z(r, xl - (c === null ? 0 : 1 / bc));
-  return c0 === null ? series : series.inverse().add(new Z(0, omega * c0)).inverse();
+  return c0 === null
+    ? series
+    : series
+        .inverse()
+        .add(new Z(0, omega * c0))
+        .inverse();
 }

@@ -26,7 +26,11 @@ export function edgeGrid(f0: number, range: Span | null = null): Float64Array {
   if (range === null) return grid;
   // The ends of the data are samples too: an edge may lie between the last step and them.
   const within = grid.filter((hz) => range.low < hz && hz < range.high);
-  return Float64Array.of(...(range.low < f0 ? [Math.max(range.low, f0 * 1e-6)] : []), ...within, ...(range.high > f0 ? [range.high] : []));
+  return Float64Array.of(
+    ...(range.low < f0 ? [Math.max(range.low, f0 * 1e-6)] : []),
+    ...within,
+    ...(range.high > f0 ? [range.high] : []),
+  );
 }
 
 /**

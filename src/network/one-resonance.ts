@@ -29,7 +29,10 @@ export function fitOneResonance(
 ): OneResonance {
   const u = frequencyHz.map((hz) => hz / centreHz);
   const series = fitOne(u, impedances);
-  const parallel = fitOne(u, impedances.map((z) => z.inverse()));
+  const parallel = fitOne(
+    u,
+    impedances.map((z) => z.inverse()),
+  );
   const asOne = (fit: Fit, arrangement: OneResonance['arrangement']): OneResonance => ({
     arrangement,
     r: arrangement === 'series' ? fit.real : 1 / fit.real,

@@ -7,14 +7,18 @@ import { circuitModels, type CircuitModel, type CircuitModelName } from './circu
 const isModel = (name: string): name is CircuitModelName => Object.hasOwn(circuitModels, name);
 
 /** Whether a text is meant as a circuit model: it begins with a word. */
-export const namesModel = (text: string): boolean => /^\s*[a-z]{2,}[a-z-]*(\s|$)/iu.test(text) && !/^\s*(?:ohm)/iu.test(text);
+export const namesModel = (text: string): boolean =>
+  /^\s*[a-z]{2,}[a-z-]*(\s|$)/iu.test(text) && !/^\s*(?:ohm)/iu.test(text);
 
 /** Reads a circuit model in its plain form, name and values: `rc-series 12 8.2p`. */
 export function readModel(text: string): Reading<CircuitModel> {
   const [name = '', ...cells] = text.trim().split(/\s+/u);
   const model = name.toLowerCase();
   if (!isModel(model)) {
-    return refuse(`"${name}" is no circuit model`, `give one of ${Object.keys(circuitModels).join(', ')}, as in rc-series 12 8.2p`);
+    return refuse(
+      `"${name}" is no circuit model`,
+      `give one of ${Object.keys(circuitModels).join(', ')}, as in rc-series 12 8.2p`,
+    );
   }
   const { symbols, units } = circuitModels[model];
   const would = `write it as ${model} ${symbols.join(' ')}`;

@@ -2,13 +2,7 @@ import { Complex } from 'complex.js';
 import { interpolate, intervalOf, slopesOf } from '../measured/shape-preserving.ts';
 import type { Span } from '../quantity/span.ts';
 import { partsOf } from './circuit-model.ts';
-import {
-  isMeasured,
-  isModel,
-  type MeasuredTermination,
-  type OneImpedance,
-  type Termination,
-} from './termination.ts';
+import { isMeasured, isModel, type MeasuredTermination, type OneImpedance, type Termination } from './termination.ts';
 
 /**
  * Impedances of a termination over frequency, written into typed arrays for the sweep.

@@ -58,9 +58,12 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
     terminationWords,
   );
   const loads = take('load', readLoads(fields.load, fields['load-behaviour'], attachments), (states) =>
-    states.map(({ name, termination }) => `${name === '' ? '' : `${name}: `}${terminationWords(termination)}`).join('; '),
+    states
+      .map(({ name, termination }) => `${name === '' ? '' : `${name}: `}${terminationWords(termination)}`)
+      .join('; '),
   );
-  const whole = (name: FieldName): number | string => (/^\d+$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim());
+  const whole = (name: FieldName): number | string =>
+    /^\d+$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim();
   const plainNumber = (name: FieldName): number | string => {
     const value = Number(fields[name].trim().replace(',', '.'));
     return fields[name].trim() === '' || !Number.isFinite(value) ? fields[name] : value;

@@ -88,7 +88,9 @@ export function fieldsOf(record: DesignRecord): Record<FieldName, string> {
     frequency: plain(requirement.frequencyHz, 'Hz'),
     source: terminationText(source),
     'source-behaviour': behaviourOf([source]),
-    load: loads.map(({ name, termination }) => (name === '' ? '' : `${name} = `) + terminationText(termination)).join('\n'),
+    load: loads
+      .map(({ name, termination }) => (name === '' ? '' : `${name} = `) + terminationText(termination))
+      .join('\n'),
     'load-behaviour': behaviourOf(loads.map(({ termination }) => termination)),
     aim: record.aim,
     band: spanText(requirement.bandHz, 'Hz'),

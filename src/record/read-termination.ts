@@ -37,7 +37,10 @@ export function readLoads(text: string, behaviour: string, attachments: Attachme
       const which = name === '' ? `state ${String(k + 1)}` : name;
       return lines.length > 1 ? refuse(`${which}: ${reading.why}`, reading.would) : reading;
     }
-    states.push({ name: name === '' && lines.length > 1 ? `state ${String(k + 1)}` : name, termination: reading.value });
+    states.push({
+      name: name === '' && lines.length > 1 ? `state ${String(k + 1)}` : name,
+      termination: reading.value,
+    });
   }
   return read(states);
 }

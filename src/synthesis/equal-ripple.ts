@@ -50,7 +50,10 @@ export function equalRipple(
     absent.push({ form: 'equal ripple', why: 'needs two different resistances; here they are the same' });
   }
   if (bandHz.low === bandHz.high) {
-    return { candidates, absent: [{ form: 'equal ripple', why: 'needs a band with a width; here both edges are the same' }] };
+    return {
+      candidates,
+      absent: [{ form: 'equal ripple', why: 'needs a band with a width; here both edges are the same' }],
+    };
   }
   const centre = Math.sqrt(bandHz.low * bandHz.high);
   for (const { low, high, shuntAt, r } of arrangements) {
@@ -121,7 +124,8 @@ function absorb(rising: Arm[], low: EqualRippleEnd, high: EqualRippleEnd, f0: nu
   const x = low.z.im;
   if (x !== 0) {
     const own = { name: 'series reactance', kind: x > 0 ? 'inductor' : 'capacitor', size: Math.abs(x) } as const;
-    if (low.behaviour !== 'series') return `needs the lower end's reactance to vary as a series part; it is taken as ${low.behaviour}`;
+    if (low.behaviour !== 'series')
+      return `needs the lower end's reactance to vary as a series part; it is taken as ${low.behaviour}`;
     if (own.kind !== first.part) return `the lower end's reactance is of the other kind than the outer ${first.part}`;
     // A series capacitor left over of two in series is larger: 1/C = 1/C1 − 1/Cend.
     const value = own.kind === 'inductor' ? own.size / omega : 1 / (omega * own.size);
@@ -132,7 +136,8 @@ function absorb(rising: Arm[], low: EqualRippleEnd, high: EqualRippleEnd, f0: nu
   const b = susceptance(high.z);
   if (high.z.im !== 0) {
     const kind = b > 0 ? 'capacitor' : 'inductor';
-    if (high.behaviour !== 'parallel') return `needs the higher end's reactance to vary as a parallel part; it is taken as ${high.behaviour}`;
+    if (high.behaviour !== 'parallel')
+      return `needs the higher end's reactance to vary as a parallel part; it is taken as ${high.behaviour}`;
     if (kind !== last.part) return `the higher end's reactance is of the other kind than the outer ${last.part}`;
     const value = kind === 'capacitor' ? b / omega : -1 / (omega * b);
     const rest = kind === 'capacitor' ? last.value - value : 1 / (1 / last.value - 1 / value);

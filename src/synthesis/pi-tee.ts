@@ -51,7 +51,12 @@ export function piTee(
   const qAt = (r: number): number => Math.sqrt(Math.max(0, (kind === 'pi' ? r / virtual : virtual / r) - 1));
   const [qs, ql] = [qAt(atSource), qAt(atLoad)];
   const candidates: Candidate[] = [];
-  for (const signs of [[1, 1], [1, -1], [-1, 1], [-1, -1]] as const) {
+  for (const signs of [
+    [1, 1],
+    [1, -1],
+    [-1, 1],
+    [-1, -1],
+  ] as const) {
     const arms = armsOf(kind, target, load, frequencyHz, { virtual, qs, ql, atSource, atLoad, signs });
     if (candidates.some((other) => sameArms(other.arms, arms))) continue;
     const way = (sign: 1 | -1): string => (sign > 0 ? 'plus' : 'minus');

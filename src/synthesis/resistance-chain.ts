@@ -92,7 +92,8 @@ export function chainArms(
 export const susceptance = (z: Complex): number => -z.im / (z.re * z.re + z.im * z.im);
 
 /** A sum that is exactly zero where only rounding is left. */
-export const sum = (a: number, b: number): number => (Math.abs(a + b) <= zeroWithin * (Math.abs(a) + Math.abs(b)) ? 0 : a + b);
+export const sum = (a: number, b: number): number =>
+  Math.abs(a + b) <= zeroWithin * (Math.abs(a) + Math.abs(b)) ? 0 : a + b;
 
 /** The condition RT <= 1/GL (or its dual RL <= 1/GT) that failed, with its numbers. */
 export function whyNoChain({ shuntAt, low, high }: Chain): string {

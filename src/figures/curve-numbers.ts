@@ -18,6 +18,9 @@ const numeralWidth = 5;
 const numeralHeight = 6;
 /** More room than this between a number and a curve says nothing more. */
 const roomEnough = 8;
+/** With less it could be taken for the other curve's. */
+const leastRoom = 4;
+const everySample = 3;
 
 /**
  * The number of each curve beside it, where it is farthest from the others; none where there is only one curve, or
@@ -32,22 +35,18 @@ export function curveNumbers(frame: Frame, curves: readonly Curve[]): readonly S
   );
   const placed: Box[] = [];
   return drawn.flatMap((points, k): Shape[] => {
+    // Numbers spread along the curves are read more easily than a column of them.
+    const wanted = frame.left + ((frame.right - frame.left) * (k + 0.5)) / curves.length;
     let best: Box | null = null;
-    let most = 1.5;
-    for (const { x, y } of points) {
+    let most = -Infinity;
+    for (const { x, y } of points.filter((_, index) => index % everySample === 0)) {
       for (const top of [y - 3 - numeralHeight, y + 3]) {
         const box = { left: x - numeralWidth / 2, right: x + numeralWidth / 2, top, bottom: top + numeralHeight };
         if (!inside(frame, box) || placed.some((other) => meet(box, other))) continue;
-        // Its own curve has to stay near by as well as clear of it.
-        const own = clearance(points, box);
         const others = Math.min(...drawn.map((curve, j) => (j === k ? Infinity : clearance(curve, box))));
-        // Numbers spread along the curves are read more easily than a column of them.
-        const wanted = frame.left + ((frame.right - frame.left) * (k + 0.5)) / curves.length;
-        const aside = Math.abs(x - wanted) / (frame.right - frame.left);
-        const score = Math.min(own - 1, others, roomEnough) - 4 * aside;
-        if (own > 1 && others > 2.5 && score > most - 4) {
-          if (best === null || score > most) [best, most] = [box, score];
-        }
+        if (others < leastRoom || clearance(points, box) < 1) continue;
+        const score = Math.min(others, roomEnough) - (4 * Math.abs(x - wanted)) / (frame.right - frame.left);
+        if (score > most) [best, most] = [box, score];
       }
     }
     if (best === null) return [];

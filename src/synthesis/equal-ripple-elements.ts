@@ -100,7 +100,7 @@ function roughPoles(n: number, epsilon: number, width: number, middle: number): 
 function refine(start: Complex, squares: readonly Fixed[], k: Fixed): FixedComplex {
   let s: FixedComplex = { re: toFixedPoint(start.re), im: toFixedPoint(start.im) };
   const k2 = times(k, k);
-  for (let step = 0; step < 4; step += 1) {
+  for (let step = 0; step < 3; step += 1) {
     const square = complexTimes(s, s);
     const factors = squares.map((w2) => ({ re: square.re + w2, im: square.im }));
     const p = factors.reduce(complexTimes);

@@ -57,6 +57,13 @@ export function equalRipple(
   }
   const centre = Math.sqrt(bandHz.low * bandHz.high);
   for (const { low, high, shuntAt, r } of arrangements) {
+    // Both forms have the same elements; large numbers of sections take their time.
+    const known = new Map<number, readonly number[]>();
+    const elements = (n: number): readonly number[] => {
+      const values = known.get(n) ?? equalRippleElements(r, bandHz.low / centre, bandHz.high / centre, n).values;
+      known.set(n, values);
+      return values;
+    };
     for (const pass of ['low-pass', 'high-pass'] as const) {
       // One line tells why a form doesn't exist at all; numbers of sections that merely lack are told one by one.
       const refused: Absence[] = [];
@@ -71,8 +78,7 @@ export function equalRipple(
           });
           continue;
         }
-        const { values } = equalRippleElements(r, bandHz.low / centre, bandHz.high / centre, n);
-        const rising = arms(values, low.z.re, centre, pass);
+        const rising = arms(elements(n), low.z.re, centre, pass);
         const why = absorb(rising, low, high, f0);
         if (why !== null) {
           refused.push({ form, why });

@@ -1,8 +1,8 @@
 /**
- * Fixed-point numbers as BigInt with 384 fractional bits, and complex ones. Extracting a ladder from its polynomials
+ * Fixed-point numbers as BigInt with 192 fractional bits, and complex ones. Extracting a ladder from its polynomials
  * loses up to half of the digits at every few elements, which double precision can't carry for six sections.
  */
-const bits = 384n;
+const bits = 192n;
 
 export type Fixed = bigint;
 export const unity: Fixed = 1n << bits;
@@ -18,7 +18,7 @@ export function toFixedPoint(value: number): Fixed {
 export function toNumber(value: Fixed): number {
   const size = value < 0n ? -value : value;
   const length = BigInt(size.toString(2).length);
-  const drop = length > 64n ? length - 64n : 0n;
+  const drop = length > 64n ? length - 64n : 192n;
   return Math.sign(Number(value)) * Number(size >> drop) * 2 ** Number(drop - bits);
 }
 

@@ -1,20 +1,23 @@
 import type { Dossier } from '../../dossier.ts';
 import type { Block } from '../page/block.ts';
+import { ceiling } from './ceiling.ts';
 import { cautions, references, signOff } from './closing.ts';
 import { network } from './network.ts';
 import { options } from './options.ts';
-import { assumptions, requirement, terminations } from './requirement.ts';
+import { assumptions, requirement } from './requirement.ts';
 import { response } from './response.ts';
+import { terminations } from './terminations.ts';
 import { titleBlock } from './title-block.ts';
 import { verdict } from './verdict.ts';
 import { bandwidth, verification } from './verification.ts';
 
-const parts = [
+const inOrder = [
   titleBlock,
   verdict,
   requirement,
   terminations,
   assumptions,
+  ceiling,
   options,
   network,
   response,
@@ -26,4 +29,4 @@ const parts = [
 ];
 
 /** A report from its title block to its sign-off, as content without places. */
-export const blocks = (dossier: Dossier): readonly Block[] => parts.flatMap((part) => part(dossier));
+export const blocks = (dossier: Dossier): readonly Block[] => inOrder.flatMap((part) => part(dossier));

@@ -1,15 +1,17 @@
 import type { Dossier, Option } from '../../dossier.ts';
 import { schematic } from '../../figures/schematic.ts';
 import { formatImpedance, formatQuantity } from '../../quantity/format.ts';
+import { loadLabel, terminationLabel } from '../../record/read-termination.ts';
 import { plain, text, type Block } from '../page/block.ts';
+import { parts } from './parts.ts';
 import { chosenOption, reasonsOf, sentence, valueOf } from './words.ts';
 
 /** The chosen network: who chose it and why, its schematic, and the parts to order. */
 export function network(dossier: Dossier): readonly Block[] {
   const option = chosenOption(dossier.options, dossier.chosen);
-  const heading: Block = { kind: 'heading', number: 5, text: 'Chosen network' };
+  const heading: Block = { kind: 'heading', number: parts.network, text: 'Chosen network' };
   if (option === undefined) return [heading, text('There is no network to choose.')];
-  const { source, load, requirement } = dossier.record;
+  const { source, loads, requirement } = dossier.record;
   const f0 = formatQuantity(requirement.frequencyHz, 'Hz', 5);
   return [
     heading,
@@ -17,8 +19,8 @@ export function network(dossier: Dossier): readonly Block[] {
     { ...text(why(dossier, option)), keep: true },
     {
       kind: 'picture',
-      figure: schematic(option.arms, option.designators, source, load),
-      caption: `Figure 1. Chosen network; at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}.`,
+      figure: schematic(option.arms, option.designators, terminationLabel(source), loadLabel(loads)),
+      caption: `Figure 1. Chosen network; at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}${loads.length > 1 ? ` with the load ${option.worstState}, the state that governs` : ''}.`,
       scale: 1,
     },
     { kind: 'heading', text: 'Parts to order' },
@@ -28,10 +30,10 @@ export function network(dossier: Dossier): readonly Block[] {
 
 function why({ chosenBy, record, options }: Dossier, option: Option): string {
   if (chosenBy === 'proposal') {
-    return `Proposed: the first of ${String(options.length)} in the order considered that meets everything required. ${note(record.selection.reason)}`;
+    return `Proposed: the first of ${String(options.length)} in the order considered that meets everything required.${note(record.selection.reason)}`;
   }
   if (chosenBy === 'nearest') {
-    return `No option meets everything required; this one comes nearest. ${reasonsOf(option)} ${note(record.selection.reason)}`;
+    return `No option meets everything required; this one comes nearest. ${reasonsOf(option)}${note(record.selection.reason)}`;
   }
   const by = record.signOff.prepared.name.trim();
   const who = by === '' ? 'Chosen by the engineer' : `Chosen by the engineer (prepared by ${by})`;
@@ -39,7 +41,7 @@ function why({ chosenBy, record, options }: Dossier, option: Option): string {
   return `${who}. ${reason === '' ? 'No reason was written down.' : `Reason given: “${reason}”`}`;
 }
 
-const note = (reason: string): string => (reason.trim() === '' ? '' : `Note by the engineer: “${reason.trim()}”`);
+const note = (reason: string): string => (reason.trim() === '' ? '' : ` Note by the engineer: “${reason.trim()}”`);
 
 function partsList({ arms, designators }: Option): Block {
   return {

@@ -1,134 +1,86 @@
-import type { Dossier, Option, SectionTable } from '../../dossier.ts';
-import { returnLossWords } from '../../design/words.ts';
-import { schematicThumbnail } from '../../figures/schematic-thumbnail.ts';
-import { formatFixed } from '../../quantity/format.ts';
-import { plain, text, type Block, type Paragraph, type Row } from '../page/block.ts';
-import { attenuation, partsOf, reasonsOf, sentence } from './words.ts';
+import type { Dossier, Option } from '../../dossier.ts';
+import { plain, text, type Block } from '../page/block.ts';
+import { methodAsked, methodNames } from './methods.ts';
+import { compactRow, optionColumns, optionRow } from './option-row.ts';
+import { parts } from './parts.ts';
+import { sectionsTable } from './sections.ts';
+
+/** More options than these would bury the one that matters if each were drawn. */
+const drawnAtMost = 12;
 
 /** Every network that exists with its verdict, and every form that has none with the inequality that fails. */
 export function options(dossier: Dossier): readonly Block[] {
-  const { options: list, absent, sections } = dossier;
-  const meeting = list.filter(({ meets }) => meets).length;
+  const { options: list, absent, sections, record, minimum } = dossier;
+  const method: Block = text(`Method: ${methodAsked(record)}.`);
   return [
-    { kind: 'heading', number: 4, text: 'Options considered' },
+    { kind: 'heading', number: parts.options, text: 'Options considered' },
+    { ...method, keep: true },
+    { ...text(list.length === 0 ? countWords(dossier) : `${countWords(dossier)} ${minimum}`), keep: list.length > 0 },
     ...(sections === null ? [] : sectionsTable(sections)),
-    ...(sections === null ? [] : [{ kind: 'heading', text: 'Networks' } as const]),
-    { ...text(countWords(list.length, meeting)), keep: list.length > 0 || absent.length > 0 },
-    ...(list.length === 0 ? [] : [optionTable(dossier)]),
+    ...(sections === null || list.length === 0 ? [] : [{ kind: 'heading', text: 'Networks' } as const]),
+    ...(list.length === 0 ? [] : list.length <= drawnAtMost ? [table(list, dossier, optionRow)] : longList(dossier)),
     ...(absent.length === 0 ? [] : absentForms(absent)),
   ];
 }
 
-function countWords(all: number, meeting: number): string {
-  if (all === 0) return 'No network exists.';
-  if (all === 1) return `One network exists; it ${meeting === 1 ? 'meets' : 'does not meet'} everything required.`;
-  const count = `${String(all)} networks exist`;
+function countWords({ options: list, record }: Dossier): string {
+  const all = list.length;
+  const meeting = list.filter(({ meets }) => meets).length;
+  const searched = record.method === 'fitted' || record.method === 'all';
+  if (all === 0) return searched ? 'No network was found.' : 'No network exists.';
+  if (all === 1) {
+    return `One network ${searched ? 'was found' : 'exists'}; it ${meeting === 1 ? 'meets' : 'does not meet'} everything required.`;
+  }
+  const count = `${String(all)} networks ${searched ? 'were found' : 'exist'}`;
   if (meeting === 0) return `${count}; none meets everything required.`;
   if (meeting === all) return `${count}; ${all === 2 ? 'both' : 'all'} meet everything required.`;
   return `${count}; ${String(meeting)} ${meeting === 1 ? 'meets' : 'meet'} everything required.`;
 }
 
-function optionTable({ options: list, chosen, proposed }: Dossier): Block {
-  return {
-    kind: 'table',
-    columns: [
-      { title: 'No.', share: 14 },
-      { title: 'Network, source on the left', share: 172 },
-      { title: 'Half-power band', share: 100 },
-      { title: 'Worst return\u00a0loss', share: 50, align: 'end' },
-      { title: 'Attenuation at\u00a02f₀', share: 50, align: 'end' },
-      { title: 'Attenuation at\u00a03f₀', share: 50, align: 'end' },
-    ],
-    rows: list.map((option, k) => row(option, k + 1, option.id === chosen, option.id === proposed)),
-  };
-}
+const table = (list: readonly Option[], dossier: Dossier, row: typeof optionRow): Block => ({
+  kind: 'table',
+  columns: optionColumns,
+  rows: list.map((option) => row(option, dossier)),
+});
 
-function row(option: Option, number: number, chosen: boolean, proposed: boolean): Row {
-  const { title, arms, harmonicDb, worstReturnLossDb, halfPower, dc, meets, cautions } = option;
-  const harmonic = (order: 2 | 3): string => {
-    const found = harmonicDb.find((entry) => entry.order === order);
-    return found === undefined ? '–' : attenuation(found.attenuationDb);
-  };
-  const standing = [chosen ? 'chosen' : '', proposed && !chosen ? 'proposed' : ''].filter((word) => word !== '');
-  const below: Paragraph[] = [
-    {
-      spans: [
-        {
-          text: `${meets ? 'Meets' : 'Falls short'}${standing.length === 0 ? '' : ` (${standing.join(', ')})`}: `,
-          bold: true,
-        },
-        { text: reasonsOf(option) },
-      ],
-      style: 'small',
-    },
-    plain(`DC: ${sentence(dc.words).replace(/^./u, (letter) => letter.toLowerCase())}`, 'small'),
-    ...(cautions.length === 0
-      ? []
-      : [
-          {
-            spans: [{ text: `Cautions: ${cautions.map(sentence).join(' ')}`, tone: 'muted' }],
-            style: 'small',
-          } as const,
-        ]),
+/** First what was chosen and what is proposed, drawn; then all by method, or by number of sections, in short. */
+function longList(dossier: Dossier): readonly Block[] {
+  const { options: list, chosen, proposed, record } = dossier;
+  const first = list.filter(({ id }) => id === chosen || id === proposed);
+  const title = (option: Option): string => (record.method === 'all' ? methodNames[option.method] : 'All networks');
+  const groups = new Map<string, Option[]>();
+  for (const option of list) {
+    const group = groups.get(title(option));
+    if (group === undefined) groups.set(title(option), [option]);
+    else group.push(option);
+  }
+  return [
+    ...(first.length === 0 ? [] : [table(first, dossier, optionRow)]),
+    text(
+      'All networks follow in short, numbered in the order considered; the DC path and the cautions are told of those above alone.',
+    ),
+    ...[...groups].flatMap(([name, group]): readonly Block[] => [
+      { kind: 'heading', text: name },
+      table(group, dossier, compactRow),
+    ]),
   ];
-  return {
-    cells: [
-      [plain(String(number), 'small')],
-      [
-        { spans: [{ text: title, bold: true }], style: 'small' },
-        { kind: 'picture', figure: schematicThumbnail(arms), scale: 0.9 },
-        plain(partsOf(option), 'small'),
-      ],
-      [plain(halfPower.words, 'small')],
-      [plain(worstReturnLossDb === null ? 'no band' : returnLossWords(worstReturnLossDb), 'small')],
-      [plain(harmonic(2), 'small')],
-      [plain(harmonic(3), 'small')],
-    ],
-    below: { from: 2, paragraphs: below },
-    marked: chosen,
-  };
 }
 
 function absentForms(absent: Dossier['absent']): readonly Block[] {
+  const reasons = [...new Set(absent.map(({ why }) => why))];
   return [
     { kind: 'heading', text: 'Forms without a network' },
     {
       kind: 'table',
       columns: [
-        { title: 'Form', share: 30 },
-        { title: 'What fails', share: 70 },
+        { title: 'Form', share: 40 },
+        { title: 'What fails', share: 60 },
       ],
-      rows: absent.map(({ form, why }) => ({ cells: [[plain(form, 'small')], [plain(why, 'small')]] })),
-    },
-  ];
-}
-
-function sectionsTable({ rows, words }: SectionTable): readonly Block[] {
-  return [
-    { kind: 'heading', text: 'Number of sections' },
-    { ...text(words), keep: true },
-    {
-      kind: 'table',
-      columns: [
-        { title: 'Sections', share: 34, align: 'end' },
-        { title: 'Parts', share: 22, align: 'end' },
-        { title: 'Form', share: 38 },
-        { title: 'Shunt arm\u00a0at', share: 38 },
-        { title: 'Q of a\u00a0section', share: 34, align: 'end' },
-        { title: 'Worst return\u00a0loss', share: 46, align: 'end' },
-        { title: 'Holds', share: 24 },
-        { title: 'Half-power band', share: 166 },
-      ],
-      rows: rows.map(({ sections, parts, form, shuntAt, sectionQ, worstReturnLossDb, holds, halfPower }) => ({
+      // Forms that fail for one reason stand together.
+      rows: reasons.map((reason) => ({
         cells: [
-          [plain(String(sections), 'small')],
-          [plain(String(parts), 'small')],
-          [plain(form, 'small')],
-          [plain(shuntAt, 'small')],
-          [plain(formatFixed(sectionQ, 3), 'small')],
-          [plain(worstReturnLossDb === null ? 'no band' : returnLossWords(worstReturnLossDb), 'small')],
-          [plain(holds === null ? '–' : holds ? 'yes' : 'no', 'small')],
-          [plain(halfPower.words, 'small')],
+          absent.filter(({ why }) => why === reason).map(({ form }) => plain(form, 'small')),
+          [plain(reason, 'small')],
         ],
       })),
     },

@@ -4,24 +4,28 @@ import { gainPlot } from '../../figures/gain-plot.ts';
 import { reflectionPlane } from '../../figures/reflection-plane.ts';
 import { returnLossPlot } from '../../figures/return-loss-plot.ts';
 import { formatFixed, formatQuantity, formatRead } from '../../quantity/format.ts';
-import { plain, text, type Block } from '../page/block.ts';
+import { plain, text, type Block, type Column, type Row } from '../page/block.ts';
+import { parts } from './parts.ts';
 import { chosenOption, sampleAt, spanRead } from './words.ts';
 
 /** The sweep in pictures, and its figures at the frequencies that the requirement names. */
 export function response(dossier: Dossier): readonly Block[] {
-  const heading: Block = { kind: 'heading', number: 6, text: 'Response' };
+  const heading: Block = { kind: 'heading', number: parts.response, text: 'Response' };
   const option = chosenOption(dossier.options, dossier.chosen);
-  const { response: swept, record } = dossier;
-  if (option === undefined || swept === null) return [heading, text('Without a network there is no response.')];
+  const { responses, record } = dossier;
+  const [swept] = responses;
+  if (option === undefined || swept === undefined) return [heading, text('Without a network there is no response.')];
   const { requirement } = record;
   const span = `${formatQuantity(swept.spanHz.low, 'Hz')} to ${formatQuantity(swept.spanHz.high, 'Hz')}`;
+  const into = responses.length > 1 ? ` into each of ${String(responses.length)} load states` : '';
+  const governing = responses.length > 1 ? ` of ${swept.state}` : '';
   return [
     heading,
-    { ...text(`Swept from ${span}, ${String(swept.frequencyHz.length)} points.`), keep: true },
-    ...figuresAt(swept, requirement),
+    { ...text(`Swept from ${span}${into}, ${String(swept.frequencyHz.length)} points.`), keep: true },
+    ...figuresAt(responses, requirement),
     {
       kind: 'picture',
-      figure: returnLossPlot(swept, requirement),
+      figure: returnLossPlot(responses, requirement),
       caption:
         requirement.returnLossDb === null
           ? 'Figure 2. Return loss.'
@@ -30,52 +34,59 @@ export function response(dossier: Dossier): readonly Block[] {
     },
     {
       kind: 'picture',
-      figure: gainPlot(swept, requirement, option.halfPower),
-      caption:
-        'Figure 3. Transducer gain; the dashed line lies 3.01 dB below the peak, with the half-power edges on it.',
+      figure: gainPlot(responses, requirement, option.halfPower),
+      caption: `Figure 3. Transducer gain; the dashed line lies 3.01 dB below the peak${governing}, with the half-power edges on it.`,
       scale: 1.1,
     },
     {
       kind: 'picture',
-      figure: reflectionPlane(swept, requirement),
+      figure: reflectionPlane(responses, requirement),
       caption: `Figure 4. Reflection coefficient at the source for the ${record.aim} aim.`,
       scale: 1.1,
     },
   ];
 }
 
-function figuresAt(swept: Response, { frequencyHz, bandHz }: Dossier['record']['requirement']): readonly Block[] {
+function figuresAt(
+  responses: readonly Response[],
+  { frequencyHz, bandHz }: Dossier['record']['requirement'],
+): readonly Block[] {
   const named: readonly (readonly [string, number])[] = [
     ...(bandHz === null ? [] : ([['Lower band edge', bandHz.low]] as const)),
     ['Design frequency', frequencyHz],
     ...(bandHz === null ? [] : ([['Upper band edge', bandHz.high]] as const)),
   ];
-  const rows = named.flatMap(([name, hertz]) => {
-    const k = sampleAt(swept, hertz);
-    if (k < 0) return [];
-    const ratio = swept.vswr[k] ?? 0;
-    const figures = [
-      formatRead(hertz, 'Hz'),
-      returnLossWords(swept.returnLossDb[k] ?? 0),
-      ratio >= 1e4 ? '> 10 000' : formatFixed(ratio, 3),
-      `${formatFixed(swept.mismatchLossDb[k] ?? 0, 3)} dB`,
-      `${formatFixed(swept.transducerGainDb[k] ?? 0, 3)} dB`,
-    ];
-    return [{ cells: [[plain(name)], ...figures.map((figure) => [plain(figure)])] }];
-  });
+  const several = responses.length > 1;
+  const rows = responses.flatMap((swept, state) =>
+    named.flatMap(([name, hertz], k): readonly Row[] => {
+      const figures = figuresOf(swept, hertz);
+      if (figures === null) return [];
+      const first = k > 0 ? '' : `${swept.state}${state === 0 ? ' (governs)' : ''}`;
+      return [{ cells: [[plain(several ? first : name)], ...figures.map((figure) => [plain(figure)])] }];
+    }),
+  );
   if (rows.length === 0) return [];
+  const columns: readonly Column[] = [
+    { title: several ? 'Load state' : 'At', share: 22 },
+    { title: 'Frequency', share: 17, align: 'end' },
+    { title: 'Return loss', share: 15, align: 'end' },
+    { title: 'VSWR', share: 12, align: 'end' },
+    { title: 'Mismatch loss', share: 17, align: 'end' },
+    { title: 'Transducer gain', share: 18, align: 'end' },
+  ];
+  return [{ kind: 'table', columns, rows }];
+}
+
+/** Figures at one frequency; null where the sweep doesn't hold it. */
+function figuresOf(swept: Response, hertz: number): readonly string[] | null {
+  const k = sampleAt(swept, hertz);
+  if (k < 0) return null;
+  const ratio = swept.vswr[k] ?? 0;
   return [
-    {
-      kind: 'table',
-      columns: [
-        { title: 'At', share: 22 },
-        { title: 'Frequency', share: 17, align: 'end' },
-        { title: 'Return loss', share: 15, align: 'end' },
-        { title: 'VSWR', share: 12, align: 'end' },
-        { title: 'Mismatch loss', share: 17, align: 'end' },
-        { title: 'Transducer gain', share: 18, align: 'end' },
-      ],
-      rows,
-    },
+    formatRead(hertz, 'Hz'),
+    returnLossWords(swept.returnLossDb[k] ?? 0),
+    ratio >= 1e4 ? '> 10 000' : formatFixed(ratio, 3),
+    `${formatFixed(swept.mismatchLossDb[k] ?? 0, 3)} dB`,
+    `${formatFixed(swept.transducerGainDb[k] ?? 0, 3)} dB`,
   ];
 }

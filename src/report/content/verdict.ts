@@ -3,6 +3,7 @@ import { returnLossWords } from '../../design/words.ts';
 import { returnLossDb } from '../../network/figures-of-merit.ts';
 import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { plain, type Block } from '../page/block.ts';
+import { parts } from './parts.ts';
 import { chosenOption, partsOf, reasonsOf } from './words.ts';
 
 /** The answer first: whether the chosen network meets what was asked, why, and its leading figures. */
@@ -10,10 +11,10 @@ export function verdict(dossier: Dossier): readonly Block[] {
   const option = chosenOption(dossier.options, dossier.chosen);
   if (option === undefined) {
     return bar('No network', [
-      'No network of the kind asked for matches these terminations; the reasons follow in part 4.',
+      `No network of the kind asked for matches these terminations; the reasons follow in part ${String(parts.options)}.`,
     ]);
   }
-  const proof = dossier.evidence?.pass === false ? ['Verification fails: see part 7 before using any figure.'] : [];
+  const proof = dossier.evidence?.pass === false ? [`Verification fails: see part ${String(parts.verification)} before using any figure.`] : [];
   const words = option.meets ? [reasonsOf(option)] : [reasonsOf(option), shortfall(dossier)];
   return [
     ...bar(option.meets ? 'Meets the requirement' : 'Falls short of the requirement', [
@@ -25,10 +26,11 @@ export function verdict(dossier: Dossier): readonly Block[] {
   ];
 }
 
-function shortfall({ proposed, options }: Dossier): string {
+function shortfall({ proposed, options, ceiling }: Dossier): string {
   const other = chosenOption(options, proposed);
   const instead = other === undefined ? 'No option meets everything.' : `${other.title} would meet everything.`;
-  return `${instead} Issuing this document needs a written deviation.`;
+  const limit = ceiling?.verdict === 'out of reach' ? ` ${ceiling.words}` : '';
+  return `${instead}${limit} Issuing this document needs a written deviation.`;
 }
 
 function bar(headline: string, words: readonly string[]): readonly Block[] {
@@ -46,15 +48,16 @@ function bar(headline: string, words: readonly string[]): readonly Block[] {
 
 function figures({ record }: Dossier, option: Option): { readonly name: string; readonly value: string }[] {
   const worst = option.worstReturnLossDb;
+  const into = option.states.length > 1 ? `, ${option.worstState}` : '';
   const f0 = formatQuantity(record.requirement.frequencyHz, 'Hz', 5);
   return [
     {
-      name: worst === null ? `Return loss at ${f0}` : 'Worst return loss in the band',
+      name: worst === null ? `Return loss at ${f0}${into}` : `Worst return loss in the band${into}`,
       value: worst === null ? atDesignFrequency(option) : returnLossWords(worst),
     },
-    { name: `Impedance seen at ${f0}`, value: formatImpedance(option.seen.r, option.seen.x) },
-    { name: `Transducer gain at ${f0}`, value: formatFixed(option.transducerGain, 6) },
-    { name: 'Half-power band', value: option.halfPower.words },
+    { name: `Impedance seen at ${f0}${into}`, value: formatImpedance(option.seen.r, option.seen.x) },
+    { name: `Transducer gain at ${f0}${into}`, value: formatFixed(option.transducerGain, 6) },
+    { name: `Half-power band${into}`, value: option.halfPower.words },
   ];
 }
 

@@ -2,11 +2,12 @@ import type { Dossier } from '../../dossier.ts';
 import { attenuationDb } from '../../network/figures-of-merit.ts';
 import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { plain, text, type Block } from '../page/block.ts';
+import { parts } from './parts.ts';
 import { chosenOption, powerOfTen } from './words.ts';
 
 /** Independent routes to the same figures, and how far they lie apart. */
 export function verification({ evidence }: Dossier): readonly Block[] {
-  const heading: Block = { kind: 'heading', number: 7, text: 'Verification' };
+  const heading: Block = { kind: 'heading', number: parts.verification, text: 'Verification' };
   if (evidence === null) return [heading, text('Without a network there is nothing to verify.')];
   const at = evidence.frequenciesHz.map((hertz) => formatQuantity(hertz, 'Hz', 5)).join(', ');
   return [
@@ -62,10 +63,12 @@ export function verification({ evidence }: Dossier): readonly Block[] {
 
 /** The half-power bandwidth by the rule and by the sweep, side by side. */
 export function bandwidth({ options, chosen }: Dossier): readonly Block[] {
-  const heading: Block = { kind: 'heading', number: 8, text: 'Half-power bandwidth' };
+  const heading: Block = { kind: 'heading', number: parts.bandwidth, text: 'Half-power bandwidth' };
   const option = chosenOption(options, chosen);
   if (option === undefined) return [heading, text('Without a network there is no bandwidth.')];
-  const { loadedQ, bandwidthFromQHz, halfPower, bandwidthNote } = option;
+  const { loadedQ, bandwidthFromQHz, halfPower, bandwidthNote, states, worstState } = option;
+  const several = states.length > 1;
+  const into = several ? `${worstState}: ` : '';
   return [
     heading,
     {
@@ -83,18 +86,18 @@ export function bandwidth({ options, chosen }: Dossier): readonly Block[] {
             [plain('not given by this rule')],
           ],
         },
-        {
+        ...states.map(({ name, halfPower: swept }) => ({
           cells: [
-            [plain('From the sweep, 3.01 dB below the peak')],
-            [plain(halfPower.bandwidthHz === null ? 'not bounded' : formatQuantity(halfPower.bandwidthHz, 'Hz'))],
-            [plain(halfPower.words)],
+            [plain(`From the sweep, 3.01 dB below the peak${several ? `, ${name}` : ''}`)],
+            [plain(swept.bandwidthHz === null ? 'not bounded' : formatQuantity(swept.bandwidthHz, 'Hz'))],
+            [plain(swept.words)],
           ],
-        },
+        })),
       ],
     },
-    text(bandwidthNote),
+    text(into + bandwidthNote),
     text(
-      `Peak: ${formatFixed(0 - attenuationDb(halfPower.peakGain), 3)} dB at ${formatQuantity(halfPower.peakHz, 'Hz', 5)}.`,
+      `${several ? `Peak of ${worstState}` : 'Peak'}: ${formatFixed(0 - attenuationDb(halfPower.peakGain), 3)} dB at ${formatQuantity(halfPower.peakHz, 'Hz', 5)}.`,
     ),
   ];
 }

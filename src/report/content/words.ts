@@ -17,8 +17,10 @@ export const spanRead = ({ low, high }: Span, unit: 'Hz' | 'H' | 'F'): string =>
   `${formatRead(low, unit)} to ${formatRead(high, unit)}`;
 
 /** Attenuation at a harmonic in dB, with its sign. */
-export const attenuation = (value: number): string =>
-  Math.abs(value) > 100 ? `${value < 0 ? '< −' : '> '}100 dB` : `${formatFixed(value, 1)} dB`;
+export const attenuation = (value: number | null): string =>
+  value === null
+    ? 'outside the data'
+    : Math.abs(value) > 100 ? `${value < 0 ? '< −' : '> '}100 dB` : `${formatFixed(value, 1)} dB`;
 
 /** A small number in powers of ten: "3.1 × 10⁻¹⁵". */
 export function powerOfTen(value: number): string {

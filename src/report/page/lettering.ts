@@ -17,6 +17,9 @@ const invisible = /[\u00ad\u034f\u061c\u200b-\u200f\u202a-\u202e\u2060-\u206f\uf
 const blank = /(?:[^\S\u00a0]|[\u0000-\u001f\u007f-\u009f])+/gu;
 /** A space that belongs to a quantity: before its unit, and around the sign of an impedance. */
 const beforeUnit = /(?<=\d) (?=(?:[TGMkmµnpfa]?(?:Hz|Ω|H|F|W|V|A)|dB|%)(?![\p{L}\d]))/gu;
+/** A writer's apostrophe and quotation marks where a typewriter's were typed. */
+const apostrophe = /(?<=\p{L})'/gu;
+const quoted = /(?<![^\s(])"([^"\s](?:[^"]*[^"\s])?)"(?![\p{L}\d])/gu;
 const aroundSign = /(?<=[\d∞]) ([−+]) (?=j\d)/gu;
 
 export function lettering(regular: Typeface, bold: Typeface): Lettering {
@@ -25,7 +28,8 @@ export function lettering(regular: Typeface, bold: Typeface): Lettering {
     width: (text, size, heavy) => widths[heavy ? 1 : 0](text) * size,
     printable: (text) => {
       const clean = text.normalize('NFC').replace(invisible, '').replace(blank, ' ').trim();
-      const whole = clean.replace(beforeUnit, '\u00a0').replace(aroundSign, '\u00a0$1\u00a0');
+      const marked = clean.replace(apostrophe, '’').replace(quoted, '“$1”');
+      const whole = marked.replace(beforeUnit, '\u00a0').replace(aroundSign, '\u00a0$1\u00a0');
       let out = '';
       for (const letter of whole) {
         const code = letter.codePointAt(0) ?? 0;

@@ -30,9 +30,7 @@ const everySample = 3;
  */
 export function curveNumbers(frame: Frame, curves: readonly Curve[]): readonly Shape[] {
   if (curves.length < 2) return [];
-  const drawn = curves.map(({ hertz, values }) =>
-    hertz.map((hz, k) => ({ x: frame.x(hz), y: frame.y(values[k]!) })),
-  );
+  const drawn = curves.map(({ hertz, values }) => hertz.map((hz, k) => ({ x: frame.x(hz), y: frame.y(values[k]!) })));
   const placed: Box[] = [];
   return drawn.flatMap((points, k): Shape[] => {
     // Numbers spread along the curves are read more easily than a column of them.

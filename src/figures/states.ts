@@ -23,9 +23,7 @@ export function stateStroke(k: number): {
   readonly dash?: readonly number[];
 } {
   const dash = dashes[k % dashes.length]!;
-  return dash.length === 0
-    ? { stroke: 'accent', width: stroke.heavy }
-    : { stroke: 'ink', width: 0.9, dash };
+  return dash.length === 0 ? { stroke: 'accent', width: stroke.heavy } : { stroke: 'ink', width: 0.9, dash };
 }
 
 const longest = 120;

@@ -12,7 +12,10 @@ export function requirement({ record }: Dossier): readonly Block[] {
   const rows: readonly (readonly [string, string])[] = [
     ['Design frequency f₀', formatRead(frequencyHz, 'Hz')],
     ['Band to hold', bandHz === null ? 'none: the design frequency alone' : spanRead(bandHz, 'Hz')],
-    ['Return loss', returnLossDb === null ? 'not required' : `at least ${formatRead(returnLossDb, 'dB')}${everywhere(record)}`],
+    [
+      'Return loss',
+      returnLossDb === null ? 'not required' : `at least ${formatRead(returnLossDb, 'dB')}${everywhere(record)}`,
+    ],
     [
       'Aim',
       record.aim === 'conjugate'

@@ -14,7 +14,10 @@ export function verdict(dossier: Dossier): readonly Block[] {
       `No network of the kind asked for matches these terminations; the reasons follow in part ${String(parts.options)}.`,
     ]);
   }
-  const proof = dossier.evidence?.pass === false ? [`Verification fails: see part ${String(parts.verification)} before using any figure.`] : [];
+  const proof =
+    dossier.evidence?.pass === false
+      ? [`Verification fails: see part ${String(parts.verification)} before using any figure.`]
+      : [];
   const words = option.meets ? [reasonsOf(option)] : [reasonsOf(option), shortfall(dossier)];
   return [
     ...bar(option.meets ? 'Meets the requirement' : 'Falls short of the requirement', [

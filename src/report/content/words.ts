@@ -20,7 +20,9 @@ export const spanRead = ({ low, high }: Span, unit: 'Hz' | 'H' | 'F'): string =>
 export const attenuation = (value: number | null): string =>
   value === null
     ? 'outside the data'
-    : Math.abs(value) > 100 ? `${value < 0 ? '< −' : '> '}100 dB` : `${formatFixed(value, 1)} dB`;
+    : Math.abs(value) > 100
+      ? `${value < 0 ? '< −' : '> '}100 dB`
+      : `${formatFixed(value, 1)} dB`;
 
 /** A small number in powers of ten: "3.1 × 10⁻¹⁵". */
 export function powerOfTen(value: number): string {

@@ -1,0 +1,117 @@
+import type { Dossier, Option, StateFigures } from '../../dossier.ts';
+import { returnLossWords } from '../../design/words.ts';
+import { schematicThumbnail } from '../../figures/schematic-thumbnail.ts';
+import { returnLossDb } from '../../network/figures-of-merit.ts';
+import { formatFixed, formatQuantity } from '../../quantity/format.ts';
+import { plain, type Cell, type Column, type Paragraph, type Row } from '../page/block.ts';
+import { methodNames } from './methods.ts';
+import { attenuation, partsOf, reasonsOf, sentence } from './words.ts';
+
+export const optionColumns: readonly Column[] = [
+  { title: 'No.', share: 15 },
+  { title: 'Network, source on the left', share: 158 },
+  { title: 'Half-power band', share: 92 },
+  { title: 'Worst return\u00a0loss', share: 48, align: 'end' },
+  { title: 'Loss at the\u00a0stated\u00a0Q', share: 42, align: 'end' },
+  { title: 'Attenuation at\u00a02f₀', share: 48, align: 'end' },
+  { title: 'Attenuation at\u00a03f₀', share: 48, align: 'end' },
+];
+
+/** An option in full: its drawing, and under its figures the verdict, the states, DC and cautions. */
+export function optionRow(option: Option, dossier: Dossier): Row {
+  const { title, arms, dc, cautions, id } = option;
+  // What the line on DC says needn't be said again as a caution.
+  const further = cautions.filter((words) => !/^A (?:shunt inductor shorts|series capacitor blocks) DC\b/u.test(words));
+  const below: Paragraph[] = [
+    verdictLine(option, dossier),
+    ...figuresBelow(option, dossier),
+    plain(`DC: ${sentence(dc.words).replace(/^./u, (letter) => letter.toLowerCase())}`, 'small'),
+    ...(further.length === 0
+      ? []
+      : [
+          { spans: [{ text: `Cautions: ${further.map(sentence).join(' ')}`, tone: 'muted' }], style: 'small' } as const,
+        ]),
+  ];
+  return {
+    cells: [
+      [plain(numberOf(option, dossier), 'small')],
+      [
+        { spans: [{ text: title, bold: true }], style: 'small' },
+        { kind: 'picture', figure: schematicThumbnail(arms), scale: 0.9 },
+        plain(partsOf(option), 'small'),
+        ...(dossier.record.method === 'all' ? [plain(`Method: ${methodNames[option.method]}`, 'small')] : []),
+      ],
+      ...figures(option),
+    ],
+    below: { from: 2, paragraphs: below },
+    marked: id === dossier.chosen,
+  };
+}
+
+/** One of many: name, values, figures and verdict, without a drawing. */
+export function compactRow(option: Option, dossier: Dossier): Row {
+  return {
+    cells: [
+      [plain(numberOf(option, dossier), 'small')],
+      [{ spans: [{ text: option.title, bold: true }], style: 'small' }],
+      ...figures(option),
+    ],
+    below: {
+      from: 1,
+      paragraphs: [plain(partsOf(option), 'small'), verdictLine(option, dossier), ...figuresBelow(option, dossier)],
+    },
+    marked: option.id === dossier.chosen,
+  };
+}
+
+const numberOf = ({ id }: Option, { options }: Dossier): string =>
+  String(options.findIndex((option) => option.id === id) + 1);
+
+function figures({ halfPower, worstReturnLossDb, lossDb, harmonicDb }: Option): readonly Cell[] {
+  const harmonic = (order: 2 | 3): string => {
+    const found = harmonicDb.find((entry) => entry.order === order);
+    return found === undefined ? '–' : attenuation(found.attenuationDb);
+  };
+  return [
+    halfPower.words,
+    worstReturnLossDb === null ? 'no band' : returnLossWords(worstReturnLossDb),
+    `${formatFixed(lossDb, 2)} dB`,
+    harmonic(2),
+    harmonic(3),
+  ].map((words) => [plain(words, 'small')]);
+}
+
+function verdictLine(option: Option, { chosen, proposed }: Dossier): Paragraph {
+  const standing = [option.id === chosen ? 'chosen' : '', option.id === proposed ? 'proposed' : ''];
+  const said = standing.filter((word) => word !== '').join(', ');
+  return {
+    spans: [
+      { text: `${option.meets ? 'Meets' : 'Falls short'}${said === '' ? '' : ` (${said})`}: `, bold: true },
+      { text: reasonsOf(option) },
+    ],
+    style: 'small',
+  };
+}
+
+/** Each load state's return loss, and how far a fitted network stays below the ceiling. */
+function figuresBelow(option: Option, { ceiling }: Dossier): readonly Paragraph[] {
+  const { states, worstState, method, ceilingGapDb } = option;
+  const lines: string[] = [];
+  if (states.length > 1) {
+    const each = states.map((state) => stateWords(state) + (state.name === worstState ? ', governs' : ''));
+    lines.push(`By load state: ${each.join('; ')}.`);
+  }
+  if (method === 'fitted' && ceiling !== null && ceilingGapDb !== null) {
+    const name = ceiling.estimate ? 'estimated ceiling' : 'ceiling';
+    const top = returnLossDb(ceiling.bestReflection ** 2);
+    const gap = `${formatFixed(Math.abs(ceilingGapDb), 2)} dB ${ceilingGapDb < 0 ? 'above' : 'below'}`;
+    lines.push(`${top > 100 ? 'Far below' : gap} the ${name} (${returnLossWords(top)}).`);
+  }
+  return lines.map((line) => plain(line, 'small'));
+}
+
+function stateWords({ name, worstReturnLossDb, worstAtHz, reflection }: StateFigures): string {
+  if (worstReturnLossDb === null) return `${name} ${returnLossWords(returnLossDb(reflection ** 2))}`;
+  const at = worstAtHz === null ? '' : ` at ${formatQuantity(worstAtHz, 'Hz', 5)}`;
+  return `${name} ${returnLossWords(worstReturnLossDb)}${at}`;
+}

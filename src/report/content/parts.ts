@@ -1,0 +1,15 @@
+/** Numbers of a report's parts, for their headings and for the sentences that refer to them. */
+export const parts = {
+  requirement: 1,
+  terminations: 2,
+  assumptions: 3,
+  ceiling: 4,
+  options: 5,
+  network: 6,
+  response: 7,
+  verification: 8,
+  bandwidth: 9,
+  cautions: 10,
+  references: 11,
+  signOff: 12,
+} as const;

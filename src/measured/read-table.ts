@@ -1,8 +1,9 @@
+import { Complex } from 'complex.js';
 import { normalise, readQuantity } from '../quantity/read-quantity.ts';
 import { lineProblem } from './line-problem.ts';
 import type { Measured } from './measured.ts';
 
-const headerUnits: Readonly<Record<string, string>> = { hz: '', khz: 'k', mhz: 'M', ghz: 'G' };
+const headerUnits: Readonly<Record<string, string>> = { hz: '', khz: 'k', mhz: 'M', ghz: 'G', thz: 'T' };
 
 /**
  * Reads a pasted table of frequency, R and X, one sample a line: separated by blanks, tabs, semicolons, or commas where
@@ -20,11 +21,19 @@ export function readTable(text: string): Measured {
   const lines = text.split(/\r\n|\r|\n/u);
   for (const [index, raw] of lines.entries()) {
     const line = index + 1;
-    const content = normalise(raw.replace(/[!#].*$/u, ''));
+    // "# f/MHz R X" is a heading too, though it stands in a comment.
+    const content = normalise(
+      raw.replace(/^\s*[!#]\s*(?=f(?:req|[^a-z])|[kmgt]?hz(?![a-z]))/iu, '').replace(/[!#].*$/u, ''),
+    );
     if (content === '') continue;
-    if (frequencyHz.length === 0 && /^[^\d+\-.]/u.test(content)) {
-      const unit = /\b([kMG]?Hz)\b/iu.exec(content)?.[1]?.toLowerCase();
-      if (unit !== undefined) prefix = headerUnits[unit] ?? '';
+    if (frequencyHz.length === 0 && /^["'([]?\p{L}/u.test(content)) {
+      const unit = /(?<!\p{L})(\p{L}?Hz)(?!\p{L})/iu.exec(content)?.[1]?.toLowerCase();
+      if (unit !== undefined) {
+        const named = headerUnits[unit];
+        if (named === undefined)
+          throw lineProblem(line, 'this unit is unknown', 'give Hz, kHz, MHz, GHz or THz', content);
+        prefix = named;
+      }
       continue;
     }
     const cells = cellsOf(content);
@@ -51,10 +60,14 @@ export function readTable(text: string): Measured {
       );
     }
     if (r.value <= 0) throw lineProblem(line, 'the resistance must be above zero', 'give R > 0', cells[1]!);
-    const d = (r.value + referenceOhm) ** 2 + x.value ** 2;
+    const z = new Complex(r.value, x.value);
+    const gamma = z.sub(referenceOhm).div(z.add(referenceOhm));
+    if (!(gamma.abs() < 1)) {
+      throw lineProblem(line, 'it reflects all power', 'give an impedance that takes some', content);
+    }
     frequencyHz.push(f.value);
-    re.push((r.value ** 2 - referenceOhm ** 2 + x.value ** 2) / d);
-    im.push((2 * x.value * referenceOhm) / d);
+    re.push(gamma.re);
+    im.push(gamma.im);
   }
   if (frequencyHz.length < 2) {
     throw lineProblem(0, `${String(frequencyHz.length)} samples are too few to interpolate`, 'give two lines or more');
@@ -70,7 +83,7 @@ export function readTable(text: string): Measured {
 function cellsOf(content: string): string[] {
   if (/[;\t]/u.test(content)) return content.split(/[;\t]/u).map((cell) => cell.trim());
   const byComma = content.split(',').map((cell) => cell.trim());
-  if (byComma.length === 3 && byComma.every((cell) => !/\s/u.test(cell))) return byComma;
+  if (byComma.length === 3 && (byComma.every((cell) => !/\s/u.test(cell)) || !/,\S/u.test(content))) return byComma;
   return content.split(/\s+/u);
 }
 

@@ -12,12 +12,14 @@ const mostSamples = 5_000_000;
  *
  * In version 1 the values of Z and Y files are normalised to the reference; in version 2 they are in Ω and S.
  *
- * @param text  the whole file
+ * @param given the whole file
  * @param name  its name: the ending .s1p or .s2p gives the ports in version 1
  * @param port  which port is the termination
  * @throws InputError with the number of the line that can't be used
  */
-export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Measured {
+export function readTouchstone(given: string, name: string, port: 1 | 2 = 1): Measured {
+  // Some instruments end their lines with a carriage return alone.
+  const text = given.includes('\n') ? given : given.replaceAll('\r', '\n');
   const header = readHeader(text, name);
   if (port > header.ports) {
     throw lineProblem(0, `it has ${String(header.ports)} port`, 'choose port 1', `port ${String(port)}`);
@@ -33,9 +35,12 @@ export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Mea
     if (end < 0) end = text.length;
     line += 1;
     const count = numbersOf(text, start, end, values, line);
+    if (count === keyword) {
+      checkEnd(text.slice(start, Math.min(end, start + 100)), header, line);
+      break;
+    }
     start = end + 1;
     if (count === 0) continue;
-    if (count === keyword) break;
     const hz = values[0]! * header.options.unitHz;
     const previous = frequencyHz[frequencyHz.length - 1];
     if (header.ports === 2 && header.version === 1 && count === 5 && previous !== undefined && hz <= previous) break;
@@ -55,12 +60,21 @@ export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Mea
         String(values[0]),
       );
     }
+    if (frequencyHz.length === header.frequencies) {
+      throw lineProblem(
+        line,
+        `more than the ${String(header.frequencies)} frequencies that [Number of Frequencies] says`,
+        'give their true number',
+      );
+    }
     const gamma = reflectionOf(values, header, port, line);
+    if (Math.hypot(gamma.re, gamma.im) >= 1) {
+      throw lineProblem(line, 'it reflects all power or more', 'give a passive termination', String(values[0]));
+    }
     frequencyHz.push(hz);
     re.push(gamma.re);
     im.push(gamma.im);
     if (frequencyHz.length > mostSamples) throw lineProblem(line, 'more than 5 million samples', 'thin the sweep');
-    if (header.frequencies !== null && frequencyHz.length === header.frequencies) break;
   }
   finish(header, frequencyHz.length, line);
   return {
@@ -69,6 +83,18 @@ export function readTouchstone(text: string, name: string, port: 1 | 2 = 1): Mea
     im: Float64Array.from(im),
     referenceOhm: header.references[port - 1]!,
   };
+}
+
+/** Version 2 ends its network data with one of two keywords; version 1 knows none. */
+function checkEnd(content: string, { version }: Header, line: number): void {
+  const word = content.replace(/!.*$/su, '').trim();
+  if (version === 2 && /^\[(?:end|noise data)\]$/iu.test(word)) return;
+  throw lineProblem(
+    line,
+    'this keyword does not belong among the data',
+    version === 2 ? 'end them with [Noise Data] or [End]' : 'give the keywords of version 2 from [Version] on, or none',
+    word,
+  );
 }
 
 function finish(header: Header, count: number, line: number): void {
@@ -106,8 +132,8 @@ function numbersOf(text: string, start: number, end: number, into: Float64Array,
     }
     const token = text.slice(from, at);
     const value = Number(token);
-    // Number reads "0x10" and "Infinity" too; a number here is digits, point, sign and exponent.
-    if (!Number.isFinite(value) || text.charCodeAt(from + 1) === hexMark) {
+    // Number reads "0x10", "0b1" and "Infinity" too; a number here is digits, point, sign and exponent.
+    if (!Number.isFinite(value) || (text.charCodeAt(from + 1) > digitNine && /[^\deE.+-]/u.test(token))) {
       throw lineProblem(line, 'not a number', 'give a frequency and its values on each line', token);
     }
     if (count < into.length) into[count] = value;
@@ -119,4 +145,4 @@ function numbersOf(text: string, start: number, end: number, into: Float64Array,
 const bang = '!'.charCodeAt(0);
 const hash = '#'.charCodeAt(0);
 const bracket = '['.charCodeAt(0);
-const hexMark = 'x'.charCodeAt(0);
+const digitNine = '9'.charCodeAt(0);

@@ -1,5 +1,5 @@
 import { lineProblem } from './line-problem.ts';
-import { readOptionLine, touchstoneDefaults, type TouchstoneOptions } from './touchstone-options.ts';
+import { readOptionLine, type TouchstoneOptions } from './touchstone-options.ts';
 
 /** All that stands before the data of a Touchstone file. */
 export interface Header {
@@ -49,12 +49,12 @@ export function readHeader(text: string, name: string): Header {
     if (references.length !== 0 && references.length !== ports) {
       throw lineProblem(line, `${String(references.length)} references for ${String(ports)} ports`, 'give one a port');
     }
-    const given = options ?? touchstoneDefaults;
+    if (options === null) throw lineProblem(line + 1, 'no option line before the data', 'give one, as # MHz S MA R 50');
     return {
       version,
       ports,
-      options: given,
-      references: references.length === 0 ? new Array<number>(ports).fill(given.referenceOhm) : references,
+      options,
+      references: references.length === 0 ? new Array<number>(ports).fill(options.referenceOhm) : references,
       order: order ?? '21_12',
       matrix: ports === 1 ? 'full' : matrix,
       frequencies,
@@ -139,6 +139,7 @@ export function readHeader(text: string, name: string): Header {
         inInformation = true;
         break;
       case 'network data':
+        if (version === 1) throw lineProblem(line, '[Version] is missing', 'give [Version] 2.0 or 2.1 first');
         return done();
       case 'number of noise frequencies':
         break;

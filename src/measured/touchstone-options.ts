@@ -13,7 +13,7 @@ export interface TouchstoneOptions {
 const unitsHz: Readonly<Record<string, number>> = { HZ: 1, KHZ: 1e3, MHZ: 1e6, GHZ: 1e9 };
 
 /** What the specification says where the option line doesn't. */
-export const touchstoneDefaults: TouchstoneOptions = { unitHz: 1e9, parameter: 'S', format: 'MA', referenceOhm: 50 };
+const touchstoneDefaults: TouchstoneOptions = { unitHz: 1e9, parameter: 'S', format: 'MA', referenceOhm: 50 };
 
 /**
  * Reads `# MHz S MA R 50`: any order, any case, any of them left out.

@@ -14,28 +14,32 @@ export function reflectionOf(
   port: 1 | 2,
   line: number,
 ): { readonly re: number; readonly im: number } {
-  const { options, ports } = header;
+  const { options } = header;
   const pair = (k: number): Complex => complexOf(values[1 + 2 * k]!, values[2 + 2 * k]!, options.format);
-  if (options.parameter === 'S') {
-    if (ports === 1 || port === 1) return pair(0);
-    return pair(header.matrix === 'full' ? 3 : 2);
-  }
-  const r = header.references[port - 1]!;
-  const own = immittances(pair, header);
-  const near = port === 1 ? own.p11 : own.p22;
-  const far = port === 1 ? own.p22 : own.p11;
-  const otherR = header.references[2 - port] ?? r;
-  const closing = options.parameter === 'Z' ? otherR : 1 / otherR;
-  const seen = ports === 1 ? near : near.sub(own.p12.mul(own.p21).div(far.add(closing)));
-  // Γ = (Z − R)/(Z + R) = (1 − Y·R)/(1 + Y·R)
   const gamma =
-    options.parameter === 'Z'
-      ? seen.sub(r).div(seen.add(r))
-      : new Complex(1, 0).sub(seen.mul(r)).div(seen.mul(r).add(1));
+    options.parameter === 'S'
+      ? pair(port === 1 ? 0 : header.matrix === 'full' ? 3 : 2)
+      : reflectionInto(immittanceSeen(pair, header, port), header.references[port - 1]!, options.parameter);
   if (!Number.isFinite(gamma.re) || !Number.isFinite(gamma.im)) {
-    throw lineProblem(line, 'these values have no reflection coefficient', 'check the impedance or admittance');
+    throw lineProblem(line, 'these values have no reflection coefficient', 'check them');
   }
   return gamma;
+}
+
+/** Γ = (Z − R)/(Z + R) = (1 − Y·R)/(1 + Y·R) */
+function reflectionInto(seen: Complex, r: number, parameter: 'Z' | 'Y'): Complex {
+  return parameter === 'Z' ? seen.sub(r).div(seen.add(r)) : new Complex(1, 0).sub(seen.mul(r)).div(seen.mul(r).add(1));
+}
+
+/** Impedance or admittance of one port, the other closed with its reference; Ω or S. */
+function immittanceSeen(pair: (k: number) => Complex, header: Header, port: 1 | 2): Complex {
+  const { options, ports, references } = header;
+  const own = immittances(pair, header);
+  if (ports === 1) return own.p11;
+  const near = port === 1 ? own.p11 : own.p22;
+  const far = port === 1 ? own.p22 : own.p11;
+  const other = references[2 - port]!;
+  return near.sub(own.p12.mul(own.p21).div(far.add(options.parameter === 'Z' ? other : 1 / other)));
 }
 
 /** Matrix in Ω or S: version 1 writes it normalised to the reference. */

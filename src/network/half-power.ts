@@ -25,7 +25,7 @@ export function edgeGrid(f0: number, range: Span | null = null): Float64Array {
   });
   if (range === null) return grid;
   // The ends of the data are samples too: an edge may lie between the last step and them.
-  const within = grid.filter((hz) => range.low < hz && hz < range.high);
+  const within = grid.filter((hz) => hz === f0 || (range.low < hz && hz < range.high));
   return Float64Array.of(
     ...(range.low < f0 ? [Math.max(range.low, f0 * 1e-6)] : []),
     ...within,

@@ -1,10 +1,10 @@
 import type { Ceiling, Dossier } from '../../dossier.ts';
 import { returnLossWords } from '../../design/words.ts';
 import { returnLossDb } from '../../network/figures-of-merit.ts';
-import { formatFixed, formatQuantity, formatRead } from '../../quantity/format.ts';
+import { formatFixed, formatRead } from '../../quantity/format.ts';
 import { plain, text, type Block, type Row } from '../page/block.ts';
 import { parts } from './parts.ts';
-import { sentence } from './words.ts';
+import { ratio, sentence } from './words.ts';
 
 /** What no lossless network can beat over the band, and the requirement set against it; or why there is no such limit. */
 export function ceiling({ ceiling: found, noCeiling, record }: Dossier): readonly Block[] {
@@ -33,8 +33,8 @@ export function ceiling({ ceiling: found, noCeiling, record }: Dossier): readonl
       columns: 4,
       entries: [
         { name: 'Governing end', value: governs === 'source' ? 'Source' : state === '' ? 'Load' : `Load, ${state}` },
-        { name: 'Its Q at the band’s centre', value: formatQuantity(q, '') },
-        { name: 'Fractional width of the band', value: formatQuantity(fractionalWidth, '') },
+        { name: 'Its Q at the band’s centre', value: ratio(q) },
+        { name: 'Fractional width of the band', value: ratio(fractionalWidth) },
         { name: 'Standing of the figures', value: estimate ? 'Estimate' : 'Exact for lossless networks' },
       ],
     },
@@ -78,6 +78,5 @@ function table({ perResonators, bestReflection, needs, estimate, verdict }: Ceil
             ),
           ]),
     ],
-    together: false,
   };
 }

@@ -1,4 +1,4 @@
-import { formatQuantity } from '../../quantity/format.ts';
+import { formatFixed } from '../../quantity/format.ts';
 import type { DesignRecord, Method } from '../../record/design-record.ts';
 
 /** Methods as the report names them. */
@@ -15,14 +15,18 @@ export const methodNames: Readonly<Record<Method, string>> = {
 
 /** The method with what was asked of it. */
 export function methodAsked(record: DesignRecord): string {
-  const asked = record.method === 'all' ? [chosenQ(record), fit(record)] : [ofMethod(record)];
+  const asked =
+    record.method === 'all'
+      ? [record.q === null ? '' : `Pi and T of Q ${chosenQ(record)}`, fit(record)]
+      : [ofMethod(record)];
   const words = asked.filter((each) => each !== '').join('; ');
   return methodNames[record.method] + (words === '' ? '' : `: ${words}`);
 }
 
 function ofMethod(record: DesignRecord): string {
   const { method, sections, fit: asked } = record;
-  if (method === 'pi' || method === 'tee') return chosenQ(record) || 'Q taken from the least that exists';
+  if (method === 'pi' || method === 'tee')
+    return record.q === null ? 'taken from the least that exists' : chosenQ(record);
   if (method === 'cascade' || method === 'equal-ripple') {
     return sections === 'auto' ? 'the smallest number of sections that holds the requirement' : sectionsWords(sections);
   }
@@ -34,8 +38,7 @@ function ofMethod(record: DesignRecord): string {
 const sectionsWords = (sections: number): string =>
   `${String(sections)} ${sections === 1 ? 'section' : 'sections'}, as asked`;
 
-const chosenQ = ({ q }: DesignRecord): string =>
-  q === null ? '' : `Q ${formatQuantity(q, '', 6).replace(/\.?0+$/u, '')}`;
+const chosenQ = ({ q }: DesignRecord): string => (q === null ? '' : formatFixed(q, 3).replace(/\.?0+$/u, ''));
 
 const fit = ({ fit: { form, shuntInductor, seed } }: DesignRecord): string =>
   [

@@ -9,10 +9,10 @@ import { attenuation, partsOf, reasonsOf, sentence } from './words.ts';
 
 export const optionColumns: readonly Column[] = [
   { title: 'No.', share: 15 },
-  { title: 'Network, source on the left', share: 158 },
-  { title: 'Half-power band', share: 92 },
+  { title: 'Network, source on the left', share: 150 },
+  { title: 'Half-power band', share: 100 },
   { title: 'Worst return\u00a0loss', share: 48, align: 'end' },
-  { title: 'Loss at the\u00a0stated\u00a0Q', share: 42, align: 'end' },
+  { title: 'Loss at stated\u00a0Q', share: 42, align: 'end' },
   { title: 'Attenuation at\u00a02f₀', share: 48, align: 'end' },
   { title: 'Attenuation at\u00a03f₀', share: 48, align: 'end' },
 ];

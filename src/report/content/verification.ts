@@ -68,7 +68,6 @@ export function bandwidth({ options, chosen }: Dossier): readonly Block[] {
   if (option === undefined) return [heading, text('Without a network there is no bandwidth.')];
   const { loadedQ, bandwidthFromQHz, halfPower, bandwidthNote, states, worstState } = option;
   const several = states.length > 1;
-  const into = several ? `${worstState}: ` : '';
   return [
     heading,
     {
@@ -88,16 +87,18 @@ export function bandwidth({ options, chosen }: Dossier): readonly Block[] {
         },
         ...states.map(({ name, halfPower: swept }) => ({
           cells: [
-            [plain(`From the sweep, 3.01 dB below the peak${several ? `, ${name}` : ''}`)],
+            [plain(several ? `From the sweep, ${name}` : 'From the sweep, 3.01 dB below the peak')],
             [plain(swept.bandwidthHz === null ? 'not bounded' : formatQuantity(swept.bandwidthHz, 'Hz'))],
             [plain(swept.words)],
           ],
         })),
       ],
     },
-    text(into + bandwidthNote),
+    text(several && bandwidthFromQHz !== null ? `Against ${worstState}: ${lowerFirst(bandwidthNote)}` : bandwidthNote),
     text(
       `${several ? `Peak of ${worstState}` : 'Peak'}: ${formatFixed(0 - attenuationDb(halfPower.peakGain), 3)} dB at ${formatQuantity(halfPower.peakHz, 'Hz', 5)}.`,
     ),
   ];
 }
+
+const lowerFirst = (words: string): string => words.charAt(0).toLowerCase() + words.slice(1);

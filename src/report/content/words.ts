@@ -24,6 +24,12 @@ export const attenuation = (value: number | null): string =>
       ? `${value < 0 ? '< −' : '> '}100 dB`
       : `${formatFixed(value, 1)} dB`;
 
+/** A number without a unit, to four digits: "0.03974", "6.501". */
+export function ratio(value: number): string {
+  const decimals = value >= 1e-4 && value < 1e6 ? Math.max(0, 3 - Math.floor(Math.log10(value))) : null;
+  return decimals === null ? powerOfTen(value) : formatFixed(value, decimals);
+}
+
 /** A small number in powers of ten: "3.1 × 10⁻¹⁵". */
 export function powerOfTen(value: number): string {
   if (value === 0) return '0';

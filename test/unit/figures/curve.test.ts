@@ -11,6 +11,7 @@ const frame: Frame = {
   x: (hertz) => hertz,
   y: (value) => 10 - value,
   valueSpan: { low: 0, high: 10 },
+  height: 10,
   shapes: [],
 };
 

@@ -29,6 +29,7 @@ export function resonance(lowHz: number, highHz: number, extra: readonly number[
   const v = frequencyHz.map((hertz) => 12 * (hertz / f0 - f0 / hertz));
   const squared = v.map((value) => value ** 2 / (4 + value ** 2));
   return {
+    state: '',
     spanHz: { low: lowHz, high: highHz },
     frequencyHz,
     returnLossDb: squared.map((value) => Math.min(200, -10 * Math.log10(Math.max(value, 1e-20)))),

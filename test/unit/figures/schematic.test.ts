@@ -2,11 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { schematicThumbnail } from '../../../src/figures/schematic-thumbnail.ts';
 import { schematic } from '../../../src/figures/schematic.ts';
 import type { Arm } from '../../../src/network/arm.ts';
-import type { Termination } from '../../../src/network/termination.ts';
 import { outside, overlaps, textsOf } from './overlap.ts';
 
-const source: Termination = { r: 50, x: 0, behaviour: 'constant' };
-const load: Termination = { r: 1234.567, x: -1234.567, behaviour: 'series' };
+const source = '50 Ω';
+const load = '1234.567 − j1234.567 Ω';
 const kinds: readonly Arm[] = [
   { arm: 'series', part: 'inductor', value: 140.2e-9 },
   { arm: 'series', part: 'capacitor', value: 22.6e-12 },

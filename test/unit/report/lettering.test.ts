@@ -23,6 +23,12 @@ describe('lettering(regular, bold)', () => {
     expect(letters.printable('a\u0000b\n\tc')).toBe('a b c');
   });
 
+  it('sets apostrophes and quotation marks as a writer does, and leaves other marks alone', () => {
+    expect(letters.printable(`the source's "free space" can't, 5" and 6" long`)).toBe(
+      'the source’s “free space” can’t, 5" and 6" long',
+    );
+  });
+
   it('ties a figure to its unit and a reactance to its sign', () => {
     expect(letters.printable('151.3 MHz at 9.4 − j61 Ω or 5 Holes')).toBe(
       '151.3\u00a0MHz at 9.4\u00a0−\u00a0j61\u00a0Ω or 5 Holes',

@@ -3,7 +3,9 @@ import type { Dossier } from '../../../src/dossier.ts';
 import { formatImpedance, formatQuantity } from '../../../src/quantity/format.ts';
 import { report } from '../../../src/report/report.ts';
 import { overlaps, readPdf } from './read-pdf.ts';
-import { dossierOf, fonts } from './records.ts';
+import { recordOf } from '../record-of.ts';
+import { design } from '../../../src/design.ts';
+import { dossierOf, fonts, measuredStates } from './records.ts';
 
 const pdf = (dossier: Dossier, paper: 'a4' | 'letter' = 'a4') => report(dossier, { paper, fonts });
 const long = 'W'.repeat(250) + 'i'.repeat(250);
@@ -14,10 +16,10 @@ const dossiers: Readonly<Record<string, Dossier>> = {
   'a cascade': dossierOf('power-stage'),
   'a cascade between reactive ends, both chains': dossierOf('power-stage', () => ({
     source: { r: 20, x: 30, behaviour: 'series' },
-    load: { r: 30, x: -20, behaviour: 'series' },
+    loads: [{ name: '', termination: { r: 30, x: -20, behaviour: 'series' } }],
   })),
   'no part at all': dossierOf('tide-gauge', ({ source, requirement }) => ({
-    load: source,
+    loads: [{ name: '', termination: source }],
     requirement: { ...requirement, blockDc: false },
   })),
   'twelve parts, chosen': dossierOf('power-stage', ({ selection }) => ({
@@ -29,8 +31,37 @@ const dossiers: Readonly<Record<string, Dossier>> = {
   })),
   'an extreme ratio': dossierOf('tide-gauge', () => ({
     source: { r: 1e-3, x: 0, behaviour: 'constant' },
-    load: { r: 1e6, x: 0, behaviour: 'constant' },
+    loads: [{ name: '', termination: { r: 1e6, x: 0, behaviour: 'constant' } }],
   })),
+  'measured states': design(measuredStates),
+  'every method': dossierOf('tide-gauge', ({ fit }) => ({ method: 'all', fit: { ...fit, elements: 2 } })),
+  'a Pi of a chosen Q': design(
+    recordOf({ method: 'pi', frequency: '7.1M', source: '50', load: 'rc-parallel 1k 4.7p', q: '12' }),
+  ),
+  'equal ripple': design(
+    recordOf({
+      method: 'equal-ripple',
+      frequency: '150M',
+      source: '50',
+      load: '200',
+      band: '120M..180M',
+      'return-loss': '20',
+    }),
+  ),
+  'a requirement out of reach': design(
+    recordOf({ frequency: '150M', source: '50', load: 'antenna 14 150M 30', band: '130M..170M', 'return-loss': '14' }),
+  ),
+  'eight states with long names': design(
+    recordOf({
+      frequency: '150M',
+      source: '50',
+      load: Array.from({ length: 8 }, (_, k) => `${'W'.repeat(39)}${k} = rc-series ${8 + 2 * k} ${14 + 2 * k}p`).join(
+        '\n',
+      ),
+      band: '148M..152M',
+      'return-loss': '10',
+    }),
+  ),
   'words of 500 letters': dossierOf('tide-gauge', ({ signOff }) => ({
     identity: { title: long, number: long, revision: long, date: '2026-11-30', ticket: long, owner: long },
     selection: { option: null, reason: `${long} `.repeat(3) + 'reason '.repeat(1500) },
@@ -94,7 +125,7 @@ describe('report(dossier, options)', { timeout: 30_000 }, () => {
       expect(flat).toContain(formatImpedance(chosen.seen.r, chosen.seen.x));
       expect(flat).toContain('Meets the requirement');
       for (const { name: route } of dossier.evidence!.routes) expect(flat).toContain(route);
-      for (const { why } of dossier.absent) expect(flat).toContain(why.replace(/\s+/gu, ' '));
+      for (const { why } of dossier.absent) expect(flat).toContain(why.replace(/\s+/gu, ' ').replaceAll("'", '’'));
       expect(flat).toContain(`A${dossier.assumptions.length} `);
     },
   );
@@ -112,6 +143,69 @@ describe('report(dossier, options)', { timeout: 30_000 }, () => {
   it('names the engineer who chose, and why', async () => {
     const { text } = await readPdf(await pdf(dossiers['twelve parts, chosen']!));
     expect(text).toContain('Chosen by the engineer. Reason given: “Widest band”');
+  });
+
+  const flat = async (name: string): Promise<string> =>
+    (await readPdf(await pdf(dossiers[name]!))).text.replace(/\s+/gu, ' ');
+
+  it('says what no network can beat, on the first page too when it is out of reach', async () => {
+    const dossier = dossiers['a requirement out of reach']!;
+    const words = dossier.ceiling!.words.replaceAll("'", '’');
+    const { pages, text } = await readPdf(await pdf(dossier));
+    expect(pages[0]!.map((word) => word.text).join(' ')).toContain(words);
+    expect(text.replace(/\s+/gu, ' ')).toContain(`Out of reach. ${words}`);
+    expect(await flat('equal ripple')).toContain('4 Ceiling Between two resistances no ceiling exists');
+  });
+
+  it('calls a ceiling from measured data an estimate, with its basis', async () => {
+    const text = await flat('measured states');
+    expect(text).toContain('Estimate. Basis: one-resonance model');
+    expect(text).toContain('Return loss at best (estimate)');
+  });
+
+  it('gives each load state its source, its return loss and its figures, the governing one named', async () => {
+    const dossier = dossiers['measured states']!;
+    const text = await flat('measured states');
+    const { worstState, states } = dossier.options.find(({ id }) => id === dossier.chosen)!;
+    for (const { name, termination } of dossier.record.loads) {
+      if (!('measured' in termination)) throw new Error('the states are measured');
+      expect(text).toContain(`Load, ${name}`);
+      expect(text).toContain(termination.measured.name);
+      expect(text).toContain(`SHA-256 ${termination.measured.sha256}`);
+    }
+    for (const { name, worstReturnLossDb } of states)
+      expect(text).toContain(`${name} ${worstReturnLossDb!.toFixed(2)} dB at`);
+    expect(text).toContain(`${worstState} (governs)`);
+    expect(text).toContain('outside the data');
+  });
+
+  it('prints the least that holds the requirement, and every option of a long list by method', async () => {
+    const dossier = dossiers['every method']!;
+    expect(dossier.options.length).toBeGreaterThan(12);
+    const text = await flat('every method');
+    expect(text).toContain(dossier.minimum);
+    dossier.options.forEach(({ worstReturnLossDb, arms, designators }) => {
+      expect(text).toContain(`${worstReturnLossDb!.toFixed(2)} dB`);
+      arms.forEach(({ part, value }, k) => {
+        expect(text).toContain(`${designators[k]!} ${formatQuantity(value, part === 'inductor' ? 'H' : 'F')}`);
+      });
+    });
+    expect(text).toContain('Meets (chosen, proposed):');
+    expect(text.match(/C\. Bowick/gu)).toHaveLength(1);
+  });
+
+  it('sets typographic apostrophes and quotation marks', async () => {
+    for (const name of ['measured states', 'a requirement out of reach']) {
+      const text = await flat(name);
+      expect(text).not.toMatch(/['"]/u);
+      expect(text).toContain('’');
+    }
+  });
+
+  it('does not repeat as a caution what the line on DC says', async () => {
+    const text = await flat('two parts');
+    expect(text).toContain('DC: ');
+    expect(text).not.toMatch(/Cautions: A (shunt inductor|series capacitor)/u);
   });
 
   it('marks letters that it cannot draw, and says so', async () => {
@@ -136,14 +230,15 @@ describe('report(dossier, options)', { timeout: 30_000 }, () => {
       '1 Requirement',
       '2 Terminations',
       '3 Assumptions',
-      '4 Options considered',
-      '5 Chosen network',
-      '6 Response',
-      '7 Verification',
-      '8 Half-power bandwidth',
-      '9 Cautions',
-      '10 Standards and literature applied',
-      '11 Sign-off',
+      '4 Ceiling',
+      '5 Options considered',
+      '6 Chosen network',
+      '7 Response',
+      '8 Verification',
+      '9 Half-power bandwidth',
+      '10 Cautions',
+      '11 Standards and literature applied',
+      '12 Sign-off',
     ]);
   });
 

@@ -56,9 +56,12 @@ function longList(dossier: Dossier): readonly Block[] {
   }
   return [
     ...(first.length === 0 ? [] : [table(first, dossier, optionRow)]),
-    text(
-      'All networks follow in short, numbered in the order considered; the DC path and the cautions are told of those above alone.',
-    ),
+    {
+      ...text(
+        'All networks follow in short, numbered in the order considered; the DC path and the cautions are told of those above alone.',
+      ),
+      keep: true,
+    },
     ...[...groups].flatMap(([name, group]): readonly Block[] => [
       { kind: 'heading', text: name },
       table(group, dossier, compactRow),

@@ -6,9 +6,14 @@ import { circuitModels, type CircuitModel, type CircuitModelName } from './circu
 
 const isModel = (name: string): name is CircuitModelName => Object.hasOwn(circuitModels, name);
 
-/** Whether a text is meant as a circuit model: it begins with a word. */
-export const namesModel = (text: string): boolean =>
-  /^\s*[a-z]{2,}[a-z-]*(\s|$)/iu.test(text) && !/^\s*(?:ohm)/iu.test(text);
+/** Whether a text is meant as a circuit model: a model's name, or a word with values after it. */
+export function namesModel(text: string): boolean {
+  const [name = '', ...cells] = text.trim().split(/\s+/u);
+  return (
+    isModel(name.toLowerCase()) ||
+    (/^[a-z]+(-[a-z]+)*$/iu.test(name) && name.length > 1 && /^[.\d]/u.test(cells[0] ?? ''))
+  );
+}
 
 /** Reads a circuit model in its plain form, name and values: `rc-series 12 8.2p`. */
 export function readModel(text: string): Reading<CircuitModel> {

@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import type { Aim, Behaviour, Termination } from '../../src/network/termination.ts';
+import type { Aim, Behaviour, OneImpedance } from '../../src/network/termination.ts';
 
 // The same cases in every run; another seed is another run's business.
 fc.configureGlobal({ seed: 20_260_131 });
@@ -16,7 +16,7 @@ export const aim = fc.constantFrom<Aim>('conjugate', 'reflectionless');
 const behaviour = fc.constantFrom<Behaviour>('constant', 'series', 'parallel');
 
 /** R from `low` to `high`, Ω; |X|/R up to `mostQ`, of either sign or none. */
-export const termination = (low: number, high: number, mostQ: number): fc.Arbitrary<Termination> =>
+export const termination = (low: number, high: number, mostQ: number): fc.Arbitrary<OneImpedance> =>
   fc
     .tuple(logUniform(low, high), fc.constantFrom(-1, 0, 1), logUniform(1e-6, mostQ), behaviour)
     .map(([r, sign, q, away]) => ({ r, x: sign === 0 ? 0 : sign * q * r, behaviour: away }));

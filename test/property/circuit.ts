@@ -3,12 +3,12 @@ import type { Arm } from '../../src/network/arm.ts';
 import { ladderInput } from '../../src/network/ladder-input.ts';
 import { prepareLadder } from '../../src/network/ladder.ts';
 import { endsOver, sweep } from '../../src/network/sweep.ts';
-import type { Aim, Termination } from '../../src/network/termination.ts';
+import type { Aim, OneImpedance, Termination } from '../../src/network/termination.ts';
 
-export const impedance = ({ r, x }: Termination): Complex => new Complex(r, x);
+export const impedance = ({ r, x }: OneImpedance): Complex => new Complex(r, x);
 
 /** What the source is to see: ZS* or ZS, from the definition of the aims. */
-export const aimed = ({ r, x }: Termination, aim: Aim): Complex => new Complex(r, aim === 'conjugate' ? -x : x);
+export const aimed = ({ r, x }: OneImpedance, aim: Aim): Complex => new Complex(r, aim === 'conjugate' ? -x : x);
 
 /** |X|/R */
 export const qOf = ({ re, im }: Complex): number => Math.abs(im) / re;

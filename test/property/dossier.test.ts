@@ -6,11 +6,12 @@ import { anyRecord } from './records.ts';
 
 /** Where src/dossier.ts says that null may stand, besides inside the record. */
 const mayBeNull = [
-  /^\.(sections|proposed|chosen|response|evidence)$/,
-  /^\.options\[\]\.(worstReturnLossDb|worstAtHz|loadedQ|bandwidthFromQHz)$/,
+  /^\.(sections|proposed|chosen|ceiling|evidence)$/,
+  /^\.options\[\]\.(states\[\]\.)?(worstReturnLossDb|worstAtHz|loadedQ|bandwidthFromQHz|ceilingGapDb)$/,
   /\.halfPower\.(lowHz|highHz|bandwidthHz)$/,
   /^\.sections\.(smallest|bestReturnLossDb)$/,
   /^\.sections\.rows\[\]\.(worstReturnLossDb|holds)$/,
+  /^\.ceiling\.needs$/,
   /^\.evidence\.routes\[\]\.(seen|transducerGain)$/,
 ];
 
@@ -52,7 +53,7 @@ describe('design(record) of any record', () => {
   it('keeps every figure in its range', () => {
     fc.assert(
       fc.property(anyRecord(1e3), (record) => {
-        const { options, response, chosen, proposed, chosenBy } = design(record);
+        const { options, responses, chosen, proposed, chosenBy } = design(record);
         expect(options.length).toBeGreaterThan(0);
         expect(new Set(options.map(({ id }) => id)).size).toBe(options.length);
         expect(options.map(({ id }) => id)).toContain(chosen);
@@ -70,7 +71,7 @@ describe('design(record) of any record', () => {
           expect(bandwidthHz).toBe(lowHz === null || highHz === null ? null : highHz - lowHz);
         }
         const { spanHz, frequencyHz, returnLossDb, vswr, mismatchLossDb, transducerGainDb, gammaRe, gammaIm } =
-          response!;
+          responses[0]!;
         const { frequencyHz: f0, bandHz } = record.requirement;
         expect(frequencyHz[0]).toBe(spanHz.low);
         expect(frequencyHz.at(-1)).toBe(spanHz.high);

@@ -20,7 +20,7 @@ describe('evidence(subject, frequencies)', () => {
         const zl = impedance(load);
         const found = [...twoElement(target, zl, f0).candidates, ...cascade(target, zl, f0, [n]).candidates];
         for (const { arms, sections } of found.filter((one) => one.arms.every((arm) => counts(arm, target, zl, f0)))) {
-          const { checks } = evidence({ arms, source, load, f0 }, [f0, 0.95 * f0, 1.05 * f0], sections <= 1);
+          const { checks } = evidence([{ arms, source, load, f0 }], [f0, 0.95 * f0, 1.05 * f0], sections <= 1);
           expect(checks.filter(({ pass }) => !pass)).toEqual([]);
         }
       }),
@@ -35,7 +35,7 @@ describe('evidence(subject, frequencies)', () => {
         const load = { r: 50 * ratio, x: 0, behaviour: 'series' } as const;
         const { candidates } = twoElement(impedance(source), impedance(load), f0);
         const arms = candidates[0]!.arms.map((arm) => ({ ...arm, value: arm.value * (1 + 1e-11) }));
-        const { checks } = evidence({ arms, source, load, f0 }, [f0], true);
+        const { checks } = evidence([{ arms, source, load, f0 }], [f0], true);
         const values = checks.find(({ subject }) => subject === 'element values by the Q method')!;
         expect(values.pass).toBe(false);
       }),

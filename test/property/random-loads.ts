@@ -26,18 +26,14 @@ export const reactive = (hz: number): fc.Arbitrary<Termination> => {
     fc.tuple(ohms, q).map(([r, own]) => ({ model: 'rl-series' as const, values: [r, henry(own * r, hz)] })),
     fc.tuple(ohms, q).map(([r, own]) => ({ model: 'rc-parallel' as const, values: [r, farad(r / own, hz)] })),
     fc.tuple(ohms, q).map(([r, own]) => ({ model: 'rl-parallel' as const, values: [r, henry(r / own, hz)] })),
-    fc
-      .tuple(ohms, q, decades(0.2, 5))
-      .map(([r, own, off]) => ({
-        model: 'rlc-series' as const,
-        values: [r, henry(own * r, hz), farad(own * r * off, hz)],
-      })),
-    fc
-      .tuple(ohms, q, decades(0.2, 5))
-      .map(([r, own, off]) => ({
-        model: 'rlc-parallel' as const,
-        values: [r, henry(r / own, hz), farad((r / own) * off, hz)],
-      })),
+    fc.tuple(ohms, q, decades(0.2, 5)).map(([r, own, off]) => ({
+      model: 'rlc-series' as const,
+      values: [r, henry(own * r, hz), farad(own * r * off, hz)],
+    })),
+    fc.tuple(ohms, q, decades(0.2, 5)).map(([r, own, off]) => ({
+      model: 'rlc-parallel' as const,
+      values: [r, henry(r / own, hz), farad((r / own) * off, hz)],
+    })),
     fc
       .tuple(ohms, decades(0.7, 1.4), q)
       .map(([r, off, own]) => ({ model: 'antenna' as const, values: [r, hz * off, own] })),

@@ -62,6 +62,7 @@ function variants(record: DesignRecord): { path: string; record: DesignRecord }[
       ? Object.entries(value).flatMap(([name, inner]) => leaves(inner, [...path, name]))
       : [path];
   const alter = (value: unknown, [name, ...rest]: readonly string[]): unknown => {
+    if (Array.isArray(value)) return value.map((inner, k) => (String(k) === name ? alter(inner, rest) : inner));
     if (name !== undefined) {
       const object = value as Record<string, unknown>;
       return { ...object, [name]: alter(object[name], rest) };
@@ -75,6 +76,7 @@ function variants(record: DesignRecord): { path: string; record: DesignRecord }[
 
 function reordered<T>(value: T): T {
   if (typeof value !== 'object' || value === null) return value;
+  if (Array.isArray(value)) return value.map(reordered) as T;
   const entries = Object.entries(value).map(([name, inner]): [string, unknown] => [name, reordered(inner)]);
   return Object.fromEntries(entries.reverse()) as T;
 }

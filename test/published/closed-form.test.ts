@@ -33,7 +33,11 @@ describe('12.5 Ω to 50 Ω in closed form (derived by hand)', () => {
     ['high-pass', highPass, (u: number) => 1 / u],
   ])('sweep of the %s network has GT = 16/(25 − 18u² + 9u⁴), to 1 part in 10¹²', (_, { arms }, map) => {
     const frequencies = Float64Array.from(at, (u) => f0 * map(u));
-    const { gain } = sweep(prepareLadder(arms), endsOver(record.source, record.load, f0, frequencies), 'conjugate');
+    const { gain } = sweep(
+      prepareLadder(arms),
+      endsOver(record.source, record.loads[0]!.termination, f0, frequencies),
+      'conjugate',
+    );
     at.forEach((u, k) => expect(Math.abs(gain[k]! / closedForm(u) - 1)).toBeLessThan(1e-12));
   });
 

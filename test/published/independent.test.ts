@@ -51,7 +51,7 @@ describe.each(independent)(
 
     it.each(pairs)('%s: transducer gain with Q = 80 in every part to 1 part in 10⁹', (_, option, network) => {
       const lossy = option!.arms.map((arm): Arm => ({ ...arm, q: 80 }));
-      const ends = endsOver(record.source, record.load, frequencyHz, Float64Array.of(frequencyHz));
+      const ends = endsOver(record.source, record.loads[0]!.termination, frequencyHz, Float64Array.of(frequencyHz));
       const { gain } = sweep(prepareLadder(lossy), ends, aim);
       expect(relative(gain[0]!, network.transducerGainAllPartsQ80)).toBeLessThan(1e-9);
     });

@@ -5,6 +5,7 @@ import { solveNodal } from '../../src/evidence/nodal.ts';
 import type { Arm } from '../../src/network/arm.ts';
 import { ladderInput } from '../../src/network/ladder-input.ts';
 import { prepareLadder } from '../../src/network/ladder.ts';
+import type { OneImpedance } from '../../src/network/termination.ts';
 import { endsOver, sweep } from '../../src/network/sweep.ts';
 import type { Fields } from '../../src/record/fields.ts';
 import { recordOf } from '../unit/record-of.ts';
@@ -33,7 +34,9 @@ const losses = [
 describe.each(cases)('nodal equations solved by mathjs, to 1 part in 10⁹: %s', (_, fields) => {
   // Terminations held constant, so that both sides are given the same impedances.
   const record = recordOf({ ...fields, 'source-behaviour': 'constant', 'load-behaviour': 'constant' });
-  const { source, load, aim } = record;
+  const { aim } = record;
+  const source = record.source as OneImpedance;
+  const load = record.loads[0]!.termination as OneImpedance;
   const f0 = record.requirement.frequencyHz;
   const { options } = design(record);
   const frequencies = Float64Array.from(multiples, (k) => k * f0);

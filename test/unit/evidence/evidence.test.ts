@@ -10,7 +10,7 @@ const { arms } = resistivePair(100, 1000, f0).candidates[0]!;
 
 describe('evidence(subject, frequencies, twoElement)', () => {
   it('gives the four routes and, for a resistive pair, the Q method; each with its figures at f0', () => {
-    const { routes, checks, frequenciesHz, pass } = evidence({ arms, source, load, f0 }, [f0, 95e6, 105e6], true);
+    const { routes, checks, frequenciesHz, pass } = evidence([{ arms, source, load, f0 }], [f0, 95e6, 105e6], true);
     expect(routes.map(({ name }) => name)).toEqual([
       'Sweep',
       'Step by step',
@@ -36,7 +36,7 @@ describe('evidence(subject, frequencies, twoElement)', () => {
   });
 
   it('prints element values by both methods, and passes them to 1 part in 10¹²', () => {
-    const { routes, checks } = evidence({ arms, source, load, f0 }, [f0], true);
+    const { routes, checks } = evidence([{ arms, source, load, f0 }], [f0], true);
     // 300/(2π·1e8) = 477.464829 nH, 3/1000/(2π·1e8) = 4.77464829 pF.
     expect(routes[4]!.how.match(/477\.464829 nH, 4\.77464829 pF/g)).toHaveLength(2);
     expect(checks[3]).toMatchObject({ tolerance: 1e-12, pass: true });
@@ -45,12 +45,12 @@ describe('evidence(subject, frequencies, twoElement)', () => {
   it('holds the Q method for resistances that are nearly the same', () => {
     const near = { ...load, r: 100.001 };
     const network = resistivePair(100, 100.001, f0).candidates[0]!.arms;
-    expect(evidence({ arms: network, source, load: near, f0 }, [f0], true).pass).toBe(true);
+    expect(evidence([{ arms: network, source, load: near, f0 }], [f0], true).pass).toBe(true);
   });
 
   it('fails a network whose values are not those of the Q method', () => {
     const wrong = arms.map((arm): Arm => ({ ...arm, value: arm.value * 1.01 }));
-    const { checks, pass } = evidence({ arms: wrong, source, load, f0 }, [f0], true);
+    const { checks, pass } = evidence([{ arms: wrong, source, load, f0 }], [f0], true);
     // The routes still agree on what this other network does; it is just not the match.
     expect(checks.map(({ pass: good }) => good)).toEqual([true, true, true, false]);
     expect(checks[3]!.spread).toBeCloseTo(0.0099, 3);
@@ -58,8 +58,8 @@ describe('evidence(subject, frequencies, twoElement)', () => {
   });
 
   it('leaves the Q method out for reactive terminations and for several sections', () => {
-    const reactive = evidence({ arms, source, load: { ...load, x: -1 }, f0 }, [f0], true);
-    const several = evidence({ arms: [...arms, ...arms], source, load, f0 }, [f0], false);
+    const reactive = evidence([{ arms, source, load: { ...load, x: -1 }, f0 }], [f0], true);
+    const several = evidence([{ arms: [...arms, ...arms], source, load, f0 }], [f0], false);
     for (const { routes, checks } of [reactive, several]) {
       expect(routes).toHaveLength(4);
       expect(checks).toHaveLength(3);
@@ -67,7 +67,7 @@ describe('evidence(subject, frequencies, twoElement)', () => {
   });
 
   it('agrees for a network of no part: what is seen is the load', () => {
-    const { routes, pass } = evidence({ arms: [], source, load: source, f0 }, [f0], true);
+    const { routes, pass } = evidence([{ arms: [], source, load: source, f0 }], [f0], true);
     expect(pass).toBe(true);
     for (const { seen } of routes.slice(0, 4)) expect(seen!.r).toBeCloseTo(100, 10);
   });

@@ -8,6 +8,7 @@ function edgesOf(gain: (u: number) => number, f0 = 100e6) {
     grid,
     grid.map((hz) => gain(hz / f0)),
     (hz) => gain(hz / f0),
+    f0,
   );
   return {
     low: found.lowHz === null ? null : found.lowHz / f0,

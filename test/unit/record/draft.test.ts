@@ -32,10 +32,13 @@ describe('readDraft(fields)', () => {
         powerW: null,
       },
       source: { r: 50, x: 0, behaviour: 'series' },
-      load: { r: 9.4, x: -61, behaviour: 'series' },
+      loads: [{ name: '', termination: { r: 9.4, x: -61, behaviour: 'series' } }],
       aim: 'conjugate',
       method: 'two-element',
       sections: 'auto',
+      q: null,
+      fit: { elements: 'auto', form: 'any', shuntInductor: true, seed: 1, steps: null },
+      partQ: { inductor: 50, capacitor: 300 },
       sweepHz: null,
       selection: { option: null, reason: '' },
       signOff: {
@@ -117,7 +120,10 @@ describe('readDraft(fields)', () => {
     [{ 'keep-dc': 'all' }, 'keep-dc "all": the ends that carry DC are unknown; give none, source, load or both'],
     [{ inductors: '10u..1n' }, 'inductors "10u..1n": the range of inductance is upside down; give the lower end first'],
     [{ aim: 'best' }, 'aim "best": the aim is unknown; give conjugate or reflectionless'],
-    [{ method: 'pi' }, 'method "pi": the method is unknown; give two-element, resistive-pair, cascade'],
+    [
+      { method: 'guess' },
+      'method "guess": the method is unknown; give two-element, resistive-pair, pi, tee, cascade, equal-ripple, fitted, all',
+    ],
     [
       { method: 'resistive-pair' },
       'method "resistive-pair": the Q method takes two resistances; leave the reactance out, or use complex terminations',

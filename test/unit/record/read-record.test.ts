@@ -49,21 +49,41 @@ describe('readRecord(text)', () => {
       'source.r "0": the source\'s resistance must be above zero for power to flow; give R > 0, as in 9.4-j61',
     ],
     [
-      'load.r',
+      'loads.0.termination.r',
       -5,
-      'load.r "-5": the load\'s resistance must be above zero for power to flow; give R > 0, as in 9.4-j61',
+      'loads.0.termination.r "-5": the load\'s resistance must be above zero for power to flow; give R > 0, as in 9.4-j61',
     ],
-    ['load.r', 1e-7, 'load.r "1e-7": the load\'s resistance is out of range; give 1 µΩ to 1 GΩ'],
-    ['load.r', '9.4', 'load.r "9.4": the load\'s resistance is not a number; give a plain number in SI units'],
-    ['load.r', null, 'load.r "null": the load\'s resistance is not a number; give a plain number in SI units'],
-    ['load.x', 1e10, 'load.x "10000000000": the load\'s reactance is out of range; give −1 GΩ to 1 GΩ'],
     [
-      'load.behaviour',
-      'fixed',
-      'load.behaviour "fixed": the load\'s behaviour is unknown; give constant, series or parallel',
+      'loads.0.termination.r',
+      1e-7,
+      'loads.0.termination.r "1e-7": the load\'s resistance is out of range; give 1 µΩ to 1 GΩ',
     ],
-    ['load', undefined, 'load: this field is missing; give it'],
-    ['load', 'fifty', 'load "fifty": not an object; give the fields that the schema names'],
+    [
+      'loads.0.termination.r',
+      '9.4',
+      'loads.0.termination.r "9.4": the load\'s resistance is not a number; give a plain number in SI units',
+    ],
+    [
+      'loads.0.termination.r',
+      null,
+      'loads.0.termination.r "null": the load\'s resistance is not a number; give a plain number in SI units',
+    ],
+    [
+      'loads.0.termination.x',
+      1e10,
+      'loads.0.termination.x "10000000000": the load\'s reactance is out of range; give −1 GΩ to 1 GΩ',
+    ],
+    [
+      'loads.0.termination.behaviour',
+      'fixed',
+      'loads.0.termination.behaviour "fixed": the load\'s behaviour is unknown; give constant, series or parallel',
+    ],
+    ['loads', undefined, 'loads: this field is missing; give it'],
+    [
+      'loads.0.termination',
+      'fifty',
+      'loads.0.termination "fifty": not an object; give the fields that the schema names',
+    ],
     ['aim', 5, 'aim "5": the aim is unknown; give conjugate or reflectionless'],
     ['sections', 7, 'sections "7": the number of sections is out of range; give auto or a whole number from 1 to 6'],
     [
@@ -196,13 +216,21 @@ describe('readRecord(text)', () => {
 
   it('refuses 5 MB unread', () => {
     expect(linesOf(`"${'x'.repeat(5e6)}"`)).toEqual([
-      'record: 5.0 million characters are more than a record can have; give a design record of at most 1 million',
+      'record: 5.0 million characters are more than a record can have; give a design record of at most 3 million',
     ]);
   });
 
   it('tells all that is wrong, each field once', () => {
-    const broken = { ...record, aim: 'both', load: { ...record.load, r: -1, x: 'a' } };
-    expect(linesOf(JSON.stringify(broken)).map((line) => line.split(/[ :]/)[0])).toEqual(['load.r', 'load.x', 'aim']);
+    const broken = {
+      ...record,
+      aim: 'both',
+      loads: [{ name: '', termination: { ...record.loads[0]!.termination, r: -1, x: 'a' } }],
+    };
+    expect(linesOf(JSON.stringify(broken)).map((line) => line.split(/[ :]/)[0])).toEqual([
+      'loads.0.termination.r',
+      'loads.0.termination.x',
+      'aim',
+    ]);
   });
 });
 

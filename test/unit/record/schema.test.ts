@@ -22,12 +22,15 @@ describe('the published JSON Schema', () => {
   it('refuses an unknown field in every object of a record', () => {
     const objects = (value: unknown, path: readonly string[]): (readonly string[])[] =>
       typeof value === 'object' && value !== null
-        ? [path, ...Object.entries(value).flatMap(([name, inner]) => objects(inner, [...path, name]))]
+        ? [
+            ...(Array.isArray(value) ? [] : [path]),
+            ...Object.entries(value).flatMap(([name, inner]) => objects(inner, [...path, name])),
+          ]
         : [];
     const record: unknown = JSON.parse(demoText('tide-gauge'));
     const paths = objects(record, []);
-    // The record, its six parts, two spans of parts, the band, three signatures.
-    expect(paths).toHaveLength(13);
+    // The record, its eight parts, two spans of parts, the band, three signatures, a load state and its termination.
+    expect(paths).toHaveLength(16);
     for (const path of paths) {
       const copy = structuredClone(record) as Record<string, unknown>;
       const inner = path.reduce((at, name) => at[name] as Record<string, unknown>, copy);
@@ -39,8 +42,11 @@ describe('the published JSON Schema', () => {
 
   it('refuses a missing field and a value out of range', () => {
     const record = JSON.parse(demoText('tide-gauge'));
-    expect(validate(JSON.parse(JSON.stringify({ ...record, load: undefined })))).toBe(false);
-    for (const r of [0, -1, 1e12, '50', null]) expect(validate({ ...record, load: { ...record.load, r } })).toBe(false);
+    expect(validate(JSON.parse(JSON.stringify({ ...record, loads: undefined })))).toBe(false);
+    for (const r of [0, -1, 1e12, '50', null]) {
+      const loads = [{ name: '', termination: { ...record.loads[0].termination, r } }];
+      expect(validate({ ...record, loads })).toBe(false);
+    }
     for (const sections of [0, 7, 1.5, 'two']) expect(validate({ ...record, sections })).toBe(false);
   });
 });

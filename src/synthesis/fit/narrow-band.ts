@@ -1,5 +1,6 @@
 import { fitOneResonance, type OneResonance } from '../../network/one-resonance.ts';
 import { terminationAt } from '../../network/termination-at.ts';
+import type { Limits } from './limits.ts';
 import type { FitProblem, FitProgress } from './problem.ts';
 import { kept, leading, middle, samplePoints, Search, type Trial } from './search.ts';
 
@@ -7,7 +8,7 @@ import { kept, leading, middle, samplePoints, Search, type Trial } from './searc
 const narrowest = 0.06;
 const widerBand = 0.12;
 /** Factor of the width from one step of the tracking to the next. */
-const narrowing = 0.8;
+const narrowing = 0.7;
 
 /**
  * One resonance that stands for the first load, for a narrow band into a reactive load. Null where the band isn't narrow
@@ -67,16 +68,44 @@ export function* tracked(
     yield { done: step.value.done, best: search.best };
   }
   const width = Math.log(problem.bandHz.high / problem.bandHz.low);
-  const stages: Search[] = [];
-  for (let w = widerBand * narrowing; w > width; w *= narrowing) stages.push(new Search(ofWidth(problem, model, w)));
+  const stages = stepsTo(width).map((w) => ({ width: w, search: new Search(ofWidth(problem, model, w)) }));
   const trials: Trial[] = [];
   for (const [k, { shape, x }] of found.entries()) {
     const trial = { shape, x: x.slice(), level: 0 };
-    for (const stage of stages) stage.improve(trial, stage.dense, [middle[1]], 40);
+    let before = { width: widerBand, x };
+    let last = before;
+    for (const stage of stages) {
+      predict(trial, before, last, stage.width, search.limits);
+      stage.search.improve(trial, stage.search.dense, [middle[1]], 40);
+      [before, last] = [last, { width: stage.width, x: trial.x.slice() }];
+    }
+    predict(trial, before, last, width, search.limits);
     search.improve(trial, search.dense, middle, 60);
     search.note(trial);
     trials.push(trial);
     yield { done: 0.6 + (0.15 * (k + 1)) / found.length, best: search.best };
   }
   return trials;
+}
+
+/** Widths on the way from the wider band to above the true one; the first step is short, so that the second has a lead. */
+function stepsTo(width: number): readonly number[] {
+  const widths: number[] = [];
+  for (let w = widerBand * 0.95; w > width; w *= narrowing) widths.push(w);
+  return widths;
+}
+
+interface Step {
+  readonly width: number;
+  readonly x: Float64Array;
+}
+
+/** Values of coupled resonators are nearly powers of the width: a step starts from where the two before it lead. */
+function predict(trial: Trial, before: Step, last: Step, width: number, limits: Limits): void {
+  if (before.width === last.width) return;
+  const along = Math.log(width / last.width) / Math.log(last.width / before.width);
+  const shift = last.x.map((value, k) => along * (value - before.x[k]!));
+  // A natural logarithm or more is a jump, and leads nowhere.
+  if (shift.some((by, k) => Math.abs(by) * limits[trial.shape[k]!.part].half > 1)) return;
+  shift.forEach((by, k) => (trial.x[k] = last.x[k]! + by));
 }

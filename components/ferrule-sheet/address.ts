@@ -5,7 +5,12 @@ import { defaults, fieldNames, type Fields } from '../../src/record/fields.ts';
 export const pathOfMethod: Record<Method, string> = {
   'two-element': '',
   'resistive-pair': 'resistive/',
+  pi: 'resistive/',
+  tee: 'resistive/',
   cascade: 'sections/',
+  'equal-ripple': 'sections/',
+  fitted: 'sections/',
+  all: 'sections/',
 };
 
 /** The sheet as the part of an address after #: every text that isn't what the field holds when nothing is typed. */

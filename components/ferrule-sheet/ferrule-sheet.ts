@@ -1,6 +1,7 @@
 import { LitElement, html, nothing, type PropertyValues, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
 import { guard } from 'lit/directives/guard.js';
+import { isResistive } from '../../src/network/termination-at.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
@@ -96,7 +97,7 @@ export class FerruleSheet extends LitElement {
           .summary=${givenLine(this.settled)}
           .judged=${judge(parts[0]!, this.settled)}
           .basis=${parts[0]!.basis(this.method)}
-          .realSource=${this.settled.dossier?.record.source.x === 0}
+          .realSource=${this.settled.dossier !== null && isResistive(this.settled.dossier.record.source)}
         ></given-part>
         <div class="document">
           ${guard([this.following, this.name], () => this.renderTitle())}

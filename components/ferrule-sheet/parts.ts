@@ -29,7 +29,12 @@ const always =
 const optionsBasis: Record<Method, readonly string[]> = {
   'two-element': ['B3', 'B4', 'B5'],
   'resistive-pair': ['B6', 'B5'],
+  pi: ['B5'],
+  tee: ['B5'],
   cascade: ['B7', 'B5'],
+  'equal-ripple': ['B5'],
+  fitted: ['B5'],
+  all: ['B5'],
 };
 const unassessed: Judged = { verdict: 'not assessed', words: 'not assessed' };
 const judged = (good: boolean): Judged => {

@@ -1,5 +1,6 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
+import { loadLabel, terminationLabel } from '../../src/record/read-termination.ts';
 import type { Dossier, Option } from '../../src/dossier.ts';
 import { schematic } from '../../src/figures/schematic.ts';
 import { formatFixed, formatImpedance } from '../../src/quantity/format.ts';
@@ -20,10 +21,10 @@ export class NetworkPart extends LitElement {
   override render() {
     const option = this.dossier?.options.find(({ id }) => id === this.dossier?.chosen);
     if (this.dossier === null || option === undefined) return nothing;
-    const { source, load } = this.dossier.record;
+    const { source, loads } = this.dossier.record;
     return html`
       <div class="drawing" tabindex="0" role="group" aria-label="Schematic">
-        ${drawing(schematic(option.arms, option.designators, source, load))}
+        ${drawing(schematic(option.arms, option.designators, terminationLabel(source), loadLabel(loads)))}
       </div>
       <div class="columns">
         <div>

@@ -156,7 +156,9 @@ function absence(absent: readonly Absent[]): TemplateResult {
 
 /** The figures by which networks are compared, the same for each and in the same columns. */
 function figures(option: Option): TemplateResult {
-  const harmonics = option.harmonicDb.map(({ attenuationDb }) => decibels(attenuationDb)).join(', ');
+  const harmonics = option.harmonicDb
+    .map(({ attenuationDb }) => (attenuationDb === null ? 'outside the data' : decibels(attenuationDb)))
+    .join(', ');
   return html`<dl>
       <div>
         <dt>Worst return loss</dt>

@@ -52,26 +52,32 @@ export class ResponsePart extends LitElement {
 
   override render() {
     const option = this.dossier?.options.find(({ id }) => id === this.dossier?.chosen);
-    const { response = null, record } = this.dossier ?? {};
+    const responses = this.dossier?.responses ?? [];
+    const response = responses[0] ?? null;
+    const record = this.dossier?.record;
     return html`
       ${this.span(response)}
       ${
         response === null || option === undefined || record === undefined
           ? nothing
-          : this.response(response, option, record.requirement)
+          : this.response(responses, option, record.requirement)
       }
     `;
   }
 
-  private response(response: Response, option: Option, requirement: DesignRecord['requirement']): TemplateResult {
+  private response(
+    responses: readonly Response[],
+    option: Option,
+    requirement: DesignRecord['requirement'],
+  ): TemplateResult {
     return html`
-      <figure>${drawing(returnLossPlot(response, requirement, this.size))}</figure>
-      <figure>${drawing(gainPlot(response, requirement, option.halfPower, this.size))}</figure>
+      <figure>${drawing(returnLossPlot(responses, requirement, this.size))}</figure>
+      <figure>${drawing(gainPlot(responses, requirement, option.halfPower, this.size))}</figure>
       ${halfPower(option)}
-      <response-table .response=${response} .requirement=${requirement}></response-table>
+      <response-table .response=${responses[0]!} .requirement=${requirement}></response-table>
       <details @toggle=${this.toggle}>
         <summary>Reflection coefficient in its plane</summary>
-        ${this.open ? html`<figure class="plane">${drawing(reflectionPlane(response, requirement))}</figure>` : nothing}
+        ${this.open ? html`<figure class="plane">${drawing(reflectionPlane(responses, requirement))}</figure>` : nothing}
       </details>
     `;
   }

@@ -137,9 +137,7 @@ export function evidence(
     ),
     check(
       'power balance',
-      Math.max(
-        ...subjects.flatMap((subject) => frequenciesHz.map((hz) => imbalance(nodalAt(subject, hz)))),
-      ),
+      Math.max(...subjects.flatMap((subject) => frequenciesHz.map((hz) => imbalance(nodalAt(subject, hz))))),
       routeTolerance,
       'available power against load + losses + reflected, from the nodal solution',
     ),

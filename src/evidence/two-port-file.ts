@@ -8,11 +8,7 @@ import { ladderScattering } from './s-parameters.ts';
  * @param frequencyHz ascending
  * @param comments    lines put at the head
  */
-export function twoPortFile(
-  arms: readonly Arm[],
-  frequencyHz: readonly number[],
-  comments: readonly string[],
-): string {
+export function twoPortFile(arms: readonly Arm[], frequencyHz: readonly number[], comments: readonly string[]): string {
   const rows = frequencyHz.map((hz) => {
     const { s11, s21, s12, s22 } = ladderScattering(arms, hz, 50);
     return [hz, ...[s11, s21, s12, s22].flatMap(({ re, im }) => [re + 0, im + 0])].map(String).join(' ');

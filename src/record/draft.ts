@@ -117,12 +117,19 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
 
   try {
     const record = checkRecord(candidate);
-    return { record: problems.length === 0 ? record : null, problems, understood };
+    return { record: problems.length === 0 ? record : null, problems: inOrder(problems), understood };
   } catch (error) {
     if (!(error instanceof InputError)) throw error;
-    return { record: null, problems: [...problems, ...fromRecord(error.problems, fields, problems)], understood };
+    const all = [...problems, ...fromRecord(error.problems, fields, problems)];
+    return { record: null, problems: inOrder(all), understood };
   }
 }
+
+/** In the order of the fields, which is that of the sheet. */
+const inOrder = (problems: readonly Problem[]): readonly Problem[] => {
+  const place = ({ field }: Problem): number => fieldNames.findIndex((name) => name === field);
+  return problems.toSorted((a, b) => place(a) - place(b));
+};
 
 /** Problems of the record, told of the field in which its text was typed. */
 function fromRecord(

@@ -87,7 +87,7 @@ it('prints what the page shows and the command line computes, for a case typed i
     ),
     ...dossier.options.map(({ worstReturnLossDb }) => `${formatFixed(worstReturnLossDb!, 2)} dB`),
     ...dossier.options.flatMap(({ harmonicDb }) =>
-      harmonicDb.map(({ attenuationDb }) => `${formatFixed(attenuationDb, 1)} dB`),
+      harmonicDb.map(({ attenuationDb }) => `${formatFixed(attenuationDb!, 1)} dB`),
     ),
     ...dossier.options.map(({ halfPower }) => halfPower.words),
     formatImpedance(chosen.seen.r, chosen.seen.x),

@@ -34,11 +34,11 @@ describe('design(record) of several load states', () => {
         );
         dossier.options.forEach((option, k) => {
           expect(option.states.map(({ name }) => name)).toEqual(record.loads.map(({ name }) => name));
-          const { name: _, ...first } = option.states[0]!;
+          const { name, ...first } = option.states[0]!;
+          expect(name).toBe('state 0');
           expect(alone.options[k]).toMatchObject(first);
-          const worst = option.states.find(({ name }) => name === option.worstState)!;
-          const { name: __, ...figures } = worst;
-          expect(option).toMatchObject(figures);
+          const worst = option.states.find((state) => state.name === option.worstState)!;
+          expect({ ...option, name: worst.name }).toMatchObject(worst);
           for (const state of option.states) {
             if (band === null) expect(state.reflection).toBeLessThanOrEqual(worst.reflection);
             else expect(state.worstReturnLossDb).toBeGreaterThanOrEqual(worst.worstReturnLossDb!);

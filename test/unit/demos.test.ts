@@ -59,7 +59,7 @@ describe('the demo power-stage: 12.5 Ω to 50 Ω over 400 to 470 MHz, the supply
     expect(option.form).toBe('low-pass');
     expect(option.sections).toBe(sections!.smallest);
     expect(option.dc.sourceShorted).toBe(false);
-    expect(option.harmonicDb.every(({ attenuationDb }) => attenuationDb > 0)).toBe(true);
+    expect(option.harmonicDb.every(({ attenuationDb }) => attenuationDb! > 0)).toBe(true);
     expect(evidence!.pass).toBe(true);
   });
 

@@ -23,7 +23,7 @@ describe('design(record): which option', () => {
   });
 
   it("is about the engineer's choice where there is one, whether it meets the requirement or not", () => {
-    const { options, proposed, chosen, chosenBy, response, evidence } = dossierOf({
+    const { options, proposed, chosen, chosenBy, responses, evidence } = dossierOf({
       ...whip,
       'block-dc': 'yes',
       choice: 'shunt-source-plus',
@@ -34,7 +34,7 @@ describe('design(record): which option', () => {
     expect(meets).toBe(false);
     // Response and evidence are those of the chosen one: its gain at the upper end of the sweep falls as a low-pass does.
     expect(arms[0]).toMatchObject({ arm: 'shunt', part: 'capacitor' });
-    expect(response!.transducerGainDb.at(-1)!).toBeLessThan(-10);
+    expect(responses[0]!.transducerGainDb.at(-1)!).toBeLessThan(-10);
     expect(evidence!.pass).toBe(true);
   });
 

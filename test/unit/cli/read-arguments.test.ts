@@ -41,7 +41,7 @@ describe('readArguments(args)', () => {
       method: 'two-element',
       aim: 'reflectionless',
       source: { r: 50, x: 0 },
-      load: { r: 9.4, x: -61 },
+      loads: [{ termination: { r: 9.4, x: -61 } }],
       requirement: { frequencyHz: 151.25e6, bandHz: { low: 150.5e6, high: 152e6 }, returnLossDb: 14 },
     });
     expect(record.identity.date).toMatch(/^\d{4}-\d{2}-\d{2}$/);
@@ -49,7 +49,8 @@ describe('readArguments(args)', () => {
 
   it('takes --behaviour for both ends, and an end on its own over it', () => {
     const { record } = readArguments([...sound, '--behaviour', 'constant', '--load-behaviour', 'parallel']);
-    expect([record.source.behaviour, record.load.behaviour]).toEqual(['constant', 'parallel']);
+    expect(record.source).toMatchObject({ behaviour: 'constant' });
+    expect(record.loads[0]!.termination).toMatchObject({ behaviour: 'parallel' });
   });
 
   it('takes --sections for a cascade', () => {
@@ -76,7 +77,7 @@ describe('readArguments(args)', () => {
   it("gives the command's own options apart", () => {
     const { options, record } = readArguments([...sound, '--out', 'report.pdf'], ['out', 'paper']);
     expect(options).toEqual({ out: 'report.pdf' });
-    expect(record.load.r).toBe(9.4);
+    expect(record.loads[0]!.termination).toMatchObject({ r: 9.4 });
   });
 
   it.each<[string, readonly string[], string]>([
@@ -126,12 +127,12 @@ describe('readArguments(args)', () => {
     [
       'a file that is not there',
       [join(folder, 'none.json')],
-      expect.stringMatching(/^file ".*": no such file; give the path of a design record$/) as string,
+      expect.stringMatching(/^file ".*": no such file; give the path of a file$/) as string,
     ],
     [
       'a folder',
       [folder],
-      expect.stringMatching(/^file ".*": this is a folder; give the path of a design record$/) as string,
+      expect.stringMatching(/^file ".*": this is a folder; give the path of a file$/) as string,
     ],
   ])('refuses %s', (_, args, line) => {
     expect(linesOf(args)).toEqual([line]);

@@ -87,7 +87,7 @@ describe('options: harmonics', () => {
     // Reflectionless at f0 delivers RS²/|ZS|² only; where the source's reactance cancels, more passes.
     const options = optionsOf({ frequency: '100M', source: '10-j30', load: '10', aim: 'reflectionless' });
     const least = Math.min(
-      ...options.flatMap(({ harmonicDb }) => harmonicDb.map(({ attenuationDb }) => attenuationDb)),
+      ...options.flatMap(({ harmonicDb }) => harmonicDb.map(({ attenuationDb }) => attenuationDb!)),
     );
     expect(least).toBeLessThan(0);
   });

@@ -3,7 +3,7 @@ import { assumptionsOf } from './design/assumptions.ts';
 import { cautionsOf } from './design/cautions.ts';
 import { ceilingOf } from './design/ceiling.ts';
 import { fittedNetworks, type FitControl, type FitStep } from './design/fitted.ts';
-import { closedForms, openQ } from './design/method.ts';
+import { closedForms } from './design/method.ts';
 import { minimumWords } from './design/minimum.ts';
 import { assess, assessor } from './design/option.ts';
 import { checkReach, reachOf } from './design/reach.ts';
@@ -65,18 +65,17 @@ export function* designSteps(record: DesignRecord, control: FitControl): Generat
           [...new Set(band === null ? [f0] : [f0, band.low, band.high])],
           chosen.sections <= 1 && chosen.method !== 'fitted' && chosen.method !== 'equal-ripple',
         );
-  const q =
-    record.method === 'pi' || record.method === 'tee'
-      ? openQ(leastQ(record.method, target, load))
-      : record.method === 'all'
-        ? openQ(leastQ('pi', target, load))
-        : null;
+  const kinds = (['pi', 'tee'] as const).filter((kind) => record.method === kind || record.method === 'all');
+  const least = kinds.map((kind) => ({
+    kind: kind === 'pi' ? ('Pi' as const) : ('T' as const),
+    q: leastQ(kind, target, load),
+  }));
   return {
     schema: 'ferrule-dossier/1',
     version,
     record,
     digest: digestOf(record),
-    assumptions: assumptionsOf(record, q),
+    assumptions: assumptionsOf(record, least),
     ceiling,
     noCeiling,
     options,

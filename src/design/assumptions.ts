@@ -1,14 +1,18 @@
 import { isOneImpedance } from '../network/termination.ts';
-import { formatQuantity, formatRead } from '../quantity/format.ts';
+import { formatFixed, formatRead } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
+import { openQ } from './method.ts';
 import { behaviourWords } from './words.ts';
 
 /**
  * What the figures rest on, in the order in which a reviewer would question it.
  *
- * @param q Q taken for Pi and T where the record leaves it open; null where there is none
+ * @param least the least Q for which a Pi or T exists, of the kinds that are asked for
  */
-export function assumptionsOf(record: DesignRecord, q: number | null): string[] {
+export function assumptionsOf(
+  record: DesignRecord,
+  least: readonly { readonly kind: 'Pi' | 'T'; readonly q: number }[],
+): string[] {
   const { source, loads, aim, requirement, partQ, fit, method } = record;
   const { inductorH, capacitorF, frequencyHz } = requirement;
   const sameAim = isOneImpedance(source) && source.x === 0 ? ' With a real source both aims are the same.' : '';
@@ -25,10 +29,15 @@ export function assumptionsOf(record: DesignRecord, q: number | null): string[] 
       ? `Aim: conjugate. At the design frequency the source is to see ZS*, and all available power is delivered.${sameAim}`
       : `Aim: reflectionless. At the design frequency the source is to see ZS, so that no wave returns.${sameAim}`,
     'Parts are ideal: lossless, of exact value, without strays. Tolerance, stress and heat are not assessed here.',
-    `The loss figure alone takes inductors with Q ${formatQuantity(partQ.inductor, '', 3)} and capacitors with Q ${formatQuantity(partQ.capacitor, '', 3)} at the design frequency.`,
-    ...(q === null || record.q !== null
-      ? []
-      : [`Pi and T: Q ${formatQuantity(q, '', 3)}, chosen as 1.5 times the least that exists, and at least 2.`]),
+    `The loss figure alone takes inductors with Q ${String(partQ.inductor)} and capacitors with Q ${String(partQ.capacitor)} at the design frequency.`,
+    ...least.map(
+      ({ kind, q }) =>
+        `${kind} networks exist for every Q of ${formatFixed(q, 3)} or more at the steeper end; ${
+          record.q === null
+            ? `Q ${formatFixed(openQ(q), 3)} is taken: 1.5 times the least, and at least 2`
+            : `Q ${String(record.q)} is asked for`
+        }.`,
+    ),
     ...(method === 'fitted' || method === 'all'
       ? [
           `Fitted networks are the best of a seeded search (seed ${String(fit.seed)}${fit.steps === null ? '' : `, stopped after ${String(fit.steps)} steps`}) over band and states, inside the practicable ranges; a better one may exist.`,

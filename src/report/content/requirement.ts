@@ -47,7 +47,7 @@ const ends = { source: 'the source', load: 'the load', both: 'both ends' } as co
 const everywhere = ({ loads }: DesignRecord): string => (loads.length > 1 ? ' in every load state' : '');
 
 const qOf = ({ partQ }: DesignRecord): string =>
-  `inductors ${formatQuantity(partQ.inductor, '', 3)}, capacitors ${formatQuantity(partQ.capacitor, '', 3)}`;
+  `inductors ${String(partQ.inductor)}, capacitors ${String(partQ.capacitor)}`;
 
 /** Numbered, so that a reviewer can name one. */
 export function assumptions({ assumptions: lines }: Dossier): readonly Block[] {

@@ -1,5 +1,5 @@
 import type { Dossier } from '../../dossier.ts';
-import { formatQuantity, formatRead } from '../../quantity/format.ts';
+import { formatRead } from '../../quantity/format.ts';
 import type { DesignRecord } from '../../record/design-record.ts';
 import { plain, type Block } from '../page/block.ts';
 import { methodAsked } from './methods.ts';

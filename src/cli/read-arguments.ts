@@ -62,7 +62,9 @@ function parse(
     const here = args[k]!;
     const name = here.startsWith('--') ? here.slice(2) : '';
     const option = name.split('=')[0]!;
-    if (given.has(option)) throw problem(`--${option}`, 'this option is given twice', 'keep the one that is meant');
+    // Several loads are several states of it.
+    if (given.has(option) && option !== 'load')
+      throw problem(`--${option}`, 'this option is given twice', 'keep the one that is meant');
     if (known.has(option)) given.add(option);
     if (name === 'block-dc' && !['yes', 'no'].includes(args[k + 1] ?? '')) {
       joined.push('--block-dc=yes');

@@ -53,6 +53,20 @@ describe('readArguments(args)', () => {
     expect(record.loads[0]!.termination).toMatchObject({ behaviour: 'parallel' });
   });
 
+  it('takes every --load as a state of the load', () => {
+    const { record } = readArguments([
+      '--frequency=151.25M',
+      '--source=50',
+      '--load=free=9.4-j61',
+      '--load',
+      'iced=8-j70',
+    ]);
+    expect(record.loads).toMatchObject([
+      { name: 'free', termination: { r: 9.4, x: -61 } },
+      { name: 'iced', termination: { r: 8, x: -70 } },
+    ]);
+  });
+
   it('takes --sections for a cascade', () => {
     expect(readArguments([...sound, '--sections', '3']).record).toMatchObject({ method: 'cascade', sections: 3 });
   });
@@ -100,8 +114,8 @@ describe('readArguments(args)', () => {
     ],
     [
       'an option given twice',
-      [...sound, '--load=50'],
-      'command line "--load": this option is given twice; keep the one that is meant',
+      [...sound, '--source=75'],
+      'command line "--source": this option is given twice; keep the one that is meant',
     ],
     ['two records', ['a.json', 'b.json'], 'command line "b.json": more than one record is named; give one file'],
     [
@@ -129,11 +143,7 @@ describe('readArguments(args)', () => {
       [join(folder, 'none.json')],
       expect.stringMatching(/^file ".*": no such file; give the path of a file$/) as string,
     ],
-    [
-      'a folder',
-      [folder],
-      expect.stringMatching(/^file ".*": this is a folder; give the path of a file$/) as string,
-    ],
+    ['a folder', [folder], expect.stringMatching(/^file ".*": this is a folder; give the path of a file$/) as string],
   ])('refuses %s', (_, args, line) => {
     expect(linesOf(args)).toEqual([line]);
   });

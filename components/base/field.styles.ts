@@ -35,6 +35,12 @@ export const field = css`
     font: inherit;
   }
 
+  /* Its text is laid out by itself: a keystroke doesn't lay the page out for the field's own sake. */
+  input:not([type]) {
+    height: 1.875rem;
+    contain: strict;
+  }
+
   select {
     padding-inline: 0.125rem;
   }

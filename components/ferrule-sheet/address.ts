@@ -2,7 +2,7 @@ import type { Method } from '../../src/record/design-record.ts';
 import { defaults, fieldNames, type Fields } from '../../src/record/fields.ts';
 
 /** Where each kind of sheet lives under the base of the site. */
-export const pathOfMethod: Record<Method, string> = {
+const pathOfMethod: Record<Method, string> = {
   'two-element': '',
   'resistive-pair': 'resistive/',
   pi: 'resistive/',
@@ -12,6 +12,10 @@ export const pathOfMethod: Record<Method, string> = {
   fitted: 'sections/',
   all: 'sections/',
 };
+
+/** Path under the base of the site; undefined for a text that names no method. */
+export const pathOf = (method: string | undefined): string | undefined =>
+  method !== undefined && Object.hasOwn(pathOfMethod, method) ? pathOfMethod[method as Method] : undefined;
 
 /** The sheet as the part of an address after #: every text that isn't what the field holds when nothing is typed. */
 export function writeAddress(fields: Fields): string {

@@ -18,7 +18,7 @@ import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';
 import '../sheet-part/sheet-part.ts';
 import '../title-block/title-block.ts';
-import { pathOfMethod, readAddress, writeAddress } from './address.ts';
+import { pathOf, readAddress, writeAddress } from './address.ts';
 import { styles } from './ferrule-sheet.styles.ts';
 import { givenLine, outcome } from './outcome.ts';
 import { judge, parts, type Part } from './parts.ts';
@@ -159,10 +159,17 @@ export class FerruleSheet extends LitElement {
     }
   }
 
-  private readonly readHash = () => this.take(readAddress(location.hash) ?? this.demo);
+  private readonly readHash = () => {
+    const fields = readAddress(location.hash);
+    // An address that names a place in the page, and no sheet, must not take what is typed away.
+    if (fields === null && location.hash !== '' && this.hasUpdated) this.writeHash();
+    else this.take(fields ?? this.demo);
+  };
 
   private take(fields: Fields) {
-    this.settled = settle({ ...fields, method: this.method }, null);
+    // A sheet serves several methods; an address that asks for one of another sheet gets this sheet's own.
+    const method = pathOf(fields.method) === pathOf(this.method) ? fields.method : this.method;
+    this.settled = settle({ ...fields, method: method ?? this.method }, null);
     this.following = this.settled;
   }
 
@@ -224,8 +231,8 @@ export class FerruleSheet extends LitElement {
     try {
       const record = readRecord(await file.slice(0, mostRead).text());
       const fields = fieldsOf(record);
-      if (record.method !== this.method) {
-        location.assign(`${import.meta.env.BASE_URL}${pathOfMethod[record.method]}#${writeAddress(fields)}`);
+      if (pathOf(record.method) !== pathOf(this.method)) {
+        location.assign(`${import.meta.env.BASE_URL}${pathOf(record.method)}#${writeAddress(fields)}`);
         return;
       }
       this.take(fields);

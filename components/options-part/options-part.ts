@@ -45,7 +45,7 @@ export class OptionsPart extends LitElement {
     return html`
       ${this.dossier?.sections ? html`<sections-table .table=${this.dossier.sections} .chosen=${this.dossier.chosen ?? ''}></sections-table>` : nothing}
       ${
-        fields.method === 'cascade'
+        fields.method === 'cascade' || fields.method === 'equal-ripple'
           ? html`<radio-field
               name="sections"
               label="Number of sections"

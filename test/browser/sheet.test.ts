@@ -114,6 +114,14 @@ describe('the address', () => {
     await outcome(page, /^2 of 2 networks meet/);
     expect(await page.getByLabel('Load impedance').inputValue()).toBe('200');
   });
+
+  it('keeps what is typed when it comes to name a place in the page', async () => {
+    const page = await site.visit();
+    await page.getByLabel('Load impedance').fill('20+j10');
+    await page.evaluate(() => (location.hash = 'main'));
+    await page.waitForFunction(() => location.hash.includes('load=20%2Bj10'));
+    expect(await page.getByLabel('Load impedance').inputValue()).toBe('20+j10');
+  });
 });
 
 describe('choosing a network', () => {

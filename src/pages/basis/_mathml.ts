@@ -65,7 +65,7 @@ export function mathml(text: string): string {
     return `<mo${unary ? ' form="prefix"' : ''}>${token.replace('<', '&lt;').replace('>', '&gt;')}</mo>`;
   };
 
-  const whole = row('');
+  const whole = row(');');
   if (next < tokens.length)
     throw new SyntaxError(`mathml: "${text}" ends before "${tokens[next]!}"; check its brackets`);
   return `<math displaystyle="true">${whole}</math>`;

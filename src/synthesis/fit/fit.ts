@@ -25,5 +25,11 @@ export function* fit(problem: FitProblem): Generator<FitProgress, readonly Fitte
   for (const trial of leading(trials, trials.length)) {
     if (!distinct.some(({ shape }) => shape === trial.shape)) distinct.push(trial);
   }
-  return distinct.slice(0, returned).map((trial) => fitted(trial, search.limits));
+  const chosen = distinct.slice(0, returned);
+  for (const trial of chosen) {
+    search.improve(trial, search.finest, fine.slice(-2), 80);
+    search.note(trial);
+  }
+  yield { done: 1, best: search.best };
+  return leading(chosen, returned).map((trial) => fitted(trial, search.limits));
 }

@@ -35,6 +35,8 @@ export interface Trial {
 export class Search {
   readonly limits: Limits;
   readonly dense: readonly Ends[];
+  /** Between samples of the others a ladder of eight elements rises by some hundredths of a decibel. */
+  readonly finest: readonly Ends[];
   readonly #rough: readonly Ends[];
   readonly #problem: FitProblem;
   best: Fitted | null = null;
@@ -44,6 +46,7 @@ export class Search {
     this.limits = limitsOf(problem);
     this.#rough = samples(problem, 17);
     this.dense = samples(problem, 49);
+    this.finest = samples(problem, 145);
   }
 
   improve(trial: Trial, states: readonly Ends[], betas: readonly number[], steps: number): void {

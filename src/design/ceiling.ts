@@ -82,7 +82,10 @@ function verdict(
   };
   const top = figure(best);
   if (askedDb === null) {
-    return { verdict: 'not assessed', words: `No lossless network holds more than ${top} over the band.` };
+    const words = top.startsWith('over')
+      ? `The ceiling is ${top} over the band, more than any network that can be built.`
+      : `No lossless network holds more than ${top} over the band.`;
+    return { verdict: 'not assessed', words };
   }
   const asked = `${formatFixed(askedDb, 2)} dB`;
   if (!holds(decibels(best), askedDb)) {

@@ -1,6 +1,7 @@
 import type { Complex } from 'complex.js';
 import type { Option } from '../dossier.ts';
-import { isOneImpedance, type Termination } from '../network/termination.ts';
+import { partsOf } from '../network/circuit-model.ts';
+import { isModel, isOneImpedance, type Behaviour, type Termination } from '../network/termination.ts';
 import { isResistive } from '../network/termination-at.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import type { Absence, Candidate } from '../synthesis/candidate.ts';
@@ -73,10 +74,7 @@ function closedForm(method: ClosedMethod, record: DesignRecord, target: Complex,
     case 'cascade':
       return named(cascade(target, load, f0, allSections));
     case 'equal-ripple': {
-      const end = (z: Complex, termination: Termination) => ({
-        z,
-        behaviour: isOneImpedance(termination) ? termination.behaviour : ('constant' as const),
-      });
+      const end = (z: Complex, termination: Termination) => ({ z, behaviour: behaviourOf(termination) });
       // Band edges are there: the schema asks for them with this method.
       return named(
         equalRipple(
@@ -89,4 +87,14 @@ function closedForm(method: ClosedMethod, record: DesignRecord, target: Complex,
       );
     }
   }
+}
+
+/** How a reactance varies, as far as an outer element can absorb it: that of one part, in series or in parallel. */
+function behaviourOf(termination: Termination): Behaviour {
+  if (isOneImpedance(termination)) return termination.behaviour;
+  if (isModel(termination)) {
+    const { arrangement, l, c, c0 } = partsOf(termination);
+    if (c0 === null && (l === null || c === null)) return arrangement;
+  }
+  return 'constant';
 }

@@ -1,4 +1,5 @@
 import { rangeOf } from '../network/termination-at.ts';
+import { isMeasured } from '../network/termination.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import { InputError } from '../quantity/problem.ts';
 import type { Span } from '../quantity/span.ts';
@@ -33,7 +34,8 @@ export function checkReach(record: DesignRecord, reach: Span | null): void {
       would: 'give data that overlap',
     });
   }
-  const data = `the data, ${frequencySpan(reach)}`;
+  const several = [record.source, ...record.loads.map(({ termination }) => termination)].filter(isMeasured).length > 1;
+  const data = `${several ? 'what all the data share' : 'the data'}, ${frequencySpan(reach)}`;
   const outside = (field: string, read: string, why: string): InputError =>
     new InputError({ field, read, why, would: 'stay within them or measure further' });
   if (frequencyHz < reach.low || frequencyHz > reach.high) {

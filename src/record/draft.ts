@@ -62,8 +62,9 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
       .map(({ name, termination }) => `${name === '' ? '' : `${name}: `}${terminationWords(termination)}`)
       .join('; '),
   );
+  // What number it may be is the record's to say.
   const whole = (name: FieldName): number | string =>
-    /^\d+$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim();
+    /^-?\d+(?:\.\d+)?$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim();
   const plainNumber = (name: FieldName): number | string => {
     const value = Number(fields[name].trim().replace(',', '.'));
     return fields[name].trim() === '' || !Number.isFinite(value) ? fields[name] : value;

@@ -131,7 +131,7 @@ function absorb(rising: Arm[], low: EqualRippleEnd, high: EqualRippleEnd, f0: nu
   if (x !== 0) {
     const own = { name: 'series reactance', kind: x > 0 ? 'inductor' : 'capacitor', size: Math.abs(x) } as const;
     if (low.behaviour !== 'series')
-      return `needs the lower end's reactance to vary as a series part; it is taken as ${low.behaviour}`;
+      return "needs the lower end's reactance to be one part in series; it is not taken as that";
     if (own.kind !== first.part) return `the lower end's reactance is of the other kind than the outer ${first.part}`;
     // A series capacitor left over of two in series is larger: 1/C = 1/C1 − 1/Cend.
     const value = own.kind === 'inductor' ? own.size / omega : 1 / (omega * own.size);
@@ -143,7 +143,7 @@ function absorb(rising: Arm[], low: EqualRippleEnd, high: EqualRippleEnd, f0: nu
   if (high.z.im !== 0) {
     const kind = b > 0 ? 'capacitor' : 'inductor';
     if (high.behaviour !== 'parallel')
-      return `needs the higher end's reactance to vary as a parallel part; it is taken as ${high.behaviour}`;
+      return "needs the higher end's reactance to be one part in parallel; it is not taken as that";
     if (kind !== last.part) return `the higher end's reactance is of the other kind than the outer ${last.part}`;
     const value = kind === 'capacitor' ? b / omega : -1 / (omega * b);
     const rest = kind === 'capacitor' ? last.value - value : 1 / (1 / last.value - 1 / value);

@@ -1,8 +1,10 @@
 import { formatFigure, type Figure } from './figure.ts';
+import { benchFit } from './fit.ts';
 import { benchKeystroke } from './keystroke.ts';
 import { benchLoad } from './load.ts';
 import { benchReport } from './report.ts';
 import { benchSweep } from './sweep.ts';
+import { benchTouchstone } from './touchstone.ts';
 
 /** Prints each figure with its budget beside it. Figures are for reading: a miss doesn't fail the command. */
 const benches: readonly (() => readonly Figure[] | Promise<readonly Figure[]>)[] = [
@@ -10,6 +12,8 @@ const benches: readonly (() => readonly Figure[] | Promise<readonly Figure[]>)[]
   benchLoad,
   benchKeystroke,
   benchReport,
+  benchTouchstone,
+  benchFit,
 ];
 
 for (const bench of benches) for (const figure of await bench()) console.log(formatFigure(figure));

@@ -7,12 +7,6 @@ export interface Figure {
   readonly within: boolean | null;
 }
 
-export function median(values: readonly number[]): number {
-  const sorted = values.toSorted((a, b) => a - b);
-  const middle = sorted.length >> 1;
-  return sorted.length % 2 === 1 ? sorted[middle]! : (sorted[middle - 1]! + sorted[middle]!) / 2;
-}
-
 /** A line for a person: name, measured, budget, and in words whether it holds. */
 export function formatFigure({ name, measured, budget, within }: Figure): string {
   const verdict = within === null ? 'not measured' : within ? 'within' : 'OVER';

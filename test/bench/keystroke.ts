@@ -1,5 +1,6 @@
 import type { Browser, Page } from 'playwright-core';
-import { median, type Figure } from './figure.ts';
+import type { Figure } from './figure.ts';
+import { median } from './timing.ts';
 import { withPage } from './with-page.ts';
 
 const budgetMs = 16;

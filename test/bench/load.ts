@@ -1,5 +1,5 @@
 import { brotliCompressSync } from 'node:zlib';
-import { type Figure } from './figure.ts';
+import type { Figure } from './figure.ts';
 import { withPage } from './with-page.ts';
 
 const budgetKb = { scripts: 60, all: 130 };

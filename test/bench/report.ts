@@ -17,7 +17,8 @@ import {
 import { design } from '../../src/design.ts';
 import { readRecord } from '../../src/record/read-record.ts';
 import { report } from '../../src/report/report.ts';
-import { median, type Figure } from './figure.ts';
+import type { Figure } from './figure.ts';
+import { median, timeOf } from './timing.ts';
 
 const budget = 3;
 const turns = 25;
@@ -55,12 +56,6 @@ export async function benchReport(): Promise<readonly Figure[]> {
       within: ratio < budget,
     },
   ];
-}
-
-async function timeOf(work: () => Promise<unknown>): Promise<number> {
-  const start = performance.now();
-  await work();
-  return performance.now() - start;
 }
 
 async function countsOf(bytes: Uint8Array): Promise<readonly Count[]> {

@@ -6,7 +6,8 @@ import type { Arm } from '../../src/network/arm.ts';
 import { prepareLadder } from '../../src/network/ladder.ts';
 import { endsOver, sweepInto, type SweepResult } from '../../src/network/sweep.ts';
 import { logGrid } from '../../src/network/worst-in-band.ts';
-import { median, type Figure } from './figure.ts';
+import type { Figure } from './figure.ts';
+import { median } from './timing.ts';
 
 const points = 1001;
 const turns = 31;
@@ -22,7 +23,7 @@ function arms(sections: number): readonly Arm[] {
 
 /**
  * Time per arm and frequency of the sweep against that of the same loop in C (gcc -O2, no vectorising), taken in turns
- * in one run; medians.
+ * in one run; processor time, medians.
  */
 export function benchSweep(): readonly Figure[] {
   if (spawnSync('gcc', ['--version']).status !== 0) {
@@ -63,9 +64,9 @@ function against(program: string, folder: string, network: readonly Arm[]): Figu
   const ours = (): number => {
     // Both warm up at each turn: after a turn of the other the caches and the clock rate are not one's own.
     sweepRounds(rounds / 2);
-    const start = process.hrtime.bigint();
+    const start = process.cpuUsage();
     sweepRounds(rounds);
-    return Number(process.hrtime.bigint() - start) / rounds;
+    return (process.cpuUsage(start).user * 1000) / rounds;
   };
   const theirs = (): number => Number(execFileSync(program, [caseFile, resultFile, String(rounds)]).toString());
 

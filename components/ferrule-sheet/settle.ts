@@ -1,4 +1,4 @@
-import { designAtOnce } from '../../src/design.ts';
+import { design } from '../../src/design.ts';
 import type { Dossier } from '../../src/dossier.ts';
 import { formatProblem, InputError, type Problem } from '../../src/quantity/problem.ts';
 import { readDraft } from '../../src/record/draft.ts';
@@ -26,13 +26,13 @@ export function settle(fields: Fields, before: Settled | null): Settled {
   if (record === null) return { ...kept, problems: lines(problems) };
   const fresh = { fields, understood, problems: {}, stale: false };
   try {
-    return { ...fresh, dossier: designAtOnce(record), notice: '' };
+    return { ...fresh, dossier: design(record), notice: '' };
   } catch (error) {
     if (!(error instanceof InputError)) throw error;
     const lost = error.problems.some(({ field }) => field === 'choice');
     if (!lost) return { ...kept, problems: lines(error.problems) };
   }
-  const dossier = designAtOnce({ ...record, selection: { ...record.selection, option: null } });
+  const dossier = design({ ...record, selection: { ...record.selection, option: null } });
   const shown = dossier.chosenBy === 'proposal' ? 'the proposal' : 'the nearest';
   return {
     ...fresh,

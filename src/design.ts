@@ -3,7 +3,7 @@ import { assumptionsOf } from './design/assumptions.ts';
 import { cautionsOf } from './design/cautions.ts';
 import { ceilingOf } from './design/ceiling.ts';
 import { fittedNetworks, type FitControl, type FitStep } from './design/fitted.ts';
-import { closedForms } from './design/method.ts';
+import { closedForms, type FoundCandidate } from './design/method.ts';
 import { minimumWords } from './design/minimum.ts';
 import { assess, assessor } from './design/option.ts';
 import { checkReach, reachOf } from './design/reach.ts';
@@ -25,7 +25,15 @@ import { version } from './version.ts';
  * @throws InputError when a termination's data don't reach, or the record's selection names a network that isn't there
  */
 export function design(record: DesignRecord): Dossier {
-  const steps = designSteps(record, { stopped: false });
+  return finish(designSteps(record, { stopped: false }));
+}
+
+/** The same for a record that doesn't take long; whoever calls only this needs none of the search. */
+export function designAtOnce(record: DesignRecord): Dossier {
+  return finish(dossierSteps(record, noSearch));
+}
+
+function finish(steps: Generator<FitStep, Dossier>): Dossier {
   for (;;) {
     const step = steps.next();
     if (step.done === true) return step.value;
@@ -36,14 +44,26 @@ export function design(record: DesignRecord): Dossier {
 export const takesLong = ({ method }: DesignRecord): boolean => method === 'fitted' || method === 'all';
 
 /** The pipeline in pieces, for a caller that shows progress or stops a search: what it has then is kept. */
-export function* designSteps(record: DesignRecord, control: FitControl): Generator<FitStep, Dossier> {
+export function designSteps(record: DesignRecord, control: FitControl): Generator<FitStep, Dossier> {
+  return dossierSteps(record, takesLong(record) ? (starts) => fittedNetworks(record, starts, control) : noSearch);
+}
+
+/** Finds fitted networks, from closed forms to start with. */
+export type Search = (starts: readonly FoundCandidate[]) => Generator<FitStep, readonly FoundCandidate[]>;
+
+const noSearch: Search = function* () {
+  return [];
+};
+
+/** The pipeline with a search of the caller's: one that remembers, where only what doesn't touch it has changed. */
+export function* dossierSteps(record: DesignRecord, search: Search): Generator<FitStep, Dossier> {
   const f0 = record.requirement.frequencyHz;
   const reach = reachOf(record);
   checkReach(record, reach);
   const load = terminationAt(record.loads[0]!.termination, f0, f0);
   const target = targetOf(terminationAt(record.source, f0, f0), record.aim);
   const { candidates, absent } = closedForms(record, target, load);
-  const fitted = takesLong(record) ? yield* fittedNetworks(record, candidates, control) : [];
+  const fitted = yield* search(candidates);
   const { ceiling, noCeiling } = ceilingOf(record);
   const judge = assessor(record, reach, ceiling);
   const found = [...candidates, ...fitted];

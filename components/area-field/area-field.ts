@@ -1,37 +1,63 @@
-import { LitElement, html } from 'lit';
+import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { live } from 'lit/directives/live.js';
 import type { FieldName } from '../../src/record/fields.ts';
 import { base } from '../base/base.styles.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { field } from '../base/field.styles.ts';
+import { symbol } from '../base/symbol.ts';
 
 /**
- * A few lines in the engineer's own words.
+ * Text of several lines, as high as it is long. Beneath it stands what was understood, or in one line why not.
  * @fires field-change  on the user's own input only
  */
 @customElement('area-field')
 export class AreaField extends LitElement {
   static override shadowRootOptions: ShadowRootInit = { ...LitElement.shadowRootOptions, delegatesFocus: true };
-  static override styles = [base, field];
+  static override styles = [
+    base,
+    field,
+    css`
+      textarea {
+        field-sizing: content;
+        max-height: 16rem;
+      }
+
+      :host([single]) textarea {
+        padding: 0.1875rem 0.375rem;
+        line-height: 1.5rem;
+        resize: none;
+      }
+    `,
+  ];
 
   @property() name: FieldName = 'reason';
+  /** Visible and accessible name, with the symbol that the calculation uses for it. */
   @property() label = '';
+  @property() symbol = '';
   @property() value = '';
+  /** What was read, in words; '' when there is nothing to say. */
+  @property() understood = '';
   @property() problem = '';
+  /** One line high until there are more. */
+  @property({ type: Boolean, reflect: true }) single = false;
 
   override render() {
+    const lines = this.value.split('\n').length;
     return html`
-      <label for="input">${this.label}</label>
+      <label for="input">${this.label}${this.symbol === '' ? nothing : html` ${symbol(this.symbol)}`}</label>
       <textarea
         id="input"
-        rows="2"
+        rows=${Math.max(this.single ? 1 : 2, lines)}
+        autocomplete="off"
+        autocapitalize="off"
+        spellcheck=${this.single ? 'false' : 'true'}
         .value=${live(this.value)}
         aria-describedby="note"
-        aria-invalid=${this.problem === '' ? 'false' : 'true'}
+        aria-invalid=${this.problem === '' ? nothing : 'true'}
         @input=${this.say}
       ></textarea>
-      <p id="note" class="note problem">${this.problem}</p>
+      <p id="note" class=${this.problem === '' ? 'note' : 'note problem'}>${this.problem || this.understood}</p>
     `;
   }
 

@@ -1,12 +1,12 @@
 import type { Method } from '../../src/record/design-record.ts';
 import { defaults, fieldNames, type Fields } from '../../src/record/fields.ts';
 
-/** Where each kind of sheet lives under the base of the site. */
+/** Where the sheet that serves any record of a method lives under the base of the site. */
 const pathOfMethod: Record<Method, string> = {
   'two-element': '',
   'resistive-pair': 'resistive/',
-  pi: 'resistive/',
-  tee: 'resistive/',
+  pi: '',
+  tee: '',
   cascade: 'sections/',
   'equal-ripple': 'sections/',
   fitted: 'sections/',

@@ -3,11 +3,17 @@ import { customElement, property, state } from 'lit/decorators.js';
 import { guard } from 'lit/directives/guard.js';
 import { isResistive } from '../../src/network/termination-at.ts';
 import type { Method } from '../../src/record/design-record.ts';
+import type { FitStep } from '../../src/design/fitted.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
 import { readRecord } from '../../src/record/read-record.ts';
+import { attachmentsOf, type Attachments } from '../../src/record/read-termination.ts';
+import type { FromWorker } from '../../src/workers/messages.ts';
 import { base } from '../base/base.styles.ts';
 import type { FieldChange } from '../base/field-change.ts';
+import { serves } from '../base/methods.ts';
+import { count } from '../base/words.ts';
+import '../ceiling-part/ceiling-part.ts';
 import type { ContentsEntry } from '../contents-rule/contents-rule.ts';
 import '../contents-rule/contents-rule.ts';
 import '../evidence-part/evidence-part.ts';
@@ -16,18 +22,26 @@ import '../network-part/network-part.ts';
 import '../options-part/options-part.ts';
 import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';
+import '../search-progress/search-progress.ts';
 import '../sheet-part/sheet-part.ts';
 import '../title-block/title-block.ts';
 import { pathOf, readAddress, writeAddress } from './address.ts';
+import { holdsData, recall, remember, tableName, withState } from './attachments.ts';
 import { styles } from './ferrule-sheet.styles.ts';
+import { LongWork } from './long-work.ts';
 import { givenLine, outcome } from './outcome.ts';
 import { judge, parts, type Part } from './parts.ts';
-import { settle, type Settled } from './settle.ts';
+import { finished, lostChoice, lostNotice, refused, settle, withoutChoice, type Settled } from './settle.ts';
 
-/** Pauses after the last keystroke, ms: before the address is written, and before the outcome is said aloud. */
-const pause = { address: 150, voice: 1200 } as const;
+/**
+ * Pauses after the last keystroke, ms: before the address is written, before the outcome is said aloud, and before work
+ * begins that takes long.
+ */
+const pause = { address: 150, voice: 1200, work: 250 } as const;
 /** More of a file than this can't be a record, bytes. */
-const mostRead = 5_000_000;
+const mostRead = 50_000_000;
+/** More than this isn't read as measured data, bytes. */
+const mostMeasured = 200_000_000;
 
 /** A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. */
 @customElement('ferrule-sheet')
@@ -46,6 +60,15 @@ export class FerruleSheet extends LitElement {
   @state() private said = '';
   @state() private opened = '';
   @state() private dragging = false;
+  /** How far the search has come; null while none is seen to be at work. */
+  @state() private progress: FitStep | null = null;
+  @state() private attachments: Attachments = new Map();
+  @state() private dataSaid = '';
+  /** A file of which a port is to be chosen. */
+  @state() private twoPort: { readonly name: string; readonly text: string } | null = null;
+  private readonly work = new LongWork((message) => this.hear(message));
+  private workTimer = 0;
+  private stopping = false;
   private addressTimer = 0;
   private voiceTimer = 0;
   private frame = 0;
@@ -67,11 +90,16 @@ export class FerruleSheet extends LitElement {
     removeEventListener('drop', this.drop);
     clearTimeout(this.addressTimer);
     clearTimeout(this.voiceTimer);
+    clearTimeout(this.workTimer);
+    this.work.end();
     cancelAnimationFrame(this.frame);
   }
 
   protected override willUpdate(changed: PropertyValues) {
-    if (changed.has('demo')) this.readHash();
+    if (changed.has('demo')) {
+      this.attachments = recall();
+      this.readHash();
+    }
     if (changed.has('following')) {
       this.entries = parts.map((part, index) => ({
         number: index + 1,
@@ -89,18 +117,34 @@ export class FerruleSheet extends LitElement {
 
   override render() {
     return html`
-      <div class=${this.dragging ? 'sheet dragging' : 'sheet'} @field-change=${this.change}>
+      <div
+        class=${this.dragging ? 'sheet dragging' : 'sheet'}
+        @field-change=${(event: CustomEvent<FieldChange>) => this.change(event.detail)}
+        @data-file=${(event: CustomEvent<File>) => this.addFile(event.detail)}
+        @data-table=${(event: CustomEvent<string>) => this.addData(event.detail, tableName(this.attachments), 1)}
+        @data-port=${this.answerPort}
+      >
         <given-part
           class="given"
           .method=${this.method}
           .state=${this.settled}
+          .dossier=${this.settled.dossier}
+          .dataNames=${[...this.attachments.keys()]}
+          .dataSaid=${this.dataSaid}
+          .twoPort=${this.twoPort?.name ?? ''}
           .summary=${givenLine(this.settled)}
           .judged=${judge(parts[0]!, this.settled)}
-          .basis=${parts[0]!.basis(this.method)}
+          .basis=${parts[0]!.basis(this.settled.fields.method)}
           .realSource=${this.settled.dossier !== null && isResistive(this.settled.dossier.record.source)}
         ></given-part>
         <div class="document">
-          ${guard([this.following, this.name], () => this.renderTitle())}
+          ${guard([this.following, this.name, this.progress === null], () => this.renderTitle())}
+          <search-progress
+            .step=${this.settled.pending === null ? null : this.progress}
+            .stoppedAfter=${this.settled.dossier?.record.fit.steps === null ? '' : (this.settled.fields.steps ?? '')}
+            @search-stop=${this.stopSearch}
+            @search-on=${() => this.change({ name: 'steps', value: '' })}
+          ></search-progress>
           ${parts.map((part, index) => (part.name === 'Given' ? nothing : this.renderPart(part, index + 1)))}
         </div>
         <contents-rule class="contents" .entries=${this.entries} @reveal-part=${this.reveal}></contents-rule>
@@ -110,14 +154,25 @@ export class FerruleSheet extends LitElement {
   }
 
   private renderTitle(): TemplateResult {
-    const { fields, dossier, stale } = this.following;
+    const { fields, dossier, pending } = this.following;
     const { title = '', number = '', revision = '', date = '', ticket = '' } = fields;
+    const none =
+      pending === null
+        ? 'Nothing is computed yet: correct the entries that are marked.'
+        : 'Nothing is computed yet: the search is at work.';
     return html`<title-block
       .sheet=${this.name}
       .identity=${{ title, number, revision, date, ticket }}
-      .outcome=${dossier === null ? 'Nothing is computed yet: correct the entries that are marked.' : outcome(dossier)}
-      ?stale=${stale && dossier !== null}
+      .outcome=${dossier === null ? none : outcome(dossier)}
+      .stale=${dossier === null ? '' : this.staleWords(this.following)}
     ></title-block>`;
+  }
+
+  /** Why the figures shown aren't those of the texts; '' when they are, or will be before anyone could read it. */
+  private staleWords({ stale, pending }: Settled): string {
+    if (!stale) return '';
+    if (pending === null) return 'Of the last entry that could be read.';
+    return this.progress === null ? '' : 'Of the entry before; the search is at work.';
   }
 
   private renderPart(part: Part, number: number): TemplateResult {
@@ -126,10 +181,10 @@ export class FerruleSheet extends LitElement {
     return html`<sheet-part
       .number=${number}
       .name=${part.name}
-      .basis=${part.basis(this.method)}
+      .basis=${part.basis(this.settled.fields.method)}
       .verdict=${verdict}
       .words=${words}
-      ?stale=${shown.stale && shown.dossier !== null && part.name !== 'Record and report'}
+      .stale=${shown.dossier === null || part.name === 'Record and report' ? '' : this.staleWords(shown)}
       >${this.renderBody(part, shown)}</sheet-part
     >`;
   }
@@ -139,6 +194,8 @@ export class FerruleSheet extends LitElement {
     switch (name) {
       case 'Given':
         return nothing;
+      case 'Ceiling':
+        return html`<ceiling-part .dossier=${dossier}></ceiling-part>`;
       case 'Options':
         return html`<options-part .dossier=${dossier} .state=${shown} .notice=${shown.notice}></options-part>`;
       case 'Network':
@@ -168,15 +225,58 @@ export class FerruleSheet extends LitElement {
 
   private take(fields: Fields) {
     // A sheet serves several methods; an address that asks for one of another sheet gets this sheet's own.
-    const method = pathOf(fields.method) === pathOf(this.method) ? fields.method : this.method;
-    this.settled = settle({ ...fields, method: method ?? this.method }, null);
+    const method = serves(this.method, fields.method) ? fields.method : this.method;
+    this.settleTo(settle({ ...fields, method }, null, this.attachments));
     this.following = this.settled;
   }
 
-  private change(event: CustomEvent<FieldChange>) {
-    const { name, value } = event.detail;
+  /** @param delay before work begins that takes long, ms */
+  private settleTo(settled: Settled, delay = 0) {
+    clearTimeout(this.workTimer);
+    this.work.drop();
+    this.stopping = false;
+    this.settled = settled;
+    const { pending } = settled;
+    if (pending === null) this.progress = null;
+    else this.workTimer = window.setTimeout(() => this.work.start(pending), delay);
+  }
+
+  private hear(message: FromWorker) {
+    if (message.kind === 'progress') {
+      this.progress = message.step;
+      return;
+    }
+    const { pending } = this.settled;
+    if (message.kind === 'refused' && pending !== null && lostChoice(message.problems)) {
+      this.work.start(withoutChoice(pending));
+      return;
+    }
+    if (message.kind === 'refused') {
+      this.settled = refused(this.settled, message.problems);
+      this.progress = null;
+      return;
+    }
+    const { dossier } = message;
+    const lost = pending !== null && pending.selection.option !== dossier.record.selection.option;
+    const steps = this.progress?.steps;
+    this.settled = finished(this.settled, dossier, lost ? lostNotice(dossier) : '');
+    this.progress = null;
+    this.said = outcome(dossier);
+    // With the number of steps in it the record gives the same networks again.
+    if (this.stopping && steps !== undefined) this.change({ name: 'steps', value: String(steps) }, 0);
+  }
+
+  private stopSearch() {
+    this.stopping = true;
+    this.work.stop();
+  }
+
+  private change({ name, value }: FieldChange, delay: number = name === 'choice' ? 0 : pause.work) {
     this.opened = '';
-    this.settled = settle({ ...this.settled.fields, [name]: value }, this.settled);
+    // Another search is meant: it goes to its end.
+    const steps = searched.includes(name) ? { steps: '' } : {};
+    const fields = { ...this.settled.fields, ...steps, [name]: value };
+    this.settleTo(settle(fields, this.settled, this.attachments), delay);
     clearTimeout(this.addressTimer);
     this.addressTimer = window.setTimeout(this.writeHash, pause.address);
     clearTimeout(this.voiceTimer);
@@ -195,7 +295,8 @@ export class FerruleSheet extends LitElement {
 
   /** What is said after a pause in typing: the problem of the field just typed in, or the outcome. */
   private voice(name: FieldName): string {
-    const { problems, stale, dossier, notice } = this.settled;
+    const { problems, stale, dossier, notice, pending } = this.settled;
+    if (pending !== null) return 'The search is at work.';
     const problem = problems[name] ?? Object.values(problems)[0];
     if (stale || dossier === null) return problem ?? '';
     return `${notice} ${outcome(dossier)}`.trim();
@@ -223,15 +324,61 @@ export class FerruleSheet extends LitElement {
     if (file === undefined) return;
     event.preventDefault();
     this.dragging = false;
-    void this.open(file);
+    void (holdsData(file.name) ? this.addFile(file) : this.open(file));
   };
+
+  /** Takes measured data from a file, once it is known of which port. */
+  private async addFile(file: File) {
+    this.twoPort = null;
+    if (file.size > mostMeasured) {
+      this.dataSaid = `${file.name} can’t be read: it is larger than 200 MB; keep the band that matters`;
+      return;
+    }
+    const text = await file.text();
+    this.dataSaid = '';
+    if (/\.s2p$/iu.test(file.name)) this.twoPort = { name: file.name, text };
+    else await this.addData(text, file.name, 1);
+  }
+
+  private async answerPort(event: CustomEvent<1 | 2 | null>) {
+    const file = this.twoPort;
+    this.twoPort = null;
+    if (file !== null && event.detail !== null) await this.addData(file.text, file.name, event.detail);
+  }
+
+  /** Reads measured data and adds them as a state of the load; what is typed stays. */
+  private async addData(text: string, name: string, port: 1 | 2) {
+    const { measuredTermination } = await import('../../src/measured/measured-termination.ts');
+    try {
+      const data = measuredTermination(text, name, port);
+      const known = data.measured.name;
+      this.attach(new Map([[known, data]]));
+      const before = this.settled.fields.load ?? '';
+      const load = withState(before, known);
+      const more = load !== before && before.trim() !== '';
+      this.dataSaid = `${known}: ${count(data.measured.samples, 'sample')}${more ? ', added as a state of the load. Delete the other line to match to it alone.' : '.'}`;
+      this.change({ name: 'load', value: load });
+    } catch (error) {
+      if (!(error instanceof InputError)) throw error;
+      this.dataSaid = `${name} can’t be read. ${formatProblem(error.problems[0]!)}`;
+    }
+  }
+
+  private attach(data: Attachments) {
+    this.attachments = new Map([...this.attachments, ...data]);
+    remember(this.attachments);
+  }
 
   /** Reads a record from a file; the sheet stays as it is when the file holds none. */
   private async open(file: File) {
     try {
       const record = readRecord(await file.slice(0, mostRead).text());
       const fields = fieldsOf(record);
-      if (pathOf(record.method) !== pathOf(this.method)) {
+      const ends = [record.source, ...record.loads.map(({ termination }) => termination)];
+      this.attach(attachmentsOf(ends));
+      // The sheet of two resistances has room for nothing else.
+      const fits = this.method !== 'resistive-pair' || ends.every(isResistive);
+      if (!serves(this.method, record.method) || !fits) {
         location.assign(`${import.meta.env.BASE_URL}${pathOf(record.method)}#${writeAddress(fields)}`);
         return;
       }
@@ -247,6 +394,27 @@ export class FerruleSheet extends LitElement {
     this.said = this.opened;
   }
 }
+
+/** Fields that a search depends on. */
+const searched: readonly FieldName[] = [
+  'method',
+  'frequency',
+  'source',
+  'source-behaviour',
+  'load',
+  'load-behaviour',
+  'aim',
+  'band',
+  'block-dc',
+  'keep-dc',
+  'inductors',
+  'capacitors',
+  'q',
+  'elements',
+  'fit-form',
+  'shunt-inductor',
+  'seed',
+];
 
 declare global {
   interface HTMLElementTagNameMap {

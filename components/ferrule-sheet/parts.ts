@@ -13,9 +13,9 @@ export interface Judged {
 
 /** A part of the document. Parts are numbered by their place in the list. */
 export interface Part {
-  readonly name: 'Given' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Record and report';
+  readonly name: 'Given' | 'Ceiling' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Record and report';
   /** Numbers in the basis of calculation. */
-  readonly basis: (method: Method) => readonly string[];
+  readonly basis: (method: string | undefined) => readonly string[];
   readonly judge: (state: Settled) => Judged;
   /** Its fields; the first part has all those that no other has. */
   readonly fields: readonly FieldName[];
@@ -26,16 +26,17 @@ const always =
   (numbers: readonly string[]): Part['basis'] =>
   () =>
     numbers;
-const optionsBasis: Record<Method, readonly string[]> = {
+const optionsBasis: Readonly<Record<Method, readonly string[]>> = {
   'two-element': ['B3', 'B4', 'B5'],
   'resistive-pair': ['B6', 'B5'],
-  pi: ['B5'],
-  tee: ['B5'],
+  pi: ['B22', 'B5'],
+  tee: ['B22', 'B5'],
   cascade: ['B7', 'B5'],
-  'equal-ripple': ['B5'],
-  fitted: ['B5'],
-  all: ['B5'],
+  'equal-ripple': ['B23', 'B5'],
+  fitted: ['B24', 'B5'],
+  all: ['B3', 'B4', 'B7', 'B22', 'B23', 'B24', 'B5'],
 };
+const isMethod = (text: string | undefined): text is Method => text !== undefined && Object.hasOwn(optionsBasis, text);
 const unassessed: Judged = { verdict: 'not assessed', words: 'not assessed' };
 const judged = (good: boolean): Judged => {
   const verdict = good ? 'meets' : 'falls short';
@@ -62,13 +63,28 @@ export function judge(part: Part, state: Settled): Judged {
 export const parts: readonly Part[] = [
   {
     name: 'Given',
-    basis: always(['B1', 'B2']),
+    basis: always(['B1', 'B2', 'B18', 'B19']),
     fields: fieldNames.filter((name) => !elsewhere.includes(name)),
     judge: () => ({ verdict: 'meets', words: 'can be read' }),
   },
   {
+    name: 'Ceiling',
+    basis: always(['B20', 'B21']),
+    fields: [],
+    judge: ({ dossier }) => {
+      const ceiling = dossier?.ceiling;
+      if (!ceiling) return unassessed;
+      const { verdict, estimate } = ceiling;
+      if (verdict === 'not assessed') return unassessed;
+      return {
+        verdict: verdict === 'out of reach' ? 'falls short' : 'meets',
+        words: estimate ? `${verdict}, by estimate` : verdict,
+      };
+    },
+  },
+  {
     name: 'Options',
-    basis: (method) => optionsBasis[method],
+    basis: (method) => (isMethod(method) ? optionsBasis[method] : []),
     fields: optionsFields,
     judge: ({ dossier }) => {
       if (dossier === null || dossier.options.length === 0) return unassessed;
@@ -81,7 +97,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Network',
-    basis: always(['B8', 'B9']),
+    basis: always(['B8', 'B9', 'B25']),
     fields: [],
     judge: (state) => {
       const chosen = chosenOf(state);

@@ -47,7 +47,32 @@ export const styles = css`
     gap: 0.5rem;
   }
 
+  .why {
+    padding-left: 0.375rem;
+    font-size: var(--small);
+    line-height: 1.35;
+    color: var(--muted);
+  }
+
+  details.help {
+    margin: 0;
+    padding: 0;
+    border: 0;
+    font-size: var(--small);
+    line-height: 1.4;
+  }
+
+  details.help summary {
+    font-weight: 400;
+  }
+
+  details.help ul {
+    margin: 0.25rem 0 0.25rem 0.75rem;
+  }
+
   choice-field + text-field,
+  choice-field + area-field,
+  area-field + choice-field,
   choice-field + radio-field {
     margin-top: 0.5rem;
   }

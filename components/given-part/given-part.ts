@@ -1,17 +1,42 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
 import type { FieldName } from '../../src/record/fields.ts';
+import { circuitModels } from '../../src/network/circuit-model.ts';
+import type { Dossier } from '../../src/dossier.ts';
+import { isOneImpedance, type Termination } from '../../src/network/termination.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import { base } from '../base/base.styles.ts';
 import { basisLinks } from '../base/basis-links.ts';
 import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
+import { methodChoices, methodWords, serves } from '../base/methods.ts';
+import '../area-field/area-field.ts';
 import '../choice-field/choice-field.ts';
+import '../measured-data/measured-data.ts';
 import '../radio-field/radio-field.ts';
 import '../text-field/text-field.ts';
 import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';
-import { aims, behaviours, blocks, keeps } from './choices.ts';
+import { aims, behaviours, blocks, forms, keeps, shuntInductors, sizes } from './choices.ts';
 import { styles } from './given-part.styles.ts';
+
+const partsFields = ['inductors', 'capacitors', 'q-inductor', 'q-capacitor', 'power'] as const;
+
+/** Whether how an end varies is the engineer's to say: models and measured data say it themselves. */
+const variesByChoice = (terminations: readonly (Termination | undefined)[] | undefined): boolean =>
+  terminations === undefined || terminations.some((each) => each === undefined || isOneImpedance(each));
+
+const terminationHelp = html`<details class="help">
+  <summary>What an end can be</summary>
+  <p>An impedance at the design frequency: 9.4-j61, 50∠-30°.</p>
+  <p>A circuit model, its parts in this order:</p>
+  <ul>
+    ${Object.entries(circuitModels).map(([name, { symbols }]) => html`<li>${name} <i>${symbols.join(' ')}</i></li>`)}
+  </ul>
+  <p>
+    as in rc-series 12 8.2p. Measured data, by name. Several states of the load, one a line: in hand = 12-j40. The worst
+    one governs.
+  </p>
+</details>`;
 
 /** Part 1: what is asked for. On a narrow screen it folds into one line. */
 @customElement('given-part')
@@ -19,10 +44,19 @@ export class GivenPart extends LitElement {
   static override styles = [base, verdictStyles, styles];
 
   @property({ type: Number }) number = 1;
+  /** Of the sheet: the first of those that it serves. */
   @property() method: Method = 'two-element';
   @property({ attribute: false }) state: FieldState = emptyFieldState;
+  /** Of the texts, or of earlier ones that could be read. */
+  @property({ attribute: false }) dossier: Dossier | null = null;
   /** With a real source both aims are the same. */
   @property({ type: Boolean }) realSource = false;
+  /** Names of the measured data at hand. */
+  @property({ attribute: false }) dataNames: readonly string[] = [];
+  /** Outcome of reading measured data, in one line. */
+  @property() dataSaid = '';
+  /** A two-port file whose port is to be chosen; '' when there is none. */
+  @property() twoPort = '';
   /** What is given, in one line. */
   @property() summary = '';
   /** Whether it can be read. */
@@ -39,7 +73,7 @@ export class GivenPart extends LitElement {
   /** What can't be read is never out of sight; what was opened stays open while it is corrected. */
   protected override willUpdate() {
     const { problems } = this.state;
-    if (problems.inductors ?? problems.capacitors ?? problems.power) this.partsOpen = true;
+    if (partsFields.some((name) => problems[name] !== undefined)) this.partsOpen = true;
   }
 
   override render() {
@@ -61,35 +95,59 @@ export class GivenPart extends LitElement {
           </span>
           <span class="act">${this.unfolded ? 'Close' : 'Change'}</span>
         </button>
-        <div id="form" class=${this.unfolded ? 'form unfolded' : 'form'}>${this.interface()} ${this.requirement()}</div>
+        <div id="form" class=${this.unfolded ? 'form unfolded' : 'form'}>
+          ${this.interface()} ${this.requirement()} ${this.means()} ${this.parts()}
+        </div>
       </section>
     `;
   }
 
   private interface(): TemplateResult {
     const pair = this.method === 'resistive-pair';
+    const record = this.dossier?.record;
+    const { fields, understood, problems } = this.state;
     return html`
       <div class="group">
         ${this.text('frequency', 'Design frequency', 'f0')}
         ${this.text('source', pair ? 'Source resistance' : 'Source impedance', pair ? 'RS' : 'ZS')}
-        ${pair ? nothing : this.behaviour('source-behaviour', 'Source')}
-        ${this.text('load', pair ? 'Load resistance' : 'Load impedance', pair ? 'RL' : 'ZL')}
-        ${pair ? nothing : this.behaviour('load-behaviour', 'Load')}
-        ${this.state.problems.method === undefined ? nothing : html`<p class="problem">${this.state.problems.method}</p>`}
+        ${pair || !variesByChoice([record?.source]) ? nothing : this.behaviour('source-behaviour', 'Source')}
+        <area-field
+          name="load"
+          single
+          .label=${pair ? 'Load resistance' : 'Load impedance'}
+          .symbol=${pair ? 'RL' : 'ZL'}
+          .value=${fields.load ?? ''}
+          .understood=${understood.load ?? ''}
+          .problem=${problems.load ?? ''}
+        ></area-field>
+        ${
+          pair || !variesByChoice(record?.loads.map(({ termination }) => termination))
+            ? nothing
+            : this.behaviour('load-behaviour', 'Load')
+        }
+        ${
+          pair
+            ? nothing
+            : html`${terminationHelp}
+                <measured-data
+                  .names=${this.dataNames}
+                  .said=${this.dataSaid}
+                  .twoPort=${this.twoPort}
+                ></measured-data>`
+        }
         <radio-field
           name="aim"
           label="Aim: the network presents to the source"
           .choices=${aims}
-          .value=${this.state.fields.aim ?? ''}
+          .value=${fields.aim ?? ''}
           .note=${this.realSource ? 'The source is real: both are the same.' : ''}
-          .problem=${this.state.problems.aim ?? ''}
+          .problem=${problems.aim ?? ''}
         ></radio-field>
       </div>
     `;
   }
 
   private requirement(): TemplateResult {
-    const { understood } = this.state;
     return html`
       <h3>Required</h3>
       <div class="group">
@@ -98,29 +156,64 @@ export class GivenPart extends LitElement {
         ${this.choice('block-dc', 'DC from source to load', blocks)}
         ${this.choice('keep-dc', 'DC fed to an end', keeps)}
       </div>
-      <details
-        ?open=${this.partsOpen}
-        @toggle=${(event: Event) => (this.partsOpen = (event.target as HTMLDetailsElement).open)}
-      >
-        <summary>
-          Parts and power
-          <span class="muted"
-            >${[understood.inductors, understood.capacitors, understood.power].filter(Boolean).join('; ')}</span
-          >
-        </summary>
-        <div class="group">
-          ${this.text('inductors', 'Practicable inductors')} ${this.text('capacitors', 'Practicable capacitors')}
-          ${this.text('power', 'Available power', '', 'Not stated.')}
-        </div>
-      </details>
     `;
+  }
+
+  /** The method, why one would want it, and the fields that belong to it alone. */
+  private means(): TemplateResult {
+    const { method } = this.state.fields;
+    const why = serves(this.method, method) ? methodWords[method].why : '';
+    const chosenQ = method === 'pi' || method === 'tee' || method === 'all';
+    const searched = method === 'fitted' || method === 'all';
+    return html`
+      <h3>Method</h3>
+      <div class="group">
+        ${this.choice('method', 'Networks', methodChoices(this.method))}
+        <p class="why">${why}</p>
+        ${chosenQ ? this.text('q', 'Q of Pi and T at the steeper end', '', this.qWords(), this.qWords()) : nothing}
+        ${
+          searched
+            ? html`${this.choice('elements', 'Number of elements', sizes)} ${this.choice('fit-form', 'Form', forms)}
+              ${this.choice('shunt-inductor', 'Shunt inductors', shuntInductors)}
+              ${this.text('seed', 'Seed of the search', '', 'A whole number.')}`
+            : nothing
+        }
+      </div>
+    `;
+  }
+
+  /** For which Q a Pi or T exists, and which is taken. */
+  private qWords(): string {
+    return (this.dossier?.assumptions ?? []).filter((text) => /^(?:Pi|T) networks exist/u.test(text)).join(' ');
+  }
+
+  private parts(): TemplateResult {
+    const { understood, fields } = this.state;
+    const q = `Q ${fields['q-inductor'] ?? ''} and ${fields['q-capacitor'] ?? ''}`;
+    return html`<details
+      ?open=${this.partsOpen}
+      @toggle=${(event: Event) => (this.partsOpen = (event.target as HTMLDetailsElement).open)}
+    >
+      <summary>
+        Parts and power
+        <span class="muted"
+          >${[understood.inductors, understood.capacitors, q, understood.power].filter(Boolean).join('; ')}</span
+        >
+      </summary>
+      <div class="group">
+        ${this.text('inductors', 'Practicable inductors')} ${this.text('capacitors', 'Practicable capacitors')}
+        ${this.text('q-inductor', 'Q of inductors, for the loss stated')}
+        ${this.text('q-capacitor', 'Q of capacitors, for the loss stated')}
+        ${this.text('power', 'Available power', '', 'Not stated.')}
+      </div>
+    </details>`;
   }
 
   private behaviour(name: FieldName, end: string): TemplateResult {
     return this.choice(name, 'away from', behaviours, end, 'f0');
   }
 
-  private text(name: FieldName, label: string, symbol = '', empty = ''): TemplateResult {
+  private text(name: FieldName, label: string, symbol = '', empty = '', read = ''): TemplateResult {
     const { fields, understood, problems } = this.state;
     return html`<text-field
       .name=${name}
@@ -128,7 +221,7 @@ export class GivenPart extends LitElement {
       .symbol=${symbol}
       .empty=${empty}
       .value=${fields[name] ?? ''}
-      .understood=${understood[name] ?? ''}
+      .understood=${understood[name] ?? read}
       .problem=${problems[name] ?? ''}
     ></text-field>`;
   }

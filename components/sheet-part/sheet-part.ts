@@ -19,8 +19,8 @@ export class SheetPart extends LitElement {
   @property() words = '';
   /** Numbers in the basis of calculation that the part rests on: "B3". */
   @property({ attribute: false }) basis: readonly string[] = [];
-  /** The figures belong to an earlier entry: the one typed now can't be read. */
-  @property({ type: Boolean, reflect: true }) stale = false;
+  /** Why the figures belong to an earlier entry; '' when they don't. */
+  @property({ reflect: true, converter: { toAttribute: (words: string) => (words === '' ? null : '') } }) stale = '';
 
   override render() {
     return html`
@@ -38,7 +38,7 @@ export class SheetPart extends LitElement {
             <h2 id="heading" tabindex="-1"><span class="inline">${this.number}</span> ${this.name}</h2>
             ${verdictMark(this.verdict, this.words || this.verdict)}
           </header>
-          ${this.stale ? html`<p class="stale">Of the last entry that could be read.</p>` : nothing}
+          ${this.stale !== '' ? html`<p class="stale">${this.stale}</p>` : nothing}
           <slot></slot>
         </div>
       </section>

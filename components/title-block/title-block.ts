@@ -19,8 +19,8 @@ export class TitleBlock extends LitElement {
     readonly ticket: string;
   } = { title: '', number: '', revision: '', date: '', ticket: '' };
   @property() outcome = '';
-  /** The outcome is of an earlier entry: the one typed now can't be read. */
-  @property({ type: Boolean, reflect: true }) stale = false;
+  /** Why the outcome is of an earlier entry; '' when it isn't. */
+  @property({ reflect: true, converter: { toAttribute: (words: string) => (words === '' ? null : '') } }) stale = '';
 
   override render() {
     const { title, number, revision, date, ticket } = this.identity;
@@ -44,7 +44,7 @@ export class TitleBlock extends LitElement {
           )}
         </dl>
       </header>
-      ${this.stale ? html`<p class="stale">Of the last entry that could be read.</p>` : nothing}
+      ${this.stale !== '' ? html`<p class="stale">${this.stale}</p>` : nothing}
       <p class="outcome">${this.outcome}</p>
     `;
   }

@@ -1,7 +1,8 @@
-import { designSteps } from '../design.ts';
+import { dossierSteps } from '../design.ts';
 import type { FitControl } from '../design/fitted.ts';
 import { InputError } from '../quantity/problem.ts';
 import type { FromWorker, ToWorker } from './messages.ts';
+import { rememberedSearch } from './remembered-search.ts';
 
 /**
  * The pipeline off the main thread: one record at a time, with progress. A stop keeps the best so far; a new record
@@ -26,7 +27,7 @@ const breathe = (): Promise<void> =>
 async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Promise<void> {
   const control: FitControl = { stopped: false };
   current = { id, control };
-  const steps = designSteps(record, control);
+  const steps = dossierSteps(record, rememberedSearch(record, control));
   try {
     let since = performance.now();
     for (;;) {

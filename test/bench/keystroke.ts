@@ -13,15 +13,16 @@ const sheets = [
   { path: 'sections/', name: 'several sections' },
 ];
 
-/** Main-thread time from a key pressed in a field to the frame that shows every option anew, at a quarter of the speed. */
+/**
+ * Main-thread time from a key pressed in a field to the frame that shows every option anew, on a processor of a quarter of
+ * the speed. It is the thread's own time, times four: a slow-down emulated by the browser would stretch what other programs
+ * take meanwhile too.
+ */
 export async function benchKeystroke(): Promise<readonly Figure[]> {
   const times = await withPage(async (page, url, browser) => {
-    const session = await page.context().newCDPSession(page);
-    const perSheet: number[][] = [];
+    const perSheet: Keystroke[][] = [];
     for (const { path } of sheets) {
-      await session.send('Emulation.setCPUThrottlingRate', { rate: 1 });
       await page.goto(url + path, { waitUntil: 'networkidle' });
-      await session.send('Emulation.setCPUThrottlingRate', { rate: slowDown });
       perSheet.push(await timesOfKeystrokes(page, browser));
     }
     return perSheet;
@@ -30,28 +31,38 @@ export async function benchKeystroke(): Promise<readonly Figure[]> {
     const title = `keystroke to options, ${name}`;
     const budget = `< ${budgetMs} ms`;
     if (times === null) return { name: title, measured: 'no browser', budget, within: null };
-    const time = median(times[k]!);
+    const all = slowDown * median(times[k]!.map((time) => time.all));
+    const script = slowDown * median(times[k]!.map((time) => time.script));
     return {
       name: title,
-      measured: `${time.toFixed(1)} ms at ${slowDown}x slow-down`,
+      measured: `${all.toFixed(1)} ms, ${script.toFixed(1)} of it script`,
       budget,
-      within: time < budgetMs,
+      within: all < budgetMs,
     };
   });
 }
 
+/** Time of the main thread, ms. */
+interface Keystroke {
+  /** Handling the input: computing, and bringing the page's elements up to date. */
+  readonly script: number;
+  /** With layout and paint. */
+  readonly all: number;
+}
+
 /** Types a digit at the end of the load and takes it away again, over and over; both are loads that can be computed. */
-async function timesOfKeystrokes(page: Page, browser: Browser): Promise<number[]> {
+async function timesOfKeystrokes(page: Page, browser: Browser): Promise<Keystroke[]> {
   const field = page.getByLabel(/^Load (impedance|resistance)/).first();
   await field.focus();
   await page.keyboard.press('End');
   const type = async (count: number) => {
     for (let k = 0; k < count; k += 1) {
       await page.keyboard.press(k % 2 === 0 ? '5' : 'Backspace');
-      await page.waitForTimeout(300);
+      await page.waitForTimeout(200);
     }
   };
-  await type(10);
+  // As warm as a sheet in use.
+  await type(40);
   await browser.startTracing(page, { categories: ['devtools.timeline', 'disabled-by-default-devtools.timeline'] });
   await type(keystrokes);
   const { traceEvents } = JSON.parse((await browser.stopTracing()).toString()) as { traceEvents: TraceEvent[] };
@@ -66,13 +77,13 @@ interface TraceEvent {
   readonly tid: number;
   readonly ts: number;
   readonly dur?: number;
-  /** Of `dur`, what the thread itself spent; the rest it waited for a processor. */
+  /** Of `dur`, what the thread itself spent; the rest of it the thread waited for a processor. */
   readonly tdur?: number;
   readonly args: { readonly name?: string; readonly data?: { readonly type?: string } };
 }
 
-/** For each input event the time of its task and of those up to the next paint, ms. */
-function timesInTrace(events: readonly TraceEvent[]): number[] {
+/** For each input event its own time, and that of its task and those up to the next paint. */
+function timesInTrace(events: readonly TraceEvent[]): Keystroke[] {
   const main = events.find(({ name, args }) => name === 'thread_name' && args.name === 'CrRendererMain');
   const onMain = events
     .filter(({ pid, tid, ph }) => ph === 'X' && pid === main?.pid && tid === main.tid)
@@ -80,11 +91,8 @@ function timesInTrace(events: readonly TraceEvent[]): number[] {
   const tasks = onMain.filter(({ name }) => name === 'RunTask');
   const inputs = onMain.filter(({ name, args }) => name === 'EventDispatch' && args.data?.type === 'input');
   return inputs.map((input) => {
-    const paint = onMain.find(({ name, ts }) => name === 'Paint' && ts > input.ts);
-    const until = paint?.ts ?? Infinity;
-    return (
-      tasks.filter(({ ts, dur = 0 }) => ts + dur > input.ts && ts <= until).reduce((sum, { dur = 0 }) => sum + dur, 0) /
-      1000
-    );
+    const until = onMain.find(({ name, ts }) => name === 'Paint' && ts > input.ts)?.ts ?? Infinity;
+    const its = tasks.filter(({ ts, dur = 0 }) => ts + dur > input.ts && ts <= until);
+    return { script: (input.tdur ?? 0) / 1000, all: its.reduce((sum, { tdur = 0 }) => sum + tdur, 0) / 1000 };
   });
 }

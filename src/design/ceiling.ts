@@ -97,7 +97,7 @@ function verdict(
   if (needs === null) {
     return {
       verdict: 'within reach',
-      words: `${asked} needs more than ${String(mostResonators)} resonators (${figure(perResonators[mostResonators - 1]!)} with six); the ceiling is ${top}.`,
+      words: `${asked} needs more than ${String(mostResonators)} resonators tuned to the band's centre (${figure(perResonators[mostResonators - 1]!)} with six); the ceiling is ${top}.`,
     };
   }
   const with_ = `${figure(perResonators[needs - 1]!)} with ${needs === 1 ? "the end's own alone" : String(needs)}`;
@@ -109,7 +109,7 @@ function verdict(
   }
   return {
     verdict: 'within reach',
-    words: `${asked} needs at least ${String(needs)} resonators (${with_}); the ceiling is ${top}.`,
+    words: `${asked} needs at least ${String(needs)} resonators tuned to the band's centre (${with_}); the ceiling is ${top}.`,
   };
 }
 

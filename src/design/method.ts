@@ -6,7 +6,7 @@ import { isResistive } from '../network/termination-at.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import type { Absence, Candidate } from '../synthesis/candidate.ts';
 import { cascade, mostSections, type CascadeCandidate } from '../synthesis/cascade.ts';
-import { equalRipple } from '../synthesis/equal-ripple.ts';
+import type { equalRipple } from '../synthesis/equal-ripple.ts';
 import { leastQ, piTee } from '../synthesis/pi-tee.ts';
 import { resistivePair } from '../synthesis/resistive-pair.ts';
 import { sameArms } from '../synthesis/title.ts';
@@ -32,10 +32,13 @@ export const openQ = (least: number): number => Math.max(1.5 * least, 2);
 
 type ClosedMethod = Exclude<Option['method'], 'fitted'>;
 
+/** The method itself, given by the caller: it is large, and takes long. */
+type EqualRipple = typeof equalRipple;
+
 /** Closed-form networks for the first load state; of cascades and equal ripple, of every number of sections. */
-export function closedForms(record: DesignRecord, target: Complex, load: Complex): Found {
+export function closedForms(record: DesignRecord, target: Complex, load: Complex, ripple: EqualRipple): Found {
   if (record.method === 'fitted') return { candidates: [], absent: [] };
-  if (record.method !== 'all') return closedForm(record.method, record, target, load);
+  if (record.method !== 'all') return closedForm(record.method, record, target, load, ripple);
   const resistive = isResistive(record.source) && isResistive(record.loads[0]!.termination);
   const methods: readonly ClosedMethod[] = [
     resistive ? 'resistive-pair' : 'two-element',
@@ -47,7 +50,7 @@ export function closedForms(record: DesignRecord, target: Complex, load: Complex
   const candidates: FoundCandidate[] = [];
   const absent: Absence[] = [];
   for (const method of methods) {
-    const found = closedForm(method, record, target, load);
+    const found = closedForm(method, record, target, load, ripple);
     absent.push(...found.absent);
     for (const candidate of found.candidates) {
       // One section is a two-element network, and a Pi or T whose outer arm vanishes too: each network is listed once.
@@ -57,7 +60,13 @@ export function closedForms(record: DesignRecord, target: Complex, load: Complex
   return { candidates, absent };
 }
 
-function closedForm(method: ClosedMethod, record: DesignRecord, target: Complex, load: Complex): Found {
+function closedForm(
+  method: ClosedMethod,
+  record: DesignRecord,
+  target: Complex,
+  load: Complex,
+  ripple: EqualRipple,
+): Found {
   const { frequencyHz: f0, bandHz } = record.requirement;
   const named = (found: { readonly candidates: readonly Candidate[]; readonly absent: readonly Absence[] }): Found => ({
     candidates: found.candidates.map((candidate) => ({ ...candidate, method })),
@@ -75,9 +84,13 @@ function closedForm(method: ClosedMethod, record: DesignRecord, target: Complex,
       return named(cascade(target, load, f0, allSections));
     case 'equal-ripple': {
       const end = (z: Complex, termination: Termination) => ({ z, behaviour: behaviourOf(termination) });
+      if (record.aim === 'reflectionless' && !isResistive(record.source)) {
+        const why = "needs the conjugate aim: absorbing the source's reactance in an outer element matches it for power";
+        return { candidates: [], absent: [{ form: 'equal ripple', why }] };
+      }
       // Band edges are there: the schema asks for them with this method.
       return named(
-        equalRipple(
+        ripple(
           end(target.conjugate(), record.source),
           end(load, record.loads[0]!.termination),
           f0,

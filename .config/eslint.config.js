@@ -18,7 +18,10 @@ export default defineConfig(
       'object-shorthand': 'error',
       'prefer-const': 'error',
       '@typescript-eslint/consistent-type-imports': 'error',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_', ignoreRestSiblings: true },
+      ],
       '@typescript-eslint/switch-exhaustiveness-check': 'error',
       // Numbers stand in messages everywhere here, and they are formatted on purpose.
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
@@ -53,6 +56,7 @@ export default defineConfig(
       '@typescript-eslint/no-unsafe-argument': 'off',
       '@typescript-eslint/no-unsafe-assignment': 'off',
       '@typescript-eslint/no-unsafe-member-access': 'off',
+      '@typescript-eslint/no-unsafe-return': 'off',
     },
   },
   {

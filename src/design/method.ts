@@ -85,7 +85,8 @@ function closedForm(
     case 'equal-ripple': {
       const end = (z: Complex, termination: Termination) => ({ z, behaviour: behaviourOf(termination) });
       if (record.aim === 'reflectionless' && !isResistive(record.source)) {
-        const why = "needs the conjugate aim: absorbing the source's reactance in an outer element matches it for power";
+        const why =
+          "needs the conjugate aim: absorbing the source's reactance in an outer element matches it for power";
         return { candidates: [], absent: [{ form: 'equal ripple', why }] };
       }
       // Band edges are there: the schema asks for them with this method.

@@ -62,7 +62,8 @@ function variants(record: DesignRecord): { path: string; record: DesignRecord }[
       ? Object.entries(value).flatMap(([name, inner]) => leaves(inner, [...path, name]))
       : [path];
   const alter = (value: unknown, [name, ...rest]: readonly string[]): unknown => {
-    if (Array.isArray(value)) return (value as unknown[]).map((inner, k) => (String(k) === name ? alter(inner, rest) : inner));
+    if (Array.isArray(value))
+      return (value as unknown[]).map((inner, k) => (String(k) === name ? alter(inner, rest) : inner));
     if (name !== undefined) {
       const object = value as Record<string, unknown>;
       return { ...object, [name]: alter(object[name], rest) };

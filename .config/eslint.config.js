@@ -15,7 +15,7 @@ export default defineConfig(
       'no-control-regex': 'error',
       'no-duplicate-imports': ['error', { allowSeparateTypeImports: true }],
       'no-param-reassign': 'error',
-      'object-shorthand': 'error',
+      'object-shorthand': ['error', 'properties'],
       'prefer-const': 'error',
       '@typescript-eslint/consistent-type-imports': 'error',
       '@typescript-eslint/no-unused-vars': [

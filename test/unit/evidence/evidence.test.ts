@@ -31,6 +31,7 @@ describe('evidence(subject, frequencies, twoElement)', () => {
       'power balance',
       'element values by the Q method',
     ]);
+    expect(checks.map(({ tolerance }) => tolerance)).toEqual([1e-9, 1e-9, 1e-9, 1e-12]);
     expect(frequenciesHz).toEqual([f0, 95e6, 105e6]);
     expect(pass).toBe(true);
   });

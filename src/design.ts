@@ -15,6 +15,7 @@ import { terminationAt } from './network/termination-at.ts';
 import { InputError } from './quantity/problem.ts';
 import { digestOf } from './record/canonical.ts';
 import type { DesignRecord } from './record/design-record.ts';
+import { equalRipple } from './synthesis/equal-ripple.ts';
 import { leastQ } from './synthesis/pi-tee.ts';
 import { targetOf } from './synthesis/target.ts';
 import { version } from './version.ts';
@@ -28,9 +29,14 @@ export function design(record: DesignRecord): Dossier {
   return finish(designSteps(record, { stopped: false }));
 }
 
-/** The same for a record that doesn't take long; whoever calls only this needs none of the search. */
+/**
+ * The same for a record that doesn't take long; whoever calls only this needs none of the methods that do.
+ *
+ * @throws RangeError for one that does
+ */
 export function designAtOnce(record: DesignRecord): Dossier {
-  return finish(dossierSteps(record, noSearch));
+  if (takesLong(record)) throw new RangeError(`designAtOnce: ${record.method} takes long; use designSteps`);
+  return finish(dossierSteps(record, none));
 }
 
 function finish(steps: Generator<FitStep, Dossier>): Dossier {
@@ -40,30 +46,41 @@ function finish(steps: Generator<FitStep, Dossier>): Dossier {
   }
 }
 
-/** Whether a record takes seconds: such a one belongs in a worker. */
-export const takesLong = ({ method }: DesignRecord): boolean => method === 'fitted' || method === 'all';
+const isSearched = ({ method }: DesignRecord): boolean => method === 'fitted' || method === 'all';
+
+/** Whether a record takes more than a keystroke allows, up to seconds: such a one belongs in a worker. */
+export const takesLong = (record: DesignRecord): boolean => isSearched(record) || record.method === 'equal-ripple';
 
 /** The pipeline in pieces, for a caller that shows progress or stops a search: what it has then is kept. */
 export function designSteps(record: DesignRecord, control: FitControl): Generator<FitStep, Dossier> {
-  return dossierSteps(record, takesLong(record) ? (starts) => fittedNetworks(record, starts, control) : noSearch);
+  return dossierSteps(record, { equalRipple, search: (starts) => fittedNetworks(record, starts, control) });
 }
 
 /** Finds fitted networks, from closed forms to start with. */
 export type Search = (starts: readonly FoundCandidate[]) => Generator<FitStep, readonly FoundCandidate[]>;
 
-const noSearch: Search = function* () {
-  return [];
+/** The methods that take long. */
+interface LongMethods {
+  readonly equalRipple: typeof equalRipple;
+  readonly search: Search;
+}
+
+const none: LongMethods = {
+  equalRipple: () => ({ candidates: [], absent: [] }),
+  *search() {
+    return [];
+  },
 };
 
 /** The pipeline with a search of the caller's: one that remembers, where only what doesn't touch it has changed. */
-export function* dossierSteps(record: DesignRecord, search: Search): Generator<FitStep, Dossier> {
+export function* dossierSteps(record: DesignRecord, methods: LongMethods): Generator<FitStep, Dossier> {
   const f0 = record.requirement.frequencyHz;
   const reach = reachOf(record);
   checkReach(record, reach);
   const load = terminationAt(record.loads[0]!.termination, f0, f0);
   const target = targetOf(terminationAt(record.source, f0, f0), record.aim);
-  const { candidates, absent } = closedForms(record, target, load);
-  const fitted = yield* search(candidates);
+  const { candidates, absent } = closedForms(record, target, load, methods.equalRipple);
+  const fitted = isSearched(record) ? yield* methods.search(candidates) : [];
   const { ceiling, noCeiling } = ceilingOf(record);
   const judge = assessor(record, reach, ceiling);
   const found = [...candidates, ...fitted];

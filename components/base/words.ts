@@ -13,6 +13,18 @@ export const partValue = ({ part, value }: Arm): string => formatQuantity(value,
 export const partWords = ({ arms, designators }: Option): readonly string[] =>
   arms.map((arm, index) => `${designators[index] ?? ''} ${partValue(arm)}`);
 
+/** "12.3 dB, 21.0 dB": attenuation at the harmonics, where the data reach so far. */
+export function harmonics({ harmonicDb }: Option): string {
+  const words = harmonicDb.map(({ attenuationDb }) => (attenuationDb === null ? null : decibels(attenuationDb)));
+  return words.every((each) => each === null)
+    ? 'outside the data'
+    : words.map((each) => each ?? 'outside the data').join(', ');
+}
+
+/** Why a network has no loaded Q. */
+export const withoutLoadedQ = ({ arms }: Option): string =>
+  arms.length === 0 ? 'none: no part is needed' : 'not defined for this network';
+
 /** A number stays with its unit at the end of a line. */
 export const unbroken = (text: string): string =>
   text.replace(/(\d) (?=(?:[GMkmµnp]?(?:Hz|Ω|H|F|W|V)|dB|%)(?![\p{L}\p{N}]))/gu, '$1\u00a0');

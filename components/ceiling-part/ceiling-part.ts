@@ -44,6 +44,10 @@ export class CeilingPart extends LitElement {
         padding-left: 0.5rem;
       }
 
+      td:last-child {
+        white-space: nowrap;
+      }
+
       .beyond {
         color: var(--muted);
       }
@@ -95,7 +99,7 @@ export class CeilingPart extends LitElement {
       html`<tr class=${needed ? 'needed' : beyond ? 'beyond' : ''} aria-current=${needed ? 'true' : nothing}>
         <th scope="row">${name}</th>
         <td class="number">${about}${returnLossWords(returnLossDb(reflection ** 2))}</td>
-        <td class="number">${formatFixed(reflection, 4)}</td>
+        <td class="number">${reflection < 5e-5 ? '< 0.0001' : formatFixed(reflection, 4)}</td>
         ${asked === null ? nothing : html`<td>${needed ? 'the least' : beyond ? 'too few' : ''}</td>`}
       </tr>`;
     return html`<table>
@@ -117,13 +121,13 @@ export class CeilingPart extends LitElement {
   }
 }
 
+/** Four digits, without a prefix. */
+const plain = (value: number): string => String(Number(value.toPrecision(4)));
+
 function basis({ governs, state, q, fractionalWidth, basis: words, estimate }: Ceiling): TemplateResult {
   const rows = [
     ['Governs', state === '' ? `the ${governs}` : `the ${governs}, ${state}`],
-    [
-      'Q of that end, and the band’s width over its centre',
-      `${formatQuantity(q, '', 4)} and ${formatQuantity(fractionalWidth, '', 4)}`,
-    ],
+    ['Q of that end, and the band’s width over its centre', `${plain(q)} and ${plain(fractionalWidth)}`],
     [estimate ? 'Estimated from' : 'Worked out from', unbroken(words)],
   ];
   return html`<dl>

@@ -31,6 +31,10 @@ export const styles = css`
     padding-left: 3.25rem;
   }
 
+  search-progress {
+    margin-left: 3.25rem;
+  }
+
   sheet-part {
     margin-bottom: 2.75rem;
     scroll-margin-top: 1rem;
@@ -71,6 +75,10 @@ export const styles = css`
   @media (max-width: 40rem) {
     title-block {
       padding-left: 0;
+    }
+
+    search-progress {
+      margin-left: 0;
     }
   }
 

@@ -2,7 +2,7 @@ import { LitElement, html, nothing, type PropertyValues, type TemplateResult } f
 import { customElement, property, state } from 'lit/decorators.js';
 import { guard } from 'lit/directives/guard.js';
 import { isResistive } from '../../src/network/termination-at.ts';
-import type { Method } from '../../src/record/design-record.ts';
+import type { DesignRecord, Method } from '../../src/record/design-record.ts';
 import type { FitStep } from '../../src/design/fitted.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
@@ -22,13 +22,12 @@ import '../network-part/network-part.ts';
 import '../options-part/options-part.ts';
 import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';
-import '../search-progress/search-progress.ts';
 import '../sheet-part/sheet-part.ts';
 import '../title-block/title-block.ts';
 import { pathOf, readAddress, writeAddress } from './address.ts';
 import { holdsData, recall, remember, tableName, withState } from './attachments.ts';
 import { styles } from './ferrule-sheet.styles.ts';
-import { LongWork } from './long-work.ts';
+import type { LongWork } from './long-work.ts';
 import { givenLine, outcome } from './outcome.ts';
 import { judge, parts, type Part } from './parts.ts';
 import { finished, lostChoice, lostNotice, refused, settle, withoutChoice, type Settled } from './settle.ts';
@@ -66,7 +65,8 @@ export class FerruleSheet extends LitElement {
   @state() private dataSaid = '';
   /** A file of which a port is to be chosen. */
   @state() private twoPort: { readonly name: string; readonly text: string } | null = null;
-  private readonly work = new LongWork((message) => this.hear(message));
+  /** Fetched with the first record that takes long. */
+  private work: LongWork | null = null;
   private workTimer = 0;
   private stopping = false;
   private addressTimer = 0;
@@ -91,7 +91,7 @@ export class FerruleSheet extends LitElement {
     clearTimeout(this.addressTimer);
     clearTimeout(this.voiceTimer);
     clearTimeout(this.workTimer);
-    this.work.end();
+    this.work?.end();
     cancelAnimationFrame(this.frame);
   }
 
@@ -172,7 +172,7 @@ export class FerruleSheet extends LitElement {
   private staleWords({ stale, pending }: Settled): string {
     if (!stale) return '';
     if (pending === null) return 'Of the last entry that could be read.';
-    return this.progress === null ? '' : 'Of the entry before; the search is at work.';
+    return this.progress === null ? '' : 'Of the entry before: the search is at work.';
   }
 
   private renderPart(part: Part, number: number): TemplateResult {
@@ -197,7 +197,12 @@ export class FerruleSheet extends LitElement {
       case 'Ceiling':
         return html`<ceiling-part .dossier=${dossier}></ceiling-part>`;
       case 'Options':
-        return html`<options-part .dossier=${dossier} .state=${shown} .notice=${shown.notice}></options-part>`;
+        return html`<options-part
+          .sheet=${this.method}
+          .dossier=${dossier}
+          .state=${shown}
+          .notice=${shown.notice}
+        ></options-part>`;
       case 'Network':
         return html`<network-part .dossier=${dossier}></network-part>`;
       case 'Response':
@@ -233,12 +238,18 @@ export class FerruleSheet extends LitElement {
   /** @param delay before work begins that takes long, ms */
   private settleTo(settled: Settled, delay = 0) {
     clearTimeout(this.workTimer);
-    this.work.drop();
+    this.work?.drop();
     this.stopping = false;
     this.settled = settled;
     const { pending } = settled;
     if (pending === null) this.progress = null;
-    else this.workTimer = window.setTimeout(() => this.work.start(pending), delay);
+    else this.workTimer = window.setTimeout(() => void this.begin(pending), delay);
+  }
+
+  private async begin(record: DesignRecord) {
+    const { LongWork } = await import('./long-work.ts');
+    this.work ??= new LongWork((message) => this.hear(message));
+    if (this.settled.pending === record) this.work.start(record);
   }
 
   private hear(message: FromWorker) {
@@ -248,7 +259,7 @@ export class FerruleSheet extends LitElement {
     }
     const { pending } = this.settled;
     if (message.kind === 'refused' && pending !== null && lostChoice(message.problems)) {
-      this.work.start(withoutChoice(pending));
+      this.work?.start(withoutChoice(pending));
       return;
     }
     if (message.kind === 'refused') {
@@ -268,7 +279,7 @@ export class FerruleSheet extends LitElement {
 
   private stopSearch() {
     this.stopping = true;
-    this.work.stop();
+    this.work?.stop();
   }
 
   private change({ name, value }: FieldChange, delay: number = name === 'choice' ? 0 : pause.work) {

@@ -1,4 +1,5 @@
 import type { DesignRecord } from '../../src/record/design-record.ts';
+import '../search-progress/search-progress.ts';
 import type { FromWorker, ToWorker } from '../../src/workers/messages.ts';
 
 /** The pipeline off the main thread, for one record at a time; its worker starts with the first of them. */

@@ -43,7 +43,18 @@ const judged = (good: boolean): Judged => {
   return { verdict, words: verdict };
 };
 
-const optionsFields: readonly FieldName[] = ['sections', 'choice', 'reason'];
+const optionsFields: readonly FieldName[] = [
+  'method',
+  'sections',
+  'q',
+  'elements',
+  'fit-form',
+  'shunt-inductor',
+  'seed',
+  'steps',
+  'choice',
+  'reason',
+];
 const responseFields: readonly FieldName[] = ['sweep'];
 const recordFields = fieldNames.filter((name) => /^(identity|signOff)\./u.test(pathOf[name]));
 const elsewhere = [...optionsFields, ...responseFields, ...recordFields];

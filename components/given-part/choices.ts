@@ -22,19 +22,3 @@ export const keeps: readonly Choice[] = [
   { value: 'load', words: 'at the load: not to be shorted' },
   { value: 'both', words: 'at both: not to be shorted' },
 ];
-
-export const sizes: readonly Choice[] = [
-  { value: 'auto', words: 'every number, 2 to 8' },
-  ...['2', '3', '4', '5', '6', '7', '8'].map((value) => ({ value, words: value })),
-];
-
-export const forms: readonly Choice[] = [
-  { value: 'any', words: 'any' },
-  { value: 'low-pass', words: 'low-pass' },
-  { value: 'high-pass', words: 'high-pass' },
-];
-
-export const shuntInductors: readonly Choice[] = [
-  { value: 'yes', words: 'allowed' },
-  { value: 'no', words: 'none' },
-];

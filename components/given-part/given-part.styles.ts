@@ -47,13 +47,6 @@ export const styles = css`
     gap: 0.5rem;
   }
 
-  .why {
-    padding-left: 0.375rem;
-    font-size: var(--small);
-    line-height: 1.35;
-    color: var(--muted);
-  }
-
   details.help {
     margin: 0;
     padding: 0;

@@ -9,14 +9,13 @@ import { base } from '../base/base.styles.ts';
 import { basisLinks } from '../base/basis-links.ts';
 import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
-import { methodChoices, methodWords, serves } from '../base/methods.ts';
 import '../area-field/area-field.ts';
 import '../choice-field/choice-field.ts';
 import '../measured-data/measured-data.ts';
 import '../radio-field/radio-field.ts';
 import '../text-field/text-field.ts';
 import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';
-import { aims, behaviours, blocks, forms, keeps, shuntInductors, sizes } from './choices.ts';
+import { aims, behaviours, blocks, keeps } from './choices.ts';
 import { styles } from './given-part.styles.ts';
 
 const partsFields = ['inductors', 'capacitors', 'q-inductor', 'q-capacitor', 'power'] as const;
@@ -96,7 +95,7 @@ export class GivenPart extends LitElement {
           <span class="act">${this.unfolded ? 'Close' : 'Change'}</span>
         </button>
         <div id="form" class=${this.unfolded ? 'form unfolded' : 'form'}>
-          ${this.interface()} ${this.requirement()} ${this.means()} ${this.parts()}
+          ${this.interface()} ${this.requirement()} ${this.parts()}
         </div>
       </section>
     `;
@@ -135,6 +134,7 @@ export class GivenPart extends LitElement {
                   .twoPort=${this.twoPort}
                 ></measured-data>`
         }
+        ${pair && problems.method !== undefined ? html`<p class="problem">${problems.method}</p>` : nothing}
         <radio-field
           name="aim"
           label="Aim: the network presents to the source"
@@ -157,34 +157,6 @@ export class GivenPart extends LitElement {
         ${this.choice('keep-dc', 'DC fed to an end', keeps)}
       </div>
     `;
-  }
-
-  /** The method, why one would want it, and the fields that belong to it alone. */
-  private means(): TemplateResult {
-    const { method } = this.state.fields;
-    const why = serves(this.method, method) ? methodWords[method].why : '';
-    const chosenQ = method === 'pi' || method === 'tee' || method === 'all';
-    const searched = method === 'fitted' || method === 'all';
-    return html`
-      <h3>Method</h3>
-      <div class="group">
-        ${this.choice('method', 'Networks', methodChoices(this.method))}
-        <p class="why">${why}</p>
-        ${chosenQ ? this.text('q', 'Q of Pi and T at the steeper end', '', this.qWords(), this.qWords()) : nothing}
-        ${
-          searched
-            ? html`${this.choice('elements', 'Number of elements', sizes)} ${this.choice('fit-form', 'Form', forms)}
-              ${this.choice('shunt-inductor', 'Shunt inductors', shuntInductors)}
-              ${this.text('seed', 'Seed of the search', '', 'A whole number.')}`
-            : nothing
-        }
-      </div>
-    `;
-  }
-
-  /** For which Q a Pi or T exists, and which is taken. */
-  private qWords(): string {
-    return (this.dossier?.assumptions ?? []).filter((text) => /^(?:Pi|T) networks exist/u.test(text)).join(' ');
   }
 
   private parts(): TemplateResult {
@@ -213,7 +185,7 @@ export class GivenPart extends LitElement {
     return this.choice(name, 'away from', behaviours, end, 'f0');
   }
 
-  private text(name: FieldName, label: string, symbol = '', empty = '', read = ''): TemplateResult {
+  private text(name: FieldName, label: string, symbol = '', empty = ''): TemplateResult {
     const { fields, understood, problems } = this.state;
     return html`<text-field
       .name=${name}
@@ -221,7 +193,7 @@ export class GivenPart extends LitElement {
       .symbol=${symbol}
       .empty=${empty}
       .value=${fields[name] ?? ''}
-      .understood=${understood[name] ?? read}
+      .understood=${understood[name] ?? ''}
       .problem=${problems[name] ?? ''}
     ></text-field>`;
   }

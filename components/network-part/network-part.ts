@@ -7,11 +7,11 @@ import { formatFixed, formatImpedance } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { drawing } from '../base/drawing.ts';
 import { table } from '../base/table.styles.ts';
-import { partValue, unbroken } from '../base/words.ts';
+import { partValue, unbroken, withoutLoadedQ } from '../base/words.ts';
 import '../copy-button/copy-button.ts';
 import { styles } from './network-part.styles.ts';
 
-/** Part 3: the chosen network, its parts, what the source sees, and what to be careful of. */
+/** Part 4: the chosen network, its parts, what the source sees, and what to be careful of. */
 @customElement('network-part')
 export class NetworkPart extends LitElement {
   static override styles = [base, table, styles];
@@ -64,7 +64,7 @@ export class NetworkPart extends LitElement {
       ['Seen from the source', formatImpedance(option.seen.r, option.seen.x)],
       ['Transducer gain', formatFixed(option.transducerGain, 6)],
       [`|Γ|, ${aim} aim`, formatFixed(option.reflection, 6)],
-      ['Loaded Q', option.loadedQ === null ? 'none: no part is needed' : formatFixed(option.loadedQ, 3)],
+      ['Loaded Q', option.loadedQ === null ? withoutLoadedQ(option) : formatFixed(option.loadedQ, 3)],
       ['DC path', option.dc.words],
     ];
   }

@@ -125,8 +125,25 @@ export const styles = css`
     line-height: 1.4;
   }
 
-  radio-field {
-    margin-bottom: 1.5rem;
+  .minimum {
+    margin-bottom: 0.75rem;
+  }
+
+  .states {
+    max-width: none;
+    margin-top: 0.375rem;
+    font-size: var(--small);
+    line-height: 1.4;
+  }
+
+  .alone {
+    grid-template-columns: minmax(0, 1fr);
+    border-bottom: 1px solid var(--hairline);
+  }
+
+  .alone .title,
+  .alone .drawing {
+    cursor: default;
   }
 
   .notice {

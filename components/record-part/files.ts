@@ -16,6 +16,13 @@ export function fileStem({ identity: { number, revision } }: DesignRecord): stri
 export const recordFile = (record: DesignRecord): Blob =>
   new Blob([`${JSON.stringify(record, null, 2)}\n`], { type: 'application/json' });
 
+/** The chosen network as a two-port file, or its sweep as comma-separated values; null where there is no network. */
+export async function exportFile(dossier: Dossier, kind: 's2p' | 'csv'): Promise<Blob | null> {
+  const { chosenTwoPort, sweepCsv } = await import('../../src/design/exports.ts');
+  const text = kind === 's2p' ? chosenTwoPort(dossier) : sweepCsv(dossier);
+  return text === null ? null : new Blob([text], { type: kind === 's2p' ? 'text/plain' : 'text/csv' });
+}
+
 /** The report; its writer and the fonts are fetched when one is asked for, not before. */
 export async function reportFile(dossier: Dossier, paper: Paper): Promise<Blob> {
   const [{ report }, regular, bold] = await Promise.all([

@@ -8,13 +8,13 @@ import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import { field } from '../base/field.styles.ts';
 import '../copy-button/copy-button.ts';
 import '../text-field/text-field.ts';
-import { fileStem, recordFile, reportFile, save, type Paper } from './files.ts';
+import { exportFile, fileStem, recordFile, reportFile, save, type Paper } from './files.ts';
 import { styles } from './record-part.styles.ts';
 
 const signers = ['prepared', 'checked', 'approved'] as const;
 
 /**
- * Part 6: what identifies the document, who signs it, and the ways in and out.
+ * Part 7: what identifies the document, who signs it, and the ways in and out.
  * @fires field-change  identity and sign-off
  * @fires open-file     detail: a File that the user picked
  */
@@ -69,6 +69,14 @@ export class RecordPart extends LitElement {
         </label>
         <copy-button label="Copy a link to this sheet" .text=${this.link}></copy-button>
       </div>
+      <div class="actions">
+        <button type="button" aria-disabled=${this.stale} @click=${() => this.export('s2p')}>
+          Download the network (.s2p)
+        </button>
+        <button type="button" aria-disabled=${this.stale} @click=${() => this.export('csv')}>
+          Download the sweep (CSV)
+        </button>
+      </div>
       <p class="said" role="status">${this.said || this.opened}</p>
       ${this.dossier === null ? nothing : this.digest(this.dossier.digest)}
     `;
@@ -118,11 +126,27 @@ export class RecordPart extends LitElement {
     this.said = 'The record is saved.';
   }
 
+  private async export(kind: 's2p' | 'csv') {
+    if (!this.ready()) return;
+    const dossier = this.dossier!;
+    const file = await exportFile(dossier, kind);
+    if (file === null) this.said = 'There is no network to save.';
+    else {
+      save(file, `${fileStem(dossier.record)}.${kind}`);
+      this.said = kind === 's2p' ? 'The network is saved as a two-port file.' : 'The sweep is saved.';
+    }
+  }
+
   /** Says why nothing is issued while an entry can't be read. */
   private ready(): boolean {
     const ready = this.dossier !== null && !this.stale;
-    if (!ready)
-      this.said = `Nothing is issued until every entry can be read. ${Object.values(this.state.problems)[0] ?? ''}`;
+    const problem = Object.values(this.state.problems)[0];
+    if (!ready) {
+      this.said =
+        problem === undefined
+          ? 'Nothing is issued while the search is at work.'
+          : `Nothing is issued until every entry can be read. ${problem}`;
+    }
     return ready;
   }
 

@@ -35,8 +35,22 @@ export const styles = css`
     margin-top: 1rem;
   }
 
+  .plot {
+    position: relative;
+    cursor: crosshair;
+    touch-action: pan-y;
+  }
+
+  .cursor {
+    position: absolute;
+    top: 0;
+    bottom: 0;
+    border-left: 1px solid var(--accent);
+    pointer-events: none;
+  }
+
   .plane {
-    max-width: 38rem;
+    max-width: 46rem;
     padding-top: 0.5rem;
   }
 
@@ -70,15 +84,5 @@ export const styles = css`
   sub {
     font-size: 0.75em;
     line-height: 0;
-  }
-
-  details {
-    margin-top: 0.75rem;
-  }
-
-  summary {
-    min-height: 1.5rem;
-    font-weight: 700;
-    cursor: pointer;
   }
 `;

@@ -1,9 +1,12 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import { guard } from 'lit/directives/guard.js';
 import { frequencySpan } from '../../src/design/words.ts';
 import type { Dossier, Option, Response } from '../../src/dossier.ts';
 import type { Span } from '../../src/quantity/span.ts';
 import type { DesignRecord } from '../../src/record/design-record.ts';
+import { plotOf } from '../../src/figures/chart-frame.ts';
+import { frequencyAt, frequencyAxis } from '../../src/figures/frequency-axis.ts';
 import { gainPlot } from '../../src/figures/gain-plot.ts';
 import { reflectionPlane } from '../../src/figures/reflection-plane.ts';
 import { returnLossPlot } from '../../src/figures/return-loss-plot.ts';
@@ -11,7 +14,7 @@ import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { drawing } from '../base/drawing.ts';
 import { fieldChange } from '../base/field-change.ts';
-import { unbroken } from '../base/words.ts';
+import { unbroken, withoutLoadedQ } from '../base/words.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import '../response-table/response-table.ts';
 import '../text-field/text-field.ts';
@@ -24,7 +27,7 @@ const large = { width: 520, height: 200 };
 const small = { width: 290, height: 190 };
 
 /**
- * Part 4: return loss and transducer gain over a span that the engineer sets, the half-power band both ways.
+ * Part 5: return loss and transducer gain over a span that the engineer sets, the half-power band both ways.
  * @fires field-change  `sweep`
  */
 @customElement('response-part')
@@ -35,7 +38,8 @@ export class ResponsePart extends LitElement {
   @property({ attribute: false }) state: FieldState = emptyFieldState;
 
   @state() private size = large;
-  @state() private open = false;
+  /** Where the reader reads, Hz; null: nowhere in particular. */
+  @state() private atHz: number | null = null;
   private readonly watch = new ResizeObserver(([entry]) => {
     if (entry !== undefined) this.size = entry.contentRect.width < roomy ? small : large;
   });
@@ -70,20 +74,44 @@ export class ResponsePart extends LitElement {
     option: Option,
     requirement: DesignRecord['requirement'],
   ): TemplateResult {
+    const { size } = this;
+    const of = [responses, size];
+    const { spanHz } = responses[0]!;
     return html`
-      <figure>${drawing(returnLossPlot(responses, requirement, this.size))}</figure>
-      <figure>${drawing(gainPlot(responses, requirement, option.halfPower, this.size))}</figure>
+      ${this.plot(
+        spanHz,
+        guard(of, () => drawing(returnLossPlot(responses, requirement, size))),
+      )}
+      ${this.plot(
+        spanHz,
+        guard(of, () => drawing(gainPlot(responses, requirement, option.halfPower, size))),
+      )}
+      <response-table
+        .responses=${responses}
+        .requirement=${requirement}
+        .atHz=${this.atHz}
+        @read-at=${(event: CustomEvent<number>) => (this.atHz = event.detail)}
+      ></response-table>
       ${halfPower(option)}
-      <response-table .response=${responses[0]!} .requirement=${requirement}></response-table>
-      <details @toggle=${this.toggle}>
-        <summary>Reflection coefficient in its plane</summary>
-        ${this.open ? html`<figure class="plane">${drawing(reflectionPlane(responses, requirement))}</figure>` : nothing}
-      </details>
+      <h3>Reflection coefficient in its plane</h3>
+      <figure class="plane">${guard(of, () => drawing(reflectionPlane(responses, requirement)))}</figure>
     `;
   }
 
-  private toggle(event: Event) {
-    this.open = (event.target as HTMLDetailsElement).open;
+  /** A chart over which the reading follows the pointer. */
+  private plot(spanHz: Span, chart: unknown): TemplateResult {
+    const { left, right } = plotOf(this.size);
+    const place = this.atHz === null ? -1 : frequencyAxis(spanHz, 2).at(this.atHz);
+    const along = (100 * (left + place * (right - left))) / this.size.width;
+    const read = (event: PointerEvent) => {
+      const { x, width } = (event.currentTarget as HTMLElement).getBoundingClientRect();
+      const at = (((event.clientX - x) / width) * this.size.width - left) / (right - left);
+      if (at >= 0 && at <= 1) this.atHz = frequencyAt(spanHz, at);
+    };
+    return html`<figure class="plot" @pointermove=${read} @pointerdown=${read}>
+      ${chart}
+      <div class="cursor" ?hidden=${place < 0 || place > 1} .style=${`left: ${String(along)}%`}></div>
+    </figure>`;
   }
 
   private span(response: Response | null): TemplateResult {
@@ -116,7 +144,7 @@ export class ResponsePart extends LitElement {
 function halfPower(option: Option): TemplateResult {
   const { bandwidthFromQHz, loadedQ, halfPower: swept } = option;
   const estimate =
-    bandwidthFromQHz === null || loadedQ === null ? 'none: no part is needed' : formatQuantity(bandwidthFromQHz, 'Hz');
+    bandwidthFromQHz === null || loadedQ === null ? withoutLoadedQ(option) : formatQuantity(bandwidthFromQHz, 'Hz');
   const measured = swept.bandwidthHz === null ? 'an edge is absent' : formatQuantity(swept.bandwidthHz, 'Hz');
   return html`
     <h3>Half-power bandwidth</h3>

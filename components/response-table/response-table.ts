@@ -5,19 +5,18 @@ import type { Response } from '../../src/dossier.ts';
 import type { DesignRecord } from '../../src/record/design-record.ts';
 import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
-import { table } from '../base/table.styles.ts';
 import { decibels } from '../base/words.ts';
-import '../copy-button/copy-button.ts';
+import { nearest } from './nearest.ts';
 
-/** About so many rows are shown; all of them are copied. */
-const rows = 40;
-
-/** The response in numbers: at one frequency that the reader sets, and as a table that unfolds. */
+/**
+ * The response in numbers: at one frequency that the reader sets, into every state of the load, and as a table that
+ * unfolds.
+ * @fires read-at  detail: the frequency that the reader went to, Hz
+ */
 @customElement('response-table')
 export class ResponseTable extends LitElement {
   static override styles = [
     base,
-    table,
     css`
       .reading {
         display: grid;
@@ -42,21 +41,14 @@ export class ResponseTable extends LitElement {
         grid-column: 1 / -1;
       }
 
+      output span {
+        display: block;
+      }
+
       summary {
         min-height: 1.5rem;
         font-weight: 700;
         cursor: pointer;
-      }
-
-      .scroll {
-        max-height: 28rem;
-        overflow: auto;
-      }
-
-      thead th {
-        position: sticky;
-        top: 0;
-        background: var(--paper);
       }
 
       @container (max-width: 30rem) {
@@ -67,17 +59,19 @@ export class ResponseTable extends LitElement {
     `,
   ];
 
-  @property({ attribute: false }) response!: Response;
+  /** One a load state, one at least, over the same frequencies. */
+  @property({ attribute: false }) responses!: readonly Response[];
   @property({ attribute: false }) requirement!: DesignRecord['requirement'];
-
   /** Frequency of the reading, Hz; null: the design frequency. */
-  @state() private readAtHz: number | null = null;
+  @property({ attribute: false }) atHz: number | null = null;
+
   @state() private open = false;
 
   override render() {
-    const { frequencyHz } = this.response;
-    const index = nearest(frequencyHz, this.readAtHz ?? this.requirement.frequencyHz);
-    const words = this.reading(index);
+    const { frequencyHz } = this.responses[0]!;
+    const index = nearest(frequencyHz, this.atHz ?? this.requirement.frequencyHz);
+    const words = this.responses.map((response) => reading(response, index));
+    const frequency = formatQuantity(frequencyHz[index]!, 'Hz', 6);
     return html`
       <div class="reading">
         <label for="at">Read at one frequency</label>
@@ -88,92 +82,43 @@ export class ResponseTable extends LitElement {
           max=${frequencyHz.length - 1}
           step="1"
           .value=${String(index)}
-          aria-valuetext=${words}
+          aria-valuetext="${frequency}: ${words.join('; ')}"
           @input=${this.move}
         />
-        <output for="at" aria-live="off">${words}</output>
+        <output for="at" aria-live="off">
+          ${words.length === 1 ? `${frequency}: ${words.join('')}` : html`${frequency}: ${words.map((each) => html`<span>${each}</span>`)}`}
+        </output>
       </div>
-      <details @toggle=${(event: Event) => (this.open = (event.target as HTMLDetailsElement).open)}>
+      <details @toggle=${this.toggle}>
         <summary>The numbers</summary>
-        ${this.open ? this.table() : nothing}
+        ${this.open ? this.numbers() : nothing}
       </details>
     `;
   }
 
+  private numbers(): TemplateResult {
+    return html`<response-numbers .responses=${this.responses} .requirement=${this.requirement}></response-numbers>`;
+  }
+
+  private toggle(event: Event) {
+    this.open = (event.target as HTMLDetailsElement).open;
+    if (this.open) void import('../response-numbers/response-numbers.ts');
+  }
+
   private move(event: Event) {
-    this.readAtHz = this.response.frequencyHz[Number((event.target as HTMLInputElement).value)] ?? null;
-  }
-
-  private reading(index: number): string {
-    const { frequencyHz, returnLossDb, vswr, mismatchLossDb, transducerGainDb } = this.response;
-    return [
-      formatQuantity(frequencyHz[index]!, 'Hz', 6),
-      `return loss ${returnLossWords(returnLossDb[index]!)}`,
-      `VSWR ${formatFixed(vswr[index]!, 3)}`,
-      `mismatch loss ${decibels(mismatchLossDb[index]!, 3)}`,
-      `transducer gain ${decibels(transducerGainDb[index]!, 3)}`,
-    ].join(', ');
-  }
-
-  private table(): TemplateResult {
-    return html`
-      <copy-button label="Copy every line" .text=${() => this.text()}></copy-button>
-      <div class="scroll" tabindex="0" role="group" aria-label="Response in numbers">
-        <table>
-          <thead>
-            <tr>
-              <th scope="col" class="number">Frequency</th>
-              <th scope="col" class="number">Return loss, dB</th>
-              <th scope="col" class="number">VSWR</th>
-              <th scope="col" class="number">Mismatch loss, dB</th>
-              <th scope="col" class="number">Transducer gain, dB</th>
-            </tr>
-          </thead>
-          <tbody>
-            ${this.shown().map((index) => this.row(index))}
-          </tbody>
-        </table>
-      </div>
-    `;
-  }
-
-  /** Every so many lines, and those of the design frequency and the band's ends. */
-  private shown(): readonly number[] {
-    const { frequencyHz } = this.response;
-    const { frequencyHz: f0, bandHz } = this.requirement;
-    const marked = new Set([f0, bandHz?.low, bandHz?.high].map((hertz) => nearest(frequencyHz, hertz ?? f0)));
-    const every = Math.ceil(frequencyHz.length / rows);
-    return [...frequencyHz.keys()].filter((index) => index % every === 0 || marked.has(index));
-  }
-
-  private row(index: number): TemplateResult {
-    const { frequencyHz, returnLossDb, vswr, mismatchLossDb, transducerGainDb } = this.response;
-    return html`<tr>
-      <th scope="row" class="number">${formatQuantity(frequencyHz[index]!, 'Hz', 6)}</th>
-      <td class="number">${formatFixed(returnLossDb[index]!, 2)}</td>
-      <td class="number">${formatFixed(vswr[index]!, 3)}</td>
-      <td class="number">${formatFixed(mismatchLossDb[index]!, 3)}</td>
-      <td class="number">${formatFixed(transducerGainDb[index]!, 3)}</td>
-    </tr>`;
-  }
-
-  private text(): string {
-    const { frequencyHz, returnLossDb, vswr, mismatchLossDb, transducerGainDb } = this.response;
-    const head = ['Frequency, Hz', 'Return loss, dB', 'VSWR', 'Mismatch loss, dB', 'Transducer gain, dB'].join('\t');
-    const lines = frequencyHz.map((hertz, index) =>
-      [hertz, returnLossDb[index], vswr[index], mismatchLossDb[index], transducerGainDb[index]].join('\t'),
-    );
-    return [head, ...lines].join('\n');
+    const hertz = this.responses[0]!.frequencyHz[Number((event.target as HTMLInputElement).value)]!;
+    this.dispatchEvent(new CustomEvent('read-at', { detail: hertz }));
   }
 }
 
-/** Index of the frequency nearest to one that is asked for, Hz. */
-function nearest(frequencyHz: readonly number[], hertz: number): number {
-  let best = 0;
-  frequencyHz.forEach((each, index) => {
-    if (Math.abs(each - hertz) < Math.abs(frequencyHz[best]! - hertz)) best = index;
-  });
-  return best;
+function reading({ state, returnLossDb, vswr, mismatchLossDb, transducerGainDb }: Response, index: number): string {
+  const words = [
+    `return loss ${returnLossWords(returnLossDb[index]!)}`,
+    `VSWR ${formatFixed(vswr[index]!, 3)}`,
+    `mismatch loss ${decibels(mismatchLossDb[index]!, 3)}`,
+    `transducer gain ${decibels(transducerGainDb[index]!, 3)}`,
+  ].join(', ');
+  return state === '' ? words : `${state}: ${words}`;
 }
 
 declare global {

@@ -15,11 +15,18 @@ export class SearchProgress extends LitElement {
   static override styles = [
     base,
     css`
+      :host {
+        position: sticky;
+        z-index: 1;
+        top: 0;
+      }
+
       div {
         display: grid;
         grid-template-columns: minmax(0, 1fr) auto;
         align-items: center;
         gap: 0.25rem 1.25rem;
+        margin-bottom: 1.75rem;
         padding: 0.625rem 0.75rem;
         border: 1px solid var(--ink);
         background: var(--paper);

@@ -39,6 +39,12 @@ export interface Frame {
   readonly shapes: readonly Shape[];
 }
 
+/** Where the plotting area of a chart of a size lies across it. */
+export const plotOf = ({ width }: Size): { readonly left: number; readonly right: number } => ({
+  left: 32,
+  right: width - 1,
+});
+
 /**
  * Axes with ticks at 1-2-5 steps, a faint grid, the value axis' title over the axis and the frequency axis' title below.
  *
@@ -56,8 +62,7 @@ export function chartFrame(
   key?: Key,
   curves: readonly Key[] = [],
 ): Frame {
-  const left = 32;
-  const right = size.width - 1;
+  const { left, right } = plotOf(size);
   const keyWidth = key === undefined ? 0 : widthOf(key);
   const beside = textWidth(axisTitle, lettering, true) + 12 + keyWidth < right;
   const rows = keyRows(curves, right);

@@ -26,7 +26,7 @@ export function frequencyAxis(span: Span, most: number): FrequencyAxis {
   // The unit that writes the span's middle without leading zeros, so that 400 MHz to 1.1 GHz reads in MHz.
   const middle = Math.sqrt(span.low * span.high);
   const [size, unit] = prefixes.find(([value]) => middle >= value) ?? [1, 'Hz'];
-  if (span.high > 8 * span.low) {
+  if (isLogarithmic(span)) {
     const ratio = Math.log(span.high / span.low);
     const all = decadeTicks(span.low, span.high);
     const shown = all.length > most + 1 ? all.filter((hertz) => hertz.toExponential().startsWith('1e')) : all;
@@ -45,4 +45,11 @@ export function frequencyAxis(span: Span, most: number): FrequencyAxis {
     ticks: values.map((value) => ({ hertz: value * size, text: formatFixed(value, decimals) })),
     unit,
   };
+}
+
+const isLogarithmic = ({ low, high }: Span): boolean => high > 8 * low;
+
+/** Frequency at a place of the axis, Hz: the inverse of `at`. */
+export function frequencyAt(span: Span, place: number): number {
+  return isLogarithmic(span) ? span.low * (span.high / span.low) ** place : span.low + place * (span.high - span.low);
 }

@@ -1,6 +1,7 @@
 import { dossierSteps } from '../design.ts';
 import type { FitControl } from '../design/fitted.ts';
 import { InputError } from '../quantity/problem.ts';
+import { equalRipple } from '../synthesis/equal-ripple.ts';
 import type { FromWorker, ToWorker } from './messages.ts';
 import { rememberedSearch } from './remembered-search.ts';
 
@@ -27,7 +28,7 @@ const breathe = (): Promise<void> =>
 async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Promise<void> {
   const control: FitControl = { stopped: false };
   current = { id, control };
-  const steps = dossierSteps(record, rememberedSearch(record, control));
+  const steps = dossierSteps(record, { equalRipple, search: rememberedSearch(record, control) });
   try {
     let since = performance.now();
     for (;;) {

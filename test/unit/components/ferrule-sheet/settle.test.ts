@@ -50,6 +50,7 @@ describe('judge(part, state)', () => {
       '2 entries to correct',
       'not assessed',
       'not assessed',
+      'not assessed',
       '1 entry to correct',
       'not assessed',
       '1 entry to correct',
@@ -57,6 +58,6 @@ describe('judge(part, state)', () => {
   });
 
   it('does not assess a response that nothing is required of', () => {
-    expect(verdicts(settle({ ...pair, 'return-loss': '' }, null))[3]).toBe('not assessed');
+    expect(verdicts(settle({ ...pair, 'return-loss': '' }, null))[4]).toBe('not assessed');
   });
 });

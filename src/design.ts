@@ -135,12 +135,16 @@ export function* dossierSteps(record: DesignRecord, methods: LongMethods): Gener
 
 /** The networks that the list shows, in its order: of all methods together, those of fewest parts come first. */
 function listed({ method, sections }: DesignRecord, assessed: readonly Option[]): readonly Option[] {
-  if (method === 'all') {
-    const byReturnLoss = (a: Option, b: Option): number => (b.worstReturnLossDb ?? 0) - (a.worstReturnLossDb ?? 0);
-    return assessed.toSorted((a, b) => a.arms.length - b.arms.length || byReturnLoss(a, b));
-  }
-  if (sections === 'auto' || (method !== 'cascade' && method !== 'equal-ripple')) return assessed;
-  return assessed.filter((option) => option.sections === sections || option.sections === 0);
+  const asked = assessed.filter(
+    (option) =>
+      sections === 'auto' ||
+      option.sections === sections ||
+      option.sections === 0 ||
+      (option.method !== 'cascade' && option.method !== 'equal-ripple'),
+  );
+  if (method !== 'all') return asked;
+  const byReturnLoss = (a: Option, b: Option): number => (b.worstReturnLossDb ?? 0) - (a.worstReturnLossDb ?? 0);
+  return asked.toSorted((a, b) => a.arms.length - b.arms.length || byReturnLoss(a, b));
 }
 
 function pickedBy({ selection }: DesignRecord, options: readonly Option[]): Option | undefined {

@@ -6,7 +6,7 @@ import type { MeasuredTermination } from '../network/termination.ts';
 import { InputError } from '../quantity/problem.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { readDraft } from '../record/draft.ts';
-import { fieldNames, type Fields } from '../record/fields.ts';
+import { fieldNames, type FieldName, type Fields } from '../record/fields.ts';
 import { readRecord } from '../record/read-record.ts';
 
 /** Files are named from where the person stands: npm changes the folder and says where it was. */
@@ -95,16 +95,38 @@ function parse(
   return { values, positionals: parsed.positionals };
 }
 
+/** Options that only some methods use: given with another, one would do nothing without a word. */
+const methodsUsing: Partial<Record<FieldName, readonly string[]>> = {
+  sections: ['cascade', 'equal-ripple', 'all'],
+  q: ['pi', 'tee', 'all'],
+  elements: ['fitted', 'all'],
+};
+
+/** The method of a command line that names none. */
+const methodMeant = ({ sections, elements }: Fields): string =>
+  sections !== undefined ? 'cascade' : elements !== undefined ? 'fitted' : 'two-element';
+
+function checkMethod(method: string, fields: Fields): void {
+  for (const [name, methods] of Object.entries(methodsUsing)) {
+    const given = fields[name as FieldName];
+    if (given === undefined || methods.includes(method)) continue;
+    throw problem(
+      given,
+      `the method ${method} doesn't use it`,
+      `leave it out, or use --method ${methods[0]!}`,
+      `--${name}`,
+    );
+  }
+}
+
 function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: string }): DesignRecord {
+  const method = fields.method ?? methodMeant(fields);
+  checkMethod(method, fields);
   const attachments = new Map<string, MeasuredTermination>();
   const { record, problems } = readDraft(
     {
       date: new Date().toISOString().slice(0, 10),
-      ...(fields.sections !== undefined
-        ? { method: 'cascade' }
-        : fields.elements !== undefined
-          ? { method: 'fitted' }
-          : {}),
+      method,
       ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
       ...fields,
       ...(fields.source === undefined ? {} : { source: attach('source', fields.source, attachments) }),

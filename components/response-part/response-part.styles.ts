@@ -43,8 +43,8 @@ export const styles = css`
 
   .cursor {
     position: absolute;
-    top: 0;
-    bottom: 0;
+    top: 14%;
+    bottom: 14%;
     border-left: 1px solid var(--accent);
     pointer-events: none;
   }

@@ -223,4 +223,128 @@ export const formulas: readonly Formula[] = [
     symbols: [],
     source: 'FIPS 180-4; RFC 8785.',
   },
+  {
+    number: 'B18',
+    title: 'Circuit models of a termination',
+    lines: [
+      'Z = R + j(ωL − frac(1; ωC))',
+      'Y = frac(1; R) + j(ωC − frac(1; ωL))',
+      'L = frac(QR; ω_r)  ,  C = frac(1; ω_r^2 L)',
+    ],
+    text: [
+      'First line: rc-series, rl-series, rlc-series; an absent part adds nothing. Second line: rc-parallel, rl-parallel, rlc-parallel. crystal: R, L and C of the first line in series, C0 across them. antenna: the first line with L and C of the third, from its resonance and its Q there.',
+    ],
+    symbols: [
+      ['R, L, C', 'parts of the model, as typed', 'Ω, H, F', 'above zero'],
+      ['ω_r = 2πf_r', 'angular frequency of the resonance', 'rad/s', ''],
+    ],
+    source: theory,
+  },
+  {
+    number: 'B19',
+    title: 'Measured terminations',
+    lines: ['Γ = frac(Z − Z_ref; Z + Z_ref)  ,  Z = Z_ref frac(1 + Γ; 1 − Γ)'],
+    text: [
+      'From a Touchstone file, version 1 or 2, one port of it, or a table of frequency, R and X. Real and imaginary part of Γ are interpolated over frequency by a piecewise cubic that rises and falls only as the samples do. Nothing is extrapolated: a frequency outside the data is refused, or said to be outside them. Of more than 2001 samples, 2001 evenly chosen ones are kept; the largest distance of any other from the curve is stated.',
+    ],
+    symbols: [['Z_ref', 'reference resistance of the file; of a table, 50 Ω', 'Ω', '']],
+    source: 'F. N. Fritsch and J. Butland, SIAM J. Sci. Stat. Comput. 5, 1984; Touchstone, IBIS Open Forum.',
+  },
+  {
+    number: 'B20',
+    title: 'Ceiling',
+    lines: [
+      'w = frac(f_2 − f_1; sqrt(f_1 f_2))  ,  |Γ| = e^{−π/(Qw)}',
+      '|Γ| = frac(cosh nb; cosh na)',
+      'frac(tanh na; cosh a) = frac(tanh nb; cosh b)  ,  sinh a − sinh b = frac(2 sin(π/2n); Qw)',
+    ],
+    text: [
+      'The best |Γ| that a lossless network of any kind can hold over the band: with any number of resonators (first line), with n of them, the end’s own counted (second and third). It holds for each reactive end by itself; the end and state of the largest Q governs. With one resonator |Γ|² = (√(1 + g²) − 1)/(√(1 + g²) + 1), g = Qw.',
+      'There is none between two resistances, without a band, and for the reflectionless aim at a complex source, which is no question of power. Where a reactance is held constant, or a fitted model (B21) stands for the end, the figure is an estimate and is called one.',
+    ],
+    symbols: [
+      [
+        'Q',
+        'of the end at the band’s centre: |X|/R in series, R/|X| in parallel, of the larger of two reactances',
+        '1',
+        '',
+      ],
+      ['w', 'fractional width of the band', '1', ''],
+      ['n', 'number of resonators', '1', '1 to 6'],
+    ],
+    source:
+      'H. W. Bode, Network Analysis and Feedback Amplifier Design, 1945; R. M. Fano, J. Franklin Institute 249, 1950.',
+  },
+  {
+    number: 'B21',
+    title: 'One-resonance model of an end',
+    lines: ['X(f) = x_L frac(f; f_c) − x_C frac(f_c; f)'],
+    text: [
+      'For measured data and crystals: R and the two reactances by least squares over 41 frequencies of the band, in series and, in admittance, in parallel; the arrangement nearer in reflection is taken. Its Q is that of the larger reactance. The largest distance in Γ between model and data, in a reference of |Z|, is stated.',
+    ],
+    symbols: [
+      ['x_L, x_C', 'the reactance that grows and the one that falls, at the centre', 'Ω', '0 or more'],
+      ['f_c', 'centre of the band, square root of f_1 f_2', 'Hz', ''],
+    ],
+    source: theory,
+  },
+  {
+    number: 'B22',
+    title: 'Pi and T of a chosen Q',
+    lines: [
+      'R_v = frac(R_high; Q^2 + 1) < R_low',
+      'R_v = R_low (Q^2 + 1) > R_high',
+      'Q ≥ sqrt(frac(R_high; R_low) − 1)',
+    ],
+    text: [
+      'Two sections of B6 back to back through a virtual resistance: Pi (first line) between the ends’ parallel resistances, T (second line) between their series resistances. Each section is low-pass or high-pass, so that there are four of either kind. Reactance of an end is taken into the outer arm next to it. They exist from the least Q of the third line upwards; where no Q is given, 1.5 times the least and at least 2 is taken.',
+    ],
+    symbols: [
+      ['Q', 'at the steeper end', '1', 'as typed, or as above'],
+      ['R_v', 'virtual resistance', 'Ω', ''],
+    ],
+    source: 'C. Bowick, RF Circuit Design, 1982, ch. 4.',
+  },
+  {
+    number: 'B23',
+    title: 'Equal ripple',
+    lines: [
+      'frac(P_available; P_load) = 1 + ε^2 T_n^2(x)  ,  x = frac(2ω^2 − ω_1^2 − ω_2^2; ω_2^2 − ω_1^2)',
+      'ε = frac(r − 1; 2 sqrt(r)) frac(1; T_n(x_0))  ,  x_0 = frac(ω_1^2 + ω_2^2; ω_2^2 − ω_1^2)',
+      '|Γ|^2 = frac(ε^2; 1 + ε^2)',
+    ],
+    text: [
+      'Ladders of 2n elements between two resistances of ratio r, low-pass form; the high-pass form mirrors it about the band’s centre. Elements from the left-half-plane roots in closed form by continued fractions. The third line is the worst |Γ| in the band; beyond 150 dB double precision cannot bear it out, and the network is refused. Reactance of an end is absorbed where it is of the outer element’s kind and no larger.',
+    ],
+    symbols: [
+      ['T_n', 'Chebyshev polynomial of degree n', '1', ''],
+      ['n', 'number of sections', '1', '1 to 6'],
+      ['ω_1, ω_2', 'angular frequencies of the band’s ends', 'rad/s', ''],
+    ],
+    source: 'G. L. Matthaei, Proc. IEEE 52, 1964.',
+  },
+  {
+    number: 'B24',
+    title: 'Fitted networks',
+    lines: [],
+    text: [
+      'Ladders of 2 to 8 elements, arms in series and in shunt by turns: over every arrangement of inductors and capacitors that the form, the DC requirements and the choice about shunt inductors leave, the largest |Γ| over band and load states is lowered, element values kept inside the practicable ranges. Starts: random ones from a seed (1 by default), networks matched at the centre, closed forms and smaller fitted networks. A wide band is followed to a narrow one where the ends call for it. The same record gives the same networks; a search that was stopped is recorded with its number of steps. It is a search: a better network may exist, and the distance from the ceiling (B20) tells how much better at most.',
+    ],
+    symbols: [],
+    source: 'J. Nocedal and S. J. Wright, Numerical Optimization, 2nd ed., Springer 2006, ch. 6.',
+  },
+  {
+    number: 'B25',
+    title: 'Loss in the parts',
+    lines: ['R_ser = frac(ω_0 L; Q_ind)  ,  R_ser = frac(1; ω_0 C Q_cap)', 'A = 10 log10 frac(P_in; P_load)'],
+    text: [
+      'At the design frequency alone, each part with the series resistance that its quality factor means. Every other figure takes parts as lossless.',
+    ],
+    symbols: [
+      ['Q_ind', 'of inductors', '1', '50 by default'],
+      ['Q_cap', 'of capacitors', '1', '300 by default'],
+      ['A', 'loss', 'dB', ''],
+    ],
+    source: theory,
+  },
 ];

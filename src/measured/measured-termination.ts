@@ -1,7 +1,7 @@
 import { sha256 } from '@noble/hashes/sha2.js';
 import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
 import { lineProblem } from './line-problem.ts';
-import type { Measured } from './measured.ts';
+import type { Measured, MeasuredData } from './measured.ts';
 import { readTable } from './read-table.ts';
 import { readTouchstone } from './read-touchstone.ts';
 import { interpolate, slopesOf } from './shape-preserving.ts';
@@ -11,18 +11,6 @@ const mostKept = 2001;
 
 /** What no table has: the option line of a Touchstone file, or the keyword that begins one of version 2. */
 const optionLine = /^\s*(?:#(?:\s*(?:[kmg]?hz|[syzgh]|ma|db|ri|r\s*[\d.]+)(?=\s|$))+\s*(?:!.*)?$|\[version\])/imu;
-
-/** Plain data of a measured one-port, as the record holds it. */
-export interface MeasuredData {
-  readonly name: string;
-  readonly sha256: string;
-  readonly samples: number;
-  readonly thinningError: number;
-  readonly referenceOhm: number;
-  readonly frequencyHz: readonly number[];
-  readonly re: readonly number[];
-  readonly im: readonly number[];
-}
 
 /**
  * A termination from the text of a Touchstone file (by its ending) or of a table of frequency, R and X.

@@ -1,3 +1,4 @@
+import type { MeasuredData } from '../measured/measured.ts';
 import type { CircuitModel } from './circuit-model.ts';
 
 /** Conjugate: looking into the network one sees ZS*. Reflectionless: one sees ZS. Both are the same for a real source. */
@@ -20,21 +21,7 @@ export interface OneImpedance {
 
 /** Samples of a reflection coefficient, from a file or a pasted table; interpolated between, never beyond. */
 export interface MeasuredTermination {
-  readonly measured: {
-    /** File name, or "table". */
-    readonly name: string;
-    /** SHA-256 of the file's or table's text, 64 hex digits. */
-    readonly sha256: string;
-    /** Samples in the file; more than are here where it was thinned. */
-    readonly samples: number;
-    /** Largest distance between a sample left out and the curve through those kept; 0 where none was. */
-    readonly thinningError: number;
-    /** Ω */
-    readonly referenceOhm: number;
-    readonly frequencyHz: readonly number[];
-    readonly re: readonly number[];
-    readonly im: readonly number[];
-  };
+  readonly measured: MeasuredData;
 }
 
 /** One end of the interface. */

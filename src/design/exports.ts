@@ -14,21 +14,24 @@ export function chosenTwoPort({ options, chosen, responses, record, digest, vers
   ]);
 }
 
-/** The chosen network's sweep as comma-separated values (RFC 4180), one block of columns a load state; null where there is none. */
-export function sweepCsv({ responses }: Dossier): string | null {
+/** The chosen network's sweep as comma-separated values (RFC 4180), one block of columns a load state in the record's order; null where there is none. */
+export function sweepCsv({ responses, record }: Dossier): string | null {
   const [first] = responses;
   if (first === undefined) return null;
-  const columns = responses.flatMap((response) => {
-    const of = response.state === '' ? '' : `${response.state}: `;
-    return [
-      [`${of}return loss dB`, response.returnLossDb],
-      [`${of}VSWR`, response.vswr],
-      [`${of}mismatch loss dB`, response.mismatchLossDb],
-      [`${of}transducer gain dB`, response.transducerGainDb],
-      [`${of}reflection re`, response.gammaRe],
-      [`${of}reflection im`, response.gammaIm],
-    ] as const;
-  });
+  const place = (state: string): number => record.loads.findIndex(({ name }) => name === state);
+  const columns = responses
+    .toSorted((a, b) => place(a.state) - place(b.state))
+    .flatMap((response) => {
+      const of = response.state === '' ? '' : `${response.state}: `;
+      return [
+        [`${of}return loss dB`, response.returnLossDb],
+        [`${of}VSWR`, response.vswr],
+        [`${of}mismatch loss dB`, response.mismatchLossDb],
+        [`${of}transducer gain dB`, response.transducerGainDb],
+        [`${of}reflection re`, response.gammaRe],
+        [`${of}reflection im`, response.gammaIm],
+      ] as const;
+    });
   const quoted = (text: string): string => (/[",\r\n]/u.test(text) ? `"${text.replaceAll('"', '""')}"` : text);
   const head = ['frequency Hz', ...columns.map(([name]) => quoted(name))].join(',');
   const rows = first.frequencyHz.map((hz, k) => [hz, ...columns.map(([, values]) => values[k]!)].join(','));

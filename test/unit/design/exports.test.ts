@@ -62,9 +62,11 @@ describe('sweepCsv(dossier)', () => {
         ),
       );
 
-  it('has the frequency and a block of columns for each state, the governing one first', () => {
+  it("has the frequency and a block of columns for each state, in the record's order", () => {
     const [head, ...rows] = parse(text);
-    const [first, second] = dossier.responses.map(({ state }) => state);
+    const order = dossier.record.loads.map(({ name }) => name);
+    const responses = dossier.responses.toSorted((a, b) => order.indexOf(a.state) - order.indexOf(b.state));
+    const [first, second] = order;
     const columns = [
       'return loss dB',
       'VSWR',
@@ -83,7 +85,7 @@ describe('sweepCsv(dossier)', () => {
     rows.forEach((row, k) => {
       expect(row.map(Number)).toEqual([
         dossier.responses[0]!.frequencyHz[k],
-        ...dossier.responses.flatMap(({ returnLossDb, vswr, mismatchLossDb, transducerGainDb, gammaRe, gammaIm }) => [
+        ...responses.flatMap(({ returnLossDb, vswr, mismatchLossDb, transducerGainDb, gammaRe, gammaIm }) => [
           returnLossDb[k]!,
           vswr[k]!,
           mismatchLossDb[k]!,

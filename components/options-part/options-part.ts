@@ -72,7 +72,7 @@ export class OptionsPart extends LitElement {
   /** Many networks in a table, and the figures of the chosen one. */
   private table(dossier: Dossier): TemplateResult {
     const chosen = dossier.options.find(({ id }) => id === dossier.chosen);
-    return html`<options-table .dossier=${dossier}></options-table>
+    return html`<options-table .dossier=${dossier} .picked=${this.picked()}></options-table>
       ${chosen === undefined ? nothing : html`<div class="option alone"><div>${this.content(chosen)}</div></div>`}`;
   }
 
@@ -104,20 +104,26 @@ export class OptionsPart extends LitElement {
   }
 
   private option(option: Option): TemplateResult {
-    const { chosen } = this.dossier!;
     return html`
-      <li class=${option.id === chosen ? 'option chosen' : 'option'}>
+      <li class=${option.id === this.dossier?.chosen ? 'option chosen' : 'option'}>
         <input
           type="radio"
           name="network"
           id="network-${option.id}"
           aria-describedby="verdict-${option.id} reason-${option.id}"
-          .checked=${live(option.id === chosen)}
+          .checked=${live(option.id === this.picked())}
           @change=${() => this.pick(option)}
         />
         ${this.content(option)}
       </li>
     `;
+  }
+
+  /** Id of the network that is marked: the engineer's at once, even while its figures are still on their way. */
+  private picked(): string {
+    const { options, chosen } = this.dossier!;
+    const { choice = '' } = this.state.fields;
+    return options.some(({ id }) => id === choice) ? choice : (chosen ?? '');
   }
 
   private pick({ id }: Option) {

@@ -103,6 +103,9 @@ export class OptionsTable extends LitElement {
 
   @property({ attribute: false }) dossier: Dossier | null = null;
 
+  /** Id of the network that is marked. */
+  @property() picked = '';
+
   override render() {
     if (this.dossier === null) return nothing;
     const { options } = this.dossier;
@@ -153,7 +156,7 @@ export class OptionsTable extends LitElement {
     return html`<tr class=${option.id === chosen ? 'chosen' : ''}>
       <th scope="row">
         <label>
-          <input type="radio" name="network" .checked=${live(option.id === chosen)} @change=${pick} />
+          <input type="radio" name="network" .checked=${live(option.id === this.picked)} @change=${pick} />
           <span>${option.title}${option.id === proposed ? html` <span class="tag">(proposed)</span>` : nothing}</span>
         </label>
       </th>

@@ -83,10 +83,9 @@ export class SearchProgress extends LitElement {
 
   private progress({ done, elements, bestDb }: FitStep): TemplateResult {
     const best = bestDb === null ? '' : `; best so far ${returnLossWords(bestDb)}`;
+    const words = unbroken(`Searching, ${String(Math.floor(done * 100))} %: ${String(elements)} elements${best}`);
     return html`<div>
-      <p id="words">
-        ${unbroken(`Searching, ${String(Math.floor(done * 100))} %: ${String(elements)} elements${best}`)}
-      </p>
+      <p id="words">${words}</p>
       <button type="button" @click=${this.say('search-stop')}>Stop, keep the best</button>
       <progress max="1" .value=${done} aria-labelledby="words"></progress>
     </div>`;

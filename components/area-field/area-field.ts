@@ -8,7 +8,7 @@ import { field } from '../base/field.styles.ts';
 import { symbol } from '../base/symbol.ts';
 
 /**
- * Text of several lines, as high as it is long. Beneath it stands what was understood, or in one line why not.
+ * Text of several lines, as high as it has lines. Beneath it stands what was understood, or in one line why not.
  * @fires field-change  on the user's own input only
  */
 @customElement('area-field')
@@ -18,14 +18,15 @@ export class AreaField extends LitElement {
     base,
     field,
     css`
-      textarea {
-        field-sizing: content;
-        max-height: 16rem;
-      }
-
+      /* Each line of it on one line, scrolled like a field of one line; laid out by itself, as such a field is. */
       :host([single]) textarea {
+        contain: strict;
+        min-height: 0;
         padding: 0.1875rem 0.375rem;
         line-height: 1.5rem;
+        white-space: pre;
+        overflow: auto hidden;
+        scrollbar-width: none;
         resize: none;
       }
     `,
@@ -48,7 +49,8 @@ export class AreaField extends LitElement {
       <label for="input">${this.label}${this.symbol === '' ? nothing : html` ${symbol(this.symbol)}`}</label>
       <textarea
         id="input"
-        rows=${Math.max(this.single ? 1 : 2, lines)}
+        rows=${Math.max(2, lines)}
+        .style=${this.single ? `height: ${String(1.5 * lines + 0.4375)}rem` : ''}
         autocomplete="off"
         autocapitalize="off"
         spellcheck=${this.single ? 'false' : 'true'}

@@ -45,5 +45,12 @@ const methodsOf: Partial<Record<Method, readonly Method[]>> = {
 export const serves = (sheet: Method, method: string | undefined): method is Method =>
   methodsOf[sheet]?.some((each) => each === method) ?? false;
 
-export const methodChoices = (sheet: Method): readonly Choice[] =>
-  (methodsOf[sheet] ?? []).map((value) => ({ value, words: methodWords[value].words }));
+const choicesOf = Object.fromEntries(
+  Object.entries(methodsOf).map(([sheet, methods]) => [
+    sheet,
+    methods.map((value) => ({ value, words: methodWords[value].words })),
+  ]),
+);
+
+/** The same array every time, so that nothing is drawn anew for it. */
+export const methodChoices = (sheet: Method): readonly Choice[] => choicesOf[sheet] ?? [];

@@ -129,7 +129,7 @@ export class FerruleSheet extends LitElement {
           .method=${this.method}
           .state=${this.settled}
           .dossier=${this.settled.dossier}
-          .dataNames=${[...this.attachments.keys()]}
+          .attachments=${this.attachments}
           .dataSaid=${this.dataSaid}
           .twoPort=${this.twoPort?.name ?? ''}
           .summary=${givenLine(this.settled)}

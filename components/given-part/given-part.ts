@@ -4,6 +4,7 @@ import type { FieldName } from '../../src/record/fields.ts';
 import { circuitModels } from '../../src/network/circuit-model.ts';
 import type { Dossier } from '../../src/dossier.ts';
 import { isOneImpedance, type Termination } from '../../src/network/termination.ts';
+import type { Attachments } from '../../src/record/read-termination.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import { base } from '../base/base.styles.ts';
 import { basisLinks } from '../base/basis-links.ts';
@@ -50,8 +51,8 @@ export class GivenPart extends LitElement {
   @property({ attribute: false }) dossier: Dossier | null = null;
   /** With a real source both aims are the same. */
   @property({ type: Boolean }) realSource = false;
-  /** Names of the measured data at hand. */
-  @property({ attribute: false }) dataNames: readonly string[] = [];
+  /** The measured data at hand. */
+  @property({ attribute: false }) attachments: Attachments = new Map();
   /** Outcome of reading measured data, in one line. */
   @property() dataSaid = '';
   /** A two-port file whose port is to be chosen; '' when there is none. */
@@ -129,7 +130,7 @@ export class GivenPart extends LitElement {
             ? nothing
             : html`${terminationHelp}
                 <measured-data
-                  .names=${this.dataNames}
+                  .attachments=${this.attachments}
                   .said=${this.dataSaid}
                   .twoPort=${this.twoPort}
                 ></measured-data>`

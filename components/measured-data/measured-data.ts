@@ -1,5 +1,6 @@
 import { LitElement, css, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import type { Attachments } from '../../src/record/read-termination.ts';
 import { base } from '../base/base.styles.ts';
 import { field } from '../base/field.styles.ts';
 
@@ -74,8 +75,8 @@ export class MeasuredData extends LitElement {
     `,
   ];
 
-  /** Names of the data at hand. */
-  @property({ attribute: false }) names: readonly string[] = [];
+  /** The data at hand. */
+  @property({ attribute: false }) attachments: Attachments = new Map();
   /** Outcome of reading a file or table, in one line. */
   @property() said = '';
   /** A two-port file whose port is to be chosen; '' when there is none. */
@@ -95,10 +96,10 @@ export class MeasuredData extends LitElement {
       }
       <p class="said" role="status" ?hidden=${this.said === ''}>${this.said}</p>
       ${
-        this.names.length === 0
+        this.attachments.size === 0
           ? nothing
           : html`<p class="hand">
-              At hand: ${this.names.join(', ')}. The name stands for the data, at the source too.
+              At hand: ${[...this.attachments.keys()].join(', ')}. The name stands for the data, at the source too.
             </p>`
       }
       <details>

@@ -16,8 +16,10 @@ export const shuntInductors: readonly Choice[] = [
   { value: 'no', words: 'none' },
 ];
 
-/** Number of sections; of an equal-ripple ladder every number, as of a cascade, is computed anyway. */
-export const numbers = (method: 'cascade' | 'equal-ripple'): readonly Choice[] => [
-  { value: 'auto', words: method === 'cascade' ? 'the smallest that holds the band' : 'every number' },
-  ...['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value })),
-];
+const counted = ['1', '2', '3', '4', '5', '6'].map((value) => ({ value, words: value }));
+
+/** Numbers of sections; of an equal-ripple ladder the smallest isn't looked for, every one is listed. */
+export const numbers: Readonly<Record<'cascade' | 'equal-ripple', readonly Choice[]>> = {
+  cascade: [{ value: 'auto', words: 'the smallest that holds the band' }, ...counted],
+  'equal-ripple': [{ value: 'auto', words: 'every number' }, ...counted],
+};

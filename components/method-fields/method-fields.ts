@@ -79,7 +79,7 @@ export class MethodFields extends LitElement {
               name="sections"
               label="Number of sections"
               inline
-              .choices=${numbers(method)}
+              .choices=${numbers[method]}
               .value=${fields.sections ?? ''}
               .problem=${problems.sections ?? ''}
             ></radio-field>`

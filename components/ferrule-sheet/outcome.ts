@@ -30,8 +30,9 @@ function howMany(meeting: number, all: number): string {
   return `${String(meeting)} of ${String(all)} networks ${meeting === 1 ? 'meets' : 'meet'} everything asked.`;
 }
 
-/** "Series L" in the middle of a sentence is "series L". */
-const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
+/** "Series L" in the middle of a sentence is "series L"; a Pi or T stays one. */
+const lowerFirst = (text: string): string =>
+  /^(?:Pi|T):/u.test(text) ? text : text.charAt(0).toLowerCase() + text.slice(1);
 
 /** What is given, in one line, from what was understood. */
 export function givenLine({ understood }: Settled): string {

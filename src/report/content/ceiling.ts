@@ -24,6 +24,9 @@ export function ceiling({ ceiling: found, noCeiling, record }: Dossier): readonl
         spans: [
           ...(estimate ? [{ text: 'Estimate. ', bold: true }] : []),
           { text: `Basis: ${sentence(basis).replace(/^One-/u, 'one-')}` },
+          ...(record.loads.length > 1
+            ? [{ text: ' Each load state is judged by itself; holding all of them at once may not be possible.' }]
+            : []),
         ],
       },
       keep: true,

@@ -146,6 +146,6 @@ function endQ(termination: Termination, f0: number, band: Span, centre: number):
   return {
     q,
     estimate: true,
-    basis: `one-resonance model (${fit.arrangement} R ${formatQuantity(fit.r, 'Ω')}, Q ${formatQuantity(q, '', 3)} at ${formatQuantity(centre, 'Hz')}) fitted over the band, within ${formatFixed(fit.misfit, 3)} of Γ`,
+    basis: `one-resonance model (${fit.arrangement} R ${formatQuantity(fit.r, 'Ω')}, Q ${formatQuantity(q, '', 3)} at ${formatQuantity(centre, 'Hz')}) fitted over the band, within ${formatFixed(Math.max(fit.misfit, 0.001), 3)} of Γ`,
   };
 }

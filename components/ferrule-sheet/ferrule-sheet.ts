@@ -42,7 +42,10 @@ const mostRead = 50_000_000;
 /** More than this isn't read as measured data, bytes. */
 const mostMeasured = 200_000_000;
 
-/** A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. */
+/**
+ * A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. Longer than others
+ * because it is the one element with state: address, files dropped, search at work and voice all answer to it.
+ */
 @customElement('ferrule-sheet')
 export class FerruleSheet extends LitElement {
   static override styles = [base, styles];

@@ -1,6 +1,3 @@
-import type { Complex } from 'complex.js';
-import { Complex as Z } from 'complex.js';
-
 /**
  * Circuit models of a termination. `values` in the order of `symbols`, SI units (Ω, H, F; `antenna`: Ω, Hz, 1):
  *
@@ -58,20 +55,4 @@ export function partsOf({ model, values }: CircuitModel): ModelParts {
       return { arrangement, r: a, l, c: 1 / (omega * omega * l), c0: null };
     }
   }
-}
-
-/** Impedance of a model at one frequency, Ω. */
-export function modelImpedance(model: CircuitModel, frequencyHz: number): Complex {
-  const { arrangement, r, l, c, c0 } = partsOf(model);
-  const omega = 2 * Math.PI * frequencyHz;
-  const xl = l === null ? 0 : omega * l;
-  const bc = c === null ? 0 : omega * c;
-  if (arrangement === 'parallel') return new Z(1 / r, bc - (l === null ? 0 : 1 / xl)).inverse();
-  const series = new Z(r, xl - (c === null ? 0 : 1 / bc));
-  return c0 === null
-    ? series
-    : series
-        .inverse()
-        .add(new Z(0, omega * c0))
-        .inverse();
 }

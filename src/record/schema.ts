@@ -9,6 +9,7 @@ import { methods } from './design-record.ts';
 /**
  * What a record may hold. The same schema reads records, checks the sheet's fields and writes the published JSON
  * Schema. Messages are the two later parts of a problem: why it won't do; what would.
+ * Long, because all that is refused of a record is refused here.
  */
 
 /** Limits of what is computed, wide of any lumped circuit; inside them no figure leaves double precision. */

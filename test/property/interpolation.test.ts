@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { measuredTermination } from '../../src/measured/measured-termination.ts';
 import { interpolate, intervalOf, slopesOf } from '../../src/measured/shape-preserving.ts';
-import { modelImpedance } from '../../src/network/circuit-model.ts';
+import { modelImpedance } from '../model-impedance.ts';
 import { terminationAt } from '../../src/network/termination-at.ts';
 import { decades } from './random-loads.ts';
 import { resonant, sampled } from './sampled.ts';

@@ -1,4 +1,5 @@
-import { modelImpedance, type CircuitModel } from '../../src/network/circuit-model.ts';
+import type { CircuitModel } from '../../src/network/circuit-model.ts';
+import { modelImpedance } from '../model-impedance.ts';
 
 /** R, L and C that resonate at f0 with the Q given: half-power band f0/Q, of the load by itself. */
 export function resonant(kind: 'rlc-series' | 'rlc-parallel', r: number, q: number, f0: number): CircuitModel {

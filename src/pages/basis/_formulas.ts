@@ -1,4 +1,4 @@
-/** The formulas of the basis of calculation. A number, once published, keeps its meaning: reports cite it. */
+/** The formulas of the basis of calculation, all on one list so that their numbers are seen to run on. A number, once published, keeps its meaning: reports cite it. */
 export interface Formula {
   readonly number: string;
   readonly title: string;

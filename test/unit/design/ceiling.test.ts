@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { ceilingOf } from '../../../src/design/ceiling.ts';
 import { measuredTermination } from '../../../src/measured/measured-termination.ts';
-import { modelImpedance } from '../../../src/network/circuit-model.ts';
+import { modelImpedance } from '../../model-impedance.ts';
 import type { Fields } from '../../../src/record/fields.ts';
 import { recordOf } from '../record-of.ts';
 

@@ -1,6 +1,7 @@
 import { Complex } from 'complex.js';
 import { describe, expect, it } from 'vitest';
-import { circuitModels, modelImpedance, partsOf, type CircuitModel } from '../../../src/network/circuit-model.ts';
+import { circuitModels, partsOf, type CircuitModel } from '../../../src/network/circuit-model.ts';
+import { modelImpedance } from '../../model-impedance.ts';
 import { terminationAt } from '../../../src/network/termination-at.ts';
 
 const hz = 100e6;

@@ -1,6 +1,7 @@
 import { Complex } from 'complex.js';
 import { describe, expect, it } from 'vitest';
-import { modelImpedance, type CircuitModel } from '../../../src/network/circuit-model.ts';
+import type { CircuitModel } from '../../../src/network/circuit-model.ts';
+import { modelImpedance } from '../../model-impedance.ts';
 import { fitOneResonance } from '../../../src/network/one-resonance.ts';
 import { logGrid } from '../../../src/network/worst-in-band.ts';
 

@@ -1,8 +1,16 @@
 import type { Evidence } from './evidence/evidence.ts';
+import type { Corners, PartSensitivity, Percentiles, Yield } from './evidence/tolerance-figures.ts';
+import type { Stress } from './evidence/stress-figures.ts';
+import type { CoilWinding } from './parts/coil-winding.ts';
 import type { Arm } from './network/arm.ts';
+import type { RealLadder } from './network/real-arm.ts';
+import type { Tolerance } from './parts/tolerance.ts';
 import type { Span } from './quantity/span.ts';
 import type { DesignRecord, Method } from './record/design-record.ts';
 
+export type { Corners, PartSensitivity, Percentiles, Yield } from './evidence/tolerance-figures.ts';
+export type { PartStress, Stress, StressFigures, StressKind } from './evidence/stress-figures.ts';
+export type { CoilWinding } from './parts/coil-winding.ts';
 export type { Evidence, EvidenceCheck, Route } from './evidence/evidence.ts';
 
 /**
@@ -92,6 +100,9 @@ export interface Option {
     readonly loadShorted: boolean;
     readonly words: string;
   };
+  /** With real parts; null while they aren't asked for or not yet worked out. */
+  readonly built: Built | null;
+  /** Everything assessed is met: with real parts where there are such. */
   readonly meets: boolean;
   /** One per requirement assessed, met or not, in words. */
   readonly checks: readonly Check[];
@@ -99,6 +110,86 @@ export interface Option {
   readonly reasons: readonly string[];
   /** Rules of thumb that apply, with the reason. They never hide an option. */
   readonly cautions: readonly string[];
+}
+
+/** A network of real parts: what it is made of, and how it does. Units as in `Option`. */
+export interface Built {
+  /** To order, source side first; the parts of a pair follow each other. */
+  readonly parts: readonly BuiltPart[];
+  /** The same as arms, one for each of the option's, and the strays: what everything below is computed of. */
+  readonly ladder: RealLadder;
+  /** The sets of values that come nearest, the best first, at most three; empty where values are exact. */
+  readonly sets: readonly ValueSet[];
+  /** Which of them was taken, from 1; 0 where values are exact. */
+  readonly set: number;
+  /** How it was searched, and whether another set has the better yield, in a sentence or two. */
+  readonly searchWords: string;
+  /** Least return loss over band and states, dB; without a band at the design frequency. */
+  readonly worstReturnLossDb: number;
+  readonly worstAtHz: number;
+  readonly worstState: string;
+  /** What finite Q and strays leave of the exact values' return loss, and what values centred anew would. */
+  readonly centring: Centring;
+  /** At the design frequency, in the state that governs; −10·log10 of `efficiency`. */
+  readonly lossDb: number;
+  /** Power in the load over power into the network, 0 to 1. */
+  readonly efficiency: number;
+  /** null where no return loss is required. */
+  readonly yield: Yield | null;
+  /** Return loss that the given fractions of networks have or exceed, over the response's frequencies; null: not worked out. */
+  readonly percentiles: Percentiles | null;
+  readonly corners: Corners | null;
+  /** Largest effect first. */
+  readonly sensitivity: readonly PartSensitivity[];
+  /** What to tighten first, and what it would buy; '' where nothing would. */
+  readonly tighten: string;
+  /** For the available power; null where no power is stated. */
+  readonly stress: Stress | null;
+  readonly bias: readonly string[];
+  /** One for each inductor, as a coil to be wound. */
+  readonly coils: readonly CoilWinding[];
+}
+
+export interface BuiltPart {
+  readonly designator: string;
+  /** Index of the arm in the option's `arms`. */
+  readonly armIndex: number;
+  readonly arm: 'series' | 'shunt';
+  readonly part: 'inductor' | 'capacitor';
+  /** H or F */
+  readonly value: number;
+  /** Name of the series ("E24"), of the stock line, "wound" or "exact". */
+  readonly from: string;
+  /** How it is joined to the other part of its pair; null: it stands alone. */
+  readonly pair: 'in series' | 'in parallel' | null;
+  readonly tolerance: Tolerance;
+  readonly q: number;
+  /** Hz; null: not stated. */
+  readonly selfResonanceHz: number | null;
+  readonly ratedVolts: number | null;
+  readonly ratedAmps: number | null;
+}
+
+export interface ValueSet {
+  /** One for each arm, H or F: of a pair, of both together. */
+  readonly values: readonly number[];
+  /** As to be ordered: "82 nH", "8.2 pF + 1 pF". */
+  readonly words: readonly string[];
+  readonly worstReturnLossDb: number;
+  readonly yield: Yield | null;
+}
+
+/** Worst return loss over band and states, dB. */
+export interface Centring {
+  /** Exact values, ideal parts. */
+  readonly idealDb: number;
+  /** Exact values with loss and strays. */
+  readonly realDb: number;
+  /** Values found anew with loss and strays in, H or F, one for each arm. */
+  readonly values: readonly number[];
+  readonly centredDb: number;
+  /** What rounding to parts on sale cost against these, dB. */
+  readonly roundingDb: number;
 }
 
 /** Transducer gain at a harmonic below that at f0, dB; null: outside the terminations' data. */
@@ -146,7 +237,14 @@ export interface Ceiling {
 }
 
 export interface Check {
-  readonly subject: 'return loss' | 'DC block' | 'DC at the source' | 'DC at the load' | 'part values';
+  readonly subject:
+    | 'return loss'
+    | 'yield'
+    | 'stress'
+    | 'DC block'
+    | 'DC at the source'
+    | 'DC at the load'
+    | 'part values';
   readonly verdict: 'meets' | 'falls short';
   readonly reason: string;
 }

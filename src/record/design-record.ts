@@ -1,4 +1,9 @@
+import type { Distribution } from '../evidence/distribution.ts';
+import type { MeasuredData } from '../measured/measured.ts';
 import type { Aim, Termination } from '../network/termination.ts';
+import type { Origin } from '../parts/origin.ts';
+import type { StockList } from '../parts/stock.ts';
+import type { Tolerance } from '../parts/tolerance.ts';
 import type { Span } from '../quantity/span.ts';
 
 export const methods = [
@@ -26,6 +31,73 @@ export interface Signature {
   readonly role: string;
   /** ISO 8601 calendar date, or '' while unsigned. */
   readonly date: string;
+  readonly remark: string;
+}
+
+/** Of one kind of part, where its stock line says nothing else. */
+export interface PartPolicy {
+  readonly origin: Origin;
+  readonly tolerance: Tolerance;
+  /** Q(f) = Q0·(f/f0)^slope. */
+  readonly qSlope: number;
+  /** Hz; null: above all frequencies of interest. */
+  readonly selfResonanceHz: number | null;
+}
+
+/** What real parts are taken from, and what is asked of the network built of them. */
+export interface Build {
+  readonly inductor: PartPolicy;
+  readonly capacitor: PartPolicy;
+  readonly stock: StockList | null;
+  /** Two parts in series or in parallel may stand for one. */
+  readonly pairs: boolean;
+  /** Stray capacitance of every node to ground, F. */
+  readonly strayF: number;
+  /** Inductance of the leads of every shunt arm, H. */
+  readonly leadH: number;
+  readonly distribution: Distribution;
+  /** How far R may be from its value, as a fraction of it, and X, as a fraction of |Z|; the same over frequency. */
+  readonly sourceSpread: number;
+  readonly loadSpread: number;
+  /** Networks drawn for the yield. */
+  readonly samples: number;
+  readonly seed: number;
+  /** Least yield, 0 to 1; null: not required. */
+  readonly leastYield: number | null;
+  /** Load mismatch up to which stress is assessed; null: the load states alone. */
+  readonly vswr: number | null;
+  /** Part of a rating that may be used, 0 to 1. */
+  readonly derating: number;
+  /** Ratings of parts whose stock line gives none; null: not known. V (peak), A (RMS), W. */
+  readonly ratedVolts: number | null;
+  readonly ratedAmps: number | null;
+  readonly ratedWatts: number | null;
+  /** A single-layer air coil: wire diameter, diameter of the form, gap between turns, m. */
+  readonly winding: { readonly wireM: number; readonly formM: number; readonly gapM: number };
+}
+
+/** A requirement that isn't met, accepted in writing. */
+export interface Deviation {
+  /** The subject of the check that falls short: "return loss". */
+  readonly subject: string;
+  readonly reason: string;
+}
+
+/** One line of the revision history. */
+export interface EarlierRevision {
+  readonly revision: string;
+  /** ISO 8601 calendar date. */
+  readonly date: string;
+  /** What it changed, and why. */
+  readonly change: string;
+  /** Digest of that revision's record. */
+  readonly digest: string;
+}
+
+/** What the analyser measured on the finished board, looking in from the source side with the load attached. */
+export interface AsBuilt {
+  readonly measured: MeasuredData;
+  readonly note: string;
 }
 
 /**
@@ -33,7 +105,7 @@ export interface Signature {
  * SI units throughout.
  */
 export interface DesignRecord {
-  readonly schema: 'ferrule-record/1';
+  readonly schema: 'ferrule-record/2';
   readonly identity: {
     readonly title: string;
     readonly number: string;
@@ -44,6 +116,8 @@ export interface DesignRecord {
     readonly ticket: string;
     /** Legal owner of the document (ISO 7200); '' when none. */
     readonly owner: string;
+    /** What this revision changes, and why; '' for the first. */
+    readonly change: string;
   };
   readonly requirement: {
     readonly frequencyHz: number;
@@ -80,8 +154,10 @@ export interface DesignRecord {
     /** Pieces of work after which the engineer stopped it; null: all. */
     readonly steps: number | null;
   };
-  /** Quality factors for which a loss is stated; every other figure takes parts as lossless. */
+  /** Quality factors at the design frequency: of real parts, and for the loss stated of exact ones. */
   readonly partQ: { readonly inductor: number; readonly capacitor: number };
+  /** null: exact, ideal parts alone. */
+  readonly build: Build | null;
   /** Sweep shown, Hz; null: chosen from the band. */
   readonly sweepHz: Span | null;
   readonly selection: {
@@ -89,8 +165,18 @@ export interface DesignRecord {
     readonly option: string | null;
     /** Why, in the engineer's words. */
     readonly reason: string;
+    /** Which of the best sets of values, 1 to 3. */
+    readonly set: 1 | 2 | 3;
   };
+  readonly deviations: readonly Deviation[];
+  /** Earlier revisions, the oldest first. */
+  readonly history: readonly EarlierRevision[];
+  /** The revision before this one, itself without one before; null: none. */
+  readonly previous: DesignRecord | null;
+  readonly asBuilt: AsBuilt | null;
+  /** Not part of the digest. */
   readonly signOff: {
+    readonly state: 'draft' | 'for review' | 'issued';
     readonly prepared: Signature;
     readonly checked: Signature;
     readonly approved: Signature;

@@ -2,6 +2,7 @@ import { read, refuse, type Reading } from './reading.ts';
 import { prefixes, units, type Unit } from './unit.ts';
 
 const plain = /^([+-]?)(\d+(?:[.,]\d*)?|[.,]\d+)(?:e([+-]?\d+))?\s*(.*)$/iu;
+const lonelyM = /^[+-]?[\d.,]+(?:e[+-]?\d+)?\s*m\d*$/iu;
 const letterForPoint = /^([+-]?)(\d*)([a-zA-Z])(\d+)\s*(.*)$/u;
 
 /** Typographic variants that mean the same as the plain sign. */
@@ -18,12 +19,14 @@ export function normalise(text: string): string {
  * Reads one quantity as engineers write it: `151.25M`, `151.25 MHz`, `4n7` (IEC 60062 letter-for-point), `4,7 nH`,
  * `1.5e8`, `151 250 000`.
  *
- * @returns the value in the SI unit itself (Hz, Ω, H, F, W) or in dB; finite
+ * @returns the value in the SI unit itself (Hz, Ω, H, F, W, V, A, m) or in dB; finite
  */
 export function readQuantity(text: string, unit: Unit): Reading<number> {
   const would = `write it as ${units[unit].example}`;
   const given = normalise(text).replace(/(?<=^[+-]?\d{1,3}(?: \d{3})*) (?=\d{3}(?!\d))/gu, '');
   if (given === '') return refuse('nothing is given', would);
+
+  if (unit === 'm' && lonelyM.test(given)) return refuse('the m can mean metre or milli', would);
 
   const letters = letterForPoint.exec(given);
   if (letters !== null) {
@@ -56,6 +59,10 @@ function finite(literal: string, unit: Unit, prefix: string): Reading<number> {
   if (unit === 'Hz' && 'afpnum'.includes(prefix) && prefix !== '') {
     return refuse(`"${prefix}" makes it less than a hertz`, 'write M for mega, k for kilo');
   }
+  if (unit === 'A' && prefix === 'a') return refuse('"a" means atto', 'write A for ampere, m for milli');
+  if (unit === 'm' && prefix !== '' && 'MGT'.includes(prefix)) {
+    return refuse(`"${prefix}" makes it more than a kilometre`, `write it as ${units[unit].example}`);
+  }
   if (unit === 'dB' && prefix !== '') return refuse('decibels take no prefix', 'write it as 14');
   return read(value);
 }
@@ -69,9 +76,9 @@ function readSuffix(suffix: string, unit: Unit): { readonly exponent: number; re
   return { exponent, prefix };
 }
 
-/** Lower case is read after a prefix ("4.7 pf") and for units of several letters; a lone "f" could be femto. */
+/** Lower case is read after a prefix ("4.7 pf") and where it can't be one; a lone "f" could be femto. */
 function isUnit(text: string, unit: Unit, afterPrefix = false): boolean {
   const lower = text.toLowerCase();
   if (!(units[unit].spellings as readonly string[]).includes(lower)) return false;
-  return afterPrefix || lower.length > 1 || text === unit || (unit === 'Ω' && text === 'R') || lower === 'ω';
+  return afterPrefix || lower.length > 1 || text === unit || !(lower in prefixes);
 }

@@ -5,6 +5,9 @@ export const units = {
   H: { spellings: ['h'], example: '4.7n, 4n7 or 4.7 nH' },
   F: { spellings: ['f'], example: '8.2p, 8p2 or 8.2 pF' },
   W: { spellings: ['w'], example: '2 or 500m' },
+  V: { spellings: ['v'], example: '50 or 2.5k' },
+  A: { spellings: ['a'], example: '1.5 or 300m' },
+  m: { spellings: ['m', 'metre', 'metres', 'meter', 'meters'], example: '0.8 mm' },
   dB: { spellings: ['db'], example: '14' },
 } as const;
 

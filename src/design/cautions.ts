@@ -1,4 +1,5 @@
 import type { Caution, Option } from '../dossier.ts';
+import { branchesOf } from '../evidence/branch.ts';
 import { solveNodal } from '../evidence/nodal.ts';
 import { terminationAt } from '../network/termination-at.ts';
 import { formatQuantity } from '../quantity/format.ts';
@@ -13,7 +14,7 @@ export function cautionsOf(record: DesignRecord, chosen: Option | undefined): Ca
     const volts = Math.max(
       ...record.loads.flatMap(({ termination }) => {
         const load = terminationAt(termination, frequencyHz, frequencyHz);
-        return solveNodal(chosen.arms, source, load, frequencyHz, powerW).nodes.map((node) => node.abs());
+        return solveNodal(branchesOf(chosen.arms, frequencyHz), source, load, powerW).nodes.map((node) => node.abs());
       }),
     );
     safety.push(

@@ -8,6 +8,7 @@ import { isOneImpedance, type Termination } from '../network/termination.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import { pairQ, resistivePair } from '../synthesis/resistive-pair.ts';
 import { twoElement } from '../synthesis/two-element.ts';
+import { branchesOf } from './branch.ts';
 import { fromScattering, ladderScattering } from './s-parameters.ts';
 import { solveNodal, type NodalSolution } from './nodal.ts';
 
@@ -102,7 +103,7 @@ const routes = [
 ] as const;
 
 const nodalAt = ({ arms, source, load, f0 }: Subject, hz: number): NodalSolution =>
-  solveNodal(arms, terminationAt(source, f0, hz), terminationAt(load, f0, hz), hz, 1);
+  solveNodal(branchesOf(arms, hz), terminationAt(source, f0, hz), terminationAt(load, f0, hz), 1);
 
 /**
  * Independent routes to the impedance seen and the transducer gain of one network, with the spread between them.

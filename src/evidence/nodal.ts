@@ -1,12 +1,13 @@
 import { Complex } from 'complex.js';
-import type { Arm } from '../network/arm.ts';
-import { impedanceOf } from '../network/immittance.ts';
+import { heat, type Borne, type Branches } from './branch.ts';
 import { solveLinear } from './solve-linear.ts';
 
 /** Voltages and powers of source, ladder and load as one circuit. Peak volts, W. */
 export interface NodalSolution {
   /** Node voltages from the source's terminal to the load's, V (peak). */
   readonly nodes: readonly Complex[];
+  /** Of each arm: the difference of its nodes' voltages, and what current that drives through it. */
+  readonly arms: readonly Borne[];
   readonly seen: Complex;
   readonly availableW: number;
   readonly loadW: number;
@@ -22,29 +23,26 @@ export interface NodalSolution {
  * Nodal equations of the whole circuit, solved for every voltage at once: the source as a current of ES/ZS beside its
  * own admittance.
  *
- * @param arms       source side first
+ * @param ladder     at the frequency in question
+ * @param source     impedance at that frequency, Ω; `load` likewise
  * @param availableW power available from the source, W
  */
-export function solveNodal(
-  arms: readonly Arm[],
-  source: Complex,
-  load: Complex,
-  frequencyHz: number,
-  availableW: number,
-): NodalSolution {
-  const branches = arms.map((arm) => new Complex(1, 0).div(impedanceOf(arm, frequencyHz)));
+export function solveNodal(ladder: Branches, source: Complex, load: Complex, availableW: number): NodalSolution {
+  const { arms, strayB } = ladder;
   const n = 1 + arms.filter(({ arm }) => arm === 'series').length;
   const zero = new Complex(0, 0);
   const y = Array.from({ length: n }, () => new Array<Complex>(n).fill(zero));
   const stamp = (row: number, column: number, value: Complex): void => {
     y[row]![column] = y[row]![column]!.add(value);
   };
+  for (let node = 0; node < n; node += 1) stamp(node, node, new Complex(0, strayB));
   stamp(0, 0, source.inverse());
+  const admittances = arms.map(({ z }) => z.inverse());
   let node = 0;
-  arms.forEach((arm, k) => {
-    const branch = branches[k]!;
+  arms.forEach(({ arm }, k) => {
+    const branch = admittances[k]!;
     stamp(node, node, branch);
-    if (arm.arm === 'series') {
+    if (arm === 'series') {
       stamp(node + 1, node + 1, branch);
       stamp(node, node + 1, branch.neg());
       stamp(node + 1, node, branch.neg());
@@ -58,18 +56,25 @@ export function solveNodal(
   injected[0] = emf.div(source);
   const nodes = solveLinear(y, injected);
 
-  const power = (voltage: Complex, admittance: Complex): number => (voltage.abs() ** 2 * admittance.re) / 2;
-  let lostW = 0;
   node = 0;
-  arms.forEach((arm, k) => {
-    const across = arm.arm === 'shunt' ? nodes[node]! : nodes[node]!.sub(nodes[node + 1]!);
-    lostW += power(across, branches[k]!);
-    if (arm.arm === 'series') node += 1;
+  const borne = arms.map(({ arm, z }, k): Borne => {
+    const volts = arm === 'shunt' ? nodes[node]! : nodes[node]!.sub(nodes[node + 1]!);
+    if (arm === 'series') node += 1;
+    const amps = volts.mul(admittances[k]!);
+    return { volts, amps, watts: heat(amps, z) };
   });
   const current = emf.sub(nodes[0]!).div(source);
   const reflected = nodes[0]!.sub(current.mul(source.conjugate()));
-  // With peak values the available power is |ES|²/(8·RS), and |V − I·ZS*|²/(8·RS) of it comes back.
-  const reflectedW = reflected.abs() ** 2 / (8 * source.re);
-  const loadW = power(nodes[n - 1]!, load.inverse());
-  return { nodes, seen: nodes[0]!.div(current), availableW, loadW, lostW, reflectedW, gain: loadW / availableW };
+  const loadW = heat(nodes[n - 1]!.div(load), load);
+  return {
+    nodes,
+    arms: borne,
+    seen: nodes[0]!.div(current),
+    availableW,
+    loadW,
+    lostW: borne.reduce((sum, { watts }) => sum + watts, 0),
+    // With peak values the available power is |ES|²/(8·RS), and |V − I·ZS*|²/(8·RS) of it comes back.
+    reflectedW: reflected.abs() ** 2 / (8 * source.re),
+    gain: loadW / availableW,
+  };
 }

@@ -1,6 +1,7 @@
 import { Complex } from 'complex.js';
 import { describe, expect, it } from 'vitest';
 import { design } from '../../src/design.ts';
+import { branchesOf } from '../../src/evidence/branch.ts';
 import { solveNodal } from '../../src/evidence/nodal.ts';
 import type { Arm } from '../../src/network/arm.ts';
 import { ladderInput } from '../../src/network/ladder-input.ts';
@@ -53,7 +54,7 @@ describe.each(cases)('nodal equations solved by mathjs, to 1 part in 10⁹: %s',
       const { gain, gammaRe, gammaIm } = sweep(prepareLadder(arms), ends, aim);
       frequencies.forEach((hz, k) => {
         const solved = solveWithMathjs({ arms, source, load, emf }, hz);
-        const nodal = solveNodal(arms, zs, zl, hz, availableW);
+        const nodal = solveNodal(branchesOf(arms, hz), zs, zl, availableW);
         const gamma = reflection(solved.zin, source, aim === 'conjugate' ? -source.x : source.x);
         expect(Math.abs(gain[k]! / solved.gain - 1)).toBeLessThan(1e-9);
         expect(Math.abs(nodal.gain / solved.gain - 1)).toBeLessThan(1e-9);

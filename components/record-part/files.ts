@@ -3,16 +3,6 @@ import type { DesignRecord } from '../../src/record/design-record.ts';
 
 export type Paper = 'a4' | 'letter';
 
-/** Name of a document's files, from its number and revision: "TG-041_A". */
-export function fileStem({ identity: { number, revision } }: DesignRecord): string {
-  const safe = (text: string): string =>
-    text
-      .trim()
-      .replace(/[^\p{L}\p{N}.-]+/gu, '-')
-      .replace(/^[-.]+|[-.]+$/gu, '');
-  return [safe(number), safe(revision)].filter((text) => text !== '').join('_') || 'design';
-}
-
 export const recordFile = (record: DesignRecord): Blob =>
   new Blob([`${JSON.stringify(record, null, 2)}\n`], { type: 'application/json' });
 

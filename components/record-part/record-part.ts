@@ -2,13 +2,14 @@ import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
 import type { Dossier } from '../../src/dossier.ts';
 import type { FieldName } from '../../src/record/fields.ts';
+import { fileName } from '../../src/record/file-name.ts';
 import '../area-field/area-field.ts';
 import { base } from '../base/base.styles.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import { field } from '../base/field.styles.ts';
 import '../copy-button/copy-button.ts';
 import '../text-field/text-field.ts';
-import { exportFile, fileStem, recordFile, reportFile, save, type Paper } from './files.ts';
+import { exportFile, recordFile, reportFile, save, type Paper } from './files.ts';
 import { styles } from './record-part.styles.ts';
 
 const signers = ['prepared', 'checked', 'approved'] as const;
@@ -113,7 +114,7 @@ export class RecordPart extends LitElement {
     this.said = 'Writing the report…';
     try {
       const file = await reportFile(dossier!, paper);
-      save(file, `${fileStem(dossier!.record)}.pdf`);
+      save(file, fileName(dossier!.record, 'pdf'));
       this.said = 'The report is written.';
     } catch (error) {
       this.said = `The report could not be written: ${error instanceof Error ? error.message : String(error)}`;
@@ -122,7 +123,7 @@ export class RecordPart extends LitElement {
 
   private record() {
     if (!this.ready()) return;
-    save(recordFile(this.dossier!.record), `${fileStem(this.dossier!.record)}.json`);
+    save(recordFile(this.dossier!.record), fileName(this.dossier!.record, 'json'));
     this.said = 'The record is saved.';
   }
 
@@ -132,7 +133,7 @@ export class RecordPart extends LitElement {
     const file = await exportFile(dossier, kind);
     if (file === null) this.said = 'There is no network to save.';
     else {
-      save(file, `${fileStem(dossier.record)}.${kind}`);
+      save(file, fileName(dossier.record, kind));
       this.said = kind === 's2p' ? 'The network is saved as a two-port file.' : 'The sweep is saved.';
     }
   }

@@ -1,0 +1,46 @@
+import type { DesignRecord } from '../../../src/record/design-record.ts';
+
+/** A record of exact parts with nothing in it that isn't needed. */
+export const plainRecord: DesignRecord = {
+  schema: 'ferrule-record/2',
+  identity: {
+    title: 'Transmitter to whip',
+    number: 'EX-014',
+    revision: 'A',
+    date: '2026-01-31',
+    ticket: '',
+    owner: '',
+    change: '',
+  },
+  requirement: {
+    frequencyHz: 151.25e6,
+    bandHz: { low: 150.5e6, high: 152e6 },
+    returnLossDb: 14,
+    blockDc: true,
+    keepDc: 'none',
+    inductorH: { low: 1e-9, high: 10e-6 },
+    capacitorF: { low: 1e-12, high: 100e-9 },
+    powerW: 2,
+  },
+  source: { r: 50, x: 0, behaviour: 'series' },
+  loads: [{ name: '', termination: { r: 9.4, x: -61, behaviour: 'series' } }],
+  aim: 'conjugate',
+  method: 'two-element',
+  sections: 'auto',
+  q: null,
+  fit: { elements: 'auto', form: 'any', shuntInductor: true, seed: 1, steps: null },
+  partQ: { inductor: 50, capacitor: 300 },
+  build: null,
+  sweepHz: null,
+  selection: { option: null, reason: '', set: 1 },
+  deviations: [],
+  history: [],
+  previous: null,
+  asBuilt: null,
+  signOff: {
+    state: 'draft',
+    prepared: { name: '', role: 'RF design', date: '', remark: '' },
+    checked: { name: '', role: 'RF review', date: '', remark: '' },
+    approved: { name: '', role: 'Product integrity', date: '', remark: '' },
+  },
+};

@@ -6,7 +6,7 @@ import type { Arm } from './network/arm.ts';
 import type { RealLadder } from './network/real-arm.ts';
 import type { Tolerance } from './parts/tolerance.ts';
 import type { Span } from './quantity/span.ts';
-import type { DesignRecord, Method } from './record/design-record.ts';
+import type { DesignRecord, Method, Required } from './record/design-record.ts';
 
 export type { Corners, PartSensitivity, Percentiles, Yield } from './evidence/tolerance-figures.ts';
 export type { PartStress, Stress, StressFigures, StressKind } from './evidence/stress-figures.ts';
@@ -237,14 +237,7 @@ export interface Ceiling {
 }
 
 export interface Check {
-  readonly subject:
-    | 'return loss'
-    | 'yield'
-    | 'stress'
-    | 'DC block'
-    | 'DC at the source'
-    | 'DC at the load'
-    | 'part values';
+  readonly subject: Required;
   readonly verdict: 'meets' | 'falls short';
   readonly reason: string;
 }

@@ -427,7 +427,7 @@ const searched: readonly FieldName[] = [
   'elements',
   'fit-form',
   'shunt-inductor',
-  'seed',
+  'fit-seed',
 ];
 
 declare global {

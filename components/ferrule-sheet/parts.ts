@@ -50,7 +50,7 @@ const optionsFields: readonly FieldName[] = [
   'elements',
   'fit-form',
   'shunt-inductor',
-  'seed',
+  'fit-seed',
   'steps',
   'choice',
   'reason',
@@ -139,7 +139,8 @@ export const parts: readonly Part[] = [
       const signed =
         signOff === undefined
           ? 0
-          : Object.values(signOff).filter(({ name, date }) => name !== '' && date !== '').length;
+          : [signOff.prepared, signOff.checked, signOff.approved].filter(({ name, date }) => name !== '' && date !== '')
+              .length;
       return signed === 3
         ? { verdict: 'meets', words: 'names and dates given' }
         : { verdict: 'not assessed', words: 'not signed off' };

@@ -98,7 +98,7 @@ export class MethodFields extends LitElement {
           ? html`${this.choice('elements', 'Elements of fitted networks', sizes)}
             ${this.choice('fit-form', 'Their form', forms)}
             ${this.choice('shunt-inductor', 'Their shunt inductors', shuntInductors)}
-            ${this.text('seed', 'Seed of the search', '')}`
+            ${this.text('fit-seed', 'Seed of the search', '')}`
           : nothing
       }
       ${chosenQ ? this.text('q', 'Q of Pi and T, at the steeper end', this.qWords) : nothing}

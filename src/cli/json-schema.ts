@@ -18,12 +18,14 @@ export function jsonSchema(): string {
               withoutHead(toJsonSchema(form, { errorMode: 'ignore' })),
             ),
           }
-        : undefined,
+        : 'self' in valibotSchema
+          ? { $ref: '#' }
+          : undefined,
   });
   const { $schema, ...rest } = schema;
   const head = {
     $schema,
-    title: 'Ferrule design record, version 1',
+    title: 'Ferrule design record, version 2',
     description:
       'Inputs and decisions of one matching-network design, never results. SI units: Hz, Ω, H, F, W; return loss in dB.',
   };

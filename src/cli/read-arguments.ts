@@ -3,10 +3,13 @@ import { basename, resolve } from 'node:path';
 import { parseArgs } from 'node:util';
 import { measuredTermination } from '../measured/measured-termination.ts';
 import type { MeasuredTermination } from '../network/termination.ts';
+import { readStockList } from '../parts/read-stock-list.ts';
+import type { StockList } from '../parts/stock.ts';
 import { InputError } from '../quantity/problem.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { readDraft } from '../record/draft.ts';
-import { fieldNames, type FieldName, type Fields } from '../record/fields.ts';
+import { asksForParts, fieldNames, tellsOfParts, type FieldName, type Fields } from '../record/fields.ts';
+import { nothingKept } from '../record/kept.ts';
 import { readRecord } from '../record/read-record.ts';
 
 /** Files are named from where the person stands: npm changes the folder and says where it was. */
@@ -38,7 +41,7 @@ export function readArguments<Extra extends string = never>(
     if (typed.length === 0) {
       throw problem('', 'nothing is asked', 'give --frequency, --source and --load, or a record file');
     }
-    return { record: fromFields(values as Fields), options };
+    return { record: fromFields(values as Typed), options };
   }
   if (typed.length > 0) {
     throw problem(`--${typed[0]!}`, 'a record holds all of its fields', 'give a record or options, not both');
@@ -53,7 +56,7 @@ function parse(
   values: Partial<Record<string, string>>;
   positionals: readonly string[];
 } {
-  const names = [...fieldNames, 'behaviour', ...extra];
+  const names = [...fieldNames, 'behaviour', 'tolerance', ...extra];
   const known = new Set<string>(names);
   // A value that begins with a minus sign, as in --load -5, is a value: joined so that it isn't taken for an option.
   const joined: string[] = [];
@@ -119,16 +122,38 @@ function checkMethod(method: string, fields: Fields): void {
   }
 }
 
-function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: string }): DesignRecord {
+/** Fields as options, and those that stand for two of them. */
+type Typed = Fields & { readonly behaviour?: string; readonly tolerance?: string };
+
+/** Of real parts nothing can be said where none are asked for. */
+function checkParts(fields: Fields, tolerance: string | undefined): void {
+  if (asksForParts.some((name) => (fields[name] ?? '').trim() !== '')) return;
+  const [name] = tellsOfParts.filter((each) => fields[each] !== undefined && each !== 'seed');
+  const told = tolerance === undefined ? name : 'tolerance';
+  if (told === undefined) return;
+  throw problem(
+    tolerance ?? fields[name!]!,
+    'it tells of real parts and none are asked for',
+    'give --series-inductor, --series-capacitor (as E24) or --stock too',
+    `--${told}`,
+  );
+}
+
+function fromFields({ behaviour, tolerance, ...fields }: Typed): DesignRecord {
   const method = fields.method ?? methodMeant(fields);
   checkMethod(method, fields);
+  checkParts(fields, tolerance);
+  const lists = new Map<string, StockList>();
   const attachments = new Map<string, MeasuredTermination>();
   const { record, problems } = readDraft(
     {
       date: new Date().toISOString().slice(0, 10),
       method,
       ...(behaviour === undefined ? {} : { 'source-behaviour': behaviour, 'load-behaviour': behaviour }),
+      ...(tolerance === undefined ? {} : { 'tolerance-inductor': tolerance, 'tolerance-capacitor': tolerance }),
+      ...(fields.seed === undefined ? {} : { 'fit-seed': fields.seed }),
       ...fields,
+      ...(fields.stock === undefined ? {} : { stock: attachStock(fields.stock, lists) }),
       ...(fields.source === undefined ? {} : { source: attach('source', fields.source, attachments) }),
       ...(fields.load === undefined
         ? {}
@@ -140,6 +165,7 @@ function fromFields({ behaviour, ...fields }: Fields & { readonly behaviour?: st
           }),
     },
     attachments,
+    { ...nothingKept, stock: lists },
   );
   if (record !== null) return record;
   throw new InputError(...problems.map((found) => ({ ...found, field: `--${found.field}` })));
@@ -159,6 +185,18 @@ function attach(end: string, text: string, attachments: Map<string, MeasuredTerm
   } catch (error) {
     if (!(error instanceof InputError)) throw error;
     throw new InputError(...error.problems.map((found) => ({ ...found, field: `--${end} ${file}, ${found.field}` })));
+  }
+}
+
+/** Reads a stock list and leaves the name by which it is known. */
+function attachStock(file: string, lists: Map<string, StockList>): string {
+  try {
+    const list = readStockList(readTextFile(file), basename(file));
+    lists.set(list.name, list);
+    return list.name;
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    throw new InputError(...error.problems.map((found) => ({ ...found, field: `--stock ${file}, ${found.field}` })));
   }
 }
 

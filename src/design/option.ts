@@ -89,6 +89,7 @@ export function assess({ record, reach, ceiling, states }: Assessor, candidate: 
       !record.loads.every(({ termination }) => isResistive(termination)) || !isResistive(record.source),
     ),
     dc: { ...dc, words: dcWords(dc) },
+    built: null,
     meets: short.length === 0,
     checks,
     reasons: (short.length === 0 ? checks : short).map(({ reason }) => reason),

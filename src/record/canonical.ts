@@ -10,7 +10,8 @@ export function canonical(value: object): string {
   return text;
 }
 
+/** SHA-256 (FIPS 180-4) over the RFC 8785 form of plain data; 64 hex digits. */
+export const sha256Of = (value: object): string => bytesToHex(sha256(utf8ToBytes(canonical(value))));
+
 /** SHA-256 (FIPS 180-4) over the RFC 8785 form of the record without its sign-off; 64 hex digits. */
-export function digestOf({ signOff: _, ...record }: DesignRecord): string {
-  return bytesToHex(sha256(utf8ToBytes(canonical(record))));
-}
+export const digestOf = ({ signOff: _, ...record }: DesignRecord): string => sha256Of(record);

@@ -40,8 +40,6 @@ export interface PartPolicy {
   readonly tolerance: Tolerance;
   /** Q(f) = Q0·(f/f0)^slope. */
   readonly qSlope: number;
-  /** Hz; null: above all frequencies of interest. */
-  readonly selfResonanceHz: number | null;
 }
 
 /** What real parts are taken from, and what is asked of the network built of them. */
@@ -51,6 +49,10 @@ export interface Build {
   readonly stock: StockList | null;
   /** Two parts in series or in parallel may stand for one. */
   readonly pairs: boolean;
+  /** Self-resonance of inductors, Hz; null: above all frequencies of interest. */
+  readonly selfResonanceHz: number | null;
+  /** Equivalent series inductance of capacitors, H. */
+  readonly eslH: number;
   /** Stray capacitance of every node to ground, F. */
   readonly strayF: number;
   /** Inductance of the leads of every shunt arm, H. */
@@ -76,10 +78,21 @@ export interface Build {
   readonly winding: { readonly wireM: number; readonly formM: number; readonly gapM: number };
 }
 
+/** What a network is held to: the subjects of its checks, and of what is said where one falls short. */
+export const requirements = [
+  'return loss',
+  'yield',
+  'stress',
+  'DC block',
+  'DC at the source',
+  'DC at the load',
+  'part values',
+] as const;
+export type Required = (typeof requirements)[number];
+
 /** A requirement that isn't met, accepted in writing. */
 export interface Deviation {
-  /** The subject of the check that falls short: "return loss". */
-  readonly subject: string;
+  readonly subject: Required;
   readonly reason: string;
 }
 

@@ -7,6 +7,8 @@ import type { Span } from '../quantity/span.ts';
 import type { Unit } from '../quantity/unit.ts';
 import { checkRecord } from './check-record.ts';
 import type { DesignRecord } from './design-record.ts';
+import { draftBuild, readDeviations } from './draft-build.ts';
+import { nothingKept, type Kept } from './kept.ts';
 import { readLoads, readTermination, terminationWords, type Attachments } from './read-termination.ts';
 import { defaults, fieldNames, pathOf, type FieldName, type Fields } from './fields.ts';
 
@@ -26,8 +28,13 @@ const examples = {
   capacitors: '1p..100n',
 } as const;
 
-/** Typed texts, of the sheet or of the command line, as a design record. */
-export function readDraft(given: Fields, attachments: Attachments = new Map()): Draft {
+/**
+ * Typed texts, of the sheet or of the command line, as a design record.
+ *
+ * @param attachments measured data at hand, by the name that stands for them in a field
+ * @param kept        what no field's text can hold
+ */
+export function readDraft(given: Fields, attachments: Attachments = new Map(), kept: Kept = nothingKept): Draft {
   const fields: Record<FieldName, string> = { ...defaults, ...given };
   const problems: Problem[] = [];
   const understood: Partial<Record<FieldName, string>> = {};
@@ -73,12 +80,13 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
     name: fields[`${name}-name`],
     role: fields[`${name}-role`],
     date: fields[`${name}-date`].trim(),
+    remark: fields[`${name}-remark`],
   });
   const yesNo = (name: FieldName): boolean | string =>
     ['yes', 'no'].includes(fields[name]) ? fields[name] === 'yes' : fields[name];
 
   const candidate = {
-    schema: 'ferrule-record/1',
+    schema: 'ferrule-record/2',
     identity: {
       title: fields.title,
       number: fields.number,
@@ -86,6 +94,7 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
       date: fields.date.trim(),
       ticket: fields.ticket,
       owner: fields.owner,
+      change: fields.change,
     },
     requirement: {
       frequencyHz: quantity('frequency', 'Hz'),
@@ -107,13 +116,23 @@ export function readDraft(given: Fields, attachments: Attachments = new Map()): 
       elements: whole('elements'),
       form: fields['fit-form'],
       shuntInductor: yesNo('shunt-inductor'),
-      seed: whole('seed'),
+      seed: whole('fit-seed'),
       steps: fields.steps.trim() === '' ? null : whole('steps'),
     },
     partQ: { inductor: plainNumber('q-inductor'), capacitor: plainNumber('q-capacitor') },
+    build: draftBuild({ fields, take, quantity, plainNumber, whole, yesNo }, kept),
     sweepHz: optionalRange('sweep'),
-    selection: { option: fields.choice === '' ? null : fields.choice, reason: fields.reason },
-    signOff: { prepared: signature('prepared'), checked: signature('checked'), approved: signature('approved') },
+    selection: { option: fields.choice === '' ? null : fields.choice, reason: fields.reason, set: whole('set') },
+    deviations: readDeviations(fields.deviations),
+    history: kept.history,
+    previous: kept.previous,
+    asBuilt: kept.asBuilt,
+    signOff: {
+      state: fields.state,
+      prepared: signature('prepared'),
+      checked: signature('checked'),
+      approved: signature('approved'),
+    },
   };
 
   try {

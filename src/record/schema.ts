@@ -3,81 +3,16 @@ import { circuitModels, type CircuitModelName } from '../network/circuit-model.t
 import { isResistive } from '../network/termination-at.ts';
 import type { Termination } from '../network/termination.ts';
 import { mostSections } from '../synthesis/cascade.ts';
+import { buildSchema } from './build-schema.ts';
 import type { DesignRecord } from './design-record.ts';
-import { methods } from './design-record.ts';
+import { methods, requirements } from './design-record.ts';
+import { between, controlsButNewLine, date, frequency, limits, number, span, text } from './schema-pieces.ts';
 
 /**
  * What a record may hold. The same schema reads records, checks the sheet's fields and writes the published JSON
- * Schema. Messages are the two later parts of a problem: why it won't do; what would.
+ * Schema.
  * Long, because all that is refused of a record is refused here.
  */
-
-/** Limits of what is computed, wide of any lumped circuit; inside them no figure leaves double precision. */
-export const limits = {
-  frequencyHz: { low: 1, high: 1e12 },
-  resistanceOhm: { low: 1e-6, high: 1e9 },
-  reactanceOhm: 1e9,
-  inductorH: { low: 1e-15, high: 1e6 },
-  capacitorF: { low: 1e-18, high: 1e3 },
-  powerW: 1e5,
-  returnLossDb: 100,
-  nameLetters: 120,
-  stateLetters: 40,
-  states: 8,
-  samples: 2001,
-  reasonLetters: 4000,
-} as const;
-
-const number = (what: string): v.NumberSchema<string> =>
-  v.number(`${what} is not a number; give a plain number in SI units`);
-
-const between = (what: string, low: number, high: number, words: string) =>
-  v.pipe(
-    number(what),
-    v.minValue(low, `${what} is out of range; give ${words}`),
-    v.maxValue(high, `${what} is out of range; give ${words}`),
-  );
-
-const frequency = (what: string) =>
-  between(what, limits.frequencyHz.low, limits.frequencyHz.high, 'a frequency from 1 Hz to 1 THz');
-
-const span = (what: string, low: number, high: number, words: string) =>
-  v.pipe(
-    v.strictObject({
-      low: between(`the lower end of ${what}`, low, high, words),
-      high: between(`the upper end of ${what}`, low, high, words),
-    }),
-    v.check(({ low: a, high: b }) => a <= b, `${what} is upside down; give the lower end first`),
-  );
-
-/* eslint-disable no-control-regex -- these are what is looked for */
-const controls = /[\u0000-\u001f\u007f-\u009f\u2028\u2029]/u;
-const controlsButNewLine = /[\u0000-\u0009\u000b-\u001f\u007f-\u009f]/u;
-/* eslint-enable no-control-regex */
-
-const text = (what: string, letters: number, refused = controls) =>
-  v.pipe(
-    v.string(`${what} is not text; give it in quotes`),
-    v.maxLength(letters, `${what} is too long; give at most ${String(letters)} letters`),
-    // Control characters break a line of a form and can't be printed; a new line is the one that a reason may have.
-    v.check((value) => !refused.test(value), `${what} holds a control character; leave it out`),
-    v.check((value) => value.isWellFormed(), `${what} holds half a character; type it again`),
-  );
-
-const date = (what: string, empty: boolean) =>
-  v.pipe(
-    v.string(`${what} is not text; give it in quotes`),
-    v.check(
-      (value) => (empty && value === '') || isDate(value),
-      `${what} is not a calendar date; write it as 2026-03-31`,
-    ),
-  );
-
-function isDate(value: string): boolean {
-  if (!/^\d{4}-\d{2}-\d{2}$/u.test(value)) return false;
-  const parsed = new Date(`${value}T00:00:00Z`);
-  return !Number.isNaN(parsed.getTime()) && parsed.toISOString().startsWith(value);
-}
 
 const oneImpedance = (what: string) =>
   v.strictObject({
@@ -119,33 +54,35 @@ const samples = (what: string) =>
     v.maxLength(limits.samples, `the ${what} has too many samples; give at most ${String(limits.samples)}`),
   );
 
-const measured = (what: string) =>
-  v.strictObject({
-    measured: v.pipe(
-      v.strictObject({
-        name: text(`the name of the ${what}'s data`, limits.nameLetters),
-        sha256: v.pipe(v.string(), v.regex(/^[0-9a-f]{64}$/u, 'this is no SHA-256 digest; give 64 hex digits')),
-        samples: v.pipe(number('the number of samples'), v.integer(), v.minValue(2)),
-        thinningError: between('the thinning error', 0, 2, 'a distance between reflection coefficients'),
-        referenceOhm: between('the reference', limits.resistanceOhm.low, limits.resistanceOhm.high, '1 µΩ to 1 GΩ'),
-        frequencyHz: samples(what),
-        re: samples(what),
-        im: samples(what),
-      }),
-      v.check(
-        ({ frequencyHz, re, im }) => re.length === frequencyHz.length && im.length === frequencyHz.length,
-        `the ${what}'s columns differ in length; give as many of each`,
-      ),
-      v.check(
-        ({ frequencyHz }) => frequencyHz.every((hz, k) => hz >= 0 && (k === 0 || hz > frequencyHz[k - 1]!)),
-        `the ${what}'s frequencies do not ascend; give each once, ascending`,
-      ),
-      v.check(
-        ({ re, im }) => re.every((value, k) => Math.hypot(value, im[k]!) < 1),
-        `the ${what} reflects all power or more somewhere; give a passive termination`,
-      ),
+const digest = v.pipe(v.string(), v.regex(/^[0-9a-f]{64}$/u, 'this is no SHA-256 digest; give 64 hex digits'));
+
+const measuredData = (what: string) =>
+  v.pipe(
+    v.strictObject({
+      name: text(`the name of the ${what}'s data`, limits.nameLetters),
+      sha256: digest,
+      samples: v.pipe(number('the number of samples'), v.integer(), v.minValue(2)),
+      thinningError: between('the thinning error', 0, 2, 'a distance between reflection coefficients'),
+      referenceOhm: between('the reference', limits.resistanceOhm.low, limits.resistanceOhm.high, '1 µΩ to 1 GΩ'),
+      frequencyHz: samples(what),
+      re: samples(what),
+      im: samples(what),
+    }),
+    v.check(
+      ({ frequencyHz, re, im }) => re.length === frequencyHz.length && im.length === frequencyHz.length,
+      `the ${what}'s columns differ in length; give as many of each`,
     ),
-  });
+    v.check(
+      ({ frequencyHz }) => frequencyHz.every((hz, k) => hz >= 0 && (k === 0 || hz > frequencyHz[k - 1]!)),
+      `the ${what}'s frequencies do not ascend; give each once, ascending`,
+    ),
+    v.check(
+      ({ re, im }) => re.every((value, k) => Math.hypot(value, im[k]!) < 1),
+      `the ${what} reflects all power or more somewhere; give a passive termination`,
+    ),
+  );
+
+const measured = (what: string) => v.strictObject({ measured: measuredData(what) });
 
 /** The forms that a termination can have; which one is meant shows in its fields, so that messages speak of that one. */
 function termination(what: string): v.GenericSchema<unknown, Termination> {
@@ -162,11 +99,23 @@ const signature = (what: string) =>
     name: text(`the name under ${what}`, limits.nameLetters),
     role: text(`the role under ${what}`, limits.nameLetters),
     date: date(`the date under ${what}`, true),
+    remark: text(`the remark under ${what}`, limits.remarkLetters, controlsButNewLine),
   });
+
+/** One revision before: a whole record, itself without one before. */
+const previous: v.GenericSchema<unknown, DesignRecord> = Object.assign(
+  v.lazy(() =>
+    v.pipe(
+      recordSchema,
+      v.check(({ previous: before }) => before === null, 'the revision before has one before it; keep only the last'),
+    ),
+  ),
+  { self: true },
+);
 
 export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
   v.strictObject({
-    schema: v.literal('ferrule-record/1', 'this schema is unknown; give "ferrule-record/1"'),
+    schema: v.literal('ferrule-record/2', 'this schema is unknown; give "ferrule-record/2"'),
     identity: v.strictObject({
       title: text('the title', limits.nameLetters),
       number: text('the document number', limits.nameLetters),
@@ -174,6 +123,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       date: date('the date of issue', false),
       ticket: text('the change ticket', limits.nameLetters),
       owner: text('the legal owner', limits.nameLetters),
+      change: text('the change', limits.reasonLetters, controlsButNewLine),
     }),
     requirement: v.strictObject({
       frequencyHz: frequency('the design frequency'),
@@ -248,6 +198,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       inductor: between("the inductors' Q", 1, 1e6, 'a Q from 1 to 1 000 000'),
       capacitor: between("the capacitors' Q", 1, 1e6, 'a Q from 1 to 1 000 000'),
     }),
+    build: v.nullable(buildSchema),
     sweepHz: v.nullable(
       v.pipe(
         span('the sweep', limits.frequencyHz.low, limits.frequencyHz.high, 'frequencies from 1 Hz to 1 THz'),
@@ -257,8 +208,40 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     selection: v.strictObject({
       option: v.nullable(text('the chosen network', limits.nameLetters)),
       reason: text('the reason', limits.reasonLetters, controlsButNewLine),
+      set: v.picklist([1, 2, 3], 'the set of values is unknown; give 1, 2 or 3'),
     }),
+    deviations: v.pipe(
+      v.array(
+        v.strictObject({
+          subject: v.picklist(
+            requirements,
+            `a deviation is from what is required; begin it with one of ${requirements.join(', ')}, as in "return loss = accepted because …"`,
+          ),
+          reason: text('the reason of a deviation', limits.reasonLetters),
+        }),
+      ),
+      v.maxLength(limits.deviations, `there are too many deviations; give at most ${String(limits.deviations)}`),
+    ),
+    history: v.pipe(
+      v.array(
+        v.strictObject({
+          revision: text('an earlier revision', limits.nameLetters),
+          date: date('the date of an earlier revision', false),
+          change: text('the change of an earlier revision', limits.reasonLetters, controlsButNewLine),
+          digest,
+        }),
+      ),
+      v.maxLength(limits.revisions, `there are too many revisions; give at most ${String(limits.revisions)}`),
+    ),
+    previous: v.nullable(previous),
+    asBuilt: v.nullable(
+      v.strictObject({
+        measured: measuredData('board'),
+        note: text('the note on the board', limits.reasonLetters, controlsButNewLine),
+      }),
+    ),
     signOff: v.strictObject({
+      state: v.picklist(['draft', 'for review', 'issued'], 'this state is unknown; give draft, for review or issued'),
       prepared: signature('prepared'),
       checked: signature('checked'),
       approved: signature('approved'),

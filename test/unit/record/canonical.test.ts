@@ -28,12 +28,12 @@ describe('digestOf(record)', () => {
   });
 
   it('stays the same when the sign-off changes, and not when a reason does', () => {
-    const signature = { name: 'A. Reviewer', role: 'RF review', date: '2026-02-01' };
+    const signature = { name: 'A. Reviewer', role: 'RF review', date: '2026-02-01', remark: '' };
     const signed: DesignRecord = {
       ...record,
-      signOff: { prepared: signature, checked: signature, approved: signature },
+      signOff: { state: 'for review', prepared: signature, checked: signature, approved: signature },
     };
-    const reasoned: DesignRecord = { ...record, selection: { option: null, reason: 'cheaper' } };
+    const reasoned: DesignRecord = { ...record, selection: { option: null, reason: 'cheaper', set: 1 } };
     expect(digestOf(signed)).toBe(digestOf(record));
     expect(digestOf(reasoned)).not.toBe(digestOf(record));
   });

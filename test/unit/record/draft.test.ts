@@ -12,7 +12,7 @@ describe('readDraft(fields)', () => {
     const { record, problems } = readDraft(sound);
     expect(problems).toEqual([]);
     expect(record).toEqual({
-      schema: 'ferrule-record/1',
+      schema: 'ferrule-record/2',
       identity: {
         title: 'Matching network',
         number: 'unnumbered',
@@ -20,6 +20,7 @@ describe('readDraft(fields)', () => {
         date: '2026-01-31',
         ticket: '',
         owner: '',
+        change: '',
       },
       requirement: {
         frequencyHz: 151.25e6,
@@ -39,12 +40,18 @@ describe('readDraft(fields)', () => {
       q: null,
       fit: { elements: 'auto', form: 'any', shuntInductor: true, seed: 1, steps: null },
       partQ: { inductor: 50, capacitor: 300 },
+      build: null,
       sweepHz: null,
-      selection: { option: null, reason: '' },
+      selection: { option: null, reason: '', set: 1 },
+      deviations: [],
+      history: [],
+      previous: null,
+      asBuilt: null,
       signOff: {
-        prepared: { name: '', role: '', date: '' },
-        checked: { name: '', role: '', date: '' },
-        approved: { name: '', role: '', date: '' },
+        state: 'draft',
+        prepared: { name: '', role: '', date: '', remark: '' },
+        checked: { name: '', role: '', date: '', remark: '' },
+        approved: { name: '', role: '', date: '', remark: '' },
       },
     });
   });
@@ -186,7 +193,7 @@ describe('fieldsOf(record)', () => {
 
 describe('pathOf', () => {
   it('leads every field to a place that the record has', () => {
-    const record = recordOf({ ...sound, band: '150M..152M' });
+    const record = recordOf({ ...sound, band: '150M..152M', 'series-inductor': 'E24' });
     for (const path of Object.values(pathOf)) {
       let inner: unknown = record;
       for (const name of path.split('.')) {

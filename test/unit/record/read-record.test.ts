@@ -91,7 +91,7 @@ describe('readRecord(text)', () => {
       2.5,
       'sections "2.5": the number of sections is out of range; give auto or a whole number from 1 to 6',
     ],
-    ['schema', 'ferrule-record/2', 'schema "ferrule-record/2": this schema is unknown; give "ferrule-record/1"'],
+    ['schema', 'ferrule-record/3', 'schema "ferrule-record/3": this schema is unknown; give "ferrule-record/2"'],
     [
       'requirement.bandHz',
       { low: 152e6, high: 150e6 },

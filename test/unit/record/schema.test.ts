@@ -5,7 +5,7 @@ import { jsonSchema } from '../../../src/cli/json-schema.ts';
 import { readRecord } from '../../../src/record/read-record.ts';
 import { demoNames, demoText } from './demos.ts';
 
-const published = readFileSync(new URL('../../../public/schema/ferrule-record-1.json', import.meta.url), 'utf8');
+const published = readFileSync(new URL('../../../public/schema/ferrule-record-2.json', import.meta.url), 'utf8');
 const validate = new Ajv({ allErrors: true, strict: true, allowUnionTypes: true }).compile(JSON.parse(published));
 
 describe('the published JSON Schema', () => {
@@ -29,14 +29,15 @@ describe('the published JSON Schema', () => {
         : [];
     const record: unknown = JSON.parse(demoText('tide-gauge'));
     const paths = objects(record, []);
-    // The record, its eight parts, two spans of parts, the band, three signatures, a load state and its termination.
-    expect(paths).toHaveLength(16);
+    // The record, its nine parts, two policies of parts with a tolerance each, the winding, two spans of parts, the band,
+    // three signatures, a load state and its termination.
+    expect(paths).toHaveLength(22);
     for (const path of paths) {
       const copy = structuredClone(record) as Record<string, unknown>;
       const inner = path.reduce((at, name) => at[name] as Record<string, unknown>, copy);
-      inner['remark'] = 1;
+      inner['notion'] = 1;
       expect(validate(copy), path.join('.')).toBe(false);
-      expect(() => readRecord(JSON.stringify(copy)), path.join('.')).toThrow([...path, 'remark'].join('.'));
+      expect(() => readRecord(JSON.stringify(copy)), path.join('.')).toThrow([...path, 'notion'].join('.'));
     }
   });
 

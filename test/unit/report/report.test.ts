@@ -26,7 +26,7 @@ const dossiers: Readonly<Record<string, Dossier>> = {
     selection: { ...selection, option: 'low-pass-6-shunt-load', reason: 'Widest band' },
   })),
   'nothing stated, no band': dossierOf('tide-gauge', ({ requirement }) => ({
-    identity: { title: '', number: '', revision: '', date: '', ticket: '', owner: '' },
+    identity: { title: '', number: '', revision: '', date: '', ticket: '', owner: '', change: '' },
     requirement: { ...requirement, bandHz: null, returnLossDb: null, powerW: null },
   })),
   'an extreme ratio': dossierOf('tide-gauge', () => ({
@@ -63,9 +63,17 @@ const dossiers: Readonly<Record<string, Dossier>> = {
     }),
   ),
   'words of 500 letters': dossierOf('tide-gauge', ({ signOff }) => ({
-    identity: { title: long, number: long, revision: long, date: '2026-11-30', ticket: long, owner: long },
-    selection: { option: null, reason: `${long} `.repeat(3) + 'reason '.repeat(1500) },
-    signOff: { ...signOff, prepared: { name: long, role: long, date: '2026-12-01' } },
+    identity: {
+      title: long,
+      number: long,
+      revision: long,
+      date: '2026-11-30',
+      ticket: long,
+      owner: long,
+      change: long,
+    },
+    selection: { option: null, reason: `${long} `.repeat(3) + 'reason '.repeat(1500), set: 1 },
+    signOff: { ...signOff, prepared: { name: long, role: long, date: '2026-12-01', remark: long } },
   })),
 };
 

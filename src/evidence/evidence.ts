@@ -9,8 +9,11 @@ import { formatQuantity } from '../quantity/format.ts';
 import { pairQ, resistivePair } from '../synthesis/resistive-pair.ts';
 import { twoElement } from '../synthesis/two-element.ts';
 import { branchesOf } from './branch.ts';
+import { check, leastGain, relativeSpread, routeTolerance, type EvidenceCheck } from './evidence-check.ts';
 import { fromScattering, ladderScattering } from './s-parameters.ts';
 import { solveNodal, type NodalSolution } from './nodal.ts';
+
+export type { EvidenceCheck } from './evidence-check.ts';
 
 export interface Evidence {
   /** Frequencies at which every route was evaluated, Hz: design frequency first, then band edges. */
@@ -29,21 +32,8 @@ export interface Route {
   readonly transducerGain: number | null;
 }
 
-export interface EvidenceCheck {
-  /** "impedance seen", "transducer gain", "power balance", "element values by the Q method" */
-  readonly subject: string;
-  /** Largest relative difference over routes and frequencies. */
-  readonly spread: number;
-  readonly tolerance: number;
-  readonly pass: boolean;
-  readonly note: string;
-}
-
-/** Largest relative difference between routes that passes, and that between element values of two methods. */
-const routeTolerance = 1e-9;
+/** Largest relative difference between the element values of two methods that passes. */
 const valueTolerance = 1e-12;
-/** Of a gain below −60 dB the rounding of the available power is all that routes could differ by. */
-const leastGain = 1e-6;
 
 interface Figures {
   readonly seen: Complex;
@@ -156,17 +146,6 @@ export function evidence(
     checks.push(pair.check);
   }
   return { frequenciesHz, routes: reported, checks, pass: checks.every(({ pass }) => pass) };
-}
-
-function check(subject: string, spread: number, tolerance: number, note: string): EvidenceCheck {
-  return { subject, spread, tolerance, pass: spread <= tolerance, note };
-}
-
-/** @param floor size below which a difference is taken relative to this instead */
-function relativeSpread(values: readonly Complex[], floor = 0): number {
-  const size = Math.max(floor, ...values.map((value) => value.abs()));
-  if (size === 0) return 0;
-  return Math.max(...values.flatMap((a) => values.map((b) => a.sub(b).abs()))) / size;
 }
 
 const imbalance = ({ availableW, loadW, lostW, reflectedW }: NodalSolution): number =>

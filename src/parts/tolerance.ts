@@ -61,8 +61,9 @@ export function readTolerance(
 /** A letter that the standard counts otherwise at this value than makers' lists often do; null: it is none. */
 function twoMeanings(letter: string, of: number): Reading<never> | null {
   const small = of < picofaradBelow;
-  const size = small ? { F: 1, G: 2 }[letter] : picofaradLetters[letter];
-  if (size === undefined) return null;
+  const table = small ? percentLetters : picofaradLetters;
+  const size = table.get(letter);
+  if (size === undefined || 'JKM'.includes(letter)) return null;
   const range = small ? 'below 10 pF' : 'from 10 pF up';
   return refuse(`${letter} can mean per cent or pF ${range}`, `write ${String(size)}% or ${String(size)} pF`);
 }

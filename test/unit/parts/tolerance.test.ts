@@ -42,6 +42,7 @@ describe('readTolerance(text, part)', () => {
     ['0.2 nH', 'capacitor', 'not a tolerance'],
     ['Z', 'capacitor', 'not a tolerance'],
     ['j', 'capacitor', 'not a tolerance'],
+    ['constructor', 'capacitor', 'not a tolerance'],
   ])('refuses "%s" of an %s: %s', (text, part, why) => {
     expect(readTolerance(text, part)).toMatchObject({ ok: false, why, would: expect.stringMatching(/^write /u) });
   });

@@ -1,10 +1,14 @@
 import type { Dossier } from '../dossier.ts';
+import { attachments } from './attachments.ts';
 import { blocks } from './content/blocks.ts';
 import { missingNote } from './content/title-block.ts';
 import { orNotStated, titleOf } from './content/words.ts';
+import type { Block } from './page/block.ts';
+import { documentElement } from './page/element.ts';
 import { addFurniture, frameOf } from './page/furniture.ts';
 import { lettering, missing, type Lettering } from './page/lettering.ts';
 import { paginate } from './page/paginate.ts';
+import type { Piece } from './page/piece.ts';
 import { setBlock } from './page/set-block.ts';
 import { readTypeface } from './page/typeface.ts';
 import { writePdf } from './pdf/write-pdf.ts';
@@ -28,8 +32,10 @@ export async function report(dossier: Dossier, { paper, fonts }: ReportOptions):
   const width = frame.right - frame.left;
   const { record, digest, version } = dossier;
   const { identity, signOff } = record;
-  const pieces = blocks(dossier).flatMap((block) => setBlock(block, frame.left, width, letters));
-  if (letters.lacks()) pieces.push(...setBlock(missingNote(missing), frame.left, width, letters));
+  const structure = documentElement();
+  const set = (block: Block): readonly Piece[] => setBlock(block, frame.left, width, letters, structure);
+  const pieces = blocks(dossier).flatMap(set);
+  if (letters.lacks()) pieces.push(...set(missingNote(missing)));
   const sheets = paginate(pieces, frame.top, frame.bottom);
   const number = identity.number.trim() === '' ? 'No document number' : identity.number;
   addFurniture(
@@ -39,14 +45,23 @@ export async function report(dossier: Dossier, { paper, fonts }: ReportOptions):
     letters,
   );
   const author = signOff.prepared.name.trim() || identity.owner.trim();
-  return writePdf(sheets, [frame.width, frame.height], faces, letters, {
+  const description = {
     title: titleOf(record),
     subject: `Design report ${identity.number} revision ${identity.revision}`.replace(/\s+/gu, ' ').trim(),
     author,
     creator: `Ferrule ${version}`,
+    language: 'en',
     digest,
     date: dateOf(identity.date),
-  });
+  };
+  const contents = {
+    sheets,
+    size: [frame.width, frame.height],
+    structure,
+    attachments: attachments(dossier),
+    description,
+  } as const;
+  return writePdf(contents, faces, letters);
 }
 
 /** Lettering that remembers whether a character had to be replaced. */

@@ -14,7 +14,7 @@ export function titleBlock({ record, version }: Dossier): readonly Block[] {
         { name: 'Document number', value: orNotStated(identity.number) },
         { name: 'Revision', value: orNotStated(identity.revision) },
         { name: 'Date of issue', value: orNotStated(identity.date) },
-        { name: 'Sheet', value: (sheets) => `1 of ${String(sheets)}` },
+        { name: 'Sheet', value: ({ sheets }) => `1 of ${String(sheets)}` },
         { name: 'Document type', value: 'Design report' },
         { name: 'Legal owner', value: orNotStated(identity.owner) },
         { name: 'Language', value: 'en' },

@@ -1,8 +1,9 @@
 import type { Figure, Tone } from '../../figures/figure.ts';
+import type { Words } from './piece.ts';
 import type { Style } from './style.ts';
 
 /** A report's content before it has places: what follows what, and what stays together. */
-export type Block = Heading | Text | List | Facts | Table | Picture;
+export type Block = Heading | Text | List | Facts | Contents | Table | Picture;
 
 export interface Span {
   readonly text: string;
@@ -39,11 +40,18 @@ export interface List {
   readonly entries: readonly { readonly mark: string; readonly paragraph: Paragraph }[];
 }
 
-/** Name over value, so many in a row. A value that counts pages is written once there are pages. */
+/** Name over value, so many in a row. A value that counts sheets is written once there are sheets. */
 export interface Facts {
   readonly kind: 'facts';
   readonly columns: number;
-  readonly entries: readonly { readonly name: string; readonly value: string | ((sheets: number) => string) }[];
+  readonly entries: readonly { readonly name: string; readonly value: Words }[];
+}
+
+/** Numbered parts with the sheet on which each begins. */
+export interface Contents {
+  readonly kind: 'contents';
+  readonly columns: number;
+  readonly entries: readonly { readonly number: number; readonly text: string }[];
 }
 
 export interface Column {
@@ -53,7 +61,18 @@ export interface Column {
   readonly align?: 'end';
 }
 
-export type Cell = readonly (Paragraph | Picture)[];
+export type Cell = readonly (Paragraph | Picture | SignatureSpace)[];
+
+/** Room for a signature, by hand or by a program that signs PDF. */
+export interface SignatureSpace {
+  readonly kind: 'signature';
+  /** Of the form field. */
+  readonly name: string;
+  /** What is to be signed. */
+  readonly label: string;
+  /** pt */
+  readonly height: number;
+}
 
 export interface Row {
   readonly cells: readonly Cell[];
@@ -80,6 +99,9 @@ export interface Picture {
   /** Largest scale at which it is drawn; smaller where the width asks for it. */
   readonly scale: number;
 }
+
+/** A numbered part's name in the outline, by which contents lead to it. */
+export const bookmarkOf = (number: number, heading: string): string => `${String(number)} ${heading}`;
 
 export const plain = (text: string, style?: Style): Paragraph =>
   style === undefined ? { spans: [{ text }] } : { spans: [{ text }], style };

@@ -43,7 +43,7 @@ export function addFurniture(
   sheets.forEach(({ items }, k) => {
     const page = `Page ${String(k + 1)} of ${String(sheets.length)}`;
     const write = (x: number, y: number, text: string, pt: number, tone: 'ink' | 'muted', bold = false): void => {
-      items.push({ kind: 'text', x, y, text, size: pt, bold, tone });
+      items.push({ kind: 'text', x, y, text, size: pt, bold, tone, of: y === headY ? 'header' : 'footer' });
     };
     const across = (y: number, wide: number): Item => ({
       kind: 'rule',

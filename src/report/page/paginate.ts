@@ -1,4 +1,4 @@
-import { extent, shift, type Item, type Piece } from './piece.ts';
+import { asHeader, extent, shift, type Item, type Piece } from './piece.ts';
 
 export interface Sheet {
   readonly items: Item[];
@@ -23,7 +23,7 @@ export function paginate(pieces: readonly Piece[], top: number, bottom: number):
   };
   const place = (piece: Piece): void => {
     const { header } = piece;
-    if (y === top && header !== undefined) put(header.items, header.height);
+    if (y === top && header !== undefined) put(asHeader(header.items), header.height);
     else if (y > top) y += piece.before;
     if (piece.bookmark !== undefined) current().bookmarks.push({ title: piece.bookmark, y });
     let rest = piece;
@@ -31,7 +31,7 @@ export function paginate(pieces: readonly Piece[], top: number, bottom: number):
       const [now, later, cut] = divide(rest, bottom - y, y === top);
       put(now, cut);
       turn();
-      if (header !== undefined) put(header.items, header.height);
+      if (header !== undefined) put(asHeader(header.items), header.height);
       rest = { ...rest, items: later, height: rest.height - cut };
     }
     put(rest.items, rest.height);

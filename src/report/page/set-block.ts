@@ -1,34 +1,52 @@
-import type { Block, Facts, Heading, List, Picture, Text } from './block.ts';
+import { bookmarkOf, type Block, type Heading, type List, type Picture, type Text } from './block.ts';
+import { child, type Element } from './element.ts';
 import type { Lettering } from './lettering.ts';
-import { shift, type Item, type Piece } from './piece.ts';
+import { shift, within, type Item, type Piece } from './piece.ts';
+import { pictured } from './set-cell.ts';
+import { setContents } from './set-contents.ts';
+import { setFacts } from './set-facts.ts';
 import { setLines, setParagraph } from './set-paragraph.ts';
 import { setTable } from './set-table.ts';
 import { rules, space, styles } from './style.ts';
 
-/** Pieces of one block, between x and x + width pt. */
-export function setBlock(block: Block, x: number, width: number, letters: Lettering): readonly Piece[] {
+/** Pieces of one block, between x and x + width pt, as children of an element of the report's structure. */
+export function setBlock(
+  block: Block,
+  x: number,
+  width: number,
+  letters: Lettering,
+  parent: Element,
+): readonly Piece[] {
   switch (block.kind) {
     case 'heading':
-      return [setHeading(block, x, width, letters)];
+      return [setHeading(block, x, width, letters, parent)];
     case 'text':
-      return setText(block, x, width, letters);
+      return setText(block, x, width, letters, parent);
     case 'list':
-      return setList(block, x, width, letters);
+      return setList(block, x, width, letters, parent);
     case 'facts':
-      return setFacts(block, x, width, letters);
+      return setFacts(block, x, width, letters, parent);
+    case 'contents':
+      return setContents(block, x, width, letters, parent);
     case 'table':
-      return setTable(block, x, width, letters);
+      return setTable(block, x, width, letters, parent);
     case 'picture':
-      return [setPicture(block, x, width, letters)];
+      return [setPicture(block, x, width, letters, parent)];
   }
 }
 
 const hang = 26;
 
-function setHeading({ number, text }: Heading, x: number, width: number, letters: Lettering): Piece {
+function setHeading({ number, text }: Heading, x: number, width: number, letters: Lettering, parent: Element): Piece {
+  const heading = child(parent, number === undefined ? 'H3' : 'H2');
   if (number === undefined) {
     const set = setParagraph({ spans: [{ text, bold: true }] }, x, width, letters);
-    return { before: space.wide, height: set.height + space.hair, items: set.items, keep: true };
+    return {
+      before: space.wide,
+      height: set.height + space.hair,
+      items: within(heading, set.items),
+      keep: true,
+    };
   }
   const style = 'heading';
   const mark = setParagraph({ spans: [{ text: String(number), bold: true, tone: 'accent' }], style }, x, hang, letters);
@@ -36,9 +54,13 @@ function setHeading({ number, text }: Heading, x: number, width: number, letters
   return {
     before: space.far,
     height: set.height + space.hair,
-    items: [...mark.items, ...set.items],
+    // The space isn't seen; it keeps number and name apart for whoever hears them.
+    items: within(heading, [
+      ...mark.items.map((item) => ({ ...item, text: `${String(number)} ` }) as Item),
+      ...set.items,
+    ]),
     keep: true,
-    bookmark: `${String(number)} ${text}`,
+    bookmark: bookmarkOf(number, text),
   };
 }
 
@@ -48,7 +70,9 @@ function setText(
   x: number,
   width: number,
   letters: Lettering,
+  parent: Element,
 ): readonly Piece[] {
+  const element = child(parent, paragraph.style === 'display' ? 'H1' : 'P');
   const inset = bar === true ? space.near + space.hair : 0;
   const { leading } = styles[paragraph.style ?? 'body'];
   const lines = setLines(paragraph, x + inset, width - inset, letters);
@@ -58,7 +82,7 @@ function setText(
     return {
       before: index > 0 ? 0 : opens === true ? space.wide : bar === true ? 0 : space.tight,
       height: leading,
-      items: [...edge, ...line],
+      items: [...edge, ...within(element, line)],
       keep: last ? keep === true : index === 0 || index === lines.length - 2,
     };
   });
@@ -75,8 +99,11 @@ const barBeside = (x: number, height: number): Item => ({
   tone: 'accent',
 });
 
-function setList({ entries }: List, x: number, width: number, letters: Lettering): readonly Piece[] {
+function setList({ entries }: List, x: number, width: number, letters: Lettering, parent: Element): readonly Piece[] {
+  const list = child(parent, 'L');
   return entries.flatMap(({ mark, paragraph }, entry) => {
+    const item = child(list, 'LI');
+    const [label, body] = [child(item, 'Lbl'), child(item, 'LBody')];
     const { leading } = styles[paragraph.style ?? 'body'];
     const style = paragraph.style ?? 'body';
     const marks = setParagraph({ spans: [{ text: mark, tone: 'muted' }], style }, x, hang, letters);
@@ -84,7 +111,7 @@ function setList({ entries }: List, x: number, width: number, letters: Lettering
     return lines.map((line, index): Piece => ({
       before: index === 0 ? (entry === 0 ? space.tight : space.hair) : 0,
       height: leading,
-      items: index === 0 ? [...marks.items, ...line] : line,
+      items: [...(index === 0 ? within(label, marks.items) : []), ...within(body, line)],
       // Neither the first entry nor the last stands on a page by itself.
       keep:
         index < lines.length - 1
@@ -94,63 +121,23 @@ function setList({ entries }: List, x: number, width: number, letters: Lettering
   });
 }
 
-function setFacts({ columns, entries }: Facts, x: number, width: number, letters: Lettering): readonly Piece[] {
-  const gutter = space.wide;
-  const cellWidth = (width - gutter * (columns - 1)) / columns;
-  const { size, leading } = styles.body;
-  const pieces: Piece[] = [];
-  for (let start = 0; start < entries.length; start += columns) {
-    const sets = entries.slice(start, start + columns).map(({ name, value }, column) => {
-      const left = x + column * (cellWidth + gutter);
-      const title = setParagraph({ spans: [{ text: name, tone: 'muted' }], style: 'micro' }, left, cellWidth, letters);
-      const body =
-        typeof value === 'string'
-          ? setParagraph({ spans: [{ text: value }] }, left, cellWidth, letters)
-          : {
-              items: [
-                {
-                  kind: 'text',
-                  x: left,
-                  y: leading / 2 + 0.35 * size,
-                  text: value,
-                  size,
-                  bold: false,
-                  tone: 'ink',
-                } as const,
-              ],
-              height: leading,
-            };
-      const top: Item = { kind: 'rule', x: left, y: 0, X: left + cellWidth, Y: 0, width: rules.hair, tone: 'muted' };
-      return {
-        items: [
-          top,
-          ...title.items.map((item) => shift(item, space.hair)),
-          ...body.items.map((item) => shift(item, space.hair + title.height)),
-        ],
-        height: title.height + body.height,
-      };
-    });
-    pieces.push({
-      before: start === 0 ? space.near : 0,
-      height: Math.max(...sets.map(({ height }) => height)) + 3 * space.hair,
-      items: sets.flatMap(({ items }) => items),
-      keep: start + columns < entries.length,
-    });
-  }
-  return pieces;
-}
-
-function setPicture({ figure, caption, scale }: Picture, x: number, width: number, letters: Lettering): Piece {
+function setPicture(
+  { figure, caption, scale }: Picture,
+  x: number,
+  width: number,
+  letters: Lettering,
+  parent: Element,
+): Piece {
   const drawn = Math.min(scale, width / figure.width);
   const height = figure.height * drawn;
-  const items: Item[] = [{ kind: 'figure', x, y: 0, scale: drawn, figure }];
+  const items: Item[] = [{ kind: 'figure', x, y: 0, scale: drawn, figure, of: pictured(figure, parent) }];
   if (caption === undefined) return { before: space.near, height, items, keep: false };
   const words = setParagraph({ spans: [{ text: caption, tone: 'muted' }], style: 'small' }, x, width, letters);
   const top = height + space.tight;
   return {
     before: space.wide,
     height: top + words.height,
-    items: [...items, ...words.items.map((item) => shift(item, top))],
+    items: [...items, ...within(child(parent, 'Caption'), words.items).map((item) => shift(item, top))],
     keep: false,
   };
 }

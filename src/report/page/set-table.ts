@@ -1,28 +1,31 @@
-import type { Cell, Column, Row, Table } from './block.ts';
+import type { Column, Row, Table } from './block.ts';
+import { child, type Element } from './element.ts';
 import type { Lettering } from './lettering.ts';
-import { shift, type Item, type Piece } from './piece.ts';
+import { shift, within, type Item, type Piece } from './piece.ts';
+import { setCell, type Place } from './set-cell.ts';
 import { setParagraph, type Set } from './set-paragraph.ts';
 import { rules, space } from './style.ts';
 
 const gutter = 12;
 const pad = 2.5;
 
-interface Place {
-  readonly x: number;
-  readonly width: number;
-  readonly align: 'start' | 'end';
-}
-
 /**
  * A table's head and rows, each a piece that no page break divides; the head repeats on every page that the table
  * reaches, and neither the first row nor the last stands alone.
  */
-export function setTable(table: Table, x: number, width: number, letters: Lettering): readonly Piece[] {
+export function setTable(
+  table: Table,
+  x: number,
+  width: number,
+  letters: Lettering,
+  parent: Element,
+): readonly Piece[] {
   const places = placesOf(table.columns, x, width);
-  const header = setHead(table.columns, places, x, width, letters);
+  const element = child(parent, 'Table');
+  const header = setHead(table.columns, places, x, width, letters, element);
   const last = table.rows.length - 1;
   const pieces = table.rows.map((row, index): Piece => {
-    const { items, height } = setRow(row, places, letters);
+    const { items, height } = setRow(row, places, letters, element);
     const full = Math.max(height + 2 * pad, table.rowHeight ?? 0);
     const foot: Item = rule(
       x,
@@ -80,11 +83,14 @@ function setHead(
   x: number,
   width: number,
   letters: Lettering,
+  table: Element,
 ): Piece {
+  const row = child(table, 'TR');
   const sets = columns.map(({ title }, index) => {
     const place = places[index]!;
     const spans = [{ text: title, bold: true, tone: 'muted' as const }];
-    return setParagraph({ spans, style: 'small' }, place.x, place.width, letters, place.align);
+    const set = setParagraph({ spans, style: 'small' }, place.x, place.width, letters, place.align);
+    return { ...set, items: within(child(row, 'TH'), set.items) };
   });
   const height = Math.max(...sets.map((set) => set.height));
   // Heads of unlike length stand on one line.
@@ -98,34 +104,22 @@ function setHead(
   };
 }
 
-function setRow({ cells, below }: Row, places: readonly Place[], letters: Lettering): Set {
-  const sets = cells.map((cell, index) => setCell(cell, places[index]!, letters));
+function setRow({ cells, below }: Row, places: readonly Place[], letters: Lettering, table: Element): Set {
+  const row = child(table, 'TR');
+  // What is set below the later cells is a row of its own, which the cells before them reach into.
+  const sets = cells.map((cell, index) => {
+    const reaches = below !== undefined && index < below.from;
+    return setCell(cell, places[index]!, letters, child(row, 'TD', reaches ? { rowSpan: 2 } : {}));
+  });
   const items: Item[] = sets.flatMap((set) => [...set.items]);
   if (below === undefined) return { items, height: Math.max(0, ...sets.map(({ height }) => height)) };
   const over = (from: number, to?: number): number => Math.max(0, ...sets.slice(from, to).map(({ height }) => height));
-  let y = over(below.from) + space.hair;
+  const y = over(below.from) + space.hair;
   const [first, last] = [places[below.from]!, places.at(-1)!];
-  for (const paragraph of below.paragraphs) {
-    const set = setParagraph(paragraph, first.x, last.x + last.width - first.x, letters);
-    items.push(...set.items.map((item) => shift(item, y)));
-    y += set.height;
-  }
-  return { items, height: Math.max(y, over(0, below.from)) };
-}
-
-function setCell(cell: Cell, { x, width, align }: Place, letters: Lettering): Set {
-  const items: Item[] = [];
-  let y = 0;
-  for (const content of cell) {
-    if ('kind' in content) {
-      const scale = Math.min(content.scale, width / content.figure.width);
-      items.push({ kind: 'figure', x, y: y + space.hair, scale, figure: content.figure });
-      y += content.figure.height * scale + space.tight;
-    } else {
-      const set = setParagraph(content, x, width, letters, align);
-      items.push(...set.items.map((item) => shift(item, y)));
-      y += set.height;
-    }
-  }
-  return { items, height: y };
+  const wide: Place = { x: first.x, width: last.x + last.width - first.x, align: 'start' };
+  const columnSpan = places.length - below.from;
+  const under = child(child(table, 'TR'), 'TD', columnSpan > 1 ? { columnSpan } : {});
+  const set = setCell(below.paragraphs, wide, letters, under);
+  items.push(...set.items.map((item) => shift(item, y)));
+  return { items, height: Math.max(y + set.height, over(0, below.from)) };
 }

@@ -33,7 +33,10 @@ export function wrap(paragraph: Paragraph, width: number, letters: Lettering): r
   const lines: Line[] = [];
   let runs: Run[] = [];
   let x = 0;
-  const close = (): void => {
+  const close = (spaced = false): void => {
+    const last = runs.at(-1);
+    // A line's end is a space to whoever hears or copies the text.
+    if (spaced && last !== undefined) runs[runs.length - 1] = { ...last, text: `${last.text} ` };
     lines.push({ runs, width: x });
     runs = [];
     x = 0;
@@ -46,7 +49,7 @@ export function wrap(paragraph: Paragraph, width: number, letters: Lettering): r
     if (last !== undefined && last.bold === bold && last.tone === tone) {
       runs[runs.length - 1] = { ...last, text: last.text + (spaced ? ' ' : '') + text };
     } else {
-      runs.push({ x: x + gap, text, bold, tone });
+      runs.push({ x, text: (spaced ? ' ' : '') + text, bold, tone });
     }
     x += gap + wide;
   };
@@ -55,11 +58,13 @@ export function wrap(paragraph: Paragraph, width: number, letters: Lettering): r
     if (x + gap + word.width <= width) {
       put(word, word.width, gap > 0);
     } else if (word.width <= width) {
-      close();
+      close(word.spaced);
       put(word, word.width, false);
     } else {
+      let first = true;
       for (const piece of broken(word, x + gap, width, size, letters)) {
-        if (piece.fresh) close();
+        if (piece.fresh) close(first && word.spaced);
+        first = false;
         put({ ...word, text: piece.text }, piece.width, !piece.fresh && gap > 0);
       }
     }

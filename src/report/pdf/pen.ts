@@ -52,6 +52,11 @@ export class Pen {
     this.#parts.push(path, 'f');
   }
 
+  /** An operator that draws nothing: opens or closes marked content. */
+  mark(operator: string): void {
+    this.#parts.push(operator);
+  }
+
   toString(): string {
     return this.#parts.join('\n');
   }

@@ -1,36 +1,39 @@
-import { PDFDocument, PDFHexString, PDFName } from 'pdf-lib';
-import type { Sheet } from '../page/paginate.ts';
-import type { Typeface } from '../page/typeface.ts';
+import { PDFDocument, PDFName } from 'pdf-lib';
+import type { Attachment } from '../attachments.ts';
+import type { Element } from '../page/element.ts';
 import type { Lettering } from '../page/lettering.ts';
+import type { Sheet } from '../page/paginate.ts';
+import type { Places } from '../page/piece.ts';
+import type { Typeface } from '../page/typeface.ts';
+import { annotate, type Destinations } from './annotations.ts';
+import { attach } from './attach.ts';
+import { describe, type Description } from './describe.ts';
 import { drawFigure, type Fonts } from './draw-figure.ts';
 import { embedFont } from './font.ts';
+import { Marks } from './marks.ts';
 import { outline } from './outline.ts';
 import { Pen } from './pen.ts';
+import { writeStructure, type Box, type Drawn } from './structure.ts';
 
-/** What the file says of itself. */
-export interface Description {
-  readonly title: string;
-  readonly subject: string;
-  readonly author: string;
-  readonly creator: string;
-  /** 64 hex digits; the file's identifier is made of it. */
-  readonly digest: string;
-  /** Date of issue; null: none is written. */
-  readonly date: Date | null;
+/** What a file is made of. */
+export interface Contents {
+  readonly sheets: readonly Sheet[];
+  /** Width and height of a sheet, pt. */
+  readonly size: readonly [number, number];
+  /** The root of what the sheets' items belong to. */
+  readonly structure: Element;
+  readonly attachments: readonly Attachment[];
+  readonly description: Description;
 }
 
 /**
- * Laid-out sheets as a PDF 1.7 file. Nothing in it comes from a clock or from chance: the same sheets give the same
- * bytes.
- *
- * @param size   width and height of a sheet, pt
+ * Laid-out sheets as a PDF 1.7 file, tagged, with its attachments. Nothing in it comes from a clock or from chance: the
+ * same sheets give the same bytes.
  */
 export async function writePdf(
-  sheets: readonly Sheet[],
-  size: readonly [number, number],
+  { sheets, size, structure, attachments, description }: Contents,
   faces: { readonly regular: Typeface; readonly bold: Typeface },
   letters: Lettering,
-  description: Description,
 ): Promise<Uint8Array> {
   const document = await PDFDocument.create({ updateMetadata: false });
   describe(document, description);
@@ -41,45 +44,70 @@ export async function writePdf(
     letters,
   };
   const resources = context.register(context.obj({ Font: { R: fonts.regular.ref, B: fonts.bold.ref } }));
-  for (const sheet of sheets) {
+  const places = placesOf(sheets);
+  const boxes = new Map<Element, Box>();
+  const drawn = sheets.map((sheet, k): Drawn => {
     const page = document.addPage([...size]);
+    const { content, elements } = drawSheet(sheet, places, size[1], fonts, boxes);
     page.node.set(PDFName.of('Resources'), resources);
-    const content = drawSheet(sheet, sheets.length, size[1], fonts);
     page.node.set(PDFName.of('Contents'), context.register(context.flateStream(content)));
-  }
+    page.node.set(PDFName.of('StructParents'), context.obj(k));
+    // Whoever goes through the page's links and fields by keyboard meets them in the order of the text.
+    page.node.set(PDFName.of('Tabs'), PDFName.of('S'));
+    return { page: page.ref, elements };
+  });
   fonts.regular.write();
   fonts.bold.write();
-  outline(document, sheets, size[1]);
-  return document.save();
+  const destinations = destinationsOf(sheets, drawn, size[1]);
+  outline(document, destinations);
+  writeStructure(document, structure, drawn, annotate(document, sheets, size[1], destinations), boxes);
+  attach(document, attachments, description.date);
+  return document.save({ objectsPerTick: Number.MAX_SAFE_INTEGER });
 }
 
-function drawSheet({ items }: Sheet, count: number, height: number, fonts: Fonts): string {
+function drawSheet(
+  { items }: Sheet,
+  places: Places,
+  height: number,
+  fonts: Fonts,
+  boxes: Map<Element, Box>,
+): { readonly content: string; readonly elements: readonly Element[] } {
   const pen = new Pen(height);
+  const marks = new Marks(pen);
   for (const item of items) {
+    if (item.kind === 'link' || item.kind === 'signature') continue;
+    marks.belong(item.of);
     if (item.kind === 'rule') {
       pen.line(item.x, item.y, item.X, item.Y, item.width, item.tone);
     } else if (item.kind === 'figure') {
-      drawFigure(pen, item.figure, item.x, item.y, item.scale, height, fonts);
+      const { x, y, scale, figure, of } = item;
+      drawFigure(pen, figure, x, y, scale, height, fonts);
+      if (typeof of === 'object') boxes.set(of, boxOf(x, y, scale * figure.width, scale * figure.height, height));
     } else {
       const font = item.bold ? fonts.bold : fonts.regular;
-      const text = typeof item.text === 'string' ? item.text : item.text(count);
+      const text = typeof item.text === 'string' ? item.text : item.text(places);
       pen.text(item.x, item.y, font.encode(text), font.name, item.size, item.tone);
     }
   }
-  return pen.toString();
+  marks.close();
+  return { content: pen.toString(), elements: marks.elements };
 }
 
-function describe(document: PDFDocument, { title, subject, author, creator, digest, date }: Description): void {
-  document.setTitle(title, { showInWindowTitleBar: true });
-  document.setSubject(subject);
-  if (author !== '') document.setAuthor(author);
-  document.setCreator(creator);
-  document.setProducer(creator);
-  document.setLanguage('en');
-  if (date !== null) {
-    document.setCreationDate(date);
-    document.setModificationDate(date);
-  }
-  const id = PDFHexString.of(digest.slice(0, 32));
-  document.context.trailerInfo.ID = document.context.obj([id, id]);
+const boxOf = (x: number, y: number, width: number, tall: number, height: number): Box => {
+  const corners = [x, height - y - tall, x + width, height - y] as const;
+  return corners.map((value) => Math.round(value * 100) / 100) as unknown as Box;
+};
+
+function placesOf(sheets: readonly Sheet[]): Places {
+  const sheetOf = new Map(sheets.flatMap(({ bookmarks }, k) => bookmarks.map(({ title }) => [title, k + 1] as const)));
+  return { sheets: sheets.length, sheetOf: (bookmark) => sheetOf.get(bookmark) ?? 0 };
 }
+
+const destinationsOf = (sheets: readonly Sheet[], drawn: readonly Drawn[], height: number): Destinations =>
+  new Map(
+    sheets.flatMap(({ bookmarks }, k) =>
+      bookmarks.map(
+        ({ title, y }) => [title, [drawn[k]!.page, 'XYZ', null, Math.round(height - y + 6), null]] as const,
+      ),
+    ),
+  );

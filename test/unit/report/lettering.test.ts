@@ -39,8 +39,16 @@ describe('lettering(regular, bold)', () => {
 describe('wrap(paragraph, width, letters)', () => {
   it('breaks at spaces, never before a unit', () => {
     expect(linesOf('seen at 151.3 MHz', letters.width('seen at 151.3', 9, false) + 1)).toEqual([
-      'seen at',
+      'seen at ',
       '151.3\u00a0MHz',
+    ]);
+  });
+
+  it('ends a line that breaks at a space with the space, past its width', () => {
+    const lines = wrap({ spans: [{ text: 'seen at' }] }, letters.width('seen', 9, false), letters);
+    expect(lines.map(({ runs, width }) => [runs[0]?.text, width])).toEqual([
+      ['seen ', letters.width('seen', 9, false)],
+      ['at', letters.width('at', 9, false)],
     ]);
   });
 
@@ -56,10 +64,9 @@ describe('wrap(paragraph, width, letters)', () => {
     const [line] = wrap({ spans }, 500, letters);
     expect(line?.runs.map(({ text, bold }) => [text, bold])).toEqual([
       ['Passes.', true],
-      ['Compared', false],
+      [' Compared', false],
     ]);
-    const gap = letters.width(' ', 9, false);
-    expect(line?.runs[1]?.x).toBeCloseTo(letters.width('Passes.', 9, true) + gap, 9);
+    expect(line?.runs[1]?.x).toBeCloseTo(letters.width('Passes.', 9, true), 9);
   });
 
   it('gives one empty line for nothing', () => {

@@ -1,0 +1,29 @@
+import type { Description } from './describe.ts';
+
+const escape = (text: string): string => text.replace(/[<>&"]/gu, (sign) => `&#${String(sign.charCodeAt(0))};`);
+
+/** What the file says of itself as an XMP packet (ISO 16684-1), the same as in its information dictionary. */
+export function xmp({ title, subject, author, creator, language, date }: Description): string {
+  const alternative = (text: string): string =>
+    `<rdf:Alt><rdf:li xml:lang="x-default">${escape(text)}</rdf:li></rdf:Alt>`;
+  const properties = [
+    '<dc:format>application/pdf</dc:format>',
+    `<dc:title>${alternative(title)}</dc:title>`,
+    `<dc:description>${alternative(subject)}</dc:description>`,
+    author === '' ? '' : `<dc:creator><rdf:Seq><rdf:li>${escape(author)}</rdf:li></rdf:Seq></dc:creator>`,
+    `<dc:language><rdf:Bag><rdf:li>${language}</rdf:li></rdf:Bag></dc:language>`,
+    `<xmp:CreatorTool>${escape(creator)}</xmp:CreatorTool>`,
+    date === null ? '' : `<xmp:CreateDate>${iso(date)}</xmp:CreateDate><xmp:ModifyDate>${iso(date)}</xmp:ModifyDate>`,
+    `<pdf:Producer>${escape(creator)}</pdf:Producer>`,
+  ];
+  return [
+    '<?xpacket begin="\ufeff" id="W5M0MpCehiHzreSzNTczkc9d"?>',
+    '<x:xmpmeta xmlns:x="adobe:ns:meta/"><rdf:RDF xmlns:rdf="http://www.w3.org/1999/02/22-rdf-syntax-ns#">',
+    '<rdf:Description rdf:about="" xmlns:dc="http://purl.org/dc/elements/1.1/" xmlns:xmp="http://ns.adobe.com/xap/1.0/" xmlns:pdf="http://ns.adobe.com/pdf/1.3/">',
+    ...properties.filter((property) => property !== ''),
+    '</rdf:Description></rdf:RDF></x:xmpmeta>',
+    '<?xpacket end="r"?>',
+  ].join('\n');
+}
+
+const iso = (date: Date): string => date.toISOString().replace(/\.\d+Z$/u, 'Z');

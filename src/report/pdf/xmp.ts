@@ -1,4 +1,4 @@
-import type { Description } from './describe.ts';
+import type { Description } from './description.ts';
 
 const escape = (text: string): string => text.replace(/[<>&"]/gu, (sign) => `&#${String(sign.charCodeAt(0))};`);
 

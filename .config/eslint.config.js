@@ -44,7 +44,7 @@ export default defineConfig(
     ignores: ['src/cli/**', 'src/workers/**', 'src/pages/**', 'src/layouts/**'],
     languageOptions: {
       parserOptions: { lib: ['es2023'] },
-      globals: { TextEncoder: 'readonly', TextDecoder: 'readonly' },
+      globals: { TextEncoder: 'readonly', TextDecoder: 'readonly', WebAssembly: 'readonly' },
     },
     rules: { 'no-undef': 'error' },
   },

@@ -21,7 +21,7 @@ export function buildChanges(before: Build | null, after: Build | null): readonl
   ];
 }
 
-const absent = (what: string): Statement => ({ what, value: null, words: 'not given', exact: 'not given' });
+const absent = (what: string): Statement => ({ what, value: null, words: 'not given', exact: () => 'not given' });
 
 /** The same number of them, in the same order, of every build. The least yield is told with the requirement. */
 function statements(build: Build | null): readonly Statement[] | null {
@@ -31,6 +31,8 @@ function statements(build: Build | null): readonly Statement[] | null {
     ...policy('inductor', build.inductor),
     ...policy('capacitor', build.capacitor),
     yesNo('Two parts for one', build.pairs),
+    quantity('Self-resonance of inductors', build.selfResonanceHz, 'Hz', 'above all frequencies of interest'),
+    quantity('Series inductance of capacitors', build.eslH, 'H'),
     quantity('Stray capacitance of every node', build.strayF, 'F'),
     quantity('Lead inductance of every shunt arm', build.leadH, 'H'),
     choice('Distribution within the tolerance', build.distribution),
@@ -49,13 +51,12 @@ function statements(build: Build | null): readonly Statement[] | null {
   ];
 }
 
-function policy(part: 'inductor' | 'capacitor', { origin, tolerance, qSlope, selfResonanceHz }: PartPolicy) {
+function policy(part: 'inductor' | 'capacitor', { origin, tolerance, qSlope }: PartPolicy) {
   const Part = part === 'inductor' ? 'Inductors' : 'Capacitors';
   return [
     choice(`${Part} from`, origin),
     toleranceOf(`Tolerance of ${part}s`, tolerance, part),
     plainNumber(`Slope of the ${part}s’ Q over frequency`, qSlope),
-    quantity(`Self-resonance of ${part}s`, selfResonanceHz, 'Hz', 'above all frequencies of interest'),
   ];
 }
 
@@ -63,5 +64,6 @@ const toleranceOf = (what: string, tolerance: Tolerance, part: 'inductor' | 'cap
   what,
   value: tolerance,
   words: formatTolerance(tolerance, part),
-  exact: `±${minus(String(tolerance.value))} ${tolerance.kind === 'relative' ? 'of the value' : part === 'inductor' ? 'H' : 'F'}`,
+  exact: () =>
+    `±${minus(String(tolerance.value))} ${tolerance.kind === 'relative' ? 'of the value' : part === 'inductor' ? 'H' : 'F'}`,
 });

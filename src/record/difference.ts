@@ -11,6 +11,7 @@ import {
   percent,
   plainNumber,
   quantity,
+  same,
   span,
   text,
   yesNo,
@@ -32,6 +33,7 @@ export function recordDifference(before: DesignRecord, after: DesignRecord): rea
   return [
     ...of('identity', identity),
     ...listChanges('identity', 'the revision history', before.history.map(revision), after.history.map(revision)),
+    ...(same(before.previous, after.previous) ? [] : of('identity', ({ previous }) => [carriedAlong(previous)])),
     ...of('requirement', requirement),
     ...of('terminations', ({ aim, source }) => [choice('Aim', aim), terminationStatement('Source', source)]),
     ...loadChanges(before.loads, after.loads),
@@ -57,7 +59,7 @@ export function recordDifference(before: DesignRecord, after: DesignRecord): rea
   ];
 }
 
-const identity = ({ identity: of, previous }: DesignRecord): readonly Statement[] => [
+const identity = ({ identity: of }: DesignRecord): readonly Statement[] => [
   text('Title', of.title),
   text('Document number', of.number),
   text('Revision', of.revision),
@@ -65,16 +67,18 @@ const identity = ({ identity: of, previous }: DesignRecord): readonly Statement[
   text('Change ticket', of.ticket),
   text('Legal owner', of.owner),
   text('What the revision changes', of.change),
-  {
-    what: 'Earlier revision carried along',
-    value: previous,
-    words:
-      previous === null
-        ? none
-        : `${previous.identity.number}, revision ${previous.identity.revision}, SHA-256 ${digestOf(previous).slice(0, 16)}…`,
-    exact: previous === null ? none : `SHA-256 with its sign-off ${sha256Of(previous)}`,
-  },
 ];
+
+/** Worked out only where the two differ: digests take time. */
+const carriedAlong = (previous: DesignRecord | null): Statement => ({
+  what: 'Earlier revision carried along',
+  value: previous,
+  words:
+    previous === null
+      ? none
+      : `${previous.identity.number}, revision ${previous.identity.revision}, SHA-256 ${digestOf(previous).slice(0, 16)}…`,
+  exact: () => (previous === null ? none : `SHA-256 with its sign-off ${sha256Of(previous)}`),
+});
 
 const requirement = ({ requirement: of, build }: DesignRecord): readonly Statement[] => [
   quantity('Design frequency', of.frequencyHz, 'Hz'),
@@ -106,13 +110,16 @@ const revision = (of: EarlierRevision): Statement => ({
   what: `History, revision ${of.revision}`,
   value: of,
   words: [of.date, of.change, `SHA-256 ${of.digest.slice(0, 16)}…`].filter((each) => each !== '').join(', '),
-  exact: [of.date, JSON.stringify(of.change), `SHA-256 ${of.digest}`].join(', '),
+  exact: () => [of.date, JSON.stringify(of.change), `SHA-256 ${of.digest}`].join(', '),
 });
 
 const asBuilt = (of: AsBuilt | null): readonly Statement[] =>
   of === null
     ? []
-    : [measuredStatement('Measured on the board', of.measured), text('Note on the measurement', of.note)];
+    : [
+        measuredStatement('Measured on the board', of.measured),
+        ...(of.note === '' ? [] : [text('Note on the measurement', of.note)]),
+      ];
 
 const signature = (who: string, of: Signature): readonly Statement[] => [
   text(`${who}, name`, of.name),

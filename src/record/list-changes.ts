@@ -1,6 +1,8 @@
 import type { Change, ChangeGroup } from './change.ts';
 import { changeOf, none, type Statement } from './statement.ts';
 
+export const removed = 'removed';
+
 /**
  * Between two lists of named things: what was added, removed and changed, and whether those that stayed stand in another
  * order. Things of one name are told apart by their order.
@@ -18,7 +20,8 @@ export function listChanges(
   for (const [key, statement] of old) {
     const kept = now.get(key);
     if (kept === undefined) {
-      changes.push({ group, what: statement.what, before: statement.words, after: 'removed' });
+      const { what, words, exact } = statement;
+      changes.push({ group, what, before: words === removed ? exact() : words, after: removed });
     } else {
       const change = changeOf(group, statement, kept);
       if (change !== null) changes.push(change);
@@ -45,4 +48,4 @@ function keyed(statements: readonly Statement[]): ReadonlyMap<string, Statement>
 }
 
 const order = (of: ReadonlyMap<string, Statement>, other: ReadonlyMap<string, Statement>): string =>
-  [...of.keys()].filter((key) => other.has(key)).join(', ');
+  [...of.keys()].filter((key) => other.has(key)).join('; ');

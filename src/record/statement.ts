@@ -11,7 +11,7 @@ export interface Statement {
   readonly value: unknown;
   readonly words: string;
   /** To the last digit and letter, for two whose words look the same. */
-  readonly exact: string;
+  readonly exact: () => string;
 }
 
 /** Stands where there is nothing. */
@@ -21,7 +21,7 @@ export const text = (what: string, value: string): Statement => ({
   what,
   value,
   words: value.trim() === '' ? none : value,
-  exact: JSON.stringify(value),
+  exact: () => JSON.stringify(value),
 });
 
 /** One of a few; `words` where the record's own aren't an engineer's. */
@@ -29,7 +29,7 @@ export const choice = (what: string, value: string | number | boolean, words = S
   what,
   value,
   words,
-  exact: JSON.stringify(value),
+  exact: () => JSON.stringify(value),
 });
 
 export const yesNo = (what: string, value: boolean): Statement => choice(what, value, value ? 'yes' : 'no');
@@ -39,14 +39,14 @@ export const quantity = (what: string, value: number | null, unit: Unit, absent 
   what,
   value,
   words: value === null ? absent : formatRead(value, unit),
-  exact: value === null ? absent : `${minus(String(value))} ${unit}`,
+  exact: () => (value === null ? absent : `${minus(String(value))} ${unit}`),
 });
 
 export const plainNumber = (what: string, value: number | null, absent = none): Statement => ({
   what,
   value,
   words: value === null ? absent : minus(String(Number(value.toPrecision(12)))),
-  exact: value === null ? absent : minus(String(value)),
+  exact: () => (value === null ? absent : minus(String(value))),
 });
 
 /** A fraction, as per cent. */
@@ -54,26 +54,29 @@ export const percent = (what: string, value: number | null, absent = none): Stat
   what,
   value,
   words: value === null ? absent : `${minus(String(Number((100 * value).toPrecision(12))))} %`,
-  exact: value === null ? absent : `${String(value)} of the whole`,
+  exact: () => (value === null ? absent : `${String(value)} of the whole`),
 });
 
 export const span = (what: string, value: Span | null, unit: Unit, absent = none): Statement => ({
   what,
   value,
   words: value === null ? absent : `${formatRead(value.low, unit)} to ${formatRead(value.high, unit)}`,
-  exact: value === null ? absent : `${String(value.low)} to ${String(value.high)} ${unit}`,
+  exact: () => (value === null ? absent : `${String(value.low)} to ${String(value.high)} ${unit}`),
 });
 
 export const minus = (number: string): string => number.replaceAll('-', '−');
 
 /** Whether two values are the same to the last bit. */
-export const same = (a: unknown, b: unknown): boolean => canonical({ a }) === canonical({ a: b });
+export function same(a: unknown, b: unknown): boolean {
+  if (typeof a !== 'object' || typeof b !== 'object' || a === null || b === null) return a === b;
+  return a === b || canonical(a) === canonical(b);
+}
 
 /** What is otherwise between two statements about the same; null where nothing is. */
 export function changeOf(group: ChangeGroup, before: Statement, after: Statement): Change | null {
   if (same(before.value, after.value)) return null;
   const alike = oneLine(before.words) === oneLine(after.words);
-  const [a, b] = alike ? [before.exact, after.exact] : [before.words, after.words];
+  const [a, b] = alike ? [before.exact(), after.exact()] : [before.words, after.words];
   return { group, what: after.what, before: a, after: b };
 }
 

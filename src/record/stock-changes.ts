@@ -3,7 +3,7 @@ import { formatTolerance } from '../parts/tolerance.ts';
 import { formatRead } from '../quantity/format.ts';
 import { canonical } from './canonical.ts';
 import type { Change } from './change.ts';
-import { listChanges } from './list-changes.ts';
+import { listChanges, removed } from './list-changes.ts';
 import { changeOf, none, type Statement } from './statement.ts';
 
 /** Lines told one by one; of more, how many there are says enough. */
@@ -17,15 +17,15 @@ export function stockChanges(before: StockList | null, after: StockList | null):
   const lines = listChanges('parts', 'the stock lines', before.parts.map(line), after.parts.map(line));
   if (lines.length <= mostNamed) return [...files, ...lines];
   const count = (kind: (change: Change) => boolean): number => lines.filter(kind).length;
-  const added = count(({ before: words }) => words === none);
-  const removed = count(({ after: words }) => words === 'removed');
+  const more = count((change) => change.before === none);
+  const fewer = count((change) => change.after === removed);
   return [
     ...files,
     {
       group: 'parts',
       what: 'Stock lines',
       before: String(before.parts.length),
-      after: `${String(after.parts.length)}: ${String(added)} added, ${String(removed)} removed, ${String(lines.length - added - removed)} otherwise; ${String(mostNamed)} of them follow`,
+      after: `${String(after.parts.length)}: ${String(more)} added, ${String(fewer)} removed, ${String(lines.length - more - fewer)} otherwise; ${String(mostNamed)} of them follow`,
     },
     ...lines.slice(0, mostNamed),
   ];
@@ -38,7 +38,7 @@ const listStatement = (list: StockList | null): Statement => ({
     list === null
       ? none
       : `${list.name}, ${String(list.parts.length)} ${list.parts.length === 1 ? 'line' : 'lines'}, SHA-256 ${list.sha256.slice(0, 16)}…`,
-  exact: list === null ? none : `${JSON.stringify(list.name)}, SHA-256 ${list.sha256}`,
+  exact: () => (list === null ? none : `${JSON.stringify(list.name)}, SHA-256 ${list.sha256}`),
 });
 
 function line(part: StockPart): Statement {
@@ -55,6 +55,6 @@ function line(part: StockPart): Statement {
     what: `Stock line ${name}`,
     value: part,
     words: words.filter((each) => each !== '').join(', '),
-    exact: canonical(part),
+    exact: () => canonical(part),
   };
 }

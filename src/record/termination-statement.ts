@@ -15,15 +15,15 @@ export function terminationStatement(what: string, termination: Termination): St
   if (isMeasured(termination)) return measuredStatement(what, termination.measured);
   const words = terminationWords(termination);
   if (isModel(termination)) {
-    const exact = `${termination.model}: ${termination.values.map((each) => minus(String(each))).join(', ')}`;
-    return { what, value: termination, words, exact };
+    const { model, values } = termination;
+    return { what, value: termination, words, exact: () => `${model}: ${values.map(String).join(', ')}` };
   }
   const { r, x, behaviour } = termination;
   return {
     what,
     value: termination,
     words: `${words}, ${away(termination)}`,
-    exact: `R ${String(r)} Ω, X ${minus(String(x))} Ω, ${behaviours[behaviour]}`,
+    exact: () => `R ${String(r)} Ω, X ${minus(String(x))} Ω, ${behaviours[behaviour]}`,
   };
 }
 
@@ -33,18 +33,18 @@ const away = ({ x, behaviour }: OneImpedance): string => (x === 0 ? behaviours.c
 export function measuredStatement(what: string, measured: MeasuredData): Statement {
   const { name, sha256, samples, thinningError, referenceOhm, frequencyHz, re, im } = measured;
   const words = `${terminationWords({ measured })}, SHA-256 ${sha256.slice(0, 16)}…`;
-  const numbers = sha256Of({ frequencyHz, re, im }).slice(0, 16);
   return {
     what,
     value: measured,
     words,
-    exact: [
-      JSON.stringify(name),
-      `SHA-256 ${sha256}`,
-      `${String(samples)} samples, of which ${String(frequencyHz.length)} are used`,
-      `thinned within ${String(thinningError)}`,
-      `reference ${String(referenceOhm)} Ω`,
-      `SHA-256 of the numbers used ${numbers}…`,
-    ].join('; '),
+    exact: () =>
+      [
+        JSON.stringify(name),
+        `SHA-256 ${sha256}`,
+        `${String(samples)} samples, of which ${String(frequencyHz.length)} are used`,
+        `thinned within ${String(thinningError)}`,
+        `reference ${String(referenceOhm)} Ω`,
+        `SHA-256 of the numbers used ${sha256Of({ frequencyHz, re, im }).slice(0, 16)}…`,
+      ].join('; '),
   };
 }

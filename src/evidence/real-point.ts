@@ -17,7 +17,7 @@ export interface RealPoint {
   readonly reflectedW: number;
   /** Transducer gain: loadW over the available power, 0 to 1. */
   readonly gain: number;
-  /** loadW / inputW, 0 to 1. */
+  /** Of what enters the network, the part that the load gets: loadW / (loadW + lostW), no difference of terms; 0 to 1. */
   readonly efficiency: number;
 }
 
@@ -39,15 +39,15 @@ export function realPoint(ladder: Branches, source: Complex, load: Complex, avai
   const volts = carried.volts.mul(scale);
   const amps = carried.amps.mul(scale);
   const loadW = heat(scale, load);
-  const inputW = (volts.re * amps.re + volts.im * amps.im) / 2;
+  const lostW = arms.reduce((sum, { watts }) => sum + watts, 0);
   return {
     seen: volts.div(amps),
     arms,
     loadW,
-    inputW,
-    lostW: arms.reduce((sum, { watts }) => sum + watts, 0),
+    inputW: (volts.re * amps.re + volts.im * amps.im) / 2,
+    lostW,
     reflectedW: volts.sub(amps.mul(source.conjugate())).abs() ** 2 / (8 * source.re),
     gain: loadW / availableW,
-    efficiency: loadW / inputW,
+    efficiency: loadW / (loadW + lostW),
   };
 }

@@ -1,11 +1,13 @@
 import type { Dossier } from '../dossier.ts';
 import { attachments } from './attachments.ts';
 import { blocks } from './content/blocks.ts';
+import { stateWords } from './content/state.ts';
 import { missingNote } from './content/title-block.ts';
 import { orNotStated, titleOf } from './content/words.ts';
 import type { Block } from './page/block.ts';
 import { documentElement } from './page/element.ts';
-import { addFurniture, frameOf } from './page/furniture.ts';
+import { frameOf } from './page/frame.ts';
+import { addFurniture } from './page/furniture.ts';
 import { lettering, missing, type Lettering } from './page/lettering.ts';
 import { paginate } from './page/paginate.ts';
 import type { Piece } from './page/piece.ts';
@@ -32,16 +34,24 @@ export async function report(dossier: Dossier, { paper, fonts }: ReportOptions):
   const width = frame.right - frame.left;
   const { record, digest, version } = dossier;
   const { identity, signOff } = record;
+  const attached = attachments(dossier);
   const structure = documentElement();
   const set = (block: Block): readonly Piece[] => setBlock(block, frame.left, width, letters, structure);
-  const pieces = blocks(dossier).flatMap(set);
+  const pieces = blocks(dossier, attached).flatMap(set);
   if (letters.lacks()) pieces.push(...set(missingNote(missing)));
   const sheets = paginate(pieces, frame.top, frame.bottom);
   const number = identity.number.trim() === '' ? 'No document number' : identity.number;
   addFurniture(
     sheets,
     frame,
-    { number, revision: orNotStated(identity.revision), title: titleOf(record), digest },
+    {
+      number,
+      revision: orNotStated(identity.revision),
+      state: stateWords[signOff.state].mark,
+      draft: signOff.state === 'draft',
+      title: titleOf(record),
+      foot: `Ferrule ${version}, SHA-256 of the record ${digest}`,
+    },
     letters,
   );
   const author = signOff.prepared.name.trim() || identity.owner.trim();
@@ -58,7 +68,7 @@ export async function report(dossier: Dossier, { paper, fonts }: ReportOptions):
     sheets,
     size: [frame.width, frame.height],
     structure,
-    attachments: attachments(dossier),
+    attachments: attached,
     description,
   } as const;
   return writePdf(contents, faces, letters);

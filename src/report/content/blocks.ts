@@ -1,19 +1,24 @@
 import type { Dossier } from '../../dossier.ts';
+import type { Attachment } from '../attachments.ts';
 import type { Block } from '../page/block.ts';
 import { ceiling } from './ceiling.ts';
-import { cautions, references, signOff } from './closing.ts';
+import { cautions, references } from './closing.ts';
+import { contents } from './contents.ts';
+import { deviations } from './deviations.ts';
+import { files } from './files.ts';
+import { history } from './history.ts';
 import { network } from './network.ts';
 import { options } from './options.ts';
 import { assumptions, requirement } from './requirement.ts';
 import { response } from './response.ts';
+import { signOff } from './sign-off.ts';
 import { terminations } from './terminations.ts';
 import { titleBlock } from './title-block.ts';
 import { verdict } from './verdict.ts';
 import { bandwidth, verification } from './verification.ts';
 
-const inOrder = [
-  titleBlock,
-  verdict,
+/** The numbered parts that speak of the design, in their order. */
+const ofDesign = [
   requirement,
   terminations,
   assumptions,
@@ -24,9 +29,17 @@ const inOrder = [
   verification,
   bandwidth,
   cautions,
+  deviations,
   references,
-  signOff,
 ];
 
 /** A report from its title block to its sign-off, as content without places. */
-export const blocks = (dossier: Dossier): readonly Block[] => inOrder.flatMap((part) => part(dossier));
+export function blocks(dossier: Dossier, attached: readonly Attachment[]): readonly Block[] {
+  const parts = [
+    ...ofDesign.flatMap((part) => part(dossier)),
+    ...files(attached),
+    ...history(dossier),
+    ...signOff(dossier),
+  ];
+  return [...titleBlock(dossier), ...contents(dossier, parts), ...verdict(dossier), ...parts];
+}

@@ -10,6 +10,9 @@ export const parts = {
   verification: 8,
   bandwidth: 9,
   cautions: 10,
-  references: 11,
-  signOff: 12,
+  deviations: 11,
+  references: 12,
+  files: 13,
+  history: 14,
+  signOff: 15,
 } as const;

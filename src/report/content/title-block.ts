@@ -1,9 +1,10 @@
 import type { Dossier } from '../../dossier.ts';
 import { plain, type Block } from '../page/block.ts';
+import { stateWords } from './state.ts';
 import { orNotStated, titleOf } from './words.ts';
 
 /** The data fields of a title block by ISO 7200, mandatory ones first. */
-export function titleBlock({ record, version }: Dossier): readonly Block[] {
+export function titleBlock({ record }: Dossier): readonly Block[] {
   const { identity, signOff } = record;
   return [
     { kind: 'text', paragraph: { spans: [{ text: titleOf(record), bold: true }], style: 'display' }, keep: true },
@@ -13,6 +14,7 @@ export function titleBlock({ record, version }: Dossier): readonly Block[] {
       entries: [
         { name: 'Document number', value: orNotStated(identity.number) },
         { name: 'Revision', value: orNotStated(identity.revision) },
+        { name: 'Document status', value: stateWords[signOff.state].name },
         { name: 'Date of issue', value: orNotStated(identity.date) },
         { name: 'Sheet', value: ({ sheets }) => `1 of ${String(sheets)}` },
         { name: 'Document type', value: 'Design report' },
@@ -22,7 +24,6 @@ export function titleBlock({ record, version }: Dossier): readonly Block[] {
         { name: 'Prepared by', value: orNotStated(signOff.prepared.name) },
         { name: 'Checked by', value: orNotStated(signOff.checked.name) },
         { name: 'Approved by', value: orNotStated(signOff.approved.name) },
-        { name: 'Computed with', value: `Ferrule ${version}` },
       ],
     },
   ];

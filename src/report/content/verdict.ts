@@ -3,6 +3,7 @@ import { returnLossWords } from '../../design/words.ts';
 import { returnLossDb } from '../../network/figures-of-merit.ts';
 import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { plain, type Block } from '../page/block.ts';
+import { allAccepted } from './deviations.ts';
 import { parts } from './parts.ts';
 import { chosenOption, partsOf, reasonsOf } from './words.ts';
 
@@ -29,11 +30,15 @@ export function verdict(dossier: Dossier): readonly Block[] {
   ];
 }
 
-function shortfall({ proposed, options, ceiling }: Dossier): string {
+function shortfall(dossier: Dossier): string {
+  const { proposed, options, ceiling } = dossier;
   const other = chosenOption(options, proposed);
   const instead = other === undefined ? 'No option meets everything.' : `${other.title} would meet everything.`;
   const limit = ceiling?.verdict === 'out of reach' ? ` ${ceiling.words}` : '';
-  return `${instead}${limit} Issuing this document needs a written deviation.`;
+  const accepted = allAccepted(dossier)
+    ? `Accepted in writing: see part ${String(parts.deviations)}.`
+    : 'Issuing this document needs a written deviation.';
+  return `${instead}${limit} ${accepted}`;
 }
 
 function bar(headline: string, words: readonly string[]): readonly Block[] {

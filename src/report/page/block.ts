@@ -88,8 +88,6 @@ export interface Table {
   readonly rows: readonly Row[];
   /** Stays whole, and with what follows. */
   readonly together?: boolean;
-  /** Least height of a row, pt: room for a signature. */
-  readonly rowHeight?: number;
 }
 
 export interface Picture {

@@ -26,7 +26,7 @@ export function setTable(
   const last = table.rows.length - 1;
   const pieces = table.rows.map((row, index): Piece => {
     const { items, height } = setRow(row, places, letters, element);
-    const full = Math.max(height + 2 * pad, table.rowHeight ?? 0);
+    const full = height + 2 * pad;
     const foot: Item = rule(
       x,
       full,

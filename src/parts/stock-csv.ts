@@ -1,11 +1,25 @@
 import { formatRead } from '../quantity/format.ts';
-import { stockColumns } from './read-stock-part.ts';
+import type { StockColumn } from './read-stock-part.ts';
 import type { StockPart } from './stock.ts';
 import type { Tolerance } from './tolerance.ts';
 
+/** The kind comes first: a line that began with a name such as "#7" would read as a comment. */
+const columns: readonly StockColumn[] = [
+  'kind',
+  'name',
+  'value',
+  'tolerance',
+  'Q',
+  'Q frequency',
+  'self-resonance',
+  'ESL',
+  'rated voltage',
+  'rated current',
+];
+
 /** Parts as lines of a stock list (RFC 4180) that reads back to the same parts. */
 export const stockCsv = (parts: readonly StockPart[]): string =>
-  [stockColumns, ...parts.map(cells)].map((row) => `${row.map(quoted).join(',')}\r\n`).join('');
+  [columns, ...parts.map(cells)].map((row) => `${row.map(quoted).join(',')}\r\n`).join('');
 
 function cells(part: StockPart): readonly string[] {
   const { name, kind, value, tolerance, q, qAtHz, selfResonanceHz, eslH, ratedVolts, ratedAmps } = part;
@@ -13,8 +27,8 @@ function cells(part: StockPart): readonly string[] {
   const said = (known: number | null, of: 'Hz' | 'H'): string => (known === null ? '' : formatRead(known, of));
   const plain = (known: number | null): string => (known === null ? '' : String(known));
   return [
-    name,
     kind,
+    name,
     formatRead(value, unit),
     tolerance === null ? '' : written(tolerance, unit),
     plain(q),

@@ -35,6 +35,17 @@ export const styles = css`
     margin-left: 3.25rem;
   }
 
+  build-progress {
+    margin: -1.75rem 0 1rem;
+    padding-left: 3.25rem;
+  }
+
+  /* Until a part is fetched it keeps about the room that it will take. */
+  :is(network-part, response-part, evidence-part, build-part, record-part):not(:defined) {
+    display: block;
+    min-height: 40rem;
+  }
+
   sheet-part {
     margin-bottom: 2.75rem;
     scroll-margin-top: 1rem;
@@ -79,6 +90,10 @@ export const styles = css`
 
     search-progress {
       margin-left: 0;
+    }
+
+    build-progress {
+      padding-left: 0;
     }
   }
 

@@ -4,7 +4,9 @@ import { guard } from 'lit/directives/guard.js';
 import { isResistive } from '../../src/network/termination-at.ts';
 import type { DesignRecord, Method } from '../../src/record/design-record.ts';
 import type { FitStep } from '../../src/design/fitted.ts';
+import type { Dossier } from '../../src/dossier.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
+import { keptOf } from '../../src/record/kept.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
 import { readRecord } from '../../src/record/read-record.ts';
 import { attachmentsOf, type Attachments } from '../../src/record/read-termination.ts';
@@ -13,34 +15,49 @@ import { base } from '../base/base.styles.ts';
 import type { FieldChange } from '../base/field-change.ts';
 import { serves } from '../base/methods.ts';
 import { count } from '../base/words.ts';
+import '../build-progress/build-progress.ts';
 import '../ceiling-part/ceiling-part.ts';
 import type { ContentsEntry } from '../contents-rule/contents-rule.ts';
 import '../contents-rule/contents-rule.ts';
-import '../evidence-part/evidence-part.ts';
 import '../given-part/given-part.ts';
-import '../network-part/network-part.ts';
 import '../options-part/options-part.ts';
-import '../record-part/record-part.ts';
-import '../response-part/response-part.ts';
 import '../sheet-part/sheet-part.ts';
 import '../title-block/title-block.ts';
 import { pathOf, readAddress, writeAddress } from './address.ts';
+import { alongWith } from './along-with.ts';
 import { holdsData, recall, remember, tableName, withState } from './attachments.ts';
 import { styles } from './ferrule-sheet.styles.ts';
+import { keptFor, noneKept, recallKept, rememberKept, withStock, type KeptOf } from './kept.ts';
 import type { LongWork } from './long-work.ts';
 import { givenLine, outcome } from './outcome.ts';
 import { judge, parts, type Part } from './parts.ts';
-import { finished, lostChoice, lostNotice, refused, settle, withoutChoice, type Settled } from './settle.ts';
+import {
+  exact,
+  finished,
+  goingOn,
+  lostChoice,
+  lostNotice,
+  refused,
+  settle,
+  stopped,
+  withOption,
+  withoutChoice,
+  type Settled,
+} from './settle.ts';
+import { isStockList, stockFields, stockProblems, stockWords } from './stock.ts';
 
 /**
- * Pauses after the last keystroke, ms: before the address is written, before the outcome is said aloud, and before work
- * begins that takes long.
+ * Pauses after the last keystroke, ms: before the address is written, before the outcome is said aloud, before work
+ * begins that takes long, and before real parts are worked out.
  */
-const pause = { address: 150, voice: 1200, work: 250 } as const;
+const pause = { address: 150, voice: 1200, work: 250, build: 150 } as const;
 /** More of a file than this can't be a record, bytes. */
 const mostRead = 50_000_000;
 /** More than this isn't read as measured data, bytes. */
 const mostMeasured = 200_000_000;
+/** The heading of a stock list stands within so many bytes, after its comments. */
+const mostHeading = 20_000;
+const tooLarge = { field: 'list', read: '', why: 'it is larger than 50 MB', would: 'give the parts in question' };
 
 /**
  * A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. Longer than others
@@ -66,12 +83,17 @@ export class FerruleSheet extends LitElement {
   @state() private progress: FitStep | null = null;
   @state() private attachments: Attachments = new Map();
   @state() private dataSaid = '';
+  @state() private kept: KeptOf = noneKept;
+  /** Outcome of reading a stock list: a line, or one for each problem. */
+  @state() private stockSaid: readonly string[] = [];
   /** A file of which a port is to be chosen. */
   @state() private twoPort: { readonly name: string; readonly text: string } | null = null;
   /** Fetched with the first record that takes long. */
   private work: LongWork | null = null;
   private workTimer = 0;
   private stopping = false;
+  /** Work was told of, and its outcome is waited for. */
+  private awaited = false;
   private addressTimer = 0;
   private voiceTimer = 0;
   private frame = 0;
@@ -101,6 +123,7 @@ export class FerruleSheet extends LitElement {
   protected override willUpdate(changed: PropertyValues) {
     if (changed.has('demo')) {
       this.attachments = recall();
+      this.kept = recallKept();
       this.readHash();
     }
     if (changed.has('following')) {
@@ -110,6 +133,11 @@ export class FerruleSheet extends LitElement {
         ...judge(part, this.following),
       }));
     }
+  }
+
+  /** What stands below is fetched once the first result is painted. */
+  protected override firstUpdated() {
+    requestAnimationFrame(() => setTimeout(() => void import('./later.ts')));
   }
 
   protected override updated() {
@@ -126,6 +154,9 @@ export class FerruleSheet extends LitElement {
         @data-file=${(event: CustomEvent<File>) => this.addFile(event.detail)}
         @data-table=${(event: CustomEvent<string>) => this.addData(event.detail, tableName(this.attachments), 1)}
         @data-port=${this.answerPort}
+        @stock-file=${(event: CustomEvent<File>) => this.addStock(event.detail)}
+        @build-stop=${this.stopBuild}
+        @build-on=${this.goOn}
       >
         <given-part
           class="given"
@@ -148,6 +179,11 @@ export class FerruleSheet extends LitElement {
             @search-stop=${this.stopSearch}
             @search-on=${() => this.change({ name: 'steps', value: '' })}
           ></search-progress>
+          <build-progress
+            .dossier=${this.settled.dossier}
+            .realParts=${this.settled.realParts}
+            ?idle=${this.settled.building === null}
+          ></build-progress>
           ${parts.map((part, index) => (part.name === 'Given' ? nothing : this.renderPart(part, index + 1)))}
         </div>
         <contents-rule class="contents" .entries=${this.entries} @reveal-part=${this.reveal}></contents-rule>
@@ -212,11 +248,21 @@ export class FerruleSheet extends LitElement {
         return html`<response-part .dossier=${dossier} .state=${shown}></response-part>`;
       case 'Evidence':
         return html`<evidence-part .dossier=${dossier}></evidence-part>`;
+      case 'Build':
+        return html`<build-part
+          .dossier=${dossier}
+          .state=${shown}
+          .realParts=${shown.realParts}
+          ?idle=${shown.building === null}
+          .stocked=${this.kept.stock}
+          .said=${this.stockSaid}
+        ></build-part>`;
       case 'Record and report':
         return html`<record-part
           .dossier=${dossier}
           .state=${shown}
           .stale=${shown.stale}
+          .realParts=${shown.realParts}
           .opened=${this.opened}
           .link=${this.link}
           @open-file=${(event: CustomEvent<File>) => this.open(event.detail)}
@@ -234,50 +280,71 @@ export class FerruleSheet extends LitElement {
   private take(fields: Fields) {
     // A sheet serves several methods; an address that asks for one of another sheet gets this sheet's own.
     const method = serves(this.method, fields.method) ? fields.method : this.method;
-    this.settleTo(settle({ ...fields, method }, null, this.attachments));
+    this.keep(keptFor(this.kept, fields));
+    this.settleTo(settle({ ...fields, method }, null, this.attachments, this.kept));
     this.following = this.settled;
   }
 
-  /** @param delay before work begins that takes long, ms */
+  /** @param delay before a search begins, ms */
   private settleTo(settled: Settled, delay = 0) {
     clearTimeout(this.workTimer);
     this.work?.drop();
     this.stopping = false;
     this.settled = settled;
-    const { pending } = settled;
+    const { pending, building } = settled;
     if (pending === null) this.progress = null;
-    else this.workTimer = window.setTimeout(() => void this.begin(pending), delay);
+    const record = pending ?? building;
+    if (record === null) return;
+    this.workTimer = window.setTimeout(() => void this.begin(record), pending === null ? pause.build : delay);
   }
 
   private async begin(record: DesignRecord) {
     const { LongWork } = await import('./long-work.ts');
     this.work ??= new LongWork((message) => this.hear(message));
-    if (this.settled.pending === record) this.work.start(record);
+    const { pending, building } = this.settled;
+    if (record === (pending ?? building)) this.work.start(record);
   }
 
   private hear(message: FromWorker) {
-    if (message.kind === 'progress') {
-      this.progress = message.step;
-      return;
-    }
     const { pending } = this.settled;
-    if (message.kind === 'refused' && pending !== null && lostChoice(message.problems)) {
-      this.work?.start(withoutChoice(pending));
-      return;
+    switch (message.kind) {
+      case 'progress':
+        if (pending !== null) this.progress = message.step;
+        return;
+      case 'exact':
+        if (pending !== null) this.settled = exact(this.settled, message.dossier, this.noticeOf(message.dossier));
+        return;
+      case 'option':
+        this.settled = withOption(this.settled, message.option);
+        return;
+      case 'refused':
+        if (pending !== null && lostChoice(message.problems)) this.work?.start(withoutChoice(pending));
+        else {
+          this.settled = refused(this.settled, message.problems);
+          this.progress = null;
+        }
+        return;
+      case 'done':
+        this.finish(message.dossier);
     }
-    if (message.kind === 'refused') {
-      this.settled = refused(this.settled, message.problems);
-      this.progress = null;
-      return;
-    }
-    const { dossier } = message;
-    const lost = pending !== null && pending.selection.option !== dossier.record.selection.option;
+  }
+
+  private finish(dossier: Dossier) {
+    const searching = this.progress !== null;
     const steps = this.progress?.steps;
-    this.settled = finished(this.settled, dossier, lost ? lostNotice(dossier) : '');
+    this.settled = finished(this.settled, dossier, this.noticeOf(dossier));
     this.progress = null;
-    this.said = outcome(dossier);
+    if (searching || this.awaited) this.said = outcome(dossier);
+    this.awaited = false;
     // With the number of steps in it the record gives the same networks again.
     if (this.stopping && steps !== undefined) this.change({ name: 'steps', value: String(steps) }, 0);
+  }
+
+  /** Why a dossier that was waited for isn't of the network chosen; otherwise as it is said already. */
+  private noticeOf(dossier: Dossier): string {
+    const { pending, notice } = this.settled;
+    if (pending === null) return notice;
+    return pending.selection.option === dossier.record.selection.option ? '' : lostNotice(dossier);
   }
 
   private stopSearch() {
@@ -285,15 +352,34 @@ export class FerruleSheet extends LitElement {
     this.work?.stop();
   }
 
+  private stopBuild() {
+    clearTimeout(this.workTimer);
+    this.work?.stop();
+    this.settled = stopped(this.settled);
+  }
+
+  private goOn() {
+    const { building } = this.settled;
+    if (building === null) return;
+    this.settled = goingOn(this.settled);
+    void this.begin(building);
+  }
+
   private change({ name, value }: FieldChange, delay: number = name === 'choice' ? 0 : pause.work) {
+    this.changeAll({ ...alongWith({ name, value }, this.settled.dossier), [name]: value }, name, delay);
+  }
+
+  /** @param name of the field that was typed in */
+  private changeAll(changed: Fields, name: FieldName, delay: number = pause.work) {
     this.opened = '';
-    // Another search is meant: it goes to its end.
-    const steps = searched.includes(name) ? { steps: '' } : {};
-    const fields = { ...this.settled.fields, ...steps, [name]: value };
-    this.settleTo(settle(fields, this.settled, this.attachments), delay);
+    const fields = { ...this.settled.fields, ...changed };
+    // A document that is numbered anew is the same document.
+    if (name === 'number') this.keep({ ...this.kept, document: changed.number ?? '' });
+    this.settleTo(settle(fields, this.settled, this.attachments, this.kept), delay);
     clearTimeout(this.addressTimer);
     this.addressTimer = window.setTimeout(this.writeHash, pause.address);
     clearTimeout(this.voiceTimer);
+    this.awaited = false;
     this.voiceTimer = window.setTimeout(() => (this.said = this.voice(name)), pause.voice);
   }
 
@@ -309,8 +395,12 @@ export class FerruleSheet extends LitElement {
 
   /** What is said after a pause in typing: the problem of the field just typed in, or the outcome. */
   private voice(name: FieldName): string {
-    const { problems, stale, dossier, notice, pending } = this.settled;
+    const { problems, stale, dossier, notice, pending, realParts } = this.settled;
     if (pending !== null) return 'The search is at work.';
+    if (realParts === 'at work') {
+      this.awaited = true;
+      return 'Real parts are being worked out.';
+    }
     const problem = problems[name] ?? Object.values(problems)[0];
     if (stale || dossier === null) return problem ?? '';
     return `${notice} ${outcome(dossier)}`.trim();
@@ -338,8 +428,36 @@ export class FerruleSheet extends LitElement {
     if (file === undefined) return;
     event.preventDefault();
     this.dragging = false;
-    void (holdsData(file.name) ? this.addFile(file) : this.open(file));
+    void this.takeFile(file);
   };
+
+  /** A file of any kind that the sheet can use. */
+  private async takeFile(file: File) {
+    if (!holdsData(file.name)) await this.open(file);
+    else if (isStockList(await file.slice(0, mostHeading).text())) await this.addStock(file);
+    else await this.addFile(file);
+  }
+
+  /** Reads a stock list and takes parts from it, of the kinds that it has; what is typed stays where it can't be read. */
+  private async addStock(file: File) {
+    const { readStockList } = await import('../../src/parts/read-stock-list.ts');
+    try {
+      if (file.size > mostRead) throw new InputError(tooLarge);
+      const list = readStockList(await file.text(), file.name);
+      this.keep(withStock(this.kept, list));
+      this.stockSaid = [stockWords(list)];
+      this.changeAll(stockFields(list), 'stock');
+    } catch (error) {
+      if (!(error instanceof InputError)) throw error;
+      this.stockSaid = stockProblems(file.name, error.problems);
+    }
+  }
+
+  private keep(kept: KeptOf) {
+    if (kept === this.kept) return;
+    this.kept = kept;
+    rememberKept(kept);
+  }
 
   /** Takes measured data from a file, once it is known of which port. */
   private async addFile(file: File) {
@@ -390,6 +508,8 @@ export class FerruleSheet extends LitElement {
       const fields = fieldsOf(record);
       const ends = [record.source, ...record.loads.map(({ termination }) => termination)];
       this.attach(attachmentsOf(ends));
+      const { stock, ...rest } = keptOf(record);
+      this.keep({ ...rest, stock: new Map([...this.kept.stock, ...stock]), document: record.identity.number });
       // The sheet of two resistances has room for nothing else.
       const fits = this.method !== 'resistive-pair' || ends.every(isResistive);
       if (!serves(this.method, record.method) || !fits) {
@@ -408,27 +528,6 @@ export class FerruleSheet extends LitElement {
     this.said = this.opened;
   }
 }
-
-/** Fields that a search depends on. */
-const searched: readonly FieldName[] = [
-  'method',
-  'frequency',
-  'source',
-  'source-behaviour',
-  'load',
-  'load-behaviour',
-  'aim',
-  'band',
-  'block-dc',
-  'keep-dc',
-  'inductors',
-  'capacitors',
-  'q',
-  'elements',
-  'fit-form',
-  'shunt-inductor',
-  'fit-seed',
-];
 
 declare global {
   interface HTMLElementTagNameMap {

@@ -1,6 +1,7 @@
 import type { Dossier } from '../../src/dossier.ts';
 import { frequencySpan, returnLossWords } from '../../src/design/words.ts';
-import { partWords, unbroken } from '../base/words.ts';
+import { formatFixed } from '../../src/quantity/format.ts';
+import { builtPartWords, partWords, unbroken } from '../base/words.ts';
 import type { Settled } from './settle.ts';
 
 /** What the sheet came to, in two or three sentences. */
@@ -10,17 +11,18 @@ export function outcome(dossier: Dossier): string {
   if (shown === undefined) return 'No network of these forms matches these terminations.';
   const meeting = options.filter(({ meets }) => meets).length;
   const by = { engineer: 'Chosen', proposal: 'Proposed', nearest: 'Nearest' }[dossier.chosenBy];
+  const parts = shown.built === null ? partWords(shown) : builtPartWords(shown.built);
   const values =
-    shown.arms.length === 0 || shown.arms.length > 4
+    parts.length === 0 || parts.length > 4
       ? ''
-      : ` (${partWords(shown)
-          .map((words) => words.replaceAll(' ', '\u00a0'))
-          .join(', ')})`;
+      : ` (${parts.map((words) => words.replaceAll(' ', '\u00a0')).join(', ')})`;
   const band = record.requirement.bandHz;
-  const held =
-    shown.worstReturnLossDb === null || band === null
-      ? ''
-      : ` Its return loss is ${returnLossWords(shown.worstReturnLossDb)} at worst from ${frequencySpan(band)}.`;
+  const worst = shown.built?.worstReturnLossDb ?? shown.worstReturnLossDb;
+  const over =
+    shown.built?.yield == null || band === null
+      ? `from ${band === null ? '' : frequencySpan(band)}`
+      : `over the band, its yield ${formatFixed(shown.built.yield.value * 100, 1)} %`;
+  const held = worst === null || band === null ? '' : ` Its return loss is ${returnLossWords(worst)} at worst ${over}.`;
   return unbroken(`${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`);
 }
 

@@ -1,5 +1,5 @@
 import type { Option } from '../../src/dossier.ts';
-import type { Method } from '../../src/record/design-record.ts';
+import type { Method, Required } from '../../src/record/design-record.ts';
 import { fieldNames, pathOf, type FieldName } from '../../src/record/fields.ts';
 import { count } from '../base/words.ts';
 import type { Verdict } from '../verdict-mark/verdict-mark.ts';
@@ -13,7 +13,7 @@ export interface Judged {
 
 /** A part of the document. Parts are numbered by their place in the list. */
 export interface Part {
-  readonly name: 'Given' | 'Ceiling' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Record and report';
+  readonly name: 'Given' | 'Ceiling' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Build' | 'Record and report';
   /** Numbers in the basis of calculation. */
   readonly basis: (method: string | undefined) => readonly string[];
   readonly judge: (state: Settled) => Judged;
@@ -38,10 +38,14 @@ const optionsBasis: Readonly<Record<Method, readonly string[]>> = {
 };
 const isMethod = (text: string | undefined): text is Method => text !== undefined && Object.hasOwn(optionsBasis, text);
 const unassessed: Judged = { verdict: 'not assessed', words: 'not assessed' };
-const judged = (good: boolean): Judged => {
+const judged = (good: boolean, exact = false): Judged => {
   const verdict = good ? 'meets' : 'falls short';
-  return { verdict, words: verdict };
+  return { verdict, words: exact ? `${verdict}, exact values` : verdict };
 };
+
+/** Real parts are asked for, and this network isn't worked out with them yet. */
+const isExact = ({ dossier }: Settled, option: Option): boolean =>
+  dossier !== null && dossier.record.build !== null && option.built === null;
 
 const optionsFields: readonly FieldName[] = [
   'method',
@@ -56,8 +60,17 @@ const optionsFields: readonly FieldName[] = [
   'reason',
 ];
 const responseFields: readonly FieldName[] = ['sweep'];
+const buildFields: readonly FieldName[] = [
+  ...fieldNames.filter((name) => pathOf[name].startsWith('build.')),
+  'q-inductor',
+  'q-capacitor',
+  'set',
+];
 const recordFields = fieldNames.filter((name) => /^(identity|signOff)\./u.test(pathOf[name]));
-const elsewhere = [...optionsFields, ...responseFields, ...recordFields];
+const elsewhere = [...optionsFields, ...responseFields, ...buildFields, ...recordFields];
+
+/** What is asked of real parts. */
+const ofParts: readonly Required[] = ['return loss', 'yield', 'stress'];
 
 /** The verdict on a part: its own, unless a text in it can't be read or what it shows is of earlier texts. */
 export function judge(part: Part, state: Settled): Judged {
@@ -97,13 +110,15 @@ export const parts: readonly Part[] = [
     name: 'Options',
     basis: (method) => (isMethod(method) ? optionsBasis[method] : []),
     fields: optionsFields,
-    judge: ({ dossier }) => {
+    judge: (state) => {
+      const { dossier } = state;
       if (dossier === null || dossier.options.length === 0) return unassessed;
       const meeting = dossier.options.filter(({ meets }) => meets).length;
       const words = `${String(meeting)} of ${count(dossier.options.length, 'network')}`;
+      const so = dossier.options.some((option) => isExact(state, option)) ? ' so far' : '';
       return meeting > 0
-        ? { verdict: 'meets', words: `${words} meet${meeting === 1 ? 's' : ''}` }
-        : { verdict: 'falls short', words: 'none meets' };
+        ? { verdict: 'meets', words: `${words} meet${meeting === 1 ? 's' : ''}${so}` }
+        : { verdict: 'falls short', words: `none meets${so}` };
     },
   },
   {
@@ -112,7 +127,7 @@ export const parts: readonly Part[] = [
     fields: [],
     judge: (state) => {
       const chosen = chosenOf(state);
-      return chosen === undefined ? unassessed : judged(chosen.meets);
+      return chosen === undefined ? unassessed : judged(chosen.meets, isExact(state, chosen));
     },
   },
   {
@@ -120,8 +135,11 @@ export const parts: readonly Part[] = [
     basis: always(['B10', 'B11', 'B12']),
     fields: responseFields,
     judge: (state) => {
-      const check = chosenOf(state)?.checks.find(({ subject }) => subject === 'return loss');
-      return check === undefined ? unassessed : judged(check.verdict === 'meets');
+      const chosen = chosenOf(state);
+      const check = chosen?.checks.find(({ subject }) => subject === 'return loss');
+      return chosen === undefined || check === undefined
+        ? unassessed
+        : judged(check.verdict === 'meets', isExact(state, chosen));
     },
   },
   {
@@ -129,6 +147,20 @@ export const parts: readonly Part[] = [
     basis: always(['B14', 'B15', 'B16']),
     fields: [],
     judge: ({ dossier }) => (dossier?.evidence ? judged(dossier.evidence.pass) : unassessed),
+  },
+  {
+    name: 'Build',
+    basis: always([]),
+    fields: buildFields,
+    judge: (state) => {
+      const chosen = chosenOf(state);
+      if (chosen === undefined || state.dossier?.record.build == null) return unassessed;
+      if (chosen.built === null) {
+        return state.realParts === 'at work' ? { verdict: 'not assessed', words: 'being worked out' } : unassessed;
+      }
+      const checks = chosen.checks.filter(({ subject }) => ofParts.includes(subject));
+      return checks.length === 0 ? unassessed : judged(checks.every(({ verdict }) => verdict === 'meets'));
+    },
   },
   {
     name: 'Record and report',

@@ -19,7 +19,7 @@ import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdic
 import { aims, behaviours, blocks, keeps } from './choices.ts';
 import { styles } from './given-part.styles.ts';
 
-const partsFields = ['inductors', 'capacitors', 'q-inductor', 'q-capacitor', 'power'] as const;
+const partsFields = ['inductors', 'capacitors', 'power'] as const;
 
 /** Whether how an end varies is the engineer's to say: models and measured data say it themselves. */
 const variesByChoice = (terminations: readonly (Termination | undefined)[] | undefined): boolean =>
@@ -161,8 +161,7 @@ export class GivenPart extends LitElement {
   }
 
   private parts(): TemplateResult {
-    const { understood, fields } = this.state;
-    const q = `Q ${fields['q-inductor'] ?? ''} and ${fields['q-capacitor'] ?? ''}`;
+    const { understood } = this.state;
     return html`<details
       ?open=${this.partsOpen}
       @toggle=${(event: Event) => (this.partsOpen = (event.target as HTMLDetailsElement).open)}
@@ -170,13 +169,11 @@ export class GivenPart extends LitElement {
       <summary>
         Parts and power
         <span class="muted"
-          >${[understood.inductors, understood.capacitors, q, understood.power].filter(Boolean).join('; ')}</span
+          >${[understood.inductors, understood.capacitors, understood.power].filter(Boolean).join('; ')}</span
         >
       </summary>
       <div class="group">
         ${this.text('inductors', 'Practicable inductors')} ${this.text('capacitors', 'Practicable capacitors')}
-        ${this.text('q-inductor', 'Q of inductors, for the loss stated')}
-        ${this.text('q-capacitor', 'Q of capacitors, for the loss stated')}
         ${this.text('power', 'Available power', '', 'Not stated.')}
       </div>
     </details>`;

@@ -1,13 +1,14 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { loadLabel, terminationLabel } from '../../src/record/read-termination.ts';
-import type { Dossier, Option } from '../../src/dossier.ts';
+import type { Built, Dossier, Option } from '../../src/dossier.ts';
 import { schematic } from '../../src/figures/schematic.ts';
 import { formatFixed, formatImpedance } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { drawing } from '../base/drawing.ts';
+import { realFigure } from '../base/real-figure.ts';
 import { table } from '../base/table.styles.ts';
-import { partValue, unbroken, withoutLoadedQ } from '../base/words.ts';
+import { orderedValue, partValue, unbroken, withoutLoadedQ } from '../base/words.ts';
 import '../copy-button/copy-button.ts';
 import { styles } from './network-part.styles.ts';
 
@@ -36,7 +37,11 @@ export class NetworkPart extends LitElement {
                 : html`<copy-button label="Copy the parts list" .text=${() => partsText(option)}></copy-button>`
             }
           </div>
-          ${option.arms.length === 0 ? html`<p>No part is needed: the source sees the load as it is.</p>` : parts(option)}
+          ${
+            option.arms.length === 0
+              ? html`<p>No part is needed: the source sees the load as it is.</p>`
+              : parts(option, this.dossier.record.build !== null)
+          }
         </div>
         <div>
           <div class="line">
@@ -86,33 +91,50 @@ export class NetworkPart extends LitElement {
   }
 }
 
-function parts(option: Option): TemplateResult {
-  return html`<table>
-    <thead>
-      <tr>
-        <th scope="col">Part</th>
-        <th scope="col">Arm</th>
-        <th scope="col">Kind</th>
-        <th scope="col" class="number">Value</th>
-      </tr>
-    </thead>
-    <tbody>
-      ${option.arms.map(
-        (arm, index) =>
-          html`<tr>
-            <th scope="row">${option.designators[index]}</th>
-            <td>${arm.arm}</td>
-            <td>${arm.part}</td>
-            <td class="number">${partValue(arm)}</td>
-          </tr>`,
-      )}
-    </tbody>
-  </table>`;
+/** @param real  real parts are asked for */
+const parts = (option: Option, real: boolean): TemplateResult =>
+  html`<div class="scroll" tabindex="0" role="group" aria-label="Parts">
+    <table>
+      <thead>
+        <tr>
+          <th scope="col">Part</th>
+          <th scope="col">Arm</th>
+          <th scope="col">Kind</th>
+          <th scope="col" class="number">${real ? 'Exact value' : 'Value'}</th>
+          ${real ? html`<th scope="col" class="number">To order</th>` : nothing}
+        </tr>
+      </thead>
+      <tbody>
+        ${option.arms.map(
+          (arm, index) =>
+            html`<tr>
+              <th scope="row">${option.designators[index]}</th>
+              <td>${arm.arm}</td>
+              <td>${arm.part}</td>
+              <td class="number">${partValue(arm)}</td>
+              ${real ? html`<td class="number">${realFigure(option, (built) => ordered(built, index))}</td>` : nothing}
+            </tr>`,
+        )}
+      </tbody>
+    </table>
+  </div>`;
+
+/** "8.2 pF", or "8.2 pF + 1 pF in parallel" */
+function ordered({ parts: all }: Built, armIndex: number): string {
+  const its = all.filter((part) => part.armIndex === armIndex);
+  const pair = its[0]?.pair ?? null;
+  return `${its.map(orderedValue).join(' + ')}${pair === null ? '' : ` ${pair}`}`;
 }
 
 /** For a spreadsheet: one part a line, source side first, columns by tabs. */
-const partsText = (option: Option): string =>
-  option.arms.map((arm, index) => [option.designators[index], arm.arm, arm.part, partValue(arm)].join('\t')).join('\n');
+const partsText = ({ arms, designators, built }: Option): string =>
+  arms
+    .map((arm, index) =>
+      [designators[index], arm.arm, arm.part, partValue(arm), ...(built === null ? [] : [ordered(built, index)])].join(
+        '\t',
+      ),
+    )
+    .join('\n');
 
 declare global {
   interface HTMLElementTagNameMap {

@@ -87,6 +87,22 @@ export const styles = css`
     max-width: none;
   }
 
+  .real {
+    display: flex;
+    flex-wrap: wrap;
+    gap: 0 1.25rem;
+    max-width: none;
+    margin-top: 0.5rem;
+  }
+
+  .real .muted {
+    font-size: var(--small);
+  }
+
+  .real + dl {
+    margin-top: 0.125rem;
+  }
+
   dl {
     display: grid;
     grid-template-columns: repeat(auto-fill, minmax(8.25rem, 1fr));

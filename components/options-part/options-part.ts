@@ -2,15 +2,17 @@ import { LitElement, html, nothing, type PropertyValues, type TemplateResult } f
 import { customElement, property, state } from 'lit/decorators.js';
 import { live } from 'lit/directives/live.js';
 import { returnLossWords } from '../../src/design/words.ts';
-import type { Absent, Dossier, Option } from '../../src/dossier.ts';
+import type { Absent, Built, Dossier, Option } from '../../src/dossier.ts';
+import { formatFixed } from '../../src/quantity/format.ts';
 import type { Method } from '../../src/record/design-record.ts';
 import '../area-field/area-field.ts';
 import { base } from '../base/base.styles.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
-import { count, decibels, harmonics, partWords, unbroken } from '../base/words.ts';
+import { optionVerdict, realFigure } from '../base/real-figure.ts';
+import { builtPartWords, count, decibels, harmonics, partWords, stressWords, unbroken } from '../base/words.ts';
 import '../method-fields/method-fields.ts';
-import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { verdictStyles } from '../verdict-mark/verdict-mark.ts';
 import { styles } from './options-part.styles.ts';
 import { thumbnail } from './thumbnail.ts';
 
@@ -139,7 +141,7 @@ export class OptionsPart extends LitElement {
           <label class="title" for="network-${option.id}">${option.title}</label>
           ${option.id === proposed ? html`<span class="tag">proposed</span>` : nothing}
           ${option.id === chosen && chosenBy !== 'proposal' ? html`<span class="tag">${chosenBy === 'engineer' ? 'chosen' : 'nearest'}</span>` : nothing}
-          <span id="verdict-${option.id}">${verdictMark(option.meets ? 'meets' : 'falls short')}</span>
+          <span id="verdict-${option.id}">${optionVerdict(option, this.dossier!.record.build !== null)}</span>
         </div>
         <p class="values">
           ${
@@ -209,8 +211,35 @@ function figures(option: Option, { record }: Dossier): TemplateResult {
             </div>`
       }
     </dl>
-    ${option.states.length < 2 ? nothing : states(option)}
+    ${option.states.length < 2 ? nothing : states(option)} ${record.build === null ? nothing : realFigures(option)}
     <p class="form">${option.form}, ${count(option.arms.length, 'part')}. DC: ${option.dc.words}.</p>`;
+}
+
+/** The same network of real parts. */
+function realFigures(option: Option): TemplateResult {
+  const rows: readonly (readonly [string, (built: Built) => string | null])[] = [
+    ['Worst return loss', ({ worstReturnLossDb }) => returnLossWords(worstReturnLossDb)],
+    ['Yield', (built) => (built.yield === null ? null : `${formatFixed(built.yield.value * 100, 1)} %`)],
+    ['Largest voltage', stressWords],
+    ['Loss', ({ lossDb }) => decibels(lossDb, 2)],
+  ];
+  return html`<p class="real">
+      <span class="muted">Real parts</span>
+      ${
+        option.built === null
+          ? realFigure(option, () => null)
+          : builtPartWords(option.built).map((words) => html`<span class="value">${words}</span> `)
+      }
+    </p>
+    <dl>
+      ${rows.map(
+        ([name, figure]) =>
+          html`<div>
+            <dt>${name}</dt>
+            <dd>${realFigure(option, figure)}</dd>
+          </div>`,
+      )}
+    </dl>`;
 }
 
 /** Worst return loss into each state of the load. */

@@ -3,13 +3,14 @@ import { customElement, property } from 'lit/decorators.js';
 import { live } from 'lit/directives/live.js';
 import { returnLossWords } from '../../src/design/words.ts';
 import type { Dossier, Option } from '../../src/dossier.ts';
-import { formatQuantity } from '../../src/quantity/format.ts';
+import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
 import { base } from '../base/base.styles.ts';
 import { fieldChange } from '../base/field-change.ts';
 import { methodWords } from '../base/methods.ts';
+import { optionVerdict, realFigure } from '../base/real-figure.ts';
 import { table } from '../base/table.styles.ts';
-import { decibels } from '../base/words.ts';
-import { verdictMark, verdictStyles } from '../verdict-mark/verdict-mark.ts';
+import { decibels, stressWords } from '../base/words.ts';
+import { verdictStyles } from '../verdict-mark/verdict-mark.ts';
 
 /**
  * Many networks, one a line, by method; within one in the order of their size.
@@ -45,6 +46,22 @@ export class OptionsTable extends LitElement {
         background: var(--paper);
         box-shadow: inset 0 -1px 0 var(--ink);
         padding-top: 0.375rem;
+      }
+
+      .over th {
+        position: static;
+        padding-bottom: 0;
+        box-shadow: none;
+        border: 0;
+        text-align: center;
+        font-weight: 700;
+        color: var(--ink);
+      }
+
+      /* A rule between the figures of exact values and those of real parts. */
+      .first {
+        border-left: 1px solid var(--hairline);
+        padding-left: 0.75rem;
       }
 
       th,
@@ -108,11 +125,22 @@ export class OptionsTable extends LitElement {
 
   override render() {
     if (this.dossier === null) return nothing;
-    const { options } = this.dossier;
+    const { options, record } = this.dossier;
+    const real = record.build !== null;
     const methods = [...new Set(options.map(({ method }) => method))];
     return html`<div class="scroll" tabindex="0" role="radiogroup" aria-label="Choose a network">
-      <table>
+      <table class=${real ? 'real' : ''}>
         <thead>
+          ${
+            real
+              ? html`<tr class="over">
+                  <td colspan="2"></td>
+                  <th scope="colgroup" colspan="5">Exact values</th>
+                  <th scope="colgroup" colspan="4">Real parts</th>
+                  <td></td>
+                </tr>`
+              : nothing
+          }
           <tr>
             <th scope="col">Network</th>
             <th scope="col" class="number">Parts</th>
@@ -121,6 +149,14 @@ export class OptionsTable extends LitElement {
             <th scope="col" class="number">to</th>
             <th scope="col" class="number">Loss</th>
             <th scope="col" class="number">Att. 2<i>f</i><sub>0</sub></th>
+            ${
+              real
+                ? html`<th scope="col" class="number first">Worst return loss</th>
+                    <th scope="col" class="number">Yield</th>
+                    <th scope="col" class="number">Loss</th>
+                    <th scope="col" class="number">Largest voltage</th>`
+                : nothing
+            }
             <th scope="col">Verdict</th>
           </tr>
         </thead>
@@ -139,7 +175,7 @@ export class OptionsTable extends LitElement {
     const name = methodWords[method].words;
     return html`<tbody>
       <tr class="group">
-        <th scope="rowgroup" colspan="8">
+        <th scope="rowgroup" colspan=${this.dossier!.record.build === null ? 8 : 12}>
           ${name.charAt(0).toUpperCase()}${name.slice(1)}
           <span>${String(meeting)} of ${String(options.length)} meet${meeting === 1 ? 's' : ''} everything</span>
         </th>
@@ -149,7 +185,8 @@ export class OptionsTable extends LitElement {
   }
 
   private row(option: Option): TemplateResult {
-    const { chosen, proposed } = this.dossier!;
+    const { chosen, proposed, record } = this.dossier!;
+    const real = record.build !== null;
     const { lowHz, highHz } = option.halfPower;
     const second = option.harmonicDb[0]?.attenuationDb ?? null;
     const pick = () => this.dispatchEvent(fieldChange('choice', option.id));
@@ -168,7 +205,19 @@ export class OptionsTable extends LitElement {
       <td class="number">${highHz === null ? 'none' : formatQuantity(highHz, 'Hz')}</td>
       <td class="number">${decibels(option.lossDb, 2)}</td>
       <td class="number">${second === null ? 'no data' : decibels(second)}</td>
-      <td>${verdictMark(option.meets ? 'meets' : 'falls short')}</td>
+      ${
+        real
+          ? html`<td class="number first">
+                ${realFigure(option, (built) => returnLossWords(built.worstReturnLossDb))}
+              </td>
+              <td class="number">
+                ${realFigure(option, (built) => (built.yield === null ? null : `${formatFixed(built.yield.value * 100, 1)} %`))}
+              </td>
+              <td class="number">${realFigure(option, (built) => decibels(built.lossDb, 2))}</td>
+              <td class="number">${realFigure(option, stressWords)}</td>`
+          : nothing
+      }
+      <td>${optionVerdict(option, real)}</td>
     </tr>`;
   }
 }

@@ -9,13 +9,14 @@ import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import { field } from '../base/field.styles.ts';
 import '../copy-button/copy-button.ts';
 import '../text-field/text-field.ts';
-import { exportFile, recordFile, reportFile, save, type Paper } from './files.ts';
+import { save } from '../base/save.ts';
+import { exportFile, recordFile, reportFile, type Paper } from './files.ts';
 import { styles } from './record-part.styles.ts';
 
 const signers = ['prepared', 'checked', 'approved'] as const;
 
 /**
- * Part 7: what identifies the document, who signs it, and the ways in and out.
+ * Part 8: what identifies the document, who signs it, and the ways in and out.
  * @fires field-change  identity and sign-off
  * @fires open-file     detail: a File that the user picked
  */
@@ -27,6 +28,8 @@ export class RecordPart extends LitElement {
   @property({ attribute: false }) state: FieldState = emptyFieldState;
   /** The dossier is of an earlier entry: nothing may be issued from it. */
   @property({ type: Boolean }) stale = false;
+  /** How far real parts are worked out: nothing may be issued before they all are. */
+  @property() realParts: 'none' | 'at work' | 'stopped' | 'whole' = 'none';
   /** Outcome of opening a file, in one line. */
   @property() opened = '';
   /** Address that holds the whole sheet. */
@@ -58,7 +61,7 @@ export class RecordPart extends LitElement {
           <legend class="unseen">Paper</legend>
           ${(['a4', 'letter'] as const).map((paper) => this.sheetOf(paper))}
         </fieldset>
-        <button type="button" class="main" aria-disabled=${this.stale} @click=${this.report}>
+        <button type="button" class="main" aria-disabled=${!this.whole()} @click=${this.report}>
           Download the report (PDF)
         </button>
       </div>
@@ -71,10 +74,10 @@ export class RecordPart extends LitElement {
         <copy-button label="Copy a link to this sheet" .text=${this.link}></copy-button>
       </div>
       <div class="actions">
-        <button type="button" aria-disabled=${this.stale} @click=${() => this.export('s2p')}>
+        <button type="button" aria-disabled=${!this.whole()} @click=${() => this.export('s2p')}>
           Download the network (.s2p)
         </button>
-        <button type="button" aria-disabled=${this.stale} @click=${() => this.export('csv')}>
+        <button type="button" aria-disabled=${!this.whole()} @click=${() => this.export('csv')}>
           Download the sweep (CSV)
         </button>
       </div>
@@ -109,7 +112,7 @@ export class RecordPart extends LitElement {
   }
 
   private async report() {
-    if (!this.ready()) return;
+    if (!this.ready() || !this.builtReady()) return;
     const { dossier, paper } = this;
     this.said = 'Writing the report…';
     try {
@@ -128,7 +131,7 @@ export class RecordPart extends LitElement {
   }
 
   private async export(kind: 's2p' | 'csv') {
-    if (!this.ready()) return;
+    if (!this.ready() || !this.builtReady()) return;
     const dossier = this.dossier!;
     const file = await exportFile(dossier, kind);
     if (file === null) this.said = 'There is no network to save.';
@@ -149,6 +152,20 @@ export class RecordPart extends LitElement {
           : `Nothing is issued until every entry can be read. ${problem}`;
     }
     return ready;
+  }
+
+  private whole(): boolean {
+    return !this.stale && (this.realParts === 'none' || this.realParts === 'whole');
+  }
+
+  /** Says why nothing is issued while real parts are on their way. */
+  private builtReady(): boolean {
+    if (this.whole()) return true;
+    this.said =
+      this.realParts === 'stopped'
+        ? 'Nothing is issued until every network is worked out with real parts: work out the rest in part 7.'
+        : 'Nothing is issued while real parts are being worked out.';
+    return false;
   }
 
   private pick(event: Event) {

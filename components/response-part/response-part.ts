@@ -75,12 +75,13 @@ export class ResponsePart extends LitElement {
     requirement: DesignRecord['requirement'],
   ): TemplateResult {
     const { size } = this;
-    const of = [responses, size];
+    const real = this.dossier?.record.build == null ? null : (option.built?.percentiles ?? 'awaited');
+    const of = [responses, size, real];
     const { spanHz } = responses[0]!;
     return html`
       ${this.plot(
         spanHz,
-        guard(of, () => drawing(returnLossPlot(responses, requirement, size))),
+        guard(of, () => drawing(returnLossPlot(responses, requirement, size, real))),
       )}
       ${this.plot(
         spanHz,

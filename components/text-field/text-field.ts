@@ -20,6 +20,8 @@ export class TextField extends LitElement {
   /** Visible and accessible name, with the symbol that the calculation uses for it. */
   @property() label = '';
   @property() symbol = '';
+  /** Said before the label to those who don't see where the field stands. */
+  @property() of = '';
   @property() value = '';
   /** What was read, in words; '' when there is nothing to say. */
   @property() understood = '';
@@ -30,7 +32,9 @@ export class TextField extends LitElement {
 
   override render() {
     return html`
-      <label for="input">${this.label}${this.symbol === '' ? nothing : html` ${symbol(this.symbol)}`}</label>
+      <label for="input"
+        >${this.of === '' ? nothing : html`<span class="unseen">${this.of}</span> `}${this.label}${this.symbol === '' ? nothing : html` ${symbol(this.symbol)}`}</label
+      >
       <input
         id="input"
         autocomplete="off"

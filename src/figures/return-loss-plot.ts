@@ -8,6 +8,7 @@ import { curveNumbers } from './curve-numbers.ts';
 import type { Figure, Shape } from './figure.ts';
 import { designMark } from './design-mark.ts';
 import { hatch } from './hatch.ts';
+import { realCurves, realKeys, realWords, type RealCurves } from './real-curves.ts';
 import { smoothReturnLoss } from './smooth-return-loss.ts';
 import { described, stateKeys, stateStroke } from './states.ts';
 
@@ -20,11 +21,13 @@ const edge = { stroke: 'limit', width: stroke.thin } as const;
  * the return loss asked for.
  *
  * @param responses one a load state, one at least, over the same frequencies; the governing one first
+ * @param real      how real parts do, in the governing state: the nominal curve dashed, in the band that most stay in
  */
 export function returnLossPlot(
   responses: readonly Response[],
   requirement: DesignRecord['requirement'],
   size: Size = chartSize,
+  real: RealCurves = null,
 ): Figure {
   const needed = requirement.returnLossDb;
   const { spanHz } = responses[0]!;
@@ -43,7 +46,10 @@ export function returnLossPlot(
           sample: (x, y, X, Y) => [hatch(x, y, X, Y, 3.5), rectangle(x, y, X - x, Y - y, edge)],
         };
   const axisTitle = `Return loss, dB (larger is better${cut})`;
-  const frame = chartFrame(size, spanHz, { low: 0, high }, axisTitle, key, stateKeys(responses));
+  const frame = chartFrame(size, spanHz, { low: 0, high }, axisTitle, key, [
+    ...stateKeys(responses),
+    ...realKeys(real, responses.length > 1),
+  ]);
   const shapes: Shape[] = [...frame.shapes];
   let limit = 'No return loss is required.';
 
@@ -62,6 +68,7 @@ export function returnLossPlot(
         : `from ${formatRead(band.low, 'Hz')} to ${formatRead(band.high, 'Hz')}.`);
   }
   shapes.push(...designMark(frame, requirement.frequencyHz));
+  shapes.push(...realCurves(frame, real));
   responses.forEach((response, k) => {
     const { hertz, decibels } = smoothReturnLoss(response);
     const d = curve(frame, hertz, decibels);
@@ -76,6 +83,6 @@ export function returnLossPlot(
   const between = described(responses, ({ returnLossDb }) => returnLossDb);
   const description =
     `Return loss from ${formatQuantity(spanHz.low, 'Hz')} to ${formatQuantity(spanHz.high, 'Hz')}: ` +
-    `${between}. ${limit}`;
+    `${between}. ${limit}${realWords(real)}`;
   return { width: size.width, height: frame.height, title, description, shapes };
 }

@@ -28,11 +28,19 @@ const [fewestDigits, mostDigits] = [4, 12];
  */
 export function dossierDifference(before: Dossier, after: Dossier): readonly Change[] {
   const [old, now] = [findingsOf(before), findingsOf(after)];
-  const names = [...new Set([...now.keys(), ...old.keys()])];
-  return names
+  return merged([...old.keys()], [...now.keys()])
     .map((what) => changeOf(what, old.get(what), now.get(what)))
     .filter((change) => change !== null)
     .toSorted((a, b) => Number(a.group === 'verdicts') - Number(b.group === 'verdicts'));
+}
+
+/** The later names in their order, and after the name before it each one that is gone. */
+function merged(before: readonly string[], after: readonly string[]): readonly string[] {
+  const names = [...after];
+  for (const [k, name] of before.entries()) {
+    if (!names.includes(name)) names.splice(k === 0 ? 0 : names.indexOf(before[k - 1]!) + 1, 0, name);
+  }
+  return names;
 }
 
 function changeOf(what: string, before: Finding | undefined, after: Finding | undefined): Change | null {

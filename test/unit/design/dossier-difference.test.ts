@@ -55,8 +55,8 @@ describe('dossierDifference(before, after)', () => {
       ),
     ).toEqual([
       'results / Network: Series L, shunt C -> Series C',
-      'results / C1, exact: 43.71 pF across -> 10.00 pF in series',
       'results / L1, exact: 84.63 nH in series -> none',
+      'results / C1, exact: 43.71 pF across -> 10.00 pF in series',
       'verdicts / Network proposed: Series L, shunt C -> Series C',
     ]);
   });

@@ -50,7 +50,8 @@ export function centreValues(problem: CentreProblem, start: readonly number[], l
     middle: Math.log(low * high) / 2,
     half: Math.max(Math.log(high / low) / 2, 1e-12),
   }));
-  const inside = start.map((value, k) => Math.min(limits[k]!.high, Math.max(limits[k]!.low, value)));
+  const within = (value: number, k: number): number => Math.min(limits[k]!.high, Math.max(limits[k]!.low, value));
+  const inside = start.map(within);
   const all = new RealMismatch(problem, start.length);
   const few = new RealMismatch({ ...problem, states: problem.states.map(thinned) }, start.length);
   let best = { values: inside, level: all.worst(inside) };
@@ -67,7 +68,7 @@ export function centreValues(problem: CentreProblem, start: readonly number[], l
       x,
       steps,
     );
-    const values = Array.from(x, (t, k) => Math.exp(fromInside(t, bounds[k]!)));
+    const values = Array.from(x, (t, k) => within(Math.exp(fromInside(t, bounds[k]!)), k));
     const level = all.worst(values);
     if (level < best.level) best = { values, level };
   }

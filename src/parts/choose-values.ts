@@ -36,7 +36,11 @@ const fewTries = 1e4;
 export function* chooseValues(choice: ValueChoice): Generator<void, readonly ValueSet[]> {
   const { candidates, centre, keep } = choice;
   const search = new BoxSearch(choice, Math.max(keep, leaders));
-  const lists = boxAbout(choice);
+  const lists = boxAbout(
+    choice,
+    candidates.map((parts) => [...parts.keys()]),
+    sets,
+  );
   const whole = lists.every((list, k) => list.length === candidates[k]!.length);
   search.search(candidates.map((parts, k) => [nearest(parts, centre[k]!)]));
   yield* climb(
@@ -54,20 +58,29 @@ export function* chooseValues(choice: ValueChoice): Generator<void, readonly Val
   return search.best.slice(0, keep);
 }
 
-/** The candidates nearest to the centre by ratio, over all arms, as long as their product stays small. */
-function boxAbout({ candidates, centre }: ValueChoice): number[][] {
-  const byDistance = candidates
-    .flatMap((parts, arm) =>
-      parts.map(({ value }, pick) => ({ arm, pick, distance: Math.abs(Math.log(value / centre[arm]!)) })),
+/**
+ * The candidates nearest to the centre by ratio, over all arms, as long as their product stays small.
+ *
+ * @param lists for each arm the candidates considered, one or more
+ * @returns the same, fewer where there are too many
+ */
+export function boxAbout(
+  { candidates, centre }: ValueChoice,
+  lists: readonly (readonly number[])[],
+  most: number,
+): number[][] {
+  const byDistance = lists
+    .flatMap((list, arm) =>
+      list.map((pick) => ({ arm, pick, distance: Math.abs(Math.log(candidates[arm]![pick]!.value / centre[arm]!)) })),
     )
     .sort((a, b) => a.distance - b.distance);
-  const lists: number[][] = candidates.map(() => []);
+  const box: number[][] = lists.map(() => []);
   for (const { arm, pick } of byDistance) {
-    const product = lists.reduce((sum, { length }, k) => sum * (k === arm ? length + 1 : Math.max(1, length)), 1);
-    if (product <= sets || lists[arm]!.length === 0) lists[arm]!.push(pick);
+    const product = box.reduce((all, { length }, k) => all * (k === arm ? length + 1 : Math.max(1, length)), 1);
+    if (product <= most || box[arm]!.length === 0) box[arm]!.push(pick);
   }
-  for (const list of lists) list.sort((a, b) => a - b);
-  return lists;
+  for (const list of box) list.sort((a, b) => a - b);
+  return box;
 }
 
 /** A box in pieces, each with one candidate of the two arms nearest to the load that vary. */

@@ -1,20 +1,24 @@
-import type { Dossier, Option } from './dossier.ts';
+import type { Dossier, Evidence, Option } from './dossier.ts';
 import { assumptionsOf } from './design/assumptions.ts';
 import { cautionsOf } from './design/cautions.ts';
 import { ceilingOf } from './design/ceiling.ts';
 import { fittedNetworks, type FitControl, type FitStep } from './design/fitted.ts';
+import { choose, heldDb } from './design/choose.ts';
 import { closedForms, type FoundCandidate } from './design/method.ts';
 import { minimumWords } from './design/minimum.ts';
 import { assess, assessor } from './design/option.ts';
 import { checkReach, reachOf } from './design/reach.ts';
 import { referencesOf } from './design/references.ts';
+import { realSteps, type DesignStep } from './design/real-parts.ts';
 import { responseOf } from './design/response.ts';
+import { statesOf } from './design/states-of.ts';
 import { sectionTable } from './design/section-table.ts';
 import { evidence } from './evidence/evidence.ts';
+import { builtEvidence } from './evidence/built-evidence.ts';
+import { endsOver } from './network/sweep.ts';
 import { terminationAt } from './network/termination-at.ts';
-import { InputError } from './quantity/problem.ts';
 import { digestOf } from './record/canonical.ts';
-import type { DesignRecord } from './record/design-record.ts';
+import type { DesignRecord, LoadState } from './record/design-record.ts';
 import { equalRipple } from './synthesis/equal-ripple.ts';
 import { leastQ } from './synthesis/pi-tee.ts';
 import { targetOf } from './synthesis/target.ts';
@@ -30,7 +34,8 @@ export function design(record: DesignRecord): Dossier {
 }
 
 /**
- * The same for a record that doesn't take long; whoever calls only this needs none of the methods that do.
+ * The same for a record that doesn't take long, as exact values have it; whoever calls only this needs none of the
+ * methods that do.
  *
  * @throws RangeError for one that does
  */
@@ -39,7 +44,7 @@ export function designAtOnce(record: DesignRecord): Dossier {
   return finish(dossierSteps(record, none));
 }
 
-function finish(steps: Generator<FitStep, Dossier>): Dossier {
+function finish(steps: Generator<DesignStep, Dossier>): Dossier {
   for (;;) {
     const step = steps.next();
     if (step.done === true) return step.value;
@@ -48,21 +53,35 @@ function finish(steps: Generator<FitStep, Dossier>): Dossier {
 
 const isSearched = ({ method }: DesignRecord): boolean => method === 'fitted' || method === 'all';
 
-/** Whether a record takes more than a keystroke allows, up to seconds: such a one belongs in a worker. */
+/** Whether exact values take more than a keystroke allows, up to seconds: such a record belongs in a worker. */
 export const takesLong = (record: DesignRecord): boolean => isSearched(record) || record.method === 'equal-ripple';
 
-/** The pipeline in pieces, for a caller that shows progress or stops a search: what it has then is kept. */
-export function designSteps(record: DesignRecord, control: FitControl): Generator<FitStep, Dossier> {
-  return dossierSteps(record, { equalRipple, search: (starts) => fittedNetworks(record, starts, control) });
+export type { DesignStep } from './design/real-parts.ts';
+
+/** The pipeline in pieces, for a caller that shows progress or stops it: what it has then is kept. */
+export function designSteps(record: DesignRecord, control: FitControl): Generator<DesignStep, Dossier> {
+  return dossierSteps(record, {
+    equalRipple,
+    search: (starts) => fittedNetworks(record, starts, control),
+    real: { steps: realSteps, evidence: builtEvidence, control },
+  });
 }
 
 /** Finds fitted networks, from closed forms to start with. */
 export type Search = (starts: readonly FoundCandidate[]) => Generator<FitStep, readonly FoundCandidate[]>;
 
 /** The methods that take long. */
-interface LongMethods {
+export interface LongMethods {
   readonly equalRipple: typeof equalRipple;
   readonly search: Search;
+  /** Real parts; null: exact values alone. */
+  readonly real: RealMethods | null;
+}
+
+export interface RealMethods {
+  readonly steps: typeof realSteps;
+  readonly evidence: typeof builtEvidence;
+  readonly control: FitControl;
 }
 
 const none: LongMethods = {
@@ -70,67 +89,90 @@ const none: LongMethods = {
   *search() {
     return [];
   },
+  real: null,
 };
 
 /** The pipeline with a search of the caller's: one that remembers, where only what doesn't touch it has changed. */
-export function* dossierSteps(record: DesignRecord, methods: LongMethods): Generator<FitStep, Dossier> {
+export function* dossierSteps(record: DesignRecord, methods: LongMethods): Generator<DesignStep, Dossier> {
   const f0 = record.requirement.frequencyHz;
   const reach = reachOf(record);
   checkReach(record, reach);
   const load = terminationAt(record.loads[0]!.termination, f0, f0);
   const target = targetOf(terminationAt(record.source, f0, f0), record.aim);
   const { candidates, absent } = closedForms(record, target, load, methods.equalRipple);
-  const fitted = isSearched(record) ? yield* methods.search(candidates) : [];
+  const fitted = isSearched(record) ? yield* fitSteps(methods.search(candidates)) : [];
   const { ceiling, noCeiling } = ceilingOf(record);
   const judge = assessor(record, reach, ceiling);
   const found = [...candidates, ...fitted];
   const assessed = found.map((candidate) => assess(judge, candidate));
-  const options = listed(record, assessed);
-  const proposed = options.find(({ meets }) => meets);
-  const picked = pickedBy(record, options);
-  const chosen = picked ?? proposed ?? nearest(options);
-  const band = record.requirement.bandHz;
-  const states =
-    chosen === undefined
-      ? []
-      : record.loads.toSorted((a, b) => Number(b.name === chosen.worstState) - Number(a.name === chosen.worstState));
-  const checked =
-    chosen === undefined
-      ? null
-      : evidence(
-          states.map(({ termination }) => ({ arms: chosen.arms, source: record.source, load: termination, f0 })),
-          [...new Set(band === null ? [f0] : [f0, band.low, band.high])],
-          chosen.sections <= 1 && chosen.method !== 'fitted' && chosen.method !== 'equal-ripple',
-        );
   const kinds = (['pi', 'tee'] as const).filter((kind) => record.method === kind || record.method === 'all');
   const least = kinds.map((kind) => ({
     kind: kind === 'pi' ? ('Pi' as const) : ('T' as const),
     q: leastQ(kind, target, load),
   }));
-  return {
-    schema: 'ferrule-dossier/1',
-    version,
-    record,
-    digest: digestOf(record),
-    assumptions: assumptionsOf(record, least),
-    ceiling,
-    noCeiling,
-    options,
-    absent: absent.map(({ form, why }) => ({ form, why })),
-    minimum: minimumWords(record, options),
-    sections:
-      record.method === 'cascade' || record.method === 'equal-ripple' ? sectionTable(record, found, assessed) : null,
-    proposed: proposed?.id ?? null,
-    chosen: chosen?.id ?? null,
-    chosenBy: picked !== undefined ? 'engineer' : proposed !== undefined ? 'proposal' : 'nearest',
-    responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen, reach)),
-    evidence: checked,
-    cautions: cautionsOf(record, chosen),
-    references: referencesOf(record, {
-      ceiling: ceiling !== null,
-      pairChecked: checked?.routes.some(({ name }) => name === 'Q method') ?? false,
-    }),
+  const whole = (options: readonly Option[]): Dossier => {
+    const { proposed, chosen, chosenBy } = choose(record, options);
+    const states = chosen === undefined ? [] : statesOf(record, chosen);
+    const checked = chosen === undefined ? null : evidenceOf(record, chosen, states, methods.real);
+    return {
+      schema: 'ferrule-dossier/1',
+      version,
+      record,
+      digest: digestOf(record),
+      assumptions: assumptionsOf(record, least),
+      ceiling,
+      noCeiling,
+      options,
+      absent: absent.map(({ form, why }) => ({ form, why })),
+      minimum: minimumWords(record, options),
+      sections:
+        record.method === 'cascade' || record.method === 'equal-ripple' ? sectionTable(record, found, assessed) : null,
+      proposed: proposed?.id ?? null,
+      chosen: chosen?.id ?? null,
+      chosenBy,
+      responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen, reach)),
+      evidence: checked,
+      cautions: cautionsOf(record, chosen),
+      references: referencesOf(record, {
+        ceiling: ceiling !== null,
+        pairChecked: checked?.routes.some(({ name }) => name === 'Q method') ?? false,
+        real: chosen?.built != null,
+      }),
+    };
   };
+  const exact = whole(listed(record, assessed));
+  const { build } = record;
+  if (build === null || methods.real === null) return exact;
+  yield { kind: 'dossier', dossier: exact };
+  return whole(yield* methods.real.steps(record, build, exact, reach, methods.real.control));
+}
+
+function* fitSteps(search: ReturnType<Search>): Generator<DesignStep, readonly FoundCandidate[]> {
+  for (;;) {
+    const step = search.next();
+    if (step.done === true) return step.value;
+    yield { kind: 'fit', step: step.value };
+  }
+}
+
+function evidenceOf(
+  { source, requirement }: DesignRecord,
+  { arms, sections, method, built }: Option,
+  states: readonly LoadState[],
+  real: RealMethods | null,
+): Evidence {
+  const { frequencyHz: f0, bandHz, powerW } = requirement;
+  const frequencies = [...new Set(bandHz === null ? [f0] : [f0, bandHz.low, bandHz.high])];
+  const exact = evidence(
+    states.map(({ termination }) => ({ arms, source, load: termination, f0 })),
+    frequencies,
+    sections <= 1 && method !== 'fitted' && method !== 'equal-ripple',
+  );
+  if (built === null || real === null) return exact;
+  const grid = Float64Array.from(frequencies);
+  const ends = states.map(({ termination }) => endsOver(source, termination, f0, grid));
+  const checks = [...exact.checks, ...real.evidence(built.ladder, ends, f0, powerW ?? 1)];
+  return { ...exact, checks, pass: checks.every(({ pass }) => pass) };
 }
 
 /** The networks that the list shows, in its order: of all methods together, those of fewest parts come first. */
@@ -143,30 +185,6 @@ function listed({ method, sections }: DesignRecord, assessed: readonly Option[])
       (option.method !== 'cascade' && option.method !== 'equal-ripple'),
   );
   if (method !== 'all') return asked;
-  const byReturnLoss = (a: Option, b: Option): number => (b.worstReturnLossDb ?? 0) - (a.worstReturnLossDb ?? 0);
+  const byReturnLoss = (a: Option, b: Option): number => heldDb(b) - heldDb(a);
   return asked.toSorted((a, b) => a.arms.length - b.arms.length || byReturnLoss(a, b));
-}
-
-function pickedBy({ selection }: DesignRecord, options: readonly Option[]): Option | undefined {
-  if (selection.option === null) return undefined;
-  const picked = options.find(({ id }) => id === selection.option);
-  if (picked !== undefined) return picked;
-  const some = options.slice(0, 6).map(({ id }) => id);
-  throw new InputError({
-    field: 'choice',
-    read: selection.option,
-    why: 'no such network for these terminations',
-    would:
-      some.length === 0
-        ? 'leave the choice open'
-        : `choose one of ${some.join(', ')}${options.length > 6 ? ', …' : ''}`,
-  });
-}
-
-/** The option with the fewest shortfalls; of those, the one with the best worst return loss. */
-function nearest(options: readonly Option[]): Option | undefined {
-  const shortfalls = ({ checks }: Option): number => checks.filter(({ verdict }) => verdict === 'falls short').length;
-  return options.toSorted(
-    (a, b) => shortfalls(a) - shortfalls(b) || (b.worstReturnLossDb ?? 0) - (a.worstReturnLossDb ?? 0),
-  )[0];
 }

@@ -49,6 +49,8 @@ const policy = [
   "frame-ancestors 'none'",
   "img-src 'self' data:",
   "object-src 'none'",
+  // The worker that draws networks writes its own loop as WebAssembly.
+  "script-src 'self' 'wasm-unsafe-eval'",
 ].join('; ');
 
 const always = {

@@ -1,6 +1,7 @@
 import { chosenTwoPort, sweepCsv } from '../design/exports.ts';
 import { design } from '../design.ts';
 import { InputError } from '../quantity/problem.ts';
+import { flatOptions } from './flat-options.ts';
 import { readArguments } from './read-arguments.ts';
 import { run } from './run.ts';
 import { writeFile } from './write-file.ts';
@@ -29,5 +30,5 @@ await run((args) => {
     }
     writeFile(`--${option}`, file, text);
   }
-  return `${JSON.stringify(dossier, null, 1)}\n`;
+  return `${JSON.stringify(flatOptions(dossier), null, 1)}\n`;
 });

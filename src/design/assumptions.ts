@@ -1,6 +1,7 @@
 import { isOneImpedance } from '../network/termination.ts';
 import { formatFixed, formatRead } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
+import { buildAssumptions } from './build-assumptions.ts';
 import { openQ } from './method.ts';
 import { behaviourWords } from './words.ts';
 
@@ -28,8 +29,12 @@ export function assumptionsOf(
     aim === 'conjugate'
       ? `Aim: conjugate. At the design frequency the source is to see ZS*, and all available power is delivered.${sameAim}`
       : `Aim: reflectionless. At the design frequency the source is to see ZS, so that no wave returns.${sameAim}`,
-    'Parts are ideal: lossless, of exact value, without strays. Tolerance, stress and heat are not assessed here.',
-    `The loss figure alone takes inductors with Q ${String(partQ.inductor)} and capacitors with Q ${String(partQ.capacitor)} at the design frequency.`,
+    ...(record.build === null
+      ? [
+          'Parts are ideal: lossless, of exact value, without strays. Tolerance, stress and heat are not assessed here.',
+          `The loss figure alone takes inductors with Q ${String(partQ.inductor)} and capacitors with Q ${String(partQ.capacitor)} at the design frequency.`,
+        ]
+      : buildAssumptions(record, record.build)),
     ...least.map(
       ({ kind, q }) =>
         `${kind} networks exist for every Q of ${formatFixed(q, 3)} or more at the steeper end; ${

@@ -14,7 +14,17 @@ const slackDb = 1e-9;
 /** Whether a return loss is at least the one asked for, dB. */
 export const holds = (foundDb: number, askedDb: number): boolean => foundDb >= askedDb - slackDb;
 
-/** One verdict per thing required, with its reason in words. What isn't required isn't assessed. */
+/** The verdict on all of them, with the reasons why a network falls short; when it meets everything, what it meets. */
+export function verdictOf(checks: readonly Check[]): { readonly meets: boolean; readonly reasons: readonly string[] } {
+  const short = checks.filter(({ verdict }) => verdict === 'falls short');
+  return { meets: short.length === 0, reasons: (short.length === 0 ? checks : short).map(({ reason }) => reason) };
+}
+
+/**
+ * One verdict per thing required, with its reason in words. What isn't required isn't assessed.
+ *
+ * @param which of whose return loss it speaks: "with real parts "
+ */
 export function checksOf(
   { requirement, aim }: DesignRecord,
   arms: readonly Arm[],
@@ -22,6 +32,7 @@ export function checksOf(
   worst: Worst,
   state: string,
   dc: DcPath,
+  which = '',
 ): Check[] {
   const checks: Check[] = [];
   const add = (subject: Check['subject'], good: boolean, reason: string): void => {
@@ -37,7 +48,7 @@ export function checksOf(
     add(
       'return loss',
       good,
-      `return loss${kind} ${shown} at worst (${formatQuantity(worst.atHz, 'Hz', 5)}${state === '' ? '' : `, ${state}`}), ${good ? 'at least' : 'below'} the ${asked} required`,
+      `return loss${kind} ${which}${shown} at worst (${formatQuantity(worst.atHz, 'Hz', 5)}${state === '' ? '' : `, ${state}`}), ${good ? 'at least' : 'below'} the ${asked} required`,
     );
   }
   if (requirement.blockDc) {

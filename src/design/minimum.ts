@@ -13,7 +13,9 @@ export function minimumWords({ requirement }: DesignRecord, options: readonly Op
   }
   if (options.length === 0) return 'No network was found.';
   const asked = requirement.returnLossDb;
-  const found = options.map(({ worstReturnLossDb }) => worstReturnLossDb).filter((db) => db !== null);
+  const found = options
+    .map(({ built, worstReturnLossDb }) => built?.worstReturnLossDb ?? worstReturnLossDb)
+    .filter((db) => db !== null);
   if (asked === null || found.length === 0) return 'No network meets everything.';
   const best = Math.max(...found);
   const [bestWords, askedWords] = decibelPair(best, asked);

@@ -14,7 +14,7 @@ import type { Span } from '../quantity/span.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { bandSweeper, type BandFigures, type BandSweeper } from './band-figures.ts';
 import { bandwidthNote } from './bandwidth-note.ts';
-import { checksOf } from './checks.ts';
+import { checksOf, verdictOf } from './checks.ts';
 import type { FoundCandidate } from './method.ts';
 import { dcWords } from './words.ts';
 
@@ -64,7 +64,6 @@ export function assess({ record, reach, ceiling, states }: Assessor, candidate: 
   const bandwidthFromQHz = loadedQ === null ? null : f0 / loadedQ;
   const worst = figures.worst ?? { gammaSquared: state.reflection ** 2, atHz: f0 };
   const checks = checksOf(record, arms, designators, worst, state.name, dc);
-  const short = checks.filter(({ verdict }) => verdict === 'falls short');
   const { name, ...figuresOfWorst } = state;
   const ceilingDb = ceiling === null ? null : returnLossDb(ceiling.bestReflection ** 2);
   return {
@@ -90,9 +89,8 @@ export function assess({ record, reach, ceiling, states }: Assessor, candidate: 
     ),
     dc: { ...dc, words: dcWords(dc) },
     built: null,
-    meets: short.length === 0,
     checks,
-    reasons: (short.length === 0 ? checks : short).map(({ reason }) => reason),
+    ...verdictOf(checks),
     cautions: rulesOfThumb(arms, designators, dc, sectionQ),
   };
 }

@@ -1,6 +1,6 @@
 import type { Reference } from '../dossier.ts';
 import { isMeasured } from '../network/termination.ts';
-import type { DesignRecord, Method } from '../record/design-record.ts';
+import type { Build, DesignRecord, Method } from '../record/design-record.ts';
 
 const gonzalez: Reference = {
   title: 'G. Gonzalez, Microwave Transistor Amplifiers, 2nd ed., Prentice Hall 1997, ch. 2',
@@ -33,10 +33,33 @@ const ofMethod: Readonly<Record<Method, readonly Reference[]>> = {
   all: [gonzalez, piTee, cascade, matthaei, fitted],
 };
 
+/** Standards and methods of real parts that this policy applies. */
+function ofBuild({ inductor, capacitor, seed }: Build, yieldAssessed: boolean): readonly Reference[] {
+  const isSeries = (origin: string): boolean => /^E\d+$/u.test(origin);
+  const kinds = [inductor, capacitor];
+  return [
+    ...(kinds.some(({ origin }) => isSeries(origin))
+      ? [{ title: 'IEC 60063:2015', appliedFor: 'preferred values of the parts' }]
+      : []),
+    { title: 'JCGM 101:2008', appliedFor: `networks drawn from the tolerances (seed ${String(seed)})` },
+    {
+      title: 'J. K. Salmon et al., Proc. SC 2011 (Philox4x32-10)',
+      appliedFor: 'the numbers that they are drawn with',
+    },
+    ...(yieldAssessed
+      ? [{ title: 'C. J. Clopper and E. S. Pearson, Biometrika 26, 1934', appliedFor: 'interval of the yield' }]
+      : []),
+    {
+      title: 'H. A. Wheeler, Proc. IRE 16, 1928; R. G. Medhurst, Wireless Engineer 24, 1947',
+      appliedFor: 'coils to be wound: turns and self-capacitance',
+    },
+  ];
+}
+
 /** Standards and published methods really applied to this record, each with what it was applied for. */
 export function referencesOf(
-  { method, source, loads }: DesignRecord,
-  { ceiling, pairChecked }: { readonly ceiling: boolean; readonly pairChecked: boolean },
+  { method, source, loads, build, requirement }: DesignRecord,
+  { ceiling, pairChecked, real }: { readonly ceiling: boolean; readonly pairChecked: boolean; readonly real: boolean },
 ): Reference[] {
   const measured = [source, ...loads.map(({ termination }) => termination)].filter(isMeasured);
   const touchstone = measured.some(({ measured: { name } }) => /\.s\d+p\b/iu.test(name));
@@ -60,6 +83,7 @@ export function referencesOf(
         ]
       : []),
     ...(touchstone ? [{ title: 'Touchstone, IBIS Open Forum', appliedFor: 'measured data' }] : []),
+    ...(build !== null && real ? ofBuild(build, requirement.returnLossDb !== null) : []),
     {
       title: 'D. M. Pozar, Microwave Engineering, 4th ed., Wiley 2012, ch. 4 and 12',
       appliedFor: 'S-parameters of the arms and transducer gain (third route of the evidence)',

@@ -1,3 +1,4 @@
+import type { Yield } from '../evidence/tolerance-figures.ts';
 import type { DcPath } from '../network/dc-path.ts';
 import { modelWords } from '../network/read-model.ts';
 import { isMeasured, isModel, type MeasuredTermination, type Termination } from '../network/termination.ts';
@@ -56,4 +57,10 @@ function measuredWords(end: string, { measured }: MeasuredTermination): string {
       ? ''
       : ` ${String(frequencyHz.length)} samples of them are used; the curve through these passes every other within ${thinningError < 1e-4 ? '0.0001' : formatFixed(thinningError, 4)} in Γ.`;
   return `The ${end} is measured: ${name}, SHA-256 ${sha256.slice(0, 16)}…, ${String(samples)} samples, ${span}; Γ is interpolated between samples and never extrapolated.${thinned}`;
+}
+
+/** "93.2 % (91.4 to 94.7 %, 95 % confidence, 1000 networks, seed 1)". */
+export function yieldWords({ value, low, high, confidence, samples, seed }: Yield): string {
+  const percent = (fraction: number): string => formatFixed(fraction * 100, 1);
+  return `${percent(value)} % (${percent(low)} to ${percent(high)} %, ${String(confidence * 100)} % confidence, ${String(samples)} networks, seed ${String(seed)})`;
 }

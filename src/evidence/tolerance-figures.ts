@@ -10,7 +10,7 @@ export interface Yield {
   readonly seed: number;
 }
 
-/** Of each load state, in the order and over the frequencies of the dossier's responses. dB, at most 200. */
+/** Of each load state, by its name, over the frequencies of the dossier's responses. dB, at most 200. */
 export interface Percentiles {
   /** Fractions of networks: 0.05, 0.5, 0.95 */
   readonly fractions: readonly number[];

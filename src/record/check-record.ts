@@ -3,18 +3,54 @@ import { InputError, type Problem } from '../quantity/problem.ts';
 import type { DesignRecord } from './design-record.ts';
 import { recordSchema } from './schema.ts';
 
+/** Most problems told at once; a file made to do harm could have as many as it has values. */
+const mostProblems = 100;
+
 /**
  * A value as a design record.
  *
- * @throws InputError with one problem per field that can't be used
+ * @throws InputError with one problem per field that can't be used, 100 at most; of another document, that it is one
  */
 export function checkRecord(value: unknown): DesignRecord {
-  const result = v.safeParse(recordSchema, value);
+  const misplaced = misplacedIn(value);
+  if (misplaced !== null) throw new InputError(misplaced);
+  const result = v.safeParse(recordSchema, value, { abortPipeEarly: true });
   if (result.success) return result.output;
-  const problems = result.issues.map(problemOf);
-  // One problem a field: a second check on the same value says nothing new.
-  throw new InputError(...problems.filter(({ field }, k) => problems.findIndex((p) => p.field === field) === k));
+  const problems = new Map<string, Problem>();
+  for (const issue of result.issues.length > mostProblems ? result.issues : issuesOf(value)) {
+    const problem = problemOf(issue);
+    // One problem a field: a second check on the same value says nothing new.
+    if (!problems.has(problem.field)) problems.set(problem.field, problem);
+    // What is no record of this schema needn't be told field by field.
+    if (problem.field === 'schema') throw new InputError(problem);
+    if (problems.size === mostProblems) break;
+  }
+  throw new InputError(...problems.values());
 }
+
+/**
+ * Those of rules between fields among them. The schema compares each with all before it once for every such rule, so
+ * that they are asked for only where they are few.
+ */
+const issuesOf = (value: unknown): readonly v.BaseIssue<unknown>[] => v.safeParse(recordSchema, value).issues ?? [];
+
+/** What is told before the schema is asked: it takes a list for an object, and goes down as deep as revisions do. */
+function misplacedIn(value: unknown): Problem | null {
+  if (Array.isArray(value)) {
+    return { field: 'record', read: 'a list', why: 'not an object', would: 'give the fields that the schema names' };
+  }
+  const earlier = inside(inside(value, 'previous'), 'previous');
+  if (earlier === null || earlier === undefined) return null;
+  return {
+    field: 'previous.previous',
+    read: '',
+    why: 'the revision before has one before it',
+    would: 'keep only the last',
+  };
+}
+
+const inside = (value: unknown, name: string): unknown =>
+  typeof value === 'object' && value !== null && Object.hasOwn(value, name) ? Reflect.get(value, name) : undefined;
 
 function problemOf(issue: v.BaseIssue<unknown>): Problem {
   const field = v.getDotPath(issue) ?? 'record';

@@ -162,7 +162,9 @@ function fromRecord(
     const field =
       fieldNames.find((name) => pathOf[name] === problem.field) ??
       fieldNames.find((name) => problem.field.startsWith(`${pathOf[name]}.`));
-    if (field === undefined || taken.has(field)) return [];
+    // What no field holds is told by its place in the record.
+    if (field === undefined) return [problem];
+    if (taken.has(field)) return [];
     taken.add(field);
     return [{ ...problem, field, read: fields[field] }];
   });

@@ -1,10 +1,11 @@
 import { InputError } from '../quantity/problem.ts';
 import { checkRecord } from './check-record.ts';
 import type { DesignRecord } from './design-record.ts';
+import { migrate, neededVersion } from './migrate.ts';
 import { repeatedName } from './repeated-name.ts';
 
 /** Largest record read, in characters: a hundred times what its fields can hold without being an attack. */
-const longest = 3_000_000;
+const longest = 8_000_000;
 
 /**
  * Reads a design record from its JSON text.
@@ -17,7 +18,7 @@ export function readRecord(text: string): DesignRecord {
       field: 'record',
       read: '',
       why: `${(text.length / 1e6).toFixed(1)} million characters are more than a record can have`,
-      would: 'give a design record of at most 3 million',
+      would: 'give a design record of at most 8 million',
     });
   }
   let value: unknown;
@@ -40,5 +41,7 @@ export function readRecord(text: string): DesignRecord {
       would: 'keep the one that is meant',
     });
   }
-  return checkRecord(value);
+  const later = neededVersion(value);
+  if (later !== null) throw new InputError(later);
+  return checkRecord(migrate(value));
 }

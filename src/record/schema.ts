@@ -254,6 +254,20 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     ['requirement', 'bandHz'],
   ),
   v.forward(
+    v.check(
+      ({ build, requirement: { returnLossDb } }) => build?.leastYield == null || returnLossDb !== null,
+      'a least yield is asked for, of networks that hold a return loss; give that too, or ask for no yield',
+    ),
+    ['requirement', 'returnLossDb'],
+  ),
+  v.forward(
+    v.check(
+      ({ selection: { option, set } }) => set === 1 || option !== null,
+      'a set of values belongs to a network; choose that too',
+    ),
+    ['selection', 'set'],
+  ),
+  v.forward(
     v.check(({ sweepHz, requirement: { frequencyHz } }) => {
       return sweepHz === null || (sweepHz.low <= frequencyHz && frequencyHz <= sweepHz.high);
     }, 'the sweep does not hold the design frequency; widen the sweep'),

@@ -1,5 +1,7 @@
 import { dossierSteps } from '../design.ts';
 import type { FitControl } from '../design/fitted.ts';
+import { realSteps } from '../design/real-parts.ts';
+import { builtEvidence } from '../evidence/built-evidence.ts';
 import { InputError } from '../quantity/problem.ts';
 import { equalRipple } from '../synthesis/equal-ripple.ts';
 import type { FromWorker, ToWorker } from './messages.ts';
@@ -28,7 +30,11 @@ const breathe = (): Promise<void> =>
 async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Promise<void> {
   const control: FitControl = { stopped: false };
   current = { id, control };
-  const steps = dossierSteps(record, { equalRipple, search: rememberedSearch(record, control) });
+  const steps = dossierSteps(record, {
+    equalRipple,
+    search: rememberedSearch(record, control),
+    real: { steps: realSteps, evidence: builtEvidence, control },
+  });
   try {
     let since = performance.now();
     for (;;) {
@@ -37,8 +43,11 @@ async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Prom
         say({ kind: 'done', id, dossier: step.value });
         return;
       }
+      const found = step.value;
+      if (found.kind === 'dossier') say({ kind: 'exact', id, dossier: found.dossier });
+      if (found.kind === 'option') say({ ...found, id });
       if (performance.now() - since < slice) continue;
-      say({ kind: 'progress', id, step: step.value });
+      if (found.kind === 'fit') say({ kind: 'progress', id, step: found.step });
       await breathe();
       if (current.id !== id) return;
       since = performance.now();

@@ -133,7 +133,7 @@ export const anyRecord = (mostQ = 1e3): fc.Arbitrary<DesignRecord> =>
         selection: fc.record({
           option: fc.constant<string | null>(null),
           reason: text(4000, true),
-          set: fc.constantFrom(1 as const, 2 as const, 3 as const),
+          set: fc.constant(1 as const),
         }),
         deviations: fc.array(fc.record({ subject: fc.constantFrom(...requirements), reason: text(4000) }), {
           maxLength: 3,
@@ -161,6 +161,8 @@ function agreeing(record: DesignRecord): DesignRecord {
   const real = (termination: Termination): Termination => ({ ...(termination as OneImpedance), x: 0 });
   return {
     ...record,
+    build:
+      record.build === null || requirement.returnLossDb !== null ? record.build : { ...record.build, leastYield: null },
     ...(method === 'resistive-pair'
       ? { source: real(source), loads: loads.map((state) => ({ ...state, termination: real(state.termination) })) }
       : {}),

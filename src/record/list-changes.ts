@@ -1,7 +1,7 @@
 import type { Change, ChangeGroup } from './change.ts';
 import { changeOf, none, type Statement } from './statement.ts';
 
-export const removed = 'removed';
+const removed = 'removed';
 
 /**
  * Between two lists of named things: what was added, removed and changed, and whether those that stayed stand in another

@@ -1,28 +1,5 @@
-import type { RealArm } from '../network/real-arm.ts';
-import type { Ends } from '../network/sweep.ts';
-import type { Aim } from '../network/termination.ts';
-import { fillImmittance } from './immittance-of.ts';
-
-/** What a search for values chooses from, and what for. */
-export interface ValueProblem {
-  /** For each arm, source side first, the real parts that it could be, ascending by value; one or more. */
-  readonly candidates: readonly (readonly RealArm[])[];
-  /** From every node to ground, F; 0: none. */
-  readonly strayF: number;
-  /** The same source over the same frequencies into each load state; one frequency where there is no band. */
-  readonly states: readonly Ends[];
-  /** Design frequency, Hz. */
-  readonly f0: number;
-  readonly aim: Aim;
-}
-
-/** One part for every arm. */
-export interface ValueSet {
-  /** Which of its arm's candidates each part is, source side first. */
-  readonly picks: readonly number[];
-  /** Largest |Γ|² over the frequencies and states given. */
-  readonly gammaSquared: number;
-}
+import { SetTable } from './set-table.ts';
+import type { ValueProblem, PickedSet } from './value-problem.ts';
 
 /** Frequencies at which sets are sifted; what passes is judged at all of them. */
 const siftedAt = 17;
@@ -42,8 +19,7 @@ export class BoxSearch {
   readonly #length: number;
   readonly #most: number;
   readonly #series: readonly boolean[];
-  /** Immittance of each candidate at all frequencies; worked out when first needed. */
-  readonly #rows: (Float64Array | undefined)[][];
+  readonly #table: SetTable;
   readonly #conjugate: boolean;
   /** Sifting points, every state's frequencies in turn: index of the frequency, stray susceptance, load. */
   readonly #at: Int32Array;
@@ -58,8 +34,9 @@ export class BoxSearch {
   #first = 0;
   readonly #picks: Int32Array;
   readonly #alive: Int32Array;
-  readonly #judged: Float64Array[] = [];
-  readonly #best: ValueSet[] = [];
+  /** Rows of the candidates of the first varying arm. */
+  #leaves: readonly Float64Array[] = [];
+  readonly #best: PickedSet[] = [];
 
   /** @param most how many of the best sets to keep */
   constructor(problem: ValueProblem, most: number) {
@@ -71,8 +48,8 @@ export class BoxSearch {
     this.#problem = problem;
     this.#length = n;
     this.#most = most;
-    this.#series = candidates.map(([part]) => part!.arm === 'series');
-    this.#rows = candidates.map((parts) => new Array<undefined>(parts.length).fill(undefined));
+    this.#table = new SetTable(problem);
+    this.#series = this.#table.series;
     this.#conjugate = aim === 'conjugate';
     this.#at = Int32Array.from({ length: points }, (_, p) =>
       samples === 1 ? 0 : Math.round(((p % samples) * (frequencyHz.length - 1)) / (samples - 1)),
@@ -90,7 +67,7 @@ export class BoxSearch {
   }
 
   /** Best first; of equal sets the one with the smaller values nearer to the source first. */
-  get best(): readonly ValueSet[] {
+  get best(): readonly PickedSet[] {
     return this.#best;
   }
 
@@ -104,20 +81,9 @@ export class BoxSearch {
       return;
     }
     this.#first = first;
+    this.#leaves = lists[first]!.map((pick) => this.#table.row(first, pick));
     this.#carryEnds();
     this.#descend(this.#length - 1);
-  }
-
-  #row(arm: number, pick: number): Float64Array {
-    const rows = this.#rows[arm]!;
-    const known = rows[pick];
-    if (known !== undefined) return known;
-    const { candidates, states, f0 } = this.#problem;
-    const { frequencyHz } = states[0]!;
-    const row = new Float64Array(2 * frequencyHz.length);
-    fillImmittance(candidates[arm]![pick]!, f0, frequencyHz, row);
-    rows[pick] = row;
-    return row;
   }
 
   /** S and D from the source on, through the arms before the first that varies. */
@@ -141,7 +107,7 @@ export class BoxSearch {
     let br = wr;
     let bi = wi;
     for (let k = 0; k < this.#first; k += 1) {
-      const row = this.#row(k, this.#picks[k]!);
+      const row = this.#table.row(k, this.#picks[k]!);
       const re = row[2 * f]!;
       const im = row[2 * f + 1]!;
       if (this.#series[k]!) {
@@ -170,7 +136,7 @@ export class BoxSearch {
     }
     for (const pick of this.#lists[arm]!) {
       this.#picks[arm] = pick;
-      const row = this.#row(arm, pick);
+      const row = this.#table.row(arm, pick);
       // The last step before the varying arm is taken point by point: most sets are refused at the first of them.
       if (arm === first + 1) this.#sift(row);
       else {
@@ -218,7 +184,7 @@ export class BoxSearch {
   #sift(before: Float64Array | null): void {
     const first = this.#first;
     const list = this.#lists[first]!;
-    const rows = this.#rows[first]!;
+    const leaves = this.#leaves;
     const levels = this.#levels[before === null ? first + 1 : first + 2]!;
     const series = this.#series[first]!;
     const beforeSeries = before !== null && this.#series[first + 1]!;
@@ -228,10 +194,7 @@ export class BoxSearch {
     const alive = this.#alive;
     const limit = this.#limit() * slack;
     let left = list.length;
-    for (let k = 0; k < left; k += 1) {
-      alive[k] = list[k]!;
-      if (rows[list[k]!] === undefined) this.#row(first, list[k]!);
-    }
+    for (let k = 0; k < left; k += 1) alive[k] = k;
     for (let tried = 0; tried < order.length; tried += 1) {
       const p = order[tried]!;
       const f = 2 * at[p]!;
@@ -278,8 +241,8 @@ export class BoxSearch {
       const ei = series ? dar * ii + dai * ir : dbr * vi + dbi * vr;
       let stay = 0;
       for (let k = 0; k < left; k += 1) {
-        const pick = alive[k]!;
-        const row = rows[pick]!;
+        const leaf = alive[k]!;
+        const row = leaves[leaf]!;
         const re = row[f]!;
         const im = row[f + 1]!;
         const xr = sr + tr * re - ti * im;
@@ -287,7 +250,7 @@ export class BoxSearch {
         const yr = dr + er * re - ei * im;
         const yi = di + er * im + ei * re;
         if (yr * yr + yi * yi <= limit * (xr * xr + xi * xi)) {
-          alive[stay] = pick;
+          alive[stay] = leaf;
           stay += 1;
         }
       }
@@ -300,7 +263,7 @@ export class BoxSearch {
     }
     const picks = this.#picks;
     for (let k = 0; k < left; k += 1) {
-      picks[first] = alive[k]!;
+      picks[first] = list[alive[k]!]!;
       this.#judge();
     }
   }
@@ -314,61 +277,17 @@ export class BoxSearch {
   #judge(): void {
     const best = this.#best;
     if (best.some(({ picks }) => picks.every((pick, arm) => pick === this.#picks[arm]))) return;
-    const gammaSquared = this.#worst();
+    const gammaSquared = this.#table.worst(this.#picks, this.#limit());
     if (gammaSquared > this.#limit()) return;
-    const set: ValueSet = { picks: Array.from(this.#picks), gammaSquared };
+    const set: PickedSet = { picks: Array.from(this.#picks), gammaSquared };
     const place = best.findIndex((other) => inOrder(set, other) < 0);
     best.splice(place === -1 ? best.length : place, 0, set);
     if (best.length > this.#most) best.pop();
   }
-
-  /** Largest |Γ|² of the set at hand, or the first found above the limit. */
-  #worst(): number {
-    const { states, strayF } = this.#problem;
-    const n = this.#length;
-    const limit = this.#limit();
-    const rows = this.#judged;
-    for (let k = 0; k < n; k += 1) rows[k] = this.#row(k, this.#picks[k]!);
-    let worst = 0;
-    for (const { frequencyHz, rs, xs, rl, xl } of states) {
-      for (let f = 0; f < frequencyHz.length; f += 1) {
-        const stray = 2 * Math.PI * frequencyHz[f]! * strayF;
-        let vr = rl[f]!;
-        let vi = xl[f]!;
-        let ir = 1;
-        let ii = 0;
-        for (let k = n - 1; k >= 0; k -= 1) {
-          const re = rows[k]![2 * f]!;
-          const im = rows[k]![2 * f + 1]!;
-          if (this.#series[k]!) {
-            ir -= stray * vi;
-            ii += stray * vr;
-            vr += re * ir - im * ii;
-            vi += re * ii + im * ir;
-          } else {
-            ir += re * vr - im * vi;
-            ii += re * vi + im * vr;
-          }
-        }
-        ir -= stray * vi;
-        ii += stray * vr;
-        const zr = rs[f]!;
-        const zi = xs[f]!;
-        const aim = this.#conjugate ? -zi : zi;
-        const sr = vr + ir * zr - ii * zi;
-        const si = vi + ir * zi + ii * zr;
-        const dr = vr - ir * zr + ii * aim;
-        const di = vi - ir * aim - ii * zr;
-        worst = Math.max(worst, (dr * dr + di * di) / (sr * sr + si * si));
-        if (worst > limit) return worst;
-      }
-    }
-    return worst;
-  }
 }
 
 /** Negative when the first is better. */
-function inOrder(a: ValueSet, b: ValueSet): number {
+function inOrder(a: PickedSet, b: PickedSet): number {
   if (a.gammaSquared !== b.gammaSquared) return a.gammaSquared - b.gammaSquared;
   const arm = a.picks.findIndex((pick, k) => pick !== b.picks[k]);
   return arm === -1 ? 0 : a.picks[arm]! - b.picks[arm]!;

@@ -1,5 +1,6 @@
 import type { RealArm } from '../network/real-arm.ts';
-import { BoxSearch, type ValueProblem, type ValueSet } from './box-search.ts';
+import { BoxSearch } from './box-search.ts';
+import type { ValueProblem, PickedSet } from './value-problem.ts';
 
 /** A choice of values and how many of the best sets are wanted. */
 export interface ValueChoice extends ValueProblem {
@@ -33,7 +34,7 @@ const fewTries = 1e4;
  *
  * @returns at most `keep` sets; fewer where there are no more
  */
-export function* chooseValues(choice: ValueChoice): Generator<void, readonly ValueSet[]> {
+export function* chooseValues(choice: ValueChoice): Generator<void, readonly PickedSet[]> {
   const { candidates, centre, keep } = choice;
   const search = new BoxSearch(choice, Math.max(keep, leaders));
   const lists = boxAbout(

@@ -1,6 +1,7 @@
-import { BoxSearch, type ValueSet } from './box-search.ts';
+import { BoxSearch } from './box-search.ts';
 import { boxAbout, chooseValues, type ValueChoice } from './choose-values.ts';
 import { withPairs, type PairCandidate } from './pairs.ts';
+import type { PickedSet } from './value-problem.ts';
 
 /** A choice of values where some arms may be made of two parts. */
 export interface PairChoice extends ValueChoice {
@@ -13,7 +14,7 @@ export interface PairChoice extends ValueChoice {
 /** The best sets and what their picks point at. */
 export interface PairedSets {
   readonly candidates: readonly (readonly PairCandidate[])[];
-  readonly sets: readonly ValueSet[];
+  readonly sets: readonly PickedSet[];
 }
 
 /** Sets tried with a pair in one given arm. */

@@ -136,12 +136,12 @@ describe('readStockList(text, fileName) refuses a line', () => {
     [
       'with farads of an inductor',
       'a,L,8.2 pF',
-      'line 2, value "8.2 pF": farad don\'t fit an inductor; give henry, or correct its kind',
+      'line 2, value "8.2 pF": farads don\'t fit an inductor; give henries, or correct its kind',
     ],
     [
       'with henries of a capacitor',
       'a,C,82 nH',
-      'line 2, value "82 nH": henry don\'t fit a capacitor; give farad, or correct its kind',
+      'line 2, value "82 nH": henries don\'t fit a capacitor; give farads, or correct its kind',
     ],
     [
       'with a bare number',

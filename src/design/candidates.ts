@@ -26,7 +26,7 @@ export interface Candidate {
 }
 
 /** How far from the value that would be best parts are considered, as a ratio. */
-const reach = 1.8;
+const reach = 2.4;
 /** Lines of a stock list considered for an arm, the nearest by ratio. */
 const mostLines = 60;
 

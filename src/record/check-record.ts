@@ -1,31 +1,53 @@
 import * as v from 'valibot';
 import { InputError, type Problem } from '../quantity/problem.ts';
+import { digestOf } from './canonical.ts';
 import type { DesignRecord } from './design-record.ts';
 import { recordSchema } from './schema.ts';
 
-/** Most problems told at once; a file made to do harm could have as many as it has values. */
-const mostProblems = 100;
+/** Most fields told at once; a file made to do harm could have as many wrong ones as it has values. */
+const mostProblems = 30;
+
+/** The revision before is the one that the history ends with: its digest says so. */
+function checkHistory({ previous, history }: DesignRecord): void {
+  if (previous === null) return;
+  const digest = digestOf(previous);
+  if (history.at(-1)?.digest === digest) return;
+  throw new InputError({
+    field: 'previous',
+    read: `${previous.identity.revision}, digest ${digest.slice(0, 16)}…`,
+    why: 'the revision before is not the one that the history ends with',
+    would: 'take the record as it was saved',
+  });
+}
 
 /**
  * A value as a design record.
  *
- * @throws InputError with one problem per field that can't be used, 100 at most; of another document, that it is one
+ * @throws InputError with one problem per field that can't be used, 30 at most and then how many more there are; of another document, that it is one
  */
 export function checkRecord(value: unknown): DesignRecord {
   const misplaced = misplacedIn(value);
   if (misplaced !== null) throw new InputError(misplaced);
   const result = v.safeParse(recordSchema, value, { abortPipeEarly: true });
-  if (result.success) return result.output;
-  const problems = new Map<string, Problem>();
-  for (const issue of result.issues.length > mostProblems ? result.issues : issuesOf(value)) {
-    const problem = problemOf(issue);
-    // One problem a field: a second check on the same value says nothing new.
-    if (!problems.has(problem.field)) problems.set(problem.field, problem);
-    // What is no record of this schema needn't be told field by field.
-    if (problem.field === 'schema') throw new InputError(problem);
-    if (problems.size === mostProblems) break;
+  if (result.success) {
+    checkHistory(result.output);
+    return result.output;
   }
-  throw new InputError(...problems.values());
+  const issues = result.issues.length > mostProblems ? result.issues : issuesOf(value);
+  // One problem a field: a second check on the same value says nothing new.
+  const problems = new Map<string, Problem>();
+  let more = 0;
+  for (const issue of issues) {
+    if (problems.size === mostProblems) more += 1;
+    else {
+      const problem = problemOf(issue);
+      // What is no record of this schema needn't be told field by field.
+      if (problem.field === 'schema') throw new InputError(problem);
+      if (!problems.has(problem.field)) problems.set(problem.field, problem);
+    }
+  }
+  const rest = { field: 'record', read: '', why: `${String(more)} more problems`, would: 'mend these first' };
+  throw new InputError(...problems.values(), ...(more === 0 ? [] : [rest]));
 }
 
 /**

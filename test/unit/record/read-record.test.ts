@@ -91,7 +91,11 @@ describe('readRecord(text)', () => {
       2.5,
       'sections "2.5": the number of sections is out of range; give auto or a whole number from 1 to 6',
     ],
-    ['schema', 'ferrule-record/3', 'schema "ferrule-record/3": this schema is unknown; give "ferrule-record/2"'],
+    [
+      'schema',
+      'ferrule-record/3',
+      'schema "ferrule-record/3": a later Ferrule wrote this record; this one reads up to ferrule-record/2; open it with a Ferrule that reads ferrule-record/3',
+    ],
     [
       'requirement.bandHz',
       { low: 152e6, high: 150e6 },
@@ -149,7 +153,7 @@ describe('readRecord(text)', () => {
       `identity.title "${'x'.repeat(60)}…": the title is too long; give at most 120 letters`,
     ],
     ['identity.title', 'one\ntwo', 'identity.title "one two": the title holds a control character; leave it out'],
-    ['identity.title', 'half \uD83D', 'identity.title "half \uD83D": the title holds half a character; type it again'],
+    ['identity.title', 'half \uD83D', 'identity.title "half \uFFFD": the title holds half a character; type it again'],
     ['selection.reason', 'bell \u0007', 'selection.reason "bell": the reason holds a control character; leave it out'],
   ])('refuses %s = %j in one line', (path, value, line) => {
     expect(linesOf(withValue(path, value))).toEqual([line]);

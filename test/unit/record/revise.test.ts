@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { digestOf } from '../../../src/record/canonical.ts';
 import type { DesignRecord } from '../../../src/record/design-record.ts';
+import { readRecord } from '../../../src/record/read-record.ts';
 import { frozen, revise } from '../../../src/record/revise.ts';
 import { plainRecord } from './plain-record.ts';
 
@@ -36,6 +37,11 @@ describe('revise(record, next)', () => {
       ['A', ''],
       ['B', next.change],
     ]);
+    // The digest of the revision before is the one in the history, whatever came before that.
+    expect(digestOf(third.previous!)).toBe(third.history.at(-1)!.digest);
+    expect(readRecord(JSON.stringify(third))).toEqual(third);
+    const forged = { ...third, previous: { ...third.previous!, method: 'pi' as const } };
+    expect(() => readRecord(JSON.stringify(forged))).toThrow('the revision before is not the one');
   });
 
   it('keeps who signs and clears that they signed', () => {

@@ -37,13 +37,14 @@ export function drawsOf(
   from: number,
   count: number,
 ): Draws {
-  // The ends come first, so that their deviations are the same whatever the parts.
-  const columns = deviations(4 + parts.length, distribution, seed, from, count);
+  // The ends have the first four, so that theirs are the same whatever the parts.
+  const ends = spread.load === 0 && spread.source === 0 ? [] : deviations(4, 0, distribution, seed, from, count);
+  const columns = deviations(parts.length, 1, distribution, seed, from, count);
   const end = (k: number, size: number): Float64Array | null =>
-    size === 0 ? null : columns[k]!.map((deviation) => deviation * size);
+    size === 0 ? null : ends[k]!.map((deviation) => deviation * size);
   return {
     count,
-    scale: scalesOf(parts, arms, columns.slice(4), count),
+    scale: scalesOf(parts, arms, columns, count),
     loadR: end(0, spread.load),
     loadX: end(1, spread.load),
     sourceR: end(2, spread.source),
@@ -70,26 +71,31 @@ export const drawsWith = (
   sourceX: null,
 });
 
-/** Columns of deviations, −1 to 1. */
+/**
+ * Columns of deviations, −1 to 1, four to each call of the generator.
+ *
+ * @param first which four of a network's deviations come first
+ */
 function deviations(
   width: number,
+  first: number,
   distribution: Distribution,
   seed: number,
   from: number,
   count: number,
 ): Float64Array[] {
-  const columns = Array.from({ length: width }, () => new Float64Array(count));
-  const words = new Uint32Array(4);
-  const key = [seed, Math.floor(seed / 2 ** 32)] as const;
-  for (let first = 0; first < width; first += 4) {
-    const four = columns.slice(first, first + 4);
+  const words = new Uint32Array(4 * count);
+  return Array.from({ length: Math.ceil(width / 4) }, (_, four) => {
     for (let d = 0; d < count; d += 1) {
       const sample = from + d;
-      philox([sample, Math.floor(sample / 2 ** 32), first / 4, 0], key, words);
-      for (let k = 0; k < four.length; k += 1) four[k]![d] = deviate((words[k]! + 0.5) / 2 ** 32, distribution);
+      philox(sample, Math.floor(sample / 2 ** 32), first + four, 0, seed, Math.floor(seed / 2 ** 32), words, 4 * d);
     }
-  }
-  return columns;
+    return Array.from({ length: Math.min(4, width - 4 * four) }, (_, k) => {
+      const column = new Float64Array(count);
+      for (let d = 0; d < count; d += 1) column[d] = deviate((words[4 * d + k]! + 0.5) / 2 ** 32, distribution);
+      return column;
+    });
+  }).flat();
 }
 
 /** Value of each arm over its nominal one: Σ w·s of its parts where values add, 1/Σ(w/s) where inverses do. */
@@ -103,7 +109,7 @@ function scalesOf(
     const scale = new Float64Array(count);
     const here = parts.flatMap((part, k) => (part.armIndex === armIndex ? [{ ...part, column: deviation[k]! }] : []));
     if (here.length === 0) return scale.fill(1);
-    const adds = here[0]!.adds;
+    const adds = here.length === 1 || here[0]!.adds;
     for (const { weight, tolerance, column } of here) {
       for (let d = 0; d < count; d += 1) {
         const own = 1 + tolerance * column[d]!;

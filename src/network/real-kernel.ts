@@ -16,7 +16,7 @@ import {
 } from './assemble.ts';
 import { endsSize, stepSize, type PreparedReal, type Step } from './real-steps.ts';
 
-/** Networks worked on together: what is theirs stays in the processor's nearest cache over all frequencies. Even. */
+/** Networks worked on together: what is theirs stays in the processor's nearest cache over all frequencies. */
 export const block = 256;
 
 /** Which ends vary from network to network. */
@@ -32,11 +32,28 @@ const bytes = 8;
 // Parameters of the function: addresses of one frequency's numbers, of the networks' columns, of their worst so far, and
 // where the worst ends.
 const [numbers, columns, worst, end] = [0, 1, 2, 3] as const;
-// Its variables: voltage, current, an immittance, and what is needed in between.
-const [vr, vi, jr, ji, p, q, a, b, c] = [4, 5, 6, 7, 8, 9, 10, 11, 12] as const;
+
+/** Pairs that go hand in hand: while one waits for its last step, the processor works on the other. */
+const pairs = 2;
+/** Networks of one round; `block` is a multiple. */
+export const together = 2 * pairs;
+/** Variables of each pair. */
+const perPair = 9;
+
+/** Variables of one pair: voltage, current, an immittance, and what is needed in between; and where it stands, bytes. */
+interface Variables extends Record<'vr' | 'vi' | 'jr' | 'ji' | 'p' | 'q' | 'a' | 'b' | 'c', number> {
+  readonly offset: number;
+}
+
+function variablesOf(pair: number): Variables {
+  const first = end + 1 + pair * perPair;
+  const [vr, vi, jr, ji, p, q, a, b, c] = Array.from({ length: perPair }, (_, k) => first + k) as VariableNumbers;
+  return { vr, vi, jr, ji, p, q, a, b, c, offset: pair * 2 * bytes };
+}
+type VariableNumbers = [number, number, number, number, number, number, number, number, number];
 
 const number = (at: number): Code => loadTwice(numbers, at * bytes);
-const column = (slot: number): Code => load(columns, slot * block * bytes);
+const column = (slot: number, { offset }: Variables): Code => load(columns, slot * block * bytes + offset);
 const times = (x: Pair, y: Pair): Pair => [
   subtract(multiply(x[0], y[0]), multiply(x[1], y[1])),
   add(multiply(x[0], y[1]), multiply(x[1], y[0])),
@@ -56,56 +73,75 @@ export function kernelOf(
   varied: VariedEnds,
 ): Uint8Array<ArrayBuffer> {
   const ends = inverse.length;
+  const all = Array.from({ length: pairs }, (_, pair) => variablesOf(pair));
   const body = [
-    ...set(vr, varied.load ? add(number(0), multiply(number(0), column(ends))) : number(0)),
-    ...set(vi, varied.load ? add(number(1), multiply(number(2), column(ends + 1))) : number(1)),
+    ...all.flatMap((variables) => loadCode(varied.load, ends, variables)),
+    ...steps.flatMap((step, k) => all.flatMap((variables) => stepCode(step, endsSize + k * stepSize, variables))),
+    ...all.flatMap((variables) => sourceCode(varied.source, ends + 2, aim === 'conjugate', reactiveSource, variables)),
+    ...all.flatMap(worstCode),
+    ...advance(columns, together * bytes),
+    ...advance(worst, together * bytes),
+  ];
+  return moduleOf(end + 1, pairs * perPair, loopWhileBelow(body, worst, end));
+}
+
+/** Voltage and current of 1 A in the load. `at`: the column of R's deviations. */
+function loadCode(varied: boolean, at: number, variables: Variables): Code {
+  const { vr, vi, jr, ji } = variables;
+  const deviating = (stated: number, times: number, deviation: number): Code =>
+    varied ? add(number(stated), multiply(number(times), column(deviation, variables))) : number(stated);
+  return [
+    ...set(vr, deviating(0, 0, at)),
+    ...set(vi, deviating(1, 2, at + 1)),
     ...set(jr, number(4)),
     ...set(ji, number(5)),
-    ...steps.flatMap((step, k) => stepCode(step, endsSize + k * stepSize)),
-    ...sourceCode(varied.source, ends + 2, aim === 'conjugate', reactiveSource),
-    // |V − w|²/|V + w|²
+  ];
+}
+
+/** |V − w|²/|V + w|², where it is more than the worst so far. */
+function worstCode({ vr, vi, p, q, a, b, offset }: Variables): Code {
+  return [
     ...set(p, subtract(get(vr), get(a))),
     ...set(q, subtract(get(vi), get(b))),
     ...set(vr, add(get(vr), get(a))),
     ...set(vi, add(get(vi), get(b))),
-    ...store(worst, 0, larger(load(worst, 0), divide(squared(p, q), squared(vr, vi)))),
-    ...advance(columns, 2 * bytes),
-    ...advance(worst, 2 * bytes),
+    ...store(worst, offset, larger(load(worst, offset), divide(squared(p, q), squared(vr, vi)))),
   ];
-  return moduleOf(4, 9, loopWhileBelow(body, worst, end));
 }
 
 /** w = I·RS, or I·ZS, into a and b; I·jXS onto the voltage where that isn't in w. `at`: the column of R's deviations. */
-function sourceCode(varied: boolean, at: number, conjugate: boolean, reactive: boolean): Code {
+function sourceCode(varied: boolean, at: number, conjugate: boolean, reactive: boolean, variables: Variables): Code {
+  const { vr, vi, jr, ji, p, q, a, b } = variables;
   const current: Pair = [get(jr), get(ji)];
-  const deviating = (stated: Code, times: Code, deviation: number): Code =>
-    varied ? add(stated, multiply(times, column(deviation))) : stated;
+  const deviating = (stated: number, times: number, deviation: number): Code =>
+    varied ? add(number(stated), multiply(number(times), column(deviation, variables))) : number(stated);
   const w = [
-    ...set(p, deviating(number(6), number(6), at)),
-    ...set(q, deviating(number(7), number(7), at)),
+    ...set(p, deviating(6, 6, at)),
+    ...set(q, deviating(7, 7, at)),
     ...set2(a, b, times([get(p), get(q)], current)),
   ];
   if (!varied && !reactive) return w;
   return [
     ...w,
-    ...set(p, deviating(number(8), number(10), at + 1)),
-    ...set(q, deviating(number(9), number(11), at + 1)),
-    ...(conjugate ? accumulate(vr, vi, current) : accumulate(a, b, current)),
+    ...set(p, deviating(8, 10, at + 1)),
+    ...set(q, deviating(9, 11, at + 1)),
+    ...(conjugate ? accumulate(vr, vi, current, variables) : accumulate(a, b, current, variables)),
   ];
 }
 
 /** One step; its numbers begin at `at`. */
-function stepCode({ arm, form, slot, bare, real }: Step, at: number): Code {
+function stepCode({ arm, form, slot, bare, real }: Step, at: number, variables: Variables): Code {
+  const { vr, vi, jr, ji, p, q, a, b, c } = variables;
   const [re, im, otherRe, otherIm] = arm === 'series' ? ([vr, vi, jr, ji] as const) : ([jr, ji, vr, vi] as const);
   const other: Pair = [get(otherRe), get(otherIm)];
   const linear = (zeroth: number, first: number, withoutZeroth = false): Code => {
     if (slot === null) return number(zeroth);
-    const term = multiply(column(slot), number(first));
+    const term = multiply(column(slot, variables), number(first));
     return withoutZeroth ? term : add(number(zeroth), term);
   };
   if (form === 'linear') {
     const realPart = set(p, linear(at, at + 2, bare));
-    if (!real) return [...realPart, ...set(q, linear(at + 1, at + 3, bare)), ...accumulate(re, im, other)];
+    if (!real) return [...realPart, ...set(q, linear(at + 1, at + 3, bare)), ...accumulate(re, im, other, variables)];
     return [
       ...realPart,
       ...set(re, add(get(re), multiply(get(p), other[0]))),
@@ -125,7 +161,7 @@ function stepCode({ arm, form, slot, bare, real }: Step, at: number): Code {
       ...denominator,
       ...set(p, add(number(at), get(a))),
       ...set(q, subtract(number(at + 1), get(b))),
-      ...accumulate(re, im, other),
+      ...accumulate(re, im, other, variables),
     ];
   }
   return [
@@ -134,14 +170,14 @@ function stepCode({ arm, form, slot, bare, real }: Step, at: number): Code {
     ...set(q, linear(at + 1, at + 3, bare)),
     ...set(p, add(multiply(get(c), get(a)), multiply(get(q), get(b)))),
     ...set(q, subtract(multiply(get(q), get(a)), multiply(get(c), get(b)))),
-    ...accumulate(re, im, other),
+    ...accumulate(re, im, other, variables),
   ];
 }
 
 const set2 = (re: number, im: number, value: Pair): Code => [...set(re, value[0]), ...set(im, value[1])];
 
 /** Adds (p + jq)·other to a voltage or a current. */
-function accumulate(re: number, im: number, other: Pair): Code {
+function accumulate(re: number, im: number, other: Pair, { p, q }: Variables): Code {
   const product = times([get(p), get(q)], other);
   return set2(re, im, [add(get(re), product[0]), add(get(im), product[1])]);
 }

@@ -1,4 +1,4 @@
-import { block, kernelOf, type VariedEnds } from './real-kernel.ts';
+import { block, kernelOf, together, type VariedEnds } from './real-kernel.ts';
 import type { PreparedReal } from './real-steps.ts';
 
 export { prepareReal, type PreparedReal } from './real-steps.ts';
@@ -75,8 +75,8 @@ function columnsOf({ inverse }: PreparedReal, { scale, loadR, loadX, sourceR, so
     const factors = scale[arm]!;
     return (view, at, from, length) => {
       for (let d = 0; d < length; d += 1) view[at + d] = inverted ? 1 / factors[from + d]! : factors[from + d]!;
-      // An odd count leaves half a pair: any number that divides by nothing.
-      if (length % 2 === 1) view[at + length] = view[at + length - 1]!;
+      // A round that isn't full is filled up with any network.
+      view.fill(view[at]!, at + length, at + Math.ceil(length / together) * together);
     };
   });
   const deviations = [loadR, loadX, sourceR, sourceX].map((values): Column => (view, at, from, length) => {

@@ -2,6 +2,7 @@ import { formatFigure, type Figure } from './figure.ts';
 import { benchFit } from './fit.ts';
 import { benchKeystroke } from './keystroke.ts';
 import { benchLoad } from './load.ts';
+import { benchMonteCarlo } from './monte-carlo.ts';
 import { benchReport } from './report.ts';
 import { benchSweep } from './sweep.ts';
 import { benchTouchstone } from './touchstone.ts';
@@ -14,6 +15,7 @@ const benches: readonly (() => readonly Figure[] | Promise<readonly Figure[]>)[]
   benchReport,
   benchTouchstone,
   benchFit,
+  benchMonteCarlo,
 ];
 
 for (const bench of benches) for (const figure of await bench()) console.log(formatFigure(figure));

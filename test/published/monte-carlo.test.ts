@@ -14,7 +14,7 @@ describe('J. K. Salmon et al., "Parallel random numbers: as easy as 1, 2, 3", SC
     [[0x243f6a88, 0x85a308d3, 0x13198a2e, 0x03707344], [0xa4093822, 0x299f31d0], 'd16cfe09 94fdcceb 5001e420 24126ea1'],
   ] as const)('Philox4x32-10 of counter %j and key %j is %s (quoted from memory)', (counter, key, words) => {
     const out = new Uint32Array(4);
-    philox(counter, key, out);
+    philox(counter[0], counter[1], counter[2], counter[3], key[0], key[1], out, 0);
     expect(hex(out)).toBe(words);
   });
 });

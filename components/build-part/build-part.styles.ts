@@ -70,6 +70,10 @@ export const styles = css`
     margin-bottom: 0.25rem;
   }
 
+  .sets tbody :is(th, td) {
+    vertical-align: middle;
+  }
+
   .sets label {
     display: grid;
     grid-template-columns: 1.5rem minmax(10rem, 1fr);

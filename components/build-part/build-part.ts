@@ -61,10 +61,10 @@ export class BuildPart extends LitElement {
     const { dossier } = this;
     const option = dossier?.options.find(({ id }) => id === dossier.chosen);
     if (this.realParts === 'none') this.shown = null;
-    else if (option?.built != null) {
-      this.shown = { option, built: option.built, powerStated: dossier?.record.requirement.powerW != null };
+    else if (dossier !== null && option !== undefined && option.built !== null) {
+      this.shown = { option, built: option.built, powerStated: dossier.record.requirement.powerW !== null };
     }
-    this.earlier = option?.built == null;
+    this.earlier = option === undefined || option.built === null;
   }
 
   override render() {

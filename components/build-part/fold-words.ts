@@ -32,8 +32,10 @@ const always: readonly FieldName[] = ['distribution', 'samples', 'seed', 'derati
 export function foldWords(names: readonly FieldName[], { fields, understood }: FieldState): string {
   const said = names.flatMap((name) => {
     const text = fields[name] ?? defaults[name];
-    if (text.trim() === '' || (text === defaults[name] && !always.includes(name))) return [];
-    return [`${short[name] ?? ''} ${understood[name] ?? text}`.trim().replace('± ', '±')];
+    const read = understood[name] ?? text;
+    // Nothing of a thing is nothing to tell, however it was written.
+    const nothing = text.trim() === '' || text === defaults[name] || /^0(?:\.0)? /u.test(read);
+    return nothing && !always.includes(name) ? [] : [`${short[name] ?? ''} ${read}`.trim().replace('± ', '±')];
   });
   return said.length === 0 ? 'none assumed' : said.join('; ');
 }

@@ -28,7 +28,8 @@ export function alongWith({ name, value }: FieldChange, dossier: Dossier | null)
   // Another search is meant: it goes to its end.
   if (searched.includes(name)) return { steps: '' };
   // A set of values is one of a network's, which is chosen with it.
-  if (name === 'set' && dossier?.chosen != null) return { choice: dossier.chosen };
-  if (name === 'choice' && value !== dossier?.chosen) return { set: '1' };
+  const chosen = dossier?.chosen ?? null;
+  if (name === 'set' && chosen !== null) return { choice: chosen };
+  if (name === 'choice' && value !== chosen) return { set: '1' };
   return {};
 }

@@ -1,6 +1,7 @@
-import type { Dossier } from '../../src/dossier.ts';
+import type { Dossier, Option } from '../../src/dossier.ts';
 import { frequencySpan, returnLossWords } from '../../src/design/words.ts';
 import { formatFixed } from '../../src/quantity/format.ts';
+import type { Span } from '../../src/quantity/span.ts';
 import { builtPartWords, partWords, unbroken } from '../base/words.ts';
 import type { Settled } from './settle.ts';
 
@@ -17,13 +18,18 @@ export function outcome(dossier: Dossier): string {
       ? ''
       : ` (${parts.map((words) => words.replaceAll(' ', '\u00a0')).join(', ')})`;
   const band = record.requirement.bandHz;
-  const worst = shown.built?.worstReturnLossDb ?? shown.worstReturnLossDb;
-  const over =
-    shown.built?.yield == null || band === null
-      ? `from ${band === null ? '' : frequencySpan(band)}`
-      : `over the band, its yield ${formatFixed(shown.built.yield.value * 100, 1)} %`;
-  const held = worst === null || band === null ? '' : ` Its return loss is ${returnLossWords(worst)} at worst ${over}.`;
+  const held = band === null ? '' : heldWords(shown, band);
   return unbroken(`${howMany(meeting, options.length)} ${by}: ${lowerFirst(shown.title)}${values}.${held}`);
+}
+
+/** How well the band is held, with real parts where there are such. */
+function heldWords({ worstReturnLossDb, built }: Option, band: Span): string {
+  const worst = built?.worstReturnLossDb ?? worstReturnLossDb;
+  if (worst === null) return '';
+  const made = built?.yield ?? null;
+  const over =
+    made === null ? `from ${frequencySpan(band)}` : `over the band, its yield ${formatFixed(made.value * 100, 1)} %`;
+  return ` Its return loss is ${returnLossWords(worst)} at worst ${over}.`;
 }
 
 function howMany(meeting: number, all: number): string {

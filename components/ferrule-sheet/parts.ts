@@ -154,7 +154,7 @@ export const parts: readonly Part[] = [
     fields: buildFields,
     judge: (state) => {
       const chosen = chosenOf(state);
-      if (chosen === undefined || state.dossier?.record.build == null) return unassessed;
+      if (chosen === undefined || (state.dossier?.record.build ?? null) === null) return unassessed;
       if (chosen.built === null) {
         return state.realParts === 'at work' ? { verdict: 'not assessed', words: 'being worked out' } : unassessed;
       }

@@ -93,8 +93,8 @@ export function finished(before: Settled, dossier: Dossier, notice: string): Set
 /** A record comes back from the worker as a copy; what was found sound in it is known of the original alone. */
 function sameRecord({ pending, building }: Settled, dossier: Dossier) {
   const asked = building ?? pending;
-  const same = asked?.selection.option === dossier.record.selection.option;
-  return { dossier: same && asked !== null ? { ...dossier, record: asked } : dossier, stale: false, pending: null };
+  const same = asked !== null && asked.selection.option === dossier.record.selection.option;
+  return { dossier: same ? { ...dossier, record: asked } : dossier, stale: false, pending: null };
 }
 
 /** One network more is worked out with real parts. */

@@ -75,7 +75,7 @@ export class ResponsePart extends LitElement {
     requirement: DesignRecord['requirement'],
   ): TemplateResult {
     const { size } = this;
-    const real = this.dossier?.record.build == null ? null : (option.built?.percentiles ?? 'awaited');
+    const real = (this.dossier?.record.build ?? null) === null ? null : (option.built?.percentiles ?? 'awaited');
     const of = [responses, size, real];
     const { spanHz } = responses[0]!;
     return html`

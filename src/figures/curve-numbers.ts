@@ -2,12 +2,13 @@ import { lettering, type Frame } from './chart-frame.ts';
 import { label } from './draw.ts';
 import type { Shape } from './figure.ts';
 
-interface Curve {
+export interface Curve {
   readonly hertz: readonly number[];
   readonly values: readonly number[];
 }
 
-interface Box {
+/** A rectangle, pt. */
+export interface Box {
   readonly left: number;
   readonly right: number;
   readonly top: number;
@@ -53,14 +54,27 @@ export function curveNumbers(frame: Frame, curves: readonly Curve[]): readonly S
   });
 }
 
-const inside = ({ left, right, top, bottom }: Frame, box: Box): boolean =>
+/** Where a number stands that `curveNumbers` placed. */
+export const boxOf = (shape: Shape): readonly Box[] =>
+  shape.kind === 'text'
+    ? [
+        {
+          left: shape.x - numeralWidth / 2,
+          right: shape.x + numeralWidth / 2,
+          top: shape.y - numeralHeight,
+          bottom: shape.y,
+        },
+      ]
+    : [];
+
+export const inside = ({ left, right, top, bottom }: Frame, box: Box): boolean =>
   box.left > left + 2 && box.right < right - 2 && box.top > top + 2 && box.bottom < bottom - 2;
 
-const meet = (a: Box, b: Box): boolean =>
+export const meet = (a: Box, b: Box): boolean =>
   a.left < b.right + 4 && b.left < a.right + 4 && a.top < b.bottom + 2 && b.top < a.bottom + 2;
 
 /** Least vertical distance of a curve from a box, pt, over the box's width and a little more. */
-function clearance(points: readonly { readonly x: number; readonly y: number }[], box: Box): number {
+export function clearance(points: readonly { readonly x: number; readonly y: number }[], box: Box): number {
   let least = Infinity;
   let previous: { readonly x: number; readonly y: number } | undefined;
   for (const point of points) {

@@ -2,8 +2,10 @@ import type { Percentiles } from '../dossier.ts';
 import { formatFixed } from '../quantity/format.ts';
 import { lettering, type Frame, type Key } from './chart-frame.ts';
 import { curve } from './curve.ts';
+import { clearance, inside, meet, type Box, type Curve } from './curve-numbers.ts';
 import { label, line, n, path, rectangle, stroke } from './draw.ts';
 import type { Shape } from './figure.ts';
+import { textWidth } from './text-width.ts';
 
 /** How real parts do, over the frequencies of the curves of exact ones; `awaited`: that is still being worked out. */
 export type RealCurves = Percentiles | 'awaited' | null;
@@ -11,8 +13,15 @@ export type RealCurves = Percentiles | 'awaited' | null;
 const nominal = { stroke: 'accent', width: stroke.heavy, dash: [4, 2] } as const;
 const shade = { fill: 'muted', fillOpacity: 0.2 } as const;
 const edge = { stroke: 'muted', width: stroke.thin } as const;
-/** With less between the edges of the band, pt, there is no telling which letters are of which. */
-const roomForLetters = 10;
+/** Room around the letters of an edge, pt. */
+const room = 2;
+const every = 2;
+
+/** What the letters of the band's edges keep away from. */
+export interface Drawn {
+  readonly curves: readonly Curve[];
+  readonly boxes: readonly Box[];
+}
 
 /** Names of what `realCurves` draws, beside that of the curve of exact values; as many rows before and after. */
 export function realKeys(real: RealCurves, severalStates: boolean): readonly Key[] {
@@ -37,7 +46,7 @@ export function realKeys(real: RealCurves, severalStates: boolean): readonly Key
 }
 
 /** The band that most networks stay in, its edges named by the part of them below, and the nominal one. */
-export function realCurves(frame: Frame, real: RealCurves): readonly Shape[] {
+export function realCurves(frame: Frame, real: RealCurves, drawn: Drawn): readonly Shape[] {
   const state = real === null || real === 'awaited' ? undefined : real.states[0];
   if (real === null || real === 'awaited' || state === undefined) return [];
   const { frequencyHz, nominalDb, curvesDb } = state;
@@ -53,32 +62,48 @@ export function realCurves(frame: Frame, real: RealCurves): readonly Shape[] {
     path(`M${[...there, ...back].join('L')}Z`, shade),
     ...edges.map((d) => path(d, edge)),
     ...(middle === '' ? [] : [path(middle, nominal)]),
-    ...edgeLetters(frame, frequencyHz, low, high, real.fractions),
+    ...edgeLetters(
+      frame,
+      [low, high, nominalDb].map((values) => ({ hertz: frequencyHz, values })),
+      real.fractions,
+      drawn,
+    ),
   ];
 }
 
-/** "5 %" and "95 %" beside the edges where these are farthest apart, inside the band. */
+/**
+ * "5 %" under the lower edge and "95 %" over the upper one, each where the band is widest and nothing else is drawn; left
+ * out where there is no such place.
+ */
 function edgeLetters(
   frame: Frame,
-  frequencyHz: readonly number[],
-  low: readonly number[],
-  high: readonly number[],
+  [low, high, nominal]: readonly Curve[],
   fractions: readonly number[],
+  { curves, boxes }: Drawn,
 ): readonly Shape[] {
-  const places = frequencyHz.flatMap((hertz, k) => {
-    const [x, lower, upper] = [frame.x(hertz), frame.y(low[k]!), frame.y(high[k]!)];
-    const fits = x > frame.left + 16 && x < frame.right - 24 && upper > frame.top + 9 && lower < frame.bottom - 11;
-    return fits ? [{ x, lower, upper }] : [];
-  });
-  const widest = places.reduce<(typeof places)[number] | null>(
-    (best, place) => (best === null || place.lower - place.upper > best.lower - best.upper ? place : best),
-    null,
+  const points = [low!, high!, nominal!, ...curves].map(({ hertz, values }) =>
+    hertz.map((hz, k) => ({ x: frame.x(hz), y: frame.y(values[k]!) })),
   );
-  if (widest === null || widest.lower - widest.upper < roomForLetters) return [];
+  const [lower, upper] = [points[0]!, points[1]!];
   return [
-    label(widest.x, widest.lower + 9, percent(fractions[0]!), lettering, 'middle', 'muted'),
-    label(widest.x, widest.upper - 3, percent(fractions.at(-1)!), lettering, 'middle', 'muted'),
-  ];
+    { edge: lower, text: percent(fractions[0]!), under: true },
+    { edge: upper, text: percent(fractions.at(-1)!), under: false },
+  ].flatMap(({ edge: along, text, under }): Shape[] => {
+    const half = textWidth(text, lettering) / 2;
+    const found: Box[] = [];
+    let widest = 0;
+    along.forEach(({ x, y }, k) => {
+      const width = lower[k]!.y - upper[k]!.y;
+      if (k % every > 0 || width <= widest) return;
+      const top = under ? y + room + 1 : y - room - 7;
+      const box = { left: x - half, right: x + half, top, bottom: top + 6 };
+      if (!inside(frame, box) || boxes.some((other) => meet(box, other))) return;
+      if (points.some((curve) => clearance(curve, box) < room)) return;
+      widest = width;
+      found[0] = box;
+    });
+    return found.map(({ left, bottom }) => label(left + half, bottom, text, lettering, 'middle', 'muted'));
+  });
 }
 
 /** The same in words, for whoever doesn't see it. */

@@ -4,7 +4,7 @@ import { formatFixed, formatQuantity, formatRead } from '../quantity/format.ts';
 import { chartFrame, chartSize, type Key, type Size } from './chart-frame.ts';
 import { curve } from './curve.ts';
 import { n, path, rectangle, stroke } from './draw.ts';
-import { curveNumbers } from './curve-numbers.ts';
+import { boxOf, curveNumbers, type Box } from './curve-numbers.ts';
 import type { Figure, Shape } from './figure.ts';
 import { designMark } from './design-mark.ts';
 import { hatch } from './hatch.ts';
@@ -51,6 +51,7 @@ export function returnLossPlot(
     ...realKeys(real, responses.length > 1),
   ]);
   const shapes: Shape[] = [...frame.shapes];
+  const boxes: Box[] = [];
   let limit = 'No return loss is required.';
 
   if (needed !== null) {
@@ -59,6 +60,7 @@ export function returnLossPlot(
     let [x, X] = [inside(band.low), inside(band.high)];
     if (X - x < 3) [x, X] = [(x + X) / 2 - 1.5, (x + X) / 2 + 1.5];
     const y = frame.y(needed);
+    boxes.push({ left: x, right: X, top: y, bottom: frame.bottom });
     shapes.push(hatch(x, y, X, frame.bottom));
     shapes.push(path(`M${n(x)} ${n(frame.bottom)}L${n(x)} ${n(y)}L${n(X)} ${n(y)}L${n(X)} ${n(frame.bottom)}`, edge));
     limit =
@@ -68,18 +70,17 @@ export function returnLossPlot(
         : `from ${formatRead(band.low, 'Hz')} to ${formatRead(band.high, 'Hz')}.`);
   }
   shapes.push(...designMark(frame, requirement.frequencyHz));
-  shapes.push(...realCurves(frame, real));
+  const curves = responses.map(({ frequencyHz, returnLossDb }) => ({ hertz: frequencyHz, values: returnLossDb }));
+  const numbers = curveNumbers(frame, curves);
+  const f0 = frame.x(requirement.frequencyHz);
+  boxes.push({ left: f0 - 1, right: f0 + 1, top: frame.top, bottom: frame.bottom }, ...numbers.flatMap(boxOf));
+  shapes.push(...realCurves(frame, real, { curves, boxes }));
   responses.forEach((response, k) => {
     const { hertz, decibels } = smoothReturnLoss(response);
     const d = curve(frame, hertz, decibels);
     if (d !== '') shapes.push(path(d, stateStroke(k)));
   });
-  shapes.push(
-    ...curveNumbers(
-      frame,
-      responses.map(({ frequencyHz, returnLossDb }) => ({ hertz: frequencyHz, values: returnLossDb })),
-    ),
-  );
+  shapes.push(...numbers);
   const between = described(responses, ({ returnLossDb }) => returnLossDb);
   const description =
     `Return loss from ${formatQuantity(spanHz.low, 'Hz')} to ${formatQuantity(spanHz.high, 'Hz')}: ` +

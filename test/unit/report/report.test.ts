@@ -245,8 +245,11 @@ describe('report(dossier, options)', { timeout: 30_000 }, () => {
       '8 Verification',
       '9 Half-power bandwidth',
       '10 Cautions',
-      '11 Standards and literature applied',
-      '12 Sign-off',
+      '11 Deviations',
+      '12 Standards and literature applied',
+      '13 Attached files',
+      '14 Revision history',
+      '15 Sign-off',
     ]);
   });
 

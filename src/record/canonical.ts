@@ -22,7 +22,7 @@ const hexOf = (text: string): string => bytesToHex(sha256(utf8ToBytes(text)));
  */
 export function digestOf({ signOff: _, previous: __, ...record }: DesignRecord): string {
   const { build } = record;
-  if (build?.stock == null) return sha256Of(record);
+  if (typeof build?.stock !== 'object' || build.stock === null) return sha256Of(record);
   // A list of thousands of lines is written out once, not at every keystroke: the form of a part doesn't depend on where it stands.
   const text = canonical({ ...record, build: { ...build, stock: null } });
   return hexOf(text.replace('"stock":null', () => `"stock":${stockText(build.stock!)}`));

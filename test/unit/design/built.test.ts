@@ -146,7 +146,7 @@ describe('design(record) with real parts', () => {
     expect(alone.worstReturnLossDb).toBeLessThan(22);
     expect(joined.worstReturnLossDb).toBeGreaterThan(alone.worstReturnLossDb);
     expect(joined.parts.length).toBeGreaterThan(2);
-    expect(joined.parts.filter(({ pair }) => pair !== null).map(({ designator }) => designator)).toContain('C1a');
+    expect(joined.parts.filter(({ pair }) => pair !== null).map(({ designator }) => designator)).toContain('L1a');
   });
 
   it('takes parts from the stock list by name, with what their lines say', () => {

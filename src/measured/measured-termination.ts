@@ -9,8 +9,12 @@ import { interpolate, slopesOf } from './shape-preserving.ts';
 /** Samples that a record carries; a longer sweep is thinned, and how well the rest stands for it is told. */
 const mostKept = 2001;
 
-/** What no table has: the option line of a Touchstone file, or the keyword that begins one of version 2. */
-const optionLine = /^\s*(?:#(?:\s*(?:[kmg]?hz|[syzgh]|ma|db|ri|r\s*[\d.]+)(?=\s|$))+\s*(?:!.*)?$|\[version\])/imu;
+/**
+ * What no table has: the option line of a Touchstone file, or the keyword that begins one of version 2. Blanks within one
+ * line alone: over line ends, a text of nothing else would be gone through again from each of them.
+ */
+const optionLine =
+  /^[ \t]*(?:#(?:[ \t]*(?:[kmg]?hz|[syzgh]|ma|db|ri|r[ \t]*[\d.]+)(?=\s|$))+[ \t]*(?:!.*)?$|\[version\])/imu;
 
 /**
  * A termination from the text of a Touchstone file (by its ending) or of a table of frequency, R and X.

@@ -5,6 +5,10 @@ import type { Measured } from './measured.ts';
 
 const headerUnits: Readonly<Record<string, string>> = { hz: '', khz: 'k', mhz: 'M', ghz: 'G', thz: 'T' };
 
+/** Longest table and longest line of one, in characters: beyond them it is no table of measurements. */
+const longestTable = 5_000_000;
+const longestLine = 1000;
+
 /**
  * Reads a pasted table of frequency, R and X, one sample a line: separated by blanks, tabs, semicolons, or commas where
  * they aren't decimal ones. A first line of words may name the unit of frequency ("f/MHz R X"); otherwise frequencies
@@ -18,9 +22,16 @@ export function readTable(text: string): Measured {
   const re: number[] = [];
   const im: number[] = [];
   let prefix = '';
+  if (text.length > longestTable) {
+    throw lineProblem(0, 'more than 5 million characters', 'give a table of fewer lines, or a Touchstone file');
+  }
   const lines = text.split(/\r\n|\r|\n/u);
   for (const [index, raw] of lines.entries()) {
+    if (raw === '') continue;
     const line = index + 1;
+    if (raw.length > longestLine) {
+      throw lineProblem(line, `${String(raw.length)} characters are too many`, 'give frequency, R and X', raw);
+    }
     // "# f/MHz R X" is a heading too, though it stands in a comment.
     const content = normalise(
       raw.replace(/^\s*[!#]\s*(?=f(?:req|[^a-z])|[kmgt]?hz(?![a-z]))/iu, '').replace(/[!#].*$/u, ''),

@@ -28,7 +28,10 @@ export function formatProblem({ field, read, why, would }: Problem): string {
 }
 
 function oneLine(text: string, longest: number): string {
+  // A text may be a whole file; what follows its beginning isn't shown.
+  const beginning = text.slice(0, 20 * longest);
   // eslint-disable-next-line no-control-regex -- control characters from a file must not reach a terminal
-  const line = text.replace(/[\s\u0000-\u001f\u007f-\u009f]+/gu, ' ').trim();
-  return line.length > longest ? `${line.slice(0, longest).toWellFormed()}…` : line;
+  const line = beginning.replace(/[\s\u0000-\u001f\u007f-\u009f]+/gu, ' ').trim();
+  const whole = line.length <= longest && beginning.length === text.length;
+  return whole ? line.toWellFormed() : `${line.slice(0, longest).toWellFormed()}…`;
 }

@@ -40,6 +40,11 @@ describe('measuredTermination(text, name, port)', () => {
     expect(measuredTermination(pasted, 'table').measured.frequencyHz).toEqual([100e6, 101e6]);
   });
 
+  it('knows a Touchstone file by its option line, after blank lines and between blanks', () => {
+    const text = '\n\n \t# MHz\tS RI R 50 ! of a cable\n100 0.1 0.2\n101 0.3 -0.4\n';
+    expect(() => measuredTermination(text, 'table')).toThrow(/name the file \.s1p or \.s2p/u);
+  });
+
   it('refuses one sample', () => {
     expect(() => measuredTermination('# MHz S RI R 50\n1 0.1 0\n', 'a.s1p')).toThrow(/one sample is too few/u);
   });

@@ -100,6 +100,8 @@ describe('readTable(text) refuses, and names the line', () => {
     ['a comma that can mean two things', '100M;1,234;0', /^line 1 "1,234": the comma can mean/u],
     ['quotes', '"100","12","-40"', /^line 1 ""100"": not a quantity/u],
     ['a unit that none has', 'f/YHz R X\n1 2 3\n2 2 3', /^line 1 "f\/YHz R X": this unit is unknown/u],
+    ['a line that no table has', `f/MHz R X\n${'1;'.repeat(501)}`, /^line 2 "1;.*": 1002 characters are too many/u],
+    ['a text that is no table', ' '.repeat(5_000_001), /^file: more than 5 million characters/u],
     ['millihertz', '100m 12 -40', /^line 1 "100m": .*less than a hertz/u],
   ])('%s', (_, text, why) => {
     expect(refusal(text)).toMatch(why);

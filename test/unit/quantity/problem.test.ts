@@ -18,6 +18,17 @@ describe('formatProblem(problem)', () => {
     expect(line.isWellFormed()).toBe(true);
   });
 
+  it('looks at no more of a whole file than it shows', () => {
+    expect(formatProblem({ ...problem, read: ' '.repeat(10_000) + 'x' })).toBe(
+      'load "…": not an impedance; write it as 9.4-j61',
+    );
+    expect(formatProblem({ ...problem, read: 'a\n'.repeat(10_000) })).toMatch(/^load "(a ){30}…": not/u);
+  });
+
+  it('shows half a character as one that is missing', () => {
+    expect(formatProblem({ ...problem, read: 'a\ud83d' })).toContain('"a\ufffd"');
+  });
+
   it.each(['field', 'read', 'why'] as const)(
     'keeps control characters and new lines of the %s off the line',
     (part) => {

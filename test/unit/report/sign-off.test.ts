@@ -2,6 +2,7 @@ import { PDFDocument, PDFName, PDFSignature } from 'pdf-lib';
 import { describe, expect, it } from 'vitest';
 import type { Dossier } from '../../../src/dossier.ts';
 import type { DesignRecord } from '../../../src/record/design-record.ts';
+import { parts } from '../../../src/report/content/parts.ts';
 import { report } from '../../../src/report/report.ts';
 import { contentOf } from './content-of.ts';
 import { readPdf } from './read-pdf.ts';
@@ -73,7 +74,7 @@ describe('a report under change control', () => {
     );
     expect(flat).toContain('tolerates 40 dB');
     const first = pages[0]!.map((word) => word.text).join(' ');
-    expect(first).toContain('Accepted in writing: see part 11.');
+    expect(first).toContain(`Accepted in writing: see part ${parts.deviations}.`);
     expect(first).not.toContain('needs a written deviation');
   });
 

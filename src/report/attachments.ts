@@ -1,10 +1,10 @@
 import { chosenTwoPort, sweepCsv } from '../design/exports.ts';
-import { printedFigures } from '../design/printed-figures.ts';
+import { printedFigures, type PrintedFigure } from '../design/printed-figures.ts';
 import type { Dossier } from '../dossier.ts';
 import { onePortFile } from '../measured/one-port-file.ts';
 import { isMeasured } from '../network/termination.ts';
 import { stockCsv } from '../parts/stock-csv.ts';
-import { canonical } from '../record/canonical.ts';
+import { canonical, sha256Of } from '../record/canonical.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 
 /** A file that travels in the report. */
@@ -26,8 +26,8 @@ export function attachments(dossier: Dossier): readonly Attachment[] {
   const twoPort = chosenTwoPort(dossier);
   const stock = stockUsed(dossier);
   return [
-    file('record.json', 'Design record in its RFC 8785 form', 'application/json', 'Source', canonical(record)),
-    file('figures.json', 'Figures printed in this report', 'application/json', 'Data', figuresJson(dossier)),
+    recordFile(record),
+    figuresFile(dossier, printedFigures(dossier)),
     ...(sweep === null ? [] : [file('sweep.csv', 'Sweep of the chosen network', 'text/csv', 'Data', sweep)]),
     ...(twoPort === null
       ? []
@@ -45,12 +45,26 @@ const file = (
   text: string,
 ): Attachment => ({ name, description, mediaType, relation, text });
 
-/** What was printed, for a later version to be compared with; one figure a line. */
-function figuresJson(dossier: Dossier): string {
-  const { version, digest } = dossier;
-  const figures = printedFigures(dossier).map((figure) => JSON.stringify(figure));
-  const head = `{"schema":"ferrule-figures/1","version":${JSON.stringify(version)},"digest":"${digest}","figures":[`;
-  return `${head}\n${figures.join(',\n')}\n]}\n`;
+export const recordFile = (record: DesignRecord): Attachment =>
+  file('record.json', 'Design record in its RFC 8785 form', 'application/json', 'Source', canonical(record));
+
+/**
+ * What was printed, for a later version to be compared with; one figure a line. The record's digest leaves its sign-off
+ * out, that of the file `record.json` nothing.
+ */
+export function figuresFile(
+  { version, digest, record }: Pick<Dossier, 'version' | 'digest' | 'record'>,
+  figures: readonly PrintedFigure[],
+): Attachment {
+  const head = [
+    '"schema":"ferrule-figures/1"',
+    `"version":${JSON.stringify(version)}`,
+    `"digest":"${digest}"`,
+    `"recordFile":"${sha256Of(record)}"`,
+  ];
+  const lines = figures.map((figure) => JSON.stringify(figure)).join(',\n');
+  const text = `{${head.join(',')},"figures":[\n${lines}\n]}\n`;
+  return file('figures.json', 'Figures printed in this report', 'application/json', 'Data', text);
 }
 
 function stockUsed({ record, options, chosen }: Dossier): string | null {

@@ -12,8 +12,10 @@ import type { Description } from './description.ts';
 import { drawFigure, type Fonts } from './draw-figure.ts';
 import { embedFont } from './font.ts';
 import { Marks } from './marks.ts';
+import { opacityStates } from './opacity.ts';
 import { outline } from './outline.ts';
 import { Pen } from './pen.ts';
+import { sealed } from './seal.ts';
 import { writeStructure, type Box, type Drawn } from './structure.ts';
 
 /** What a file is made of. */
@@ -28,7 +30,7 @@ export interface Contents {
 }
 
 /**
- * Laid-out sheets as a PDF 1.7 file, tagged, with its attachments. Nothing in it comes from a clock or from chance: the
+ * Laid-out sheets as a PDF 1.7 file, tagged, sealed, with its attachments. Nothing in it comes from a clock or from chance: the
  * same sheets give the same bytes.
  */
 export async function writePdf(
@@ -44,7 +46,9 @@ export async function writePdf(
     bold: embedFont(document, faces.bold, 'B', 'FerruleSans-Bold'),
     letters,
   };
-  const resources = context.register(context.obj({ Font: { R: fonts.regular.ref, B: fonts.bold.ref } }));
+  const resources = context.register(
+    context.obj({ Font: { R: fonts.regular.ref, B: fonts.bold.ref }, ExtGState: opacityStates(sheets) }),
+  );
   const places = placesOf(sheets);
   const boxes = new Map<Element, Box>();
   const drawn = sheets.map((sheet, k): Drawn => {
@@ -63,7 +67,7 @@ export async function writePdf(
   outline(document, destinations);
   writeStructure(document, structure, drawn, annotate(document, sheets, size[1], destinations), boxes);
   attach(document, attachments, description.date);
-  return document.save({ objectsPerTick: Number.MAX_SAFE_INTEGER });
+  return sealed(await document.save({ objectsPerTick: Number.MAX_SAFE_INTEGER }));
 }
 
 function drawSheet(

@@ -43,6 +43,7 @@ describe('the files inside a report', () => {
       schema: 'ferrule-figures/1',
       version: dossier.version,
       digest: dossier.digest,
+      recordFile: createHash('sha256').update(files.get('record.json')!).digest('hex'),
       figures: printedFigures(dossier),
     });
   });

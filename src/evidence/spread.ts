@@ -86,16 +86,25 @@ function deviations(
 ): Float64Array[] {
   const words = new Uint32Array(4 * count);
   return Array.from({ length: Math.ceil(width / 4) }, (_, four) => {
-    for (let d = 0; d < count; d += 1) {
-      const sample = from + d;
-      philox(sample, Math.floor(sample / 2 ** 32), first + four, 0, seed, Math.floor(seed / 2 ** 32), words, 4 * d);
-    }
-    return Array.from({ length: Math.min(4, width - 4 * four) }, (_, k) => {
-      const column = new Float64Array(count);
-      for (let d = 0; d < count; d += 1) column[d] = deviate((words[4 * d + k]! + 0.5) / 2 ** 32, distribution);
-      return column;
-    });
+    fillWords(words, first + four, seed, from, count);
+    return Array.from({ length: Math.min(4, width - 4 * four) }, (_, k) => columnOf(words, k, distribution, count));
   }).flat();
+}
+
+/** Four words of each network. */
+function fillWords(words: Uint32Array, which: number, seed: number, from: number, count: number): void {
+  const seedHigh = Math.floor(seed / 2 ** 32);
+  for (let d = 0; d < count; d += 1) {
+    const sample = from + d;
+    philox(sample, Math.floor(sample / 2 ** 32), which, 0, seed, seedHigh, words, 4 * d);
+  }
+}
+
+/** Deviations of the networks' `k`-th words. */
+function columnOf(words: Uint32Array, k: number, distribution: Distribution, count: number): Float64Array {
+  const column = new Float64Array(count);
+  for (let d = 0; d < count; d += 1) column[d] = deviate((words[4 * d + k]! + 0.5) * 2 ** -32, distribution);
+  return column;
 }
 
 /** Value of each arm over its nominal one: Σ w·s of its parts where values add, 1/Σ(w/s) where inverses do. */
@@ -110,12 +119,14 @@ function scalesOf(
     const here = parts.flatMap((part, k) => (part.armIndex === armIndex ? [{ ...part, column: deviation[k]! }] : []));
     if (here.length === 0) return scale.fill(1);
     const adds = here.length === 1 || here[0]!.adds;
-    for (const { weight, tolerance, column } of here) {
-      for (let d = 0; d < count; d += 1) {
-        const own = 1 + tolerance * column[d]!;
-        scale[d]! += adds ? weight * own : weight / own;
-      }
-    }
+    for (const { weight, tolerance, column } of here) addTo(scale, adds, weight, tolerance, column);
     return adds ? scale : scale.map((inverse) => 1 / inverse);
   });
+}
+
+function addTo(sum: Float64Array, adds: boolean, weight: number, tolerance: number, column: Float64Array): void {
+  for (let d = 0; d < sum.length; d += 1) {
+    const own = 1 + tolerance * column[d]!;
+    sum[d]! += adds ? weight * own : weight / own;
+  }
 }

@@ -1,7 +1,9 @@
-import type { Dossier, Evidence, Option } from './dossier.ts';
+import type { Change, Dossier, Evidence, Option } from './dossier.ts';
+import { asBuiltOf } from './design/as-built.ts';
 import { assumptionsOf } from './design/assumptions.ts';
 import { cautionsOf } from './design/cautions.ts';
 import { ceilingOf } from './design/ceiling.ts';
+import { differenceFromBefore } from './design/difference-from-before.ts';
 import { fittedNetworks, type FitControl, type FitStep } from './design/fitted.ts';
 import { choose, heldDb } from './design/choose.ts';
 import { closedForms, type FoundCandidate } from './design/method.ts';
@@ -18,7 +20,7 @@ import { builtEvidence } from './evidence/built-evidence.ts';
 import { endsOver } from './network/sweep.ts';
 import { terminationAt } from './network/termination-at.ts';
 import { digestOf } from './record/canonical.ts';
-import type { DesignRecord, LoadState } from './record/design-record.ts';
+import type { Build, DesignRecord, LoadState } from './record/design-record.ts';
 import { equalRipple } from './synthesis/equal-ripple.ts';
 import { leastQ } from './synthesis/pi-tee.ts';
 import { targetOf } from './synthesis/target.ts';
@@ -56,6 +58,10 @@ const isSearched = ({ method }: DesignRecord): boolean => method === 'fitted' ||
 /** Whether exact values take more than a keystroke allows, up to seconds: such a record belongs in a worker. */
 export const takesLong = (record: DesignRecord): boolean => isSearched(record) || record.method === 'equal-ripple';
 
+/** Whether there is more to it than `designAtOnce` gives: real parts, a finished board, a revision before. */
+export const hasMore = ({ build, asBuilt, previous }: DesignRecord): boolean =>
+  build !== null || asBuilt !== null || previous !== null;
+
 export type { DesignStep } from './design/real-parts.ts';
 
 /** The pipeline in pieces, for a caller that shows progress or stops it: what it has then is kept. */
@@ -64,6 +70,7 @@ export function designSteps(record: DesignRecord, control: FitControl): Generato
     equalRipple,
     search: (starts) => fittedNetworks(record, starts, control),
     real: { steps: realSteps, evidence: builtEvidence, control },
+    review: reviewMethods(control),
   });
 }
 
@@ -76,6 +83,18 @@ export interface LongMethods {
   readonly search: Search;
   /** Real parts; null: exact values alone. */
   readonly real: RealMethods | null;
+  /** What a later revision is held against; null: nothing. */
+  readonly review: ReviewMethods | null;
+}
+
+export const reviewMethods = (control: FitControl): ReviewMethods => ({
+  asBuilt: asBuiltOf,
+  difference: (dossier) => differenceFromBefore(dossier, (before) => designSteps(before, control)),
+});
+
+export interface ReviewMethods {
+  readonly asBuilt: typeof asBuiltOf;
+  readonly difference: (dossier: Dossier) => Generator<DesignStep, readonly Change[] | null>;
 }
 
 export interface RealMethods {
@@ -90,6 +109,7 @@ const none: LongMethods = {
     return [];
   },
   real: null,
+  review: null,
 };
 
 /** The pipeline with a search of the caller's: one that remembers, where only what doesn't touch it has changed. */
@@ -110,7 +130,8 @@ export function* dossierSteps(record: DesignRecord, methods: LongMethods): Gener
     kind: kind === 'pi' ? ('Pi' as const) : ('T' as const),
     q: leastQ(kind, target, load),
   }));
-  const whole = (options: readonly Option[]): Dossier => {
+  const isLast = record.build === null || methods.real === null;
+  const whole = (options: readonly Option[], last: boolean): Dossier => {
     const { proposed, chosen, chosenBy } = choose(record, options);
     const states = chosen === undefined ? [] : statesOf(record, chosen);
     const checked = chosen === undefined ? null : evidenceOf(record, chosen, states, methods.real);
@@ -132,6 +153,8 @@ export function* dossierSteps(record: DesignRecord, methods: LongMethods): Gener
       chosenBy,
       responses: chosen === undefined ? [] : states.map((state) => responseOf(record, state, chosen, reach)),
       evidence: checked,
+      asBuilt: last && methods.review !== null ? methods.review.asBuilt(record, chosen, reach) : null,
+      difference: null,
       cautions: cautionsOf(record, chosen),
       references: referencesOf(record, {
         ceiling: ceiling !== null,
@@ -140,11 +163,16 @@ export function* dossierSteps(record: DesignRecord, methods: LongMethods): Gener
       }),
     };
   };
-  const exact = whole(listed(record, assessed));
+  const exact = whole(listed(record, assessed), isLast);
   const { build } = record;
-  if (build === null || methods.real === null) return exact;
-  yield { kind: 'dossier', dossier: exact };
-  return whole(yield* methods.real.steps(record, build, exact, reach, methods.real.control));
+  const worked = build === null || methods.real === null ? exact : yield* withRealParts(build, methods.real);
+  if (record.previous === null || methods.review === null) return worked;
+  return { ...worked, difference: yield* methods.review.difference(worked) };
+
+  function* withRealParts(policy: Build, real: RealMethods): Generator<DesignStep, Dossier> {
+    yield { kind: 'dossier', dossier: exact };
+    return whole(yield* real.steps(record, policy, exact, reach, real.control), true);
+  }
 }
 
 function* fitSteps(search: ReturnType<Search>): Generator<DesignStep, readonly FoundCandidate[]> {

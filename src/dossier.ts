@@ -1,4 +1,6 @@
+import type { AsBuiltFigures } from './evidence/as-built-figures.ts';
 import type { Evidence } from './evidence/evidence.ts';
+import type { Change } from './record/change.ts';
 import type { Corners, PartSensitivity, Percentiles, Yield } from './evidence/tolerance-figures.ts';
 import type { Stress } from './evidence/stress-figures.ts';
 import type { CoilWinding } from './parts/coil-winding.ts';
@@ -11,6 +13,8 @@ import type { DesignRecord, Method, Required } from './record/design-record.ts';
 export type { Corners, PartSensitivity, Percentiles, Yield } from './evidence/tolerance-figures.ts';
 export type { PartStress, Stress, StressFigures, StressKind } from './evidence/stress-figures.ts';
 export type { CoilWinding } from './parts/coil-winding.ts';
+export type { AsBuiltFigures } from './evidence/as-built-figures.ts';
+export type { Change } from './record/change.ts';
 export type { Evidence, EvidenceCheck, Route } from './evidence/evidence.ts';
 
 /**
@@ -46,6 +50,10 @@ export interface Dossier {
   /** The chosen option's sweep over the span shown, one a load state, the governing one first. */
   readonly responses: readonly Response[];
   readonly evidence: Evidence | null;
+  /** The finished board against the prediction; null where none was measured, or not yet worked out. */
+  readonly asBuilt: AsBuiltFigures | null;
+  /** What is otherwise than in the revision before, in record, results and verdicts; null: there is none before. */
+  readonly difference: readonly Change[] | null;
   /** Of the chosen network and of the work; safety included. */
   readonly cautions: readonly Caution[];
   /** Only those really applied, each with what it was applied for. */

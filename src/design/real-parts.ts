@@ -38,7 +38,11 @@ export function* realSteps(
   const order = exact.options.toSorted((a, b) => first(a) - first(b));
   for (const [k, option] of order.entries()) {
     if (control.stopped) break;
-    const judged = withBuilt(record, option, yield* working(builtSteps(record, build, option, states, option.id === exact.chosen ? shownOf(option) : null)));
+    const judged = withBuilt(
+      record,
+      option,
+      yield* working(builtSteps(record, build, option, states, option.id === exact.chosen ? shownOf(option) : null)),
+    );
     byId.set(option.id, judged);
     yield { kind: 'option', option: judged, done: k + 1, of: order.length };
   }

@@ -3,24 +3,9 @@ import type { DcPath } from '../network/dc-path.ts';
 import { modelWords } from '../network/read-model.ts';
 import { isMeasured, isModel, type MeasuredTermination, type Termination } from '../network/termination.ts';
 import { formatFixed, formatImpedanceRead, formatQuantity } from '../quantity/format.ts';
-import type { Span } from '../quantity/span.ts';
+import { frequencySpan } from '../quantity/figures-in-words.ts';
 
-/** "150.5 MHz to 152.0 MHz"; a narrow span with as many digits as show its width. */
-export function frequencySpan({ low, high }: Span): string {
-  const width = high > low ? Math.ceil(-Math.log10((high - low) / high)) : 0;
-  const digits = Math.min(12, Math.max(4, width + 2));
-  return `${formatQuantity(low, 'Hz', digits)} to ${formatQuantity(high, 'Hz', digits)}`;
-}
-
-/** Two decibel figures that must not look the same when they aren't: two decimals, or as many as tell them apart. */
-export function decibelPair(a: number, b: number): readonly [string, string] {
-  let decimals = 2;
-  while (a !== b && decimals < 9 && formatFixed(a, decimals) === formatFixed(b, decimals)) decimals += 1;
-  return [`${formatFixed(a, decimals)} dB`, `${formatFixed(b, decimals)} dB`];
-}
-
-/** A return loss in words: beyond 100 dB the figure is rounding. */
-export const returnLossWords = (db: number): string => (db > 100 ? 'over 100 dB' : `${formatFixed(db, 2)} dB`);
+export { decibelPair, frequencySpan, returnLossWords } from '../quantity/figures-in-words.ts';
 
 export function dcWords({ blocked, sourceShorted, loadShorted }: DcPath): string {
   const ends = [sourceShorted ? 'source' : '', loadShorted ? 'load' : ''].filter((end) => end !== '');

@@ -110,6 +110,8 @@ export interface EarlierRevision {
 /** What the analyser measured on the finished board, looking in from the source side with the load attached. */
 export interface AsBuilt {
   readonly measured: MeasuredData;
+  /** Load state that was attached, by its name; null: not said. */
+  readonly state: string | null;
   readonly note: string;
 }
 

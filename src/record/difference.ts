@@ -118,6 +118,7 @@ const asBuilt = (of: AsBuilt | null): readonly Statement[] =>
     ? []
     : [
         measuredStatement('Measured on the board', of.measured),
+        ...(of.state === null ? [] : [text('Load attached to the board', of.state)]),
         ...(of.note === '' ? [] : [text('Note on the measurement', of.note)]),
       ];
 

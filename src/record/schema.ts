@@ -237,6 +237,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     asBuilt: v.nullable(
       v.strictObject({
         measured: measuredData('board'),
+        state: v.nullable(text('the load state attached', limits.stateLetters)),
         note: text('the note on the board', limits.reasonLetters, controlsButNewLine),
       }),
     ),
@@ -259,6 +260,13 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       'a least yield is asked for, of networks that hold a return loss; give that too, or ask for no yield',
     ),
     ['requirement', 'returnLossDb'],
+  ),
+  v.forward(
+    v.check(
+      ({ asBuilt, loads }) => asBuilt?.state == null || loads.some(({ name }) => name === asBuilt.state),
+      'the board was measured with a load state that there is not; name one of them, or none',
+    ),
+    ['asBuilt'],
   ),
   v.forward(
     v.check(

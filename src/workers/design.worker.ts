@@ -1,4 +1,4 @@
-import { dossierSteps } from '../design.ts';
+import { dossierSteps, reviewMethods } from '../design.ts';
 import type { FitControl } from '../design/fitted.ts';
 import { realSteps } from '../design/real-parts.ts';
 import { builtEvidence } from '../evidence/built-evidence.ts';
@@ -34,6 +34,7 @@ async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Prom
     equalRipple,
     search: rememberedSearch(record, control),
     real: { steps: realSteps, evidence: builtEvidence, control },
+    review: reviewMethods(control),
   });
   try {
     let since = performance.now();

@@ -57,7 +57,7 @@ const build: Build = {
   ratedWatts: 0.5,
   winding: { wireM: 1e-3, formM: 6e-3, gapM: 5e-4 },
 };
-const asBuilt = { measured: { ...measured, name: 'board.s1p' }, note: 'board 3' };
+const asBuilt = { measured: { ...measured, name: 'board.s1p' }, state: 'in hand', note: 'board 3' };
 const model: Termination = { model: 'rc-series', values: [12, 8.2e-12] };
 
 /** Any record, and every branch of what it may hold grown on it. */

@@ -1,18 +1,8 @@
-/** The formulas of the basis of calculation, all on one list so that their numbers are seen to run on. A number, once published, keeps its meaning: reports cite it. */
-export interface Formula {
-  readonly number: string;
-  readonly title: string;
-  /** Each in the notation of `mathml`. */
-  readonly lines: readonly string[];
-  /** When it holds, what a case left open comes to. */
-  readonly text: readonly string[];
-  /** Symbol, meaning, unit, range where it is limited. */
-  readonly symbols: readonly (readonly [symbol: string, meaning: string, unit: string, range: string])[];
-  readonly source: string;
-}
+import type { Formula } from './_formula.ts';
 
 const theory = 'Circuit theory.';
 
+/** The formulas of exact parts, all on one list so that their numbers are seen to run on. */
 export const formulas: readonly Formula[] = [
   {
     number: 'B1',
@@ -338,7 +328,7 @@ export const formulas: readonly Formula[] = [
     title: 'Loss in the parts',
     lines: ['R_ser = frac(ω_0 L; Q_ind)  ,  R_ser = frac(1; ω_0 C Q_cap)', 'A = 10 log10 frac(P_in; P_load)'],
     text: [
-      'At the design frequency alone, each part with the series resistance that its quality factor means. Every other figure takes parts as lossless.',
+      'At the design frequency alone, each part with the series resistance that its quality factor means. Figures with real parts are of B26 and on.',
     ],
     symbols: [
       ['Q_ind', 'of inductors', '1', '50 by default'],

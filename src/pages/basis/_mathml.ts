@@ -8,7 +8,7 @@
 export function mathml(text: string): string {
   const tokens =
     text.match(
-      /frac\(|sqrt\(|[_^]\{[^}]*\}|[_^][A-Za-z0-9∗*]+|Im|log10|sinh|cosh|tanh|sin|for\b|[a-zA-ZΓω]|\d+(?:\.\d+)?|\S/gu,
+      /frac\(|sqrt\(|[_^]\{[^}]*\}|[_^][A-Za-z0-9∗*]+|Im|Re\b|RL|min|max|log10|sinh|cosh|tanh|sin|for\b|[a-zA-ZΓωηπ]|\d+(?:\.\d+)?|\S/gu,
     ) ?? [];
   let next = 0;
 
@@ -60,7 +60,8 @@ export function mathml(text: string): string {
     if (/^\d/u.test(token)) return `<mn>${token}</mn>`;
     if (token === 'log10') return `${thin}<msub>${upright('log')}<mn>10</mn></msub>${thin}`;
     if (token === 'for') return '<mtext>\u2002for\u2002</mtext>';
-    if (token === 'Im' || /^(?:sin|cos|tan)/u.test(token)) return upright(token) + thin;
+    if (/^(?:Im|Re|RL|min|max|sin|cos|tan)$/u.test(token) || /^(?:sin|cos|tan)/u.test(token))
+      return upright(token) + thin;
     if (token === 'j' || token === 'Γ' || token === 'Ω') return upright(token);
     if (/^\p{L}/u.test(token)) return `<mi>${token}</mi>`;
     const unary = before === undefined || /^[=±,:;(|]$|^frac\($|^sqrt\($/u.test(before);

@@ -111,6 +111,8 @@ export const plainDossier: Dossier = {
   chosen: 'series-shunt',
   chosenBy: 'proposal',
   responses: [],
+  asBuilt: null,
+  difference: null,
   evidence: {
     frequenciesHz: [151.25e6],
     routes: [],

@@ -175,7 +175,12 @@ describe('recordDifference(before, after)', () => {
   it('tells the history, the revision carried along, the measurement and the sign-off', () => {
     const signOff = { ...plainRecord.signOff, state: 'issued' as const };
     const history = [{ revision: 'A', date: '2026-01-31', change: 'first issue', digest }];
-    const changes = from({ history, previous: plainRecord, asBuilt: { ...measured('board.s1p'), note: '' }, signOff });
+    const changes = from({
+      history,
+      previous: plainRecord,
+      asBuilt: { ...measured('board.s1p'), state: null, note: '' },
+      signOff,
+    });
     expect(changes).toEqual([
       'identity / History, revision A: none -> added: 2026-01-31, first issue, SHA-256 0123456789abcdef…',
       expect.stringMatching(

@@ -64,7 +64,7 @@ describe('revise(record, next)', () => {
       re: [0],
       im: [0],
     };
-    const measured = { ...issued, asBuilt: { measured: data, note: 'board 3' } };
+    const measured = { ...issued, asBuilt: { measured: data, state: null, note: 'board 3' } };
     expect(revise(measured, next).asBuilt).toBeNull();
     expect(revise(measured, next).previous?.asBuilt).toEqual(measured.asBuilt);
   });

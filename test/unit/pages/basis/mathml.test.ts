@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { formulas } from '../../../../src/pages/basis/_formulas.ts';
+import { formulas as exact } from '../../../../src/pages/basis/_formulas.ts';
+import { realFormulas } from '../../../../src/pages/basis/_formulas-real.ts';
 import { mathml } from '../../../../src/pages/basis/_mathml.ts';
 
+const formulas = [...exact, ...realFormulas];
 const bare = (text: string) => mathml(text).replace(/<\/?math[^>]*>/gu, '');
 
 describe('mathml(text)', () => {

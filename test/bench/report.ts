@@ -16,6 +16,7 @@ import {
 } from 'pdf-lib';
 import { design } from '../../src/design.ts';
 import { readRecord } from '../../src/record/read-record.ts';
+import { attachments, type Attachment } from '../../src/report/attachments.ts';
 import { report } from '../../src/report/report.ts';
 import type { Figure } from './figure.ts';
 import { median, timeOf } from './timing.ts';
@@ -34,16 +35,17 @@ interface Count {
 
 /**
  * Time of a report, from its dossier to its bytes, against pdf-lib writing as many text and path operators on as many
- * pages, with the same font files put into the document; taken in turns in one run, medians.
+ * pages, with the same font files put into the document and the same files attached; taken in turns in one run, medians.
  */
 export async function benchReport(): Promise<readonly Figure[]> {
   const dossier = design(readRecord(file('demo/tide-gauge.json').toString()));
   const fonts = { regular: file('fonts/ferrule-regular.ttf'), bold: file('fonts/ferrule-bold.ttf') };
   const ours = () => report(dossier, { paper: 'a4', fonts });
+  const attached = attachments(dossier);
   const counts = await countsOf(await ours());
   const times: (readonly [number, number])[] = [];
   for (let turn = 0; turn < turns; turn += 1)
-    times.push([await timeOf(ours), await timeOf(() => plain(counts, fonts))]);
+    times.push([await timeOf(ours), await timeOf(() => plain(counts, fonts, attached))]);
   const settled = times.slice(5);
   const ratio = median(settled.map(([here, there]) => here / there));
   const [here, there] = [median(settled.map(([time]) => time)), median(settled.map(([, time]) => time))];
@@ -74,9 +76,14 @@ async function countsOf(bytes: Uint8Array): Promise<readonly Count[]> {
   });
 }
 
-async function plain(counts: readonly Count[], fonts: Readonly<Record<string, Uint8Array>>): Promise<Uint8Array> {
+async function plain(
+  counts: readonly Count[],
+  fonts: Readonly<Record<string, Uint8Array>>,
+  attached: readonly Attachment[],
+): Promise<Uint8Array> {
   const document = await PDFDocument.create();
   for (const bytes of Object.values(fonts)) document.context.register(document.context.flateStream(bytes));
+  for (const { name, text } of attached) await document.attach(new TextEncoder().encode(text), name);
   const font = await document.embedFont(StandardFonts.Helvetica);
   for (const { texts, points, paints } of counts) {
     const page = document.addPage();

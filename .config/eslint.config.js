@@ -44,7 +44,13 @@ export default defineConfig(
     ignores: ['src/cli/**', 'src/workers/**', 'src/pages/**', 'src/layouts/**'],
     languageOptions: {
       parserOptions: { lib: ['es2023'] },
-      globals: { TextEncoder: 'readonly', TextDecoder: 'readonly', WebAssembly: 'readonly' },
+      globals: {
+        TextEncoder: 'readonly',
+        TextDecoder: 'readonly',
+        WebAssembly: 'readonly',
+        ReadableStream: 'readonly',
+        DecompressionStream: 'readonly',
+      },
     },
     rules: { 'no-undef': 'error' },
   },

@@ -19,6 +19,7 @@ const floors = [
   ['src/design.ts'],
   ['src/figures/'],
   ['src/report/'],
+  ['src/recheck/'],
   ['src/cli/', 'src/workers/', 'src/styles/'],
   ['components/'],
   ['src/layouts/'],

@@ -4,6 +4,7 @@ import type { Block } from '../page/block.ts';
 import { ceiling } from './ceiling.ts';
 import { cautions, references } from './closing.ts';
 import { contents } from './contents.ts';
+import { dc } from './dc.ts';
 import { deviations } from './deviations.ts';
 import { files } from './files.ts';
 import { history } from './history.ts';
@@ -12,10 +13,13 @@ import { options } from './options.ts';
 import { assumptions, requirement } from './requirement.ts';
 import { response } from './response.ts';
 import { signOff } from './sign-off.ts';
+import { stress } from './stress.ts';
 import { terminations } from './terminations.ts';
 import { titleBlock } from './title-block.ts';
+import { tolerance } from './tolerance.ts';
 import { verdict } from './verdict.ts';
 import { bandwidth, verification } from './verification.ts';
+import { winding } from './winding.ts';
 
 /** The numbered parts that speak of the design, in their order. */
 const ofDesign = [
@@ -28,6 +32,10 @@ const ofDesign = [
   response,
   verification,
   bandwidth,
+  tolerance,
+  stress,
+  dc,
+  winding,
   cautions,
   deviations,
   references,

@@ -1,9 +1,12 @@
 import type { Dossier, Option } from '../../dossier.ts';
 import { schematic } from '../../figures/schematic.ts';
+import type { Arm } from '../../network/arm.ts';
 import { formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { loadLabel, terminationLabel } from '../../record/read-termination.ts';
 import { plain, text, type Block } from '../page/block.ts';
+import { order } from './order.ts';
 import { parts } from './parts.ts';
+import { whyNotBuilt } from './real-words.ts';
 import { chosenOption, reasonsOf, sentence, valueOf } from './words.ts';
 
 /** The chosen network: who chose it and why, its schematic, and the parts to order. */
@@ -11,7 +14,8 @@ export function network(dossier: Dossier): readonly Block[] {
   const option = chosenOption(dossier.options, dossier.chosen);
   const heading: Block = { kind: 'heading', number: parts.network, text: 'Chosen network' };
   if (option === undefined) return [heading, text('There is no network to choose.')];
-  const { source, loads, requirement } = dossier.record;
+  const { source, loads, requirement, build } = dossier.record;
+  const { built } = option;
   const f0 = formatQuantity(requirement.frequencyHz, 'Hz', 5);
   return [
     heading,
@@ -19,12 +23,24 @@ export function network(dossier: Dossier): readonly Block[] {
     { ...text(why(dossier, option)), keep: true },
     {
       kind: 'picture',
-      figure: schematic(option.arms, option.designators, terminationLabel(source), loadLabel(loads)),
-      caption: `Figure 1. Chosen network; at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}${loads.length > 1 ? ` with the load ${option.worstState}, the state that governs` : ''}.`,
+      figure: schematic(drawnArms(option), option.designators, terminationLabel(source), loadLabel(loads)),
+      caption: `Figure 1. Chosen network${built === null ? ';' : ', values as ordered; with exact values,'} at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}${loads.length > 1 ? ` with the load ${option.worstState}, the state that governs` : ''}.`,
       scale: 1,
     },
-    { kind: 'heading', text: 'Parts to order' },
-    ...(option.arms.length === 0 ? [text('None: the terminations are connected directly.')] : [partsList(option)]),
+    ...(built === null || build === null ? exactParts(dossier, option) : order(dossier, option, built, build)),
+  ];
+}
+
+/** A drawing and a parts list that disagree would both be wrong: of real parts, the values are those to order. */
+const drawnArms = ({ arms, built }: Option): readonly Arm[] =>
+  built === null ? arms : arms.map((arm, k) => ({ ...arm, value: built.ladder.arms[k]?.value ?? arm.value }));
+
+function exactParts(dossier: Dossier, option: Option): readonly Block[] {
+  return [
+    { kind: 'heading', text: 'Parts' },
+    ...(option.arms.length === 0
+      ? [text('None: the terminations are connected directly.')]
+      : [{ ...text(`Exact values: ${whyNotBuilt(dossier)}.`), keep: true }, partsList(option)]),
   ];
 }
 

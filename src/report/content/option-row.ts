@@ -4,10 +4,16 @@ import { schematicThumbnail } from '../../figures/schematic-thumbnail.ts';
 import { returnLossDb } from '../../network/figures-of-merit.ts';
 import { formatFixed, formatQuantity } from '../../quantity/format.ts';
 import { plain, type Cell, type Column, type Paragraph, type Row } from '../page/block.ts';
+import type { DesignRecord } from '../../record/design-record.ts';
 import { methodNames } from './methods.ts';
+import { mostStressed, orderWords, percent, returnLossName } from './real-words.ts';
 import { attenuation, partsOf, reasonsOf, sentence } from './words.ts';
 
-export const optionColumns: readonly Column[] = [
+/** The columns of an option's figures, with real parts or without. */
+export const optionColumns = (record: DesignRecord): readonly Column[] =>
+  record.build === null ? exactColumns : realColumns(record);
+
+const exactColumns: readonly Column[] = [
   { title: 'No.', share: 15 },
   { title: 'Network, source on the left', share: 150 },
   { title: 'Half-power band', share: 100 },
@@ -15,6 +21,16 @@ export const optionColumns: readonly Column[] = [
   { title: 'Loss at stated\u00a0Q', share: 42, align: 'end' },
   { title: 'Attenuation at\u00a02f₀', share: 48, align: 'end' },
   { title: 'Attenuation at\u00a03f₀', share: 48, align: 'end' },
+];
+
+const realColumns = (record: DesignRecord): readonly Column[] => [
+  { title: 'No.', share: 15 },
+  { title: 'Network, source on the left', share: 140 },
+  { title: 'Half-power band', share: 100 },
+  { title: 'Parts', share: 28 },
+  { title: returnLossName(record), share: 52, align: 'end' },
+  { title: 'Loss', share: 40, align: 'end' },
+  { title: 'Yield', share: 40, align: 'end' },
 ];
 
 /** An option in full: its drawing, and under its figures the verdict, the states, DC and cautions. */
@@ -41,7 +57,7 @@ export function optionRow(option: Option, dossier: Dossier): Row {
         plain(partsOf(option), 'small'),
         ...(dossier.record.method === 'all' ? [plain(`Method: ${methodNames[option.method]}`, 'small')] : []),
       ],
-      ...figures(option),
+      ...figures(option, dossier),
     ],
     below: { from: 2, paragraphs: below },
     marked: id === dossier.chosen,
@@ -54,7 +70,7 @@ export function compactRow(option: Option, dossier: Dossier): Row {
     cells: [
       [plain(numberOf(option, dossier), 'small')],
       [{ spans: [{ text: option.title, bold: true }], style: 'small' }],
-      ...figures(option),
+      ...figures(option, dossier),
     ],
     below: {
       from: 1,
@@ -67,18 +83,36 @@ export function compactRow(option: Option, dossier: Dossier): Row {
 const numberOf = ({ id }: Option, { options }: Dossier): string =>
   String(options.findIndex((option) => option.id === id) + 1);
 
-function figures({ halfPower, worstReturnLossDb, lossDb, harmonicDb }: Option): readonly Cell[] {
-  const harmonic = (order: 2 | 3): string => {
-    const found = harmonicDb.find((entry) => entry.order === order);
-    return found === undefined ? '–' : attenuation(found.attenuationDb);
-  };
+const figures = (option: Option, { record }: Dossier): readonly Cell[] =>
+  record.build === null ? exactFigures(option) : bothFigures(option);
+
+function exactFigures({ halfPower, worstReturnLossDb, lossDb, harmonicDb }: Option): readonly Cell[] {
   return [
     halfPower.words,
     worstReturnLossDb === null ? 'no band' : returnLossWords(worstReturnLossDb),
     `${formatFixed(lossDb, 2)} dB`,
-    harmonic(2),
-    harmonic(3),
+    harmonic(harmonicDb, 2),
+    harmonic(harmonicDb, 3),
   ].map((words) => [plain(words, 'small')]);
+}
+
+/** Figures of exact values over those of real parts. */
+function bothFigures({ halfPower, worstReturnLossDb, reflection, lossDb, built }: Option): readonly Cell[] {
+  const pairs = [
+    ['exact', 'real'],
+    [
+      returnLossWords(worstReturnLossDb ?? returnLossDb(reflection ** 2)),
+      built === null ? '–' : returnLossWords(built.worstReturnLossDb),
+    ],
+    [`${formatFixed(lossDb, 2)} dB`, built === null ? '–' : `${formatFixed(built.lossDb, 2)} dB`],
+    ['–', built === null || built.yield === null ? '–' : percent(built.yield.value)],
+  ];
+  return [[plain(halfPower.words, 'small')], ...pairs.map((lines) => lines.map((line) => plain(line, 'small')))];
+}
+
+function harmonic(harmonicDb: Option['harmonicDb'], order: 2 | 3): string {
+  const found = harmonicDb.find((entry) => entry.order === order);
+  return found === undefined ? '–' : attenuation(found.attenuationDb);
 }
 
 function verdictLine(option: Option, { chosen, proposed }: Dossier): Paragraph {
@@ -93,13 +127,16 @@ function verdictLine(option: Option, { chosen, proposed }: Dossier): Paragraph {
   };
 }
 
-/** Each load state's return loss, and how far a fitted network stays below the ceiling. */
-function figuresBelow(option: Option, { ceiling }: Dossier): readonly Paragraph[] {
-  const { states, worstState, method, ceilingGapDb } = option;
-  const lines: string[] = [];
+/** What is ordered and bears most; each load state's return loss; how far a fitted network stays below the ceiling. */
+function figuresBelow(option: Option, { ceiling, record }: Dossier): readonly Paragraph[] {
+  const { states, worstState, method, ceilingGapDb, harmonicDb } = option;
+  const lines: string[] = record.build === null ? [] : realLines(option);
+  if (record.build !== null) {
+    lines.push(`Attenuation ${harmonic(harmonicDb, 2)} at 2f₀, ${harmonic(harmonicDb, 3)} at 3f₀ (exact values).`);
+  }
   if (states.length > 1) {
     const each = states.map((state) => stateWords(state) + (state.name === worstState ? ', governs' : ''));
-    lines.push(`By load state: ${each.join('; ')}.`);
+    lines.push(`By load state${record.build === null ? '' : ', exact values'}: ${each.join('; ')}.`);
   }
   if (method === 'fitted' && ceiling !== null && ceilingGapDb !== null) {
     const name = ceiling.estimate ? 'estimated ceiling' : 'ceiling';
@@ -108,6 +145,15 @@ function figuresBelow(option: Option, { ceiling }: Dossier): readonly Paragraph[
     lines.push(`${top > 100 ? 'Far below' : gap} the ${name} (${returnLossWords(top)}).`);
   }
   return lines.map((line) => plain(line, 'small'));
+}
+
+function realLines({ built }: Option): string[] {
+  if (built === null) return ['Real parts: not worked out.'];
+  const stressed = mostStressed(built);
+  return [
+    ...(built.parts.length === 0 ? [] : [`To order: ${orderWords(built)}.`]),
+    ...(stressed === null ? [] : [`Most stressed: ${stressed}.`]),
+  ];
 }
 
 function stateWords({ name, worstReturnLossDb, worstAtHz, reflection }: StateFigures): string {

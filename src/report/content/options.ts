@@ -39,7 +39,7 @@ function countWords({ options: list, record }: Dossier): string {
 
 const table = (list: readonly Option[], dossier: Dossier, row: typeof optionRow): Block => ({
   kind: 'table',
-  columns: optionColumns,
+  columns: optionColumns(dossier.record),
   rows: list.map((option) => row(option, dossier)),
 });
 

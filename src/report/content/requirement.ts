@@ -4,6 +4,7 @@ import type { DesignRecord } from '../../record/design-record.ts';
 import { plain, type Block } from '../page/block.ts';
 import { methodAsked } from './methods.ts';
 import { parts } from './parts.ts';
+import { realRequired } from './real-required.ts';
 import { notStated, spanRead } from './words.ts';
 
 /** What was asked, as the record holds it. */
@@ -26,8 +27,9 @@ export function requirement({ record }: Dossier): readonly Block[] {
     ['DC between source and load', blockDc ? 'must be blocked' : 'need not be blocked'],
     ['DC to be kept', keepDc === 'none' ? 'none' : `at ${ends[keepDc]}: the network must not short it to ground`],
     ['Practicable parts', `inductors ${spanRead(inductorH, 'H')}, capacitors ${spanRead(capacitorF, 'F')}`],
-    ['Q of parts, for the loss alone', qOf(record)],
+    [record.build === null ? 'Q of parts, for the loss alone' : 'Q of parts at f₀', qOf(record)],
     ['Available power', powerW === null ? notStated : formatRead(powerW, 'W')],
+    ...realRequired(record.build),
   ];
   return [
     { kind: 'heading', number: parts.requirement, text: 'Requirement' },

@@ -1,12 +1,14 @@
 import type { Dossier, Response } from '../../dossier.ts';
 import { returnLossWords } from '../../design/words.ts';
+import { chartSize } from '../../figures/chart-frame.ts';
 import { gainPlot } from '../../figures/gain-plot.ts';
 import { reflectionPlane } from '../../figures/reflection-plane.ts';
 import { returnLossPlot } from '../../figures/return-loss-plot.ts';
 import { formatFixed, formatQuantity, formatRead } from '../../quantity/format.ts';
 import { plain, text, type Block, type Column, type Row } from '../page/block.ts';
 import { parts } from './parts.ts';
-import { chosenOption, sampleAt, spanRead } from './words.ts';
+import { bandWords, percentilesBy, realFiguresAt } from './real-response.ts';
+import { chosenOption, namedFrequencies, sampleAt, spanRead } from './words.ts';
 
 /** The sweep in pictures, and its figures at the frequencies that the requirement names. */
 export function response(dossier: Dossier): readonly Block[] {
@@ -16,6 +18,7 @@ export function response(dossier: Dossier): readonly Block[] {
   const [swept] = responses;
   if (option === undefined || swept === undefined) return [heading, text('Without a network there is no response.')];
   const { requirement } = record;
+  const real = percentilesBy(responses, option.built);
   const span = `${formatQuantity(swept.spanHz.low, 'Hz')} to ${formatQuantity(swept.spanHz.high, 'Hz')}`;
   const into = responses.length > 1 ? ` into each of ${String(responses.length)} load states` : '';
   const governing = responses.length > 1 ? ` of ${swept.state}` : '';
@@ -23,13 +26,18 @@ export function response(dossier: Dossier): readonly Block[] {
     heading,
     { ...text(`Swept from ${span}${into}, ${String(swept.frequencyHz.length)} points.`), keep: true },
     ...figuresAt(responses, requirement),
+    ...(real === null ? [] : realFiguresAt(real, requirement)),
     {
       kind: 'picture',
-      figure: returnLossPlot(responses, requirement),
-      caption:
+      figure: returnLossPlot(responses, requirement, chartSize, real),
+      caption: [
         requirement.returnLossDb === null
           ? 'Figure 2. Return loss.'
           : `Figure 2. Return loss; the hatched region is the requirement${requirement.bandHz === null ? '' : ` (${spanRead(requirement.bandHz, 'Hz')})`} and must stay free.`,
+        bandWords(real, record),
+      ]
+        .filter((words) => words !== '')
+        .join(' '),
       scale: 1.1,
     },
     {
@@ -51,11 +59,7 @@ function figuresAt(
   responses: readonly Response[],
   { frequencyHz, bandHz }: Dossier['record']['requirement'],
 ): readonly Block[] {
-  const named: readonly (readonly [string, number])[] = [
-    ...(bandHz === null ? [] : ([['Lower band edge', bandHz.low]] as const)),
-    ['Design frequency', frequencyHz],
-    ...(bandHz === null ? [] : ([['Upper band edge', bandHz.high]] as const)),
-  ];
+  const named = namedFrequencies({ frequencyHz, bandHz });
   const several = responses.length > 1;
   const rows = responses.flatMap((swept, state) =>
     named.flatMap(([name, hertz], k): readonly Row[] => {

@@ -5,6 +5,7 @@ import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/for
 import { plain, type Block } from '../page/block.ts';
 import { allAccepted } from './deviations.ts';
 import { parts } from './parts.ts';
+import { orderWords, percent, returnLossName, stressBrief, yieldBrief } from './real-words.ts';
 import { chosenOption, partsOf, reasonsOf } from './words.ts';
 
 /** The answer first: whether the chosen network meets what was asked, why, and its leading figures. */
@@ -22,11 +23,11 @@ export function verdict(dossier: Dossier): readonly Block[] {
   const words = option.meets ? [reasonsOf(option)] : [reasonsOf(option), shortfall(dossier)];
   return [
     ...bar(option.meets ? 'Meets the requirement' : 'Falls short of the requirement', [
-      `${option.title}: ${partsOf(option)}.`,
+      `${option.title}: ${option.built === null ? partsOf(option) : orderWords(option.built)}.`,
       ...words,
       ...proof,
     ]),
-    { kind: 'facts', columns: 4, entries: figures(dossier, option) },
+    { kind: 'facts', columns: 4, entries: [...realFigures(dossier, option), ...figures(dossier, option)] },
   ];
 }
 
@@ -54,18 +55,36 @@ function bar(headline: string, words: readonly string[]): readonly Block[] {
   ];
 }
 
-function figures({ record }: Dossier, option: Option): { readonly name: string; readonly value: string }[] {
+type Entry = { readonly name: string; readonly value: string };
+
+/** What decides, first; the figures of exact values follow. */
+function realFigures({ record }: Dossier, { built }: Option): readonly Entry[] {
+  if (built === null) return [];
+  const into = record.loads.length > 1 ? `, ${built.worstState}` : '';
+  return [
+    { name: `${returnLossName(record)}, real parts${into}`, value: returnLossWords(built.worstReturnLossDb) },
+    { name: 'Yield (95 % interval)', value: yieldBrief(built) },
+    { name: 'Loss, real parts', value: `${formatFixed(built.lossDb, 2)} dB, efficiency ${percent(built.efficiency)}` },
+    { name: 'Stress', value: stressBrief(built) },
+  ];
+}
+
+function figures({ record }: Dossier, option: Option): readonly Entry[] {
   const worst = option.worstReturnLossDb;
   const into = option.states.length > 1 ? `, ${option.worstState}` : '';
-  const f0 = formatQuantity(record.requirement.frequencyHz, 'Hz', 5);
+  const exact = record.build === null ? '' : ', exact values';
+  const f0 = record.build === null ? formatQuantity(record.requirement.frequencyHz, 'Hz', 5) : 'f₀';
   return [
     {
-      name: worst === null ? `Return loss at ${f0}${into}` : `Worst return loss in the band${into}`,
+      name:
+        worst === null
+          ? `Return loss at ${f0}${exact}${into}`
+          : `Worst return loss${exact === '' ? ' in the band' : exact}${into}`,
       value: worst === null ? atDesignFrequency(option) : returnLossWords(worst),
     },
-    { name: `Impedance seen at ${f0}${into}`, value: formatImpedance(option.seen.r, option.seen.x) },
-    { name: `Transducer gain at ${f0}${into}`, value: formatFixed(option.transducerGain, 6) },
-    { name: `Half-power band${into}`, value: option.halfPower.words },
+    { name: `Impedance seen at ${f0}${exact}${into}`, value: formatImpedance(option.seen.r, option.seen.x) },
+    { name: `Transducer gain at ${f0}${exact}${into}`, value: formatFixed(option.transducerGain, 6) },
+    { name: `Half-power band${exact}${into}`, value: option.halfPower.words },
   ];
 }
 

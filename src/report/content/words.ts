@@ -50,8 +50,18 @@ export const chosenOption = <O extends { readonly id: string }>(
   id: string | null,
 ): O | undefined => options.find((option) => option.id === id);
 
+/** The frequencies that a requirement names, Hz, each with what it is. */
+export const namedFrequencies = ({
+  frequencyHz,
+  bandHz,
+}: Pick<DesignRecord['requirement'], 'frequencyHz' | 'bandHz'>): readonly (readonly [string, number])[] => [
+  ...(bandHz === null ? [] : ([['Lower band edge', bandHz.low]] as const)),
+  ['Design frequency', frequencyHz],
+  ...(bandHz === null ? [] : ([['Upper band edge', bandHz.high]] as const)),
+];
+
 /** Index of a frequency among a response's samples; -1 when the sweep doesn't hold it. */
-export const sampleAt = ({ frequencyHz }: Response, hertz: number): number =>
+export const sampleAt = ({ frequencyHz }: Pick<Response, 'frequencyHz'>, hertz: number): number =>
   frequencyHz.findIndex((sample) => Math.abs(sample - hertz) <= 1e-9 * hertz);
 
 export const sentence = (words: string): string => {

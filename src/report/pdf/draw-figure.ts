@@ -28,7 +28,7 @@ export function drawFigure(
   for (const shape of figure.shapes) {
     if (shape.kind === 'path') {
       const path = pathOperators(shape.d, x, height - y, scale);
-      if (shape.fill !== undefined) pen.fill(path, shape.fill);
+      if (shape.fill !== undefined) pen.fill(path, shape.fill, shape.fillOpacity);
       if (shape.stroke !== undefined) {
         pen.stroke(
           path,

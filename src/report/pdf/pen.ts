@@ -1,4 +1,5 @@
 import type { Tone } from '../../figures/figure.ts';
+import { opacityName } from './opacity.ts';
 
 /** Device RGB, 0 to 1, as operands. Ink on paper and one accent; told apart in black and white too. */
 const colours: Record<Tone, string> = {
@@ -47,9 +48,11 @@ export class Pen {
     this.#parts.push(path, 'S');
   }
 
-  fill(path: string, tone: Tone): void {
+  /** @param opacity 0 to 1; what was drawn before shows through */
+  fill(path: string, tone: Tone, opacity = 1): void {
     this.#fillWith(tone);
-    this.#parts.push(path, 'f');
+    if (opacity === 1) this.#parts.push(path, 'f');
+    else this.#parts.push('q', `/${opacityName(opacity)} gs`, path, 'f', 'Q');
   }
 
   /** An operator that draws nothing: opens or closes marked content. */

@@ -1,21 +1,8 @@
 import { html, nothing, type TemplateResult } from 'lit';
-
-/** A table as plain texts, so that what is shown and what is copied are the same. */
-export interface Rows {
-  /** Names of the columns; those of figures stand to the right. */
-  readonly columns: readonly { readonly name: string; readonly figure: boolean }[];
-  readonly rows: readonly (readonly string[])[];
-}
-
-export const column = (name: string): Rows['columns'][number] => ({ name, figure: false });
-export const figure = (name: string): Rows['columns'][number] => ({ name, figure: true });
-
-/** For a spreadsheet: one row a line under the names of its columns, apart by tabs. */
-export const rowsText = ({ columns, rows }: Rows): string =>
-  [columns.map(({ name }) => name), ...rows].map((cells) => cells.join('\t')).join('\n');
+import type { Rows } from './rows.ts';
 
 /**
- * The same on the page, in a box that scrolls sideways where it must. The first cell of a row names it.
+ * A table on the page, in a box that scrolls sideways where it must. The first cell of a row names it.
  *
  * @param label names the box
  * @param bars  one a row, 0 to 1: a size that the figures say too

@@ -76,7 +76,7 @@ export const styles = css`
 
   .sets label {
     display: grid;
-    grid-template-columns: 1.5rem minmax(10rem, 1fr);
+    grid-template-columns: 1.5rem minmax(8rem, 1fr);
     align-items: center;
     min-height: 1.5rem;
     cursor: pointer;

@@ -10,7 +10,7 @@ import type {
 } from '../../src/dossier.ts';
 import { formatTolerance } from '../../src/parts/tolerance.ts';
 import { formatFixed, formatQuantity } from '../../src/quantity/format.ts';
-import { column, figure, type Rows } from '../base/data-table.ts';
+import { column, figure, type Rows } from '../base/rows.ts';
 import { orderedValue } from '../base/words.ts';
 
 /** "93.2 %" */
@@ -69,12 +69,17 @@ export function summaryRows(built: Built): readonly (readonly [string, string])[
 }
 
 /** From exact values to those on sale, step by step: what each costs or wins. */
-export function stepRows({ centring, worstReturnLossDb, sets }: Built, { arms }: Option): Rows {
-  const { idealDb, realDb, centredDb } = centring;
+export function stepRows({ centring, worstReturnLossDb, sets }: Built, { arms, designators }: Option): Rows {
+  const { idealDb, realDb, centredDb, values } = centring;
+  const anew = arms.map(
+    ({ part }, k) => `${designators[k] ?? ''} ${formatQuantity(values[k]!, part === 'inductor' ? 'H' : 'F')}`,
+  );
   const steps = [
     ['Exact values, ideal parts', idealDb],
     ['Exact values, with loss and strays', realDb],
-    ...(sets.length === 0 || arms.length === 0 ? [] : ([['Centred anew for these', centredDb]] as const)),
+    ...(sets.length === 0 || arms.length === 0
+      ? []
+      : ([[`Centred anew for these: ${anew.join(', ')}`, centredDb]] as const)),
     ...(sets.length === 0 ? [] : ([['Parts to order', worstReturnLossDb]] as const)),
   ] as const;
   return {

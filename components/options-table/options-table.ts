@@ -58,12 +58,6 @@ export class OptionsTable extends LitElement {
         color: var(--ink);
       }
 
-      /* A rule between the figures of exact values and those of real parts. */
-      .first {
-        border-left: 1px solid var(--hairline);
-        padding-left: 0.75rem;
-      }
-
       th,
       td {
         padding: 0.25rem 0.75rem 0.25rem 0;
@@ -72,6 +66,16 @@ export class OptionsTable extends LitElement {
       th:first-child,
       td:first-child {
         padding-left: 0.5rem;
+      }
+
+      /* A rule between the figures of exact values and those of real parts. */
+      .real .first {
+        border-left: 1px solid var(--hairline);
+        padding-left: 0.75rem;
+      }
+
+      .over td {
+        padding: 0;
       }
 
       .group th {
@@ -129,26 +133,21 @@ export class OptionsTable extends LitElement {
     const real = record.build !== null;
     const methods = [...new Set(options.map(({ method }) => method))];
     return html`<div class="scroll" tabindex="0" role="radiogroup" aria-label="Choose a network">
-      <table class=${real ? 'real' : ''}>
+      <table class=${real ? 'real' : nothing}>
         <thead>
           ${
             real
               ? html`<tr class="over">
-                  <td colspan="2"></td>
-                  <th scope="colgroup" colspan="5">Exact values</th>
+                  <td colspan="3"></td>
                   <th scope="colgroup" colspan="4">Real parts</th>
-                  <td></td>
+                  <th scope="colgroup" colspan="5">Exact values</th>
                 </tr>`
               : nothing
           }
           <tr>
             <th scope="col">Network</th>
+            <th scope="col">Verdict</th>
             <th scope="col" class="number">Parts</th>
-            <th scope="col" class="number">Worst return loss</th>
-            <th scope="col" class="number">Half-power from</th>
-            <th scope="col" class="number">to</th>
-            <th scope="col" class="number">Loss</th>
-            <th scope="col" class="number">Att. 2<i>f</i><sub>0</sub></th>
             ${
               real
                 ? html`<th scope="col" class="number first">Worst return loss</th>
@@ -157,7 +156,11 @@ export class OptionsTable extends LitElement {
                     <th scope="col" class="number">Largest voltage</th>`
                 : nothing
             }
-            <th scope="col">Verdict</th>
+            <th scope="col" class="number first">Worst return loss</th>
+            <th scope="col" class="number">Half-power from</th>
+            <th scope="col" class="number">to</th>
+            <th scope="col" class="number">Loss</th>
+            <th scope="col" class="number">Att. 2<i>f</i><sub>0</sub></th>
           </tr>
         </thead>
         ${methods.map((method) =>
@@ -197,14 +200,8 @@ export class OptionsTable extends LitElement {
           <span>${option.title}${option.id === proposed ? html` <span class="tag">(proposed)</span>` : nothing}</span>
         </label>
       </th>
+      <td>${optionVerdict(option, real)}</td>
       <td class="number">${option.arms.length}</td>
-      <td class="number">
-        ${option.worstReturnLossDb === null ? 'no band' : returnLossWords(option.worstReturnLossDb)}
-      </td>
-      <td class="number">${lowHz === null ? 'none' : formatQuantity(lowHz, 'Hz')}</td>
-      <td class="number">${highHz === null ? 'none' : formatQuantity(highHz, 'Hz')}</td>
-      <td class="number">${decibels(option.lossDb, 2)}</td>
-      <td class="number">${second === null ? 'no data' : decibels(second)}</td>
       ${
         real
           ? html`<td class="number first">
@@ -217,7 +214,13 @@ export class OptionsTable extends LitElement {
               <td class="number">${realFigure(option, stressWords)}</td>`
           : nothing
       }
-      <td>${optionVerdict(option, real)}</td>
+      <td class="number first">
+        ${option.worstReturnLossDb === null ? 'no band' : returnLossWords(option.worstReturnLossDb)}
+      </td>
+      <td class="number">${lowHz === null ? 'none' : formatQuantity(lowHz, 'Hz')}</td>
+      <td class="number">${highHz === null ? 'none' : formatQuantity(highHz, 'Hz')}</td>
+      <td class="number">${decibels(option.lossDb, 2)}</td>
+      <td class="number">${second === null ? 'no data' : decibels(second)}</td>
     </tr>`;
   }
 }

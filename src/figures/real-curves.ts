@@ -15,6 +15,9 @@ const shade = { fill: 'muted', fillOpacity: 0.2 } as const;
 const edge = { stroke: 'muted', width: stroke.thin } as const;
 /** Room around the letters of an edge, pt. */
 const room = 2;
+const height = 6;
+/** From the edge, pt. */
+const offsets = [3, 7, 12, 18] as const;
 const every = 2;
 
 /** What the letters of the band's edges keep away from. */
@@ -95,12 +98,16 @@ function edgeLetters(
     along.forEach(({ x, y }, k) => {
       const width = lower[k]!.y - upper[k]!.y;
       if (k % every > 0 || width <= widest) return;
-      const top = under ? y + room + 1 : y - room - 7;
-      const box = { left: x - half, right: x + half, top, bottom: top + 6 };
-      if (!inside(frame, box) || boxes.some((other) => meet(box, other))) return;
-      if (points.some((curve) => clearance(curve, box) < room)) return;
-      widest = width;
-      found[0] = box;
+      // Beside a steep edge the letters stand farther off.
+      for (const off of offsets) {
+        const top = under ? y + off : y - off - height;
+        const box = { left: x - half, right: x + half, top, bottom: top + height };
+        if (!inside(frame, box) || boxes.some((other) => meet(box, other))) continue;
+        if (points.some((curve) => clearance(curve, box) < room)) continue;
+        widest = width;
+        found[0] = box;
+        return;
+      }
     });
     return found.map(({ left, bottom }) => label(left + half, bottom, text, lettering, 'middle', 'muted'));
   });

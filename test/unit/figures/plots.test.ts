@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { Response } from '../../../src/dossier.ts';
+import type { Percentiles, Response } from '../../../src/dossier.ts';
 import type { Size } from '../../../src/figures/chart-frame.ts';
 import type { Figure } from '../../../src/figures/figure.ts';
 import { gainPlot } from '../../../src/figures/gain-plot.ts';
@@ -40,6 +40,47 @@ describe('returnLossPlot(responses, requirement)', () => {
     const figure = returnLossPlot(swept, { ...requirement, returnLossDb: null });
     expect(words(figure).join()).not.toContain('required');
     expect(paths(figure).every(({ stroke }) => stroke !== 'limit')).toBe(true);
+  });
+
+  describe('with real parts', () => {
+    const near = resonance(140e6, 165e6, marks);
+    const shifted = (db: number) => near.returnLossDb.map((value) => Math.max(0, Math.min(30, value + db)));
+    const percentiles: Percentiles = {
+      fractions: [0.05, 0.5, 0.95],
+      states: [
+        {
+          state: '',
+          frequencyHz: near.frequencyHz,
+          nominalDb: shifted(-2),
+          curvesDb: [shifted(-5), shifted(-2), shifted(1)],
+        },
+      ],
+    };
+    const figure = returnLossPlot([near], requirement, undefined, percentiles);
+
+    it('draws the band that most networks stay in, its edges lettered, and the nominal curve dashed', () => {
+      expect(words(figure)).toEqual(expect.arrayContaining(['5 %', '95 %', 'exact values']));
+      expect(words(figure)).toContain('real parts: nominal, and 5 % to 95 % of networks');
+      const shaded = paths(figure).filter(({ fill, d }) => fill === 'muted' && d.length > 1000);
+      expect(shaded).toHaveLength(1);
+      // Key and curve.
+      expect(paths(figure).filter(({ dash }) => dash?.join() === '4,2')).toHaveLength(2);
+      expect(figure.description).toMatch(/Real parts: nominal between .* dB; 5 % of networks lie below a curve/u);
+    });
+
+    it('is as high while they are awaited, and says so', () => {
+      const awaited = returnLossPlot([near], requirement, undefined, 'awaited');
+      expect(awaited.height).toBe(figure.height);
+      expect(words(awaited)).toContain('real parts: being worked out');
+    });
+
+    it('keeps the letters of the edges off the curves, the requirement and the design frequency', () => {
+      const letters = textsOf(figure).filter(({ text }) => text === '5 %' || text === '95 %');
+      const f0 = textsOf(figure).find(({ text }) => text.startsWith('f₀'))!;
+      const middle = (f0.left + f0.right) / 2;
+      for (const { left, right } of letters) expect(left > middle || right < middle).toBe(true);
+      expect(overlaps(figure)).toEqual([]);
+    });
   });
 
   it('leaves room over a requirement that the network does not reach', () => {

@@ -1,0 +1,255 @@
+import { sha256Of } from '../../src/record/canonical.ts';
+import type { DesignRecord, Method } from '../../src/record/design-record.ts';
+import { defaults, fieldNames, type Fields } from '../../src/record/fields.ts';
+import type { Kept } from '../../src/record/kept.ts';
+import type { Attachments } from '../../src/record/read-termination.ts';
+import type { Problem } from '../../src/quantity/problem.ts';
+import { issuedEntry, newDraft, newId, opened, type Carried, type Entry, type Opened } from './entry.ts';
+import {
+  changedElsewhere,
+  goneElsewhere,
+  keptApart,
+  keptNow,
+  notKept,
+  nothingTyped,
+  type Keeping,
+} from './keeping.ts';
+import { openRecordStore, type RecordStore, type Written } from './record-store.ts';
+import { tabSession, type Session } from './session.ts';
+import { joinTabs, type Change, type Tabs } from './tabs.ts';
+import { stillHere, whyNotKept } from './trouble.ts';
+
+/** After a keystroke; and at the latest after the first one that isn't kept yet, however fast more follow. ms */
+const pause = { keystroke: 150, longest: 1000 } as const;
+
+/** Where what is kept, and what other tabs do, comes from: the browser's own unless a test gives others. */
+export interface Surroundings {
+  readonly store: RecordStore;
+  readonly session: Session;
+  readonly join: (hear: (change: Change) => void) => Tabs;
+  readonly now: () => number;
+}
+
+const browser = (sheet: Method): Surroundings => ({
+  store: openRecordStore(),
+  session: tabSession(sheet),
+  join: joinTabs,
+  now: Date.now,
+});
+
+/** What a sheet finds when it opens. */
+export interface Recalled extends Opened {
+  /** This tab's own, as its address has it: to be shown at once. Otherwise it is to be offered. */
+  readonly own: boolean;
+}
+
+/**
+ * Keeps what is typed in one sheet of one tab. A document opened in two tabs is never written over: the tab that comes
+ * second keeps what was typed in it apart, and both say so.
+ *
+ * A sheet calls `recall` or `open` once at its start, `keep` at every change, `begin` before it shows another document.
+ */
+export class DraftKeeper {
+  readonly #sheet: Method;
+  readonly #tell: (keeping: Keeping) => void;
+  readonly #around: Surroundings;
+  readonly #tabs: Tabs;
+  /** What the texts shown are kept as, as it was last read or written; null: nothing yet. */
+  #entry: Entry | null = null;
+  /** What the store has of it beside its texts. */
+  #carried: Carried | null = null;
+  /** What is typed and not kept yet. */
+  #waiting: (Carried & { readonly fields: Fields }) | null = null;
+  #timer: ReturnType<typeof setTimeout> | undefined;
+  /** When the oldest keystroke that isn't kept yet was made, ms. */
+  #since: number | null = null;
+  #writing: Promise<void> = Promise.resolve();
+
+  /** @param tell how it stands with keeping, whenever that changes */
+  constructor(sheet: Method, tell: (keeping: Keeping) => void, around: Surroundings = browser(sheet)) {
+    this.#sheet = sheet;
+    this.#tell = tell;
+    this.#around = around;
+    this.#tabs = around.join((change) => this.#hear(change));
+    if (typeof document !== 'undefined') document.addEventListener('visibilitychange', this.#leave);
+  }
+
+  /** Ends it; what waits is written. */
+  close(): void {
+    if (typeof document !== 'undefined') document.removeEventListener('visibilitychange', this.#leave);
+    void this.saveNow().finally(() => {
+      this.#tabs.close();
+      this.#around.store.close();
+    });
+  }
+
+  /**
+   * What this tab had open before a reload or a crash; else, where the address holds no sheet, the draft of this sheet
+   * that was typed last, in whatever tab.
+   *
+   * @param address texts of the address; null: it holds none
+   */
+  async recall(address: Fields | null): Promise<Recalled | null> {
+    try {
+      const id = this.#around.session.read();
+      const before = id === null ? null : await this.#around.store.read(id);
+      if (before !== null) {
+        const own = address === null || sameTexts(address, before.entry.fields);
+        const found = opened(before.entry, before.body);
+        return { ...(own ? this.#hold(found) : found), own };
+      }
+      const last = address === null ? await this.#last() : null;
+      return last === null ? null : { ...last, own: false };
+    } catch (error) {
+      this.#tell(notKept(whyNotKept(error)));
+      return null;
+    }
+  }
+
+  /** Opens an entry by its id, to go on with it; null where it isn't kept here any more. */
+  async open(id: string): Promise<Opened | null> {
+    await this.saveNow();
+    try {
+      const found = await this.#around.store.read(id);
+      return found === null ? null : this.#hold(opened(found.entry, found.body));
+    } catch (error) {
+      this.#tell(notKept(whyNotKept(error)));
+      return null;
+    }
+  }
+
+  /** What another tab made of the document that is open here; it is gone on with. Nothing typed waits then. */
+  async openOther(): Promise<Opened | null> {
+    return this.#entry === null ? null : this.open(this.#entry.id);
+  }
+
+  /** Another document is shown from now on: what is typed next is kept as a new draft. */
+  begin(): void {
+    void this.saveNow();
+    this.#writing = this.#writing.then(() => this.#forget());
+  }
+
+  /** Keeps what is typed, exactly as typed. Call it at every change, and with the same objects where nothing else changed. */
+  keep(fields: Fields, kept: Kept, attachments: Attachments): void {
+    this.#waiting = { fields, kept, attachments };
+    const now = this.#around.now();
+    this.#since ??= now;
+    clearTimeout(this.#timer);
+    const left = Math.max(0, this.#since + pause.longest - now);
+    this.#timer = setTimeout(() => void this.saveNow(), Math.min(pause.keystroke, left));
+  }
+
+  /** Writes what waits, without a pause. Never rejects: what went wrong is told. */
+  saveNow(): Promise<void> {
+    clearTimeout(this.#timer);
+    this.#writing = this.#writing.then(() => this.#write());
+    return this.#writing;
+  }
+
+  /**
+   * Keeps an issued record as a frozen revision; the draft that it was issued from goes with it.
+   *
+   * @returns why not, where another record stands under its number and revision, or nothing can be kept; null: it is kept
+   */
+  async saveIssued(record: DesignRecord): Promise<Problem | null> {
+    await this.saveNow();
+    const { store, now, session } = this.#around;
+    const draft = this.#entry?.kind === 'draft' ? this.#entry.id : null;
+    try {
+      const entry = issuedEntry(this.#sheet, record, sha256Of(record), now());
+      const issued = await store.addIssued(entry, { record }, draft);
+      if (issued.outcome === 'other') return alreadyIssued(record);
+      this.#entry = issued.entry;
+      this.#carried = null;
+      this.#waiting = null;
+      session.write(issued.entry.id);
+      if (draft !== null) this.#tabs.tell({ id: draft, version: 0 });
+      this.#tabs.tell({ id: issued.entry.id, version: 1 });
+      this.#tell(keptNow);
+      return null;
+    } catch (error) {
+      return { field: 'record', read: '', why: 'it isn’t kept', would: whyNotKept(error) };
+    }
+  }
+
+  async #last(): Promise<Opened | null> {
+    const drafts = (await this.#around.store.list()).filter(
+      ({ kind, sheet }) => kind === 'draft' && sheet === this.#sheet,
+    );
+    const latest = drafts.toSorted((a, b) => b.savedAt - a.savedAt)[0];
+    const found = latest === undefined ? null : await this.#around.store.read(latest.id);
+    return found === null ? null : opened(found.entry, found.body);
+  }
+
+  #hold(found: Opened): Opened {
+    this.#entry = found.entry;
+    this.#carried = found;
+    this.#around.session.write(found.entry.id);
+    this.#tell(found.entry.kind === 'draft' ? keptNow : nothingTyped);
+    return found;
+  }
+
+  #forget(): void {
+    this.#entry = null;
+    this.#carried = null;
+    this.#around.session.write(null);
+    this.#tell(nothingTyped);
+  }
+
+  async #write(): Promise<void> {
+    const waiting = this.#waiting;
+    if (waiting === null) return;
+    this.#waiting = null;
+    this.#since = null;
+    try {
+      this.#tell(await this.#put(waiting));
+    } catch (error) {
+      // The next keystroke tries again, with all of it.
+      this.#waiting ??= waiting;
+      this.#tell(notKept(`${whyNotKept(error)} ${stillHere}`));
+    }
+  }
+
+  async #put({ fields, kept, attachments }: Carried & { readonly fields: Fields }): Promise<Keeping> {
+    const before = this.#entry;
+    // An issued record is shown with texts of its own; only what differs from them was typed.
+    if (before?.kind === 'issued' && sameTexts(before.fields, fields)) return nothingTyped;
+    const draft = before?.kind === 'draft' ? before : newDraft(this.#sheet, fields, 0);
+    const next = { ...draft, fields, savedAt: this.#around.now() };
+    const same = this.#carried?.kept === kept && this.#carried.attachments === attachments && before?.kind === 'draft';
+    const body = { record: null, kept, attachments };
+    const written = await this.#around.store.writeDraft(next, same ? undefined : body);
+    if (written.outcome === 'written') return this.#wrote(next, body, written, keptNow);
+    const apart = { ...next, id: newId(), version: 0, apart: true };
+    const again = await this.#around.store.writeDraft(apart, body);
+    if (again.outcome !== 'written') throw new Error(`a new draft wasn't written: ${again.outcome}`);
+    return this.#wrote(apart, body, again, written.outcome === 'gone' ? goneElsewhere : keptApart);
+  }
+
+  #wrote(entry: Entry, carried: Carried, { version }: Written & { outcome: 'written' }, keeping: Keeping): Keeping {
+    this.#entry = { ...entry, version };
+    this.#carried = carried;
+    this.#around.session.write(entry.id);
+    this.#tabs.tell({ id: entry.id, version });
+    return keeping;
+  }
+
+  #hear({ id, version }: Change): void {
+    if (id === this.#entry?.id && version !== this.#entry.version) this.#tell(changedElsewhere);
+  }
+
+  /** The page may be closed without another word once it is out of sight. */
+  readonly #leave = () => {
+    if (document.visibilityState === 'hidden') void this.saveNow();
+  };
+}
+
+const sameTexts = (a: Fields, b: Fields): boolean =>
+  fieldNames.every((name) => (a[name] ?? defaults[name]) === (b[name] ?? defaults[name]));
+
+const alreadyIssued = ({ identity: { number, revision } }: DesignRecord): Problem => ({
+  field: 'revision',
+  read: revision,
+  why: `another record is issued and kept as ${number} revision ${revision}`,
+  would: 'give the next revision, or another document number',
+});

@@ -5,15 +5,7 @@ import type { Kept } from '../../src/record/kept.ts';
 import type { Attachments } from '../../src/record/read-termination.ts';
 import type { Problem } from '../../src/quantity/problem.ts';
 import { issuedEntry, newDraft, newId, opened, type Carried, type Entry, type Opened } from './entry.ts';
-import {
-  changedElsewhere,
-  goneElsewhere,
-  keptApart,
-  keptNow,
-  notKept,
-  nothingTyped,
-  type Keeping,
-} from './keeping.ts';
+import { changedElsewhere, goneElsewhere, keptApart, keptNow, notKept, nothingTyped, type Keeping } from './keeping.ts';
 import { openRecordStore, type RecordStore, type Written } from './record-store.ts';
 import { tabSession, type Session } from './session.ts';
 import { joinTabs, type Change, type Tabs } from './tabs.ts';
@@ -37,6 +29,11 @@ const browser = (sheet: Method): Surroundings => ({
   now: Date.now,
 });
 
+interface Waiting extends Carried {
+  readonly fields: Fields;
+  readonly document: number;
+}
+
 /** What a sheet finds when it opens. */
 export interface Recalled extends Opened {
   /** This tab's own, as its address has it: to be shown at once. Otherwise it is to be offered. */
@@ -59,7 +56,13 @@ export class DraftKeeper {
   /** What the store has of it beside its texts. */
   #carried: Carried | null = null;
   /** What is typed and not kept yet. */
-  #waiting: (Carried & { readonly fields: Fields }) | null = null;
+  #waiting: Waiting | null = null;
+  /** Counts the documents shown, so that what was typed in one is never taken for another's. */
+  #document = 0;
+  /** Id of what another tab made of the document; null: no tab did. */
+  #other: string | null = null;
+  /** How it stands with what is kept of this document. */
+  #standing: Keeping = keptNow;
   #timer: ReturnType<typeof setTimeout> | undefined;
   /** When the oldest keystroke that isn't kept yet was made, ms. */
   #since: number | null = null;
@@ -94,7 +97,8 @@ export class DraftKeeper {
       const id = this.#around.session.read();
       const before = id === null ? null : await this.#around.store.read(id);
       if (before !== null) {
-        const own = address === null || sameTexts(address, before.entry.fields);
+        // Whoever is quicker than the store has begun another document.
+        const own = this.#untouched() && (address === null || sameTexts(address, before.entry.fields));
         const found = opened(before.entry, before.body);
         return { ...(own ? this.#hold(found) : found), own };
       }
@@ -111,6 +115,8 @@ export class DraftKeeper {
     await this.saveNow();
     try {
       const found = await this.#around.store.read(id);
+      // What was typed meanwhile belongs to the document before.
+      await this.saveNow();
       return found === null ? null : this.#hold(opened(found.entry, found.body));
     } catch (error) {
       this.#tell(notKept(whyNotKept(error)));
@@ -118,20 +124,22 @@ export class DraftKeeper {
     }
   }
 
-  /** What another tab made of the document that is open here; it is gone on with. Nothing typed waits then. */
+  /** What another tab made of the document, to go on with it; what was typed here is kept apart. null: no tab did. */
   async openOther(): Promise<Opened | null> {
-    return this.#entry === null ? null : this.open(this.#entry.id);
+    await this.saveNow();
+    return this.#other === null ? null : this.open(this.#other);
   }
 
   /** Another document is shown from now on: what is typed next is kept as a new draft. */
   begin(): void {
     void this.saveNow();
+    this.#document += 1;
     this.#writing = this.#writing.then(() => this.#forget());
   }
 
   /** Keeps what is typed, exactly as typed. Call it at every change, and with the same objects where nothing else changed. */
   keep(fields: Fields, kept: Kept, attachments: Attachments): void {
-    this.#waiting = { fields, kept, attachments };
+    this.#waiting = { fields, kept, attachments, document: this.#document };
     const now = this.#around.now();
     this.#since ??= now;
     clearTimeout(this.#timer);
@@ -142,7 +150,10 @@ export class DraftKeeper {
   /** Writes what waits, without a pause. Never rejects: what went wrong is told. */
   saveNow(): Promise<void> {
     clearTimeout(this.#timer);
-    this.#writing = this.#writing.then(() => this.#write());
+    const waiting = this.#waiting;
+    this.#waiting = null;
+    this.#since = null;
+    if (waiting !== null) this.#writing = this.#writing.then(() => this.#write(waiting));
     return this.#writing;
   }
 
@@ -159,9 +170,7 @@ export class DraftKeeper {
       const entry = issuedEntry(this.#sheet, record, sha256Of(record), now());
       const issued = await store.addIssued(entry, { record }, draft);
       if (issued.outcome === 'other') return alreadyIssued(record);
-      this.#entry = issued.entry;
-      this.#carried = null;
-      this.#waiting = null;
+      this.#show(issued.entry, null);
       session.write(issued.entry.id);
       if (draft !== null) this.#tabs.tell({ id: draft, version: 0 });
       this.#tabs.tell({ id: issued.entry.id, version: 1 });
@@ -182,60 +191,77 @@ export class DraftKeeper {
   }
 
   #hold(found: Opened): Opened {
-    this.#entry = found.entry;
-    this.#carried = found;
+    this.#show(found.entry, found);
     this.#around.session.write(found.entry.id);
     this.#tell(found.entry.kind === 'draft' ? keptNow : nothingTyped);
     return found;
   }
 
+  /** Another document from here on. What waits of the one before could not be kept, and was told so. */
+  #show(entry: Entry, carried: Carried | null): void {
+    this.#document += 1;
+    this.#waiting = null;
+    this.#entry = entry;
+    this.#carried = carried;
+    this.#other = null;
+    this.#standing = keptNow;
+  }
+
+  #untouched(): boolean {
+    return this.#entry === null && this.#waiting === null;
+  }
+
   #forget(): void {
     this.#entry = null;
     this.#carried = null;
+    this.#other = null;
+    this.#standing = keptNow;
     this.#around.session.write(null);
     this.#tell(nothingTyped);
   }
 
-  async #write(): Promise<void> {
-    const waiting = this.#waiting;
-    if (waiting === null) return;
-    this.#waiting = null;
-    this.#since = null;
+  async #write(waiting: Waiting): Promise<void> {
     try {
       this.#tell(await this.#put(waiting));
     } catch (error) {
       // The next keystroke tries again, with all of it.
-      this.#waiting ??= waiting;
+      if (waiting.document === this.#document) this.#waiting ??= waiting;
       this.#tell(notKept(`${whyNotKept(error)} ${stillHere}`));
     }
   }
 
-  async #put({ fields, kept, attachments }: Carried & { readonly fields: Fields }): Promise<Keeping> {
+  async #put({ fields, kept, attachments }: Waiting): Promise<Keeping> {
     const before = this.#entry;
     // An issued record is shown with texts of its own; only what differs from them was typed.
     if (before?.kind === 'issued' && sameTexts(before.fields, fields)) return nothingTyped;
     const draft = before?.kind === 'draft' ? before : newDraft(this.#sheet, fields, 0);
     const next = { ...draft, fields, savedAt: this.#around.now() };
-    const same = this.#carried?.kept === kept && this.#carried.attachments === attachments && before?.kind === 'draft';
+    const same = before?.kind === 'draft' && this.#carried?.kept === kept && this.#carried.attachments === attachments;
     const body = { record: null, kept, attachments };
     const written = await this.#around.store.writeDraft(next, same ? undefined : body);
-    if (written.outcome === 'written') return this.#wrote(next, body, written, keptNow);
+    if (written.outcome === 'written') return this.#wrote(next, body, written);
     const apart = { ...next, id: newId(), version: 0, apart: true };
     const again = await this.#around.store.writeDraft(apart, body);
     if (again.outcome !== 'written') throw new Error(`a new draft wasn't written: ${again.outcome}`);
-    return this.#wrote(apart, body, again, written.outcome === 'gone' ? goneElsewhere : keptApart);
+    this.#standing = written.outcome === 'gone' ? goneElsewhere : keptApart;
+    this.#other = written.outcome === 'gone' ? null : next.id;
+    return this.#wrote(apart, body, again);
   }
 
-  #wrote(entry: Entry, carried: Carried, { version }: Written & { outcome: 'written' }, keeping: Keeping): Keeping {
+  #wrote(entry: Entry, carried: Carried, { version }: Written & { outcome: 'written' }): Keeping {
     this.#entry = { ...entry, version };
     this.#carried = carried;
     this.#around.session.write(entry.id);
     this.#tabs.tell({ id: entry.id, version });
-    return keeping;
+    return this.#standing;
   }
 
   #hear({ id, version }: Change): void {
-    if (id === this.#entry?.id && version !== this.#entry.version) this.#tell(changedElsewhere);
+    if (id !== this.#entry?.id) return;
+    // One that comes late tells of what was read since; a deletion may be undone.
+    const elsewhere = version === 0 || version > this.#entry.version;
+    this.#other = elsewhere ? id : null;
+    this.#tell(elsewhere ? changedElsewhere : this.#standing);
   }
 
   /** The page may be closed without another word once it is out of sight. */

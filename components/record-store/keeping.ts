@@ -12,12 +12,14 @@ export const notKept = (why: string): Keeping => ({ state: 'not kept', words: wh
 
 export const changedElsewhere: Keeping = {
   state: 'changed elsewhere',
-  words: 'This document was changed in another tab. Go on here, and what you type is kept apart as a document of its own.',
+  words:
+    'This document was changed in another tab. Go on here, and what you type is kept apart as a document of its own.',
 };
 
 export const keptApart: Keeping = {
   state: 'kept apart',
-  words: 'This document was changed in another tab meanwhile. Both are kept: what you typed here, apart from the other.',
+  words:
+    'This document was changed in another tab meanwhile. Both are kept: what you typed here, apart from the other.',
 };
 
 export const goneElsewhere: Keeping = {

@@ -102,8 +102,11 @@ export class BuildPart extends LitElement {
   }
 
   /** The sets of values that come nearest; the engineer may take another than the first. */
-  private choice({ designators }: Option, { sets, set, searchWords }: Built): TemplateResult {
+  private choice({ id, designators }: Option, { sets, set, searchWords }: Built): TemplateResult {
     if (sets.length === 0) return html`<p class="after">${unbroken(searchWords)}</p>`;
+    const { choice, set: typed = '1' } = this.state.fields;
+    // The engineer's at once, even while its figures are still on their way.
+    const marked = choice === id ? typed : String(set);
     const withYield = sets.some((each) => each.yield !== null);
     return html`<fieldset class="sets">
       <legend>The best sets of values</legend>
@@ -125,7 +128,7 @@ export class BuildPart extends LitElement {
                       <input
                         type="radio"
                         name="set"
-                        .checked=${live(k + 1 === set)}
+                        .checked=${live(String(k + 1) === marked)}
                         @change=${() => this.dispatchEvent(fieldChange('set', String(k + 1)))}
                       />
                       <span>${setWords(each.words, designators)}</span>

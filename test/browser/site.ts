@@ -66,9 +66,9 @@ export function useSite(): Site {
 /** What keeps the site for use without a network stays out: it fetches everything at every first visit. */
 const usual: BrowserContextOptions = { viewport: { width: 1440, height: 900 }, serviceWorkers: 'block' };
 
-/** Every word in the page's main part, those in the elements' own trees too, with single spaces. */
-export async function wordsOf(page: Page): Promise<string> {
-  const words = await page.locator('main').evaluate((main) => {
+/** Every word in the page's main part or another, those in the elements' own trees too, with single spaces. */
+export async function wordsOf(page: Page, part = 'main'): Promise<string> {
+  const words = await page.locator(part).evaluate((main) => {
     const collect = (node: Node): string => {
       if (node instanceof Text) return node.data;
       const own = node instanceof Element ? [...(node.shadowRoot?.childNodes ?? [])] : [];

@@ -1,0 +1,55 @@
+import { printedFigures } from '../design/printed-figures.ts';
+import type { Dossier } from '../dossier.ts';
+import { report, type ReportOptions } from '../report/report.ts';
+import { compareFigures, type ComparedFigure } from './compare-figures.ts';
+import type { Found } from './found.ts';
+import type { Additions } from './pdf/additions.ts';
+
+/** What a report or a record came to when it was computed anew. */
+export interface Recheck {
+  /** `recomputed`: a record alone, which holds no figure to compare with. */
+  readonly verdict: 'same' | 'within rounding' | 'differs' | 'recomputed';
+  /** Today's dossier of the record. */
+  readonly dossier: Dossier;
+  /** Of the schema in which the record was written. */
+  readonly schema: string;
+  /** Of the record, as written; where a report states it, that is true. */
+  readonly digest: string;
+  /** null: a record alone. */
+  readonly report: RecheckedReport | null;
+}
+
+export interface RecheckedReport {
+  /** Version of Ferrule that wrote it. */
+  readonly writtenBy: string;
+  readonly figures: readonly ComparedFigure[];
+  /** Whether this version writes the same bytes; null: not to be expected, because another wrote it or figures differ. */
+  readonly sameBytes: boolean | null;
+  readonly added: Additions | null;
+}
+
+/**
+ * Compares what a file says with what its record gives today.
+ *
+ * @param dossier of the file's record
+ * @param fonts   in which reports are set
+ */
+export async function recheck(found: Found, dossier: Dossier, fonts: ReportOptions['fonts']): Promise<Recheck> {
+  const { schema, digest } = found;
+  if (found.report === null) return { verdict: 'recomputed', dossier, schema, digest, report: null };
+  const { printed, paper, written, added } = found.report;
+  const figures = compareFigures(printed.figures, printedFigures(dossier));
+  const all = (outcome: ComparedFigure['outcome']): boolean => figures.every((figure) => figure.outcome === outcome);
+  const comparable = printed.version === dossier.version && all('same');
+  const sameBytes = comparable ? sameAs(written, await report(dossier, { paper, fonts })) : null;
+  const differs = figures.some(({ outcome }) => outcome === 'differs') || sameBytes === false;
+  return {
+    verdict: differs ? 'differs' : all('same') ? 'same' : 'within rounding',
+    dossier,
+    schema,
+    digest,
+    report: { writtenBy: printed.version, figures, sameBytes, added },
+  };
+}
+
+const sameAs = (a: Uint8Array, b: Uint8Array): boolean => a.length === b.length && a.every((byte, k) => byte === b[k]);

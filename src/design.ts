@@ -159,7 +159,7 @@ export function* dossierSteps(record: DesignRecord, methods: LongMethods): Gener
       references: referencesOf(record, {
         ceiling: ceiling !== null,
         pairChecked: checked?.routes.some(({ name }) => name === 'Q method') ?? false,
-        real: chosen?.built != null,
+        real: (chosen?.built ?? null) !== null,
       }),
     };
   };

@@ -1,25 +1,33 @@
 import { chosenTwoPort, sweepCsv } from '../design/exports.ts';
+import { ticketMarkdown, ticketText } from '../design/ticket.ts';
 import { design } from '../design.ts';
+import type { Dossier } from '../dossier.ts';
 import { InputError } from '../quantity/problem.ts';
 import { flatOptions } from './flat-options.ts';
 import { readArguments } from './read-arguments.ts';
 import { run } from './run.ts';
+import { boardOptions, withBoard } from './with-board.ts';
 import { writeFile } from './write-file.ts';
+
+/** What else is written, by the option that names its file; null: there is nothing to write. */
+const files: Readonly<Record<'s2p' | 'csv' | 'ticket', (dossier: Dossier, file: string) => string | null>> = {
+  s2p: chosenTwoPort,
+  csv: sweepCsv,
+  ticket: (dossier, file) => (/\.(?:md|markdown)$/iu.test(file) ? ticketMarkdown(dossier) : ticketText(dossier)),
+};
 
 /**
  * Two terminations, or a record, in; the dossier as JSON on standard output. `--s2p FILE` and `--csv FILE` write the
- * chosen network and its sweep too.
+ * chosen network and its sweep too, `--ticket FILE` a summary for a change ticket: Markdown where the file's name ends
+ * in .md, plain text otherwise.
  */
 await run((args) => {
-  const { record, options } = readArguments(args, ['s2p', 'csv']);
-  const dossier = design(record);
-  for (const [option, content] of [
-    ['s2p', chosenTwoPort],
-    ['csv', sweepCsv],
-  ] as const) {
+  const { record, options } = readArguments(args, ['s2p', 'csv', 'ticket', ...boardOptions]);
+  const dossier = design(withBoard(record, options));
+  for (const option of ['s2p', 'csv', 'ticket'] as const) {
     const file = options[option];
     if (file === undefined) continue;
-    const text = content(dossier);
+    const text = files[option](dossier, file);
     if (text === null) {
       throw new InputError({
         field: `--${option}`,

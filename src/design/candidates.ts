@@ -36,22 +36,17 @@ export function candidatesFor(record: DesignRecord, build: Build, arm: Arm, cent
   const range = arm.part === 'inductor' ? record.requirement.inductorH : record.requirement.capacitorF;
   const low = Math.max(range.low, centre / reach);
   const high = Math.min(range.high, centre * reach);
-  switch (origin) {
-    case 'exact':
-      return [partOf(record, build, arm, arm.value, 'exact')];
-    case 'stock': {
-      const lines = build.stock!.parts.filter(({ kind }) => kind === arm.part);
-      const near = lines.toSorted((a, b) => distance(a.value, centre) - distance(b.value, centre)).slice(0, mostLines);
-      return near.toSorted((a, b) => a.value - b.value).map((line) => partOfStock(record, build, arm, line));
-    }
-    default: {
-      // A coil's turns are spread or pressed to any value; so fine a series stands for them.
-      const series = origin === 'wound' ? 'E192' : origin;
-      const within = low <= high ? preferredValues(series, low, high) : [];
-      const values = within.length > 0 ? within : [nearestOf(series, centre, range.low, range.high)];
-      return values.map((value) => partOf(record, build, arm, value, origin));
-    }
+  if (origin === 'exact') return [partOf(record, build, arm, arm.value, 'exact')];
+  if (origin === 'stock') {
+    const lines = build.stock!.parts.filter(({ kind }) => kind === arm.part);
+    const near = lines.toSorted((a, b) => distance(a.value, centre) - distance(b.value, centre)).slice(0, mostLines);
+    return near.toSorted((a, b) => a.value - b.value).map((line) => partOfStock(record, build, arm, line));
   }
+  // A coil's turns are spread or pressed to any value; so fine a series stands for them.
+  const series = origin === 'wound' ? 'E192' : origin;
+  const within = low <= high ? preferredValues(series, low, high) : [];
+  const values = within.length > 0 ? within : [nearestOf(series, centre, range.low, range.high)];
+  return values.map((value) => partOf(record, build, arm, value, origin));
 }
 
 const distance = (value: number, centre: number): number => Math.abs(Math.log(value / centre));

@@ -1,3 +1,4 @@
+import { holds } from '../network/figures-of-merit.ts';
 import type { Ceiling } from '../dossier.ts';
 import { bestReflection, bestReflectionOf } from '../network/ceiling.ts';
 import { partsOf } from '../network/circuit-model.ts';
@@ -8,7 +9,6 @@ import { logGrid } from '../network/worst-in-band.ts';
 import { formatFixed, formatQuantity } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import { holds } from './checks.ts';
 import { returnLossWords } from './words.ts';
 
 /** Resonators for which a ceiling is told. */

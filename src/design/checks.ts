@@ -1,18 +1,12 @@
 import type { Check } from '../dossier.ts';
 import type { Arm } from '../network/arm.ts';
 import type { DcPath } from '../network/dc-path.ts';
-import { returnLossDb } from '../network/figures-of-merit.ts';
+import { holds, returnLossDb } from '../network/figures-of-merit.ts';
 import type { Worst } from '../network/worst-in-band.ts';
 import { impracticable } from '../parts/practicable.ts';
 import { formatQuantity } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { decibelPair, returnLossWords } from './words.ts';
-
-/** Rounding in a return loss that doesn't make it fall short, dB. */
-const slackDb = 1e-9;
-
-/** Whether a return loss is at least the one asked for, dB. */
-export const holds = (foundDb: number, askedDb: number): boolean => foundDb >= askedDb - slackDb;
 
 /** The verdict on all of them, with the reasons why a network falls short; when it meets everything, what it meets. */
 export function verdictOf(checks: readonly Check[]): { readonly meets: boolean; readonly reasons: readonly string[] } {

@@ -1,10 +1,10 @@
-import { returnLossDb } from '../network/figures-of-merit.ts';
+import { holds, returnLossDb } from '../network/figures-of-merit.ts';
 import { reflectionAt, type Draws } from '../network/real-sweep.ts';
 import { formatFixed } from '../quantity/format.ts';
 import { drawsWith, type VariedPart } from './spread.ts';
 import type { PreparedSubject } from './subject.ts';
 import type { Corners } from './tolerance-figures.ts';
-import { holds, worstReturnLosses } from './yield.ts';
+import { worstReturnLosses } from './yield.ts';
 
 /** Parts up to which every combination is tried. */
 const mostParts = 12;

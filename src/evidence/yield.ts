@@ -1,17 +1,12 @@
-import { returnLossDb } from '../network/figures-of-merit.ts';
+import { holds, returnLossDb } from '../network/figures-of-merit.ts';
 import { worstInto, type Draws } from '../network/real-sweep.ts';
 import { clopperPearson, usualConfidence } from './clopper-pearson.ts';
 import { drawsOf } from './spread.ts';
 import type { PreparedSubject } from './subject.ts';
 import type { Yield } from './tolerance-figures.ts';
 
-/** Rounding in a return loss that doesn't make it fall short, dB. */
-const slackDb = 1e-9;
 /** Networks drawn at a time: no more memory for a million of them than for these. */
 const slice = 4096;
-
-/** Whether a return loss is at least the one asked for, dB. */
-export const holds = (foundDb: number, askedDb: number): boolean => foundDb >= askedDb - slackDb;
 
 /** Least return loss of each network over all states and their frequencies, dB, 0 to 200. */
 export function worstReturnLosses({ prepared }: PreparedSubject, draws: Draws): Float64Array {

@@ -17,3 +17,9 @@ export function vswr(gamma: number): number {
 
 /** Mismatch loss, dB (0 to 200), of |Γ|²: −10·log10(1 − |Γ|²). */
 export const mismatchLossDb = (gammaSquared: number): number => attenuationDb(1 - Math.min(1, gammaSquared));
+
+/** Rounding in a return loss that doesn't make it fall short, dB. */
+const slackDb = 1e-9;
+
+/** Whether a return loss is at least the one asked for, dB. */
+export const holds = (foundDb: number, askedDb: number): boolean => foundDb >= askedDb - slackDb;

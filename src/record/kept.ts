@@ -13,7 +13,7 @@ export interface Kept {
 export const nothingKept: Kept = { stock: new Map(), history: [], previous: null, asBuilt: null };
 
 export const keptOf = ({ build, history, previous, asBuilt }: DesignRecord): Kept => ({
-  stock: new Map(build?.stock == null ? [] : [[build.stock.name, build.stock]]),
+  stock: new Map(build === null || build.stock === null ? [] : [[build.stock.name, build.stock]]),
   history,
   previous,
   asBuilt,

@@ -256,14 +256,14 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
   ),
   v.forward(
     v.check(
-      ({ build, requirement: { returnLossDb } }) => build?.leastYield == null || returnLossDb !== null,
+      ({ build, requirement: { returnLossDb } }) => (build?.leastYield ?? null) === null || returnLossDb !== null,
       'a least yield is asked for, of networks that hold a return loss; give that too, or ask for no yield',
     ),
     ['requirement', 'returnLossDb'],
   ),
   v.forward(
     v.check(
-      ({ asBuilt, loads }) => asBuilt?.state == null || loads.some(({ name }) => name === asBuilt.state),
+      ({ asBuilt, loads }) => asBuilt === null || asBuilt.state === null || loads.some(({ name }) => name === asBuilt.state),
       'the board was measured with a load state that there is not; name one of them, or none',
     ),
     ['asBuilt'],

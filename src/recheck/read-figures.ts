@@ -47,5 +47,5 @@ export function readFigures(text: string): PrintedFigures {
   if (/"schema":\s*"ferrule-figures\/(?!1")/u.test(text.slice(0, 200))) {
     throw refusal('a later Ferrule wrote it', 'recheck it with that one');
   }
-  throw notAsWritten('its figures.json doesn't hold what a report prints');
+  throw notAsWritten("its figures.json doesn't hold what a report prints");
 }

@@ -19,7 +19,7 @@ export async function readFile(name: string, bytes: Uint8Array): Promise<Found> 
     if (startsWith(bytes, '%PDF-')) return await readReport(bytes);
     const text = new TextDecoder().decode(bytes);
     if (!/^\uFEFF?\s*\{/u.test(text)) {
-      throw refusal('neither a report (PDF) nor a record (JSON) of Ferrule's', 'give one of these');
+      throw refusal("neither a report (PDF) nor a record (JSON) of Ferrule's", 'give one of these');
     }
     return readRecordFile(text);
   } catch (error) {
@@ -33,7 +33,7 @@ export async function readFile(name: string, bytes: Uint8Array): Promise<Found> 
 }
 
 export const tooLarge = (): InputError =>
-  refusal(`over ${mostBytes / 1e6} MB, which no report has`, 'give a report or a record of Ferrule's');
+  refusal(`over ${mostBytes / 1e6} MB, which no report has`, "give a report or a record of Ferrule's");
 
 const startsWith = (bytes: Uint8Array, text: string): boolean =>
   Array.from(text).every((sign, k) => bytes[k] === sign.charCodeAt(0));

@@ -41,7 +41,7 @@ function sealedPart(bytes: Uint8Array): Uint8Array {
     throw /\/Encrypt\s/u.test(ends)
       ? refusal('this PDF is encrypted', 'give the report without a password')
       : refusal(
-          'this PDF is no report of Ferrule's, or another program has saved it anew',
+          "this PDF is no report of Ferrule's, or another program has saved it anew",
           'give the report as it was written, or its record.json',
         );
   }
@@ -62,7 +62,7 @@ function statedDigests(written: Uint8Array, { trailer, byNumber }: Objects): rea
   const stated = /<ferrule:digest>([0-9a-f]{64})<\/ferrule:digest>/u.exec(textOf(packet))?.[1];
   const ids = trailer.get('ID');
   const id = isList(ids) ? textIn(ids[0]).toLowerCase() : '';
-  if (stated === undefined || id.length !== 32) throw notAsWritten('it doesn't state the digest of its record');
+  if (stated === undefined || id.length !== 32) throw notAsWritten("it doesn't state the digest of its record");
   return [stated, id];
 }
 

@@ -48,7 +48,7 @@ async function putInPlace(added: Uint8Array, text: string): Promise<readonly (re
     out.push([Number(number), value]);
     if (typeOf(value) !== 'ObjStm') continue;
     if (typeof (value as Dictionary).get('Length') !== 'number')
-      throw notAsWritten('what was added to it can't be read');
+      throw notAsWritten("what was added to it can't be read");
     const whole = new ValueReader(added, allowance, start);
     out.push(...(await unpacked(objectAt(whole, added), inflater, allowance)));
   }

@@ -7,7 +7,7 @@ import { plain, text, type Block } from '../page/block.ts';
 import { order } from './order.ts';
 import { parts } from './parts.ts';
 import { whyNotBuilt } from './real-words.ts';
-import { chosenOption, reasonsOf, sentence, valueOf } from './words.ts';
+import { chosenOption, sentence, valueOf } from './words.ts';
 
 /** The chosen network: who chose it and why, its schematic, and the parts to order. */
 export function network(dossier: Dossier): readonly Block[] {
@@ -16,15 +16,16 @@ export function network(dossier: Dossier): readonly Block[] {
   if (option === undefined) return [heading, text('There is no network to choose.')];
   const { source, loads, requirement, build } = dossier.record;
   const { built } = option;
+  const ordered = built !== null && built.parts.length > 0;
   const f0 = formatQuantity(requirement.frequencyHz, 'Hz', 5);
   return [
     heading,
     { kind: 'text', paragraph: { spans: [{ text: sentence(option.title), bold: true }] }, keep: true },
-    { ...text(why(dossier, option)), keep: true },
+    { ...text(why(dossier)), keep: true },
     {
       kind: 'picture',
       figure: schematic(drawnArms(option), option.designators, terminationLabel(source), loadLabel(loads)),
-      caption: `Figure 1. Chosen network${built === null ? ';' : ', values as ordered; with exact values,'} at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}${loads.length > 1 ? ` with the load ${option.worstState}, the state that governs` : ''}.`,
+      caption: `Figure 1. Chosen network${ordered ? ', values as ordered; with exact values,' : ';'} at ${f0} the source sees ${formatImpedance(option.seen.r, option.seen.x)}${loads.length > 1 ? ` with the load ${option.worstState}, the state that governs${ordered ? ' them' : ''}` : ''}.`,
       scale: 1,
     },
     ...(built === null || build === null ? exactParts(dossier, option) : order(dossier, option, built, build)),
@@ -44,12 +45,12 @@ function exactParts(dossier: Dossier, option: Option): readonly Block[] {
   ];
 }
 
-function why({ chosenBy, record, options }: Dossier, option: Option): string {
+function why({ chosenBy, record, options }: Dossier): string {
   if (chosenBy === 'proposal') {
     return `Proposed: the first of ${String(options.length)} in the order considered that meets everything required.${note(record.selection.reason)}`;
   }
   if (chosenBy === 'nearest') {
-    return `No option meets everything required; this one comes nearest. ${reasonsOf(option)}${note(record.selection.reason)}`;
+    return `No option meets everything required; this one comes nearest. Part ${String(parts.deviations)} tells what it misses.${note(record.selection.reason)}`;
   }
   const by = record.signOff.prepared.name.trim();
   const who = by === '' ? 'Chosen by the engineer' : `Chosen by the engineer (prepared by ${by})`;

@@ -66,15 +66,18 @@ export function optionRow(option: Option, dossier: Dossier): Row {
 
 /** One of many: name, values, figures and verdict, without a drawing. */
 export function compactRow(option: Option, dossier: Dossier): Row {
+  const values = plain(partsOf(option), 'small');
+  // Beside two lines of figures there is room for a few.
+  const beside = dossier.record.build !== null && option.arms.length <= 3;
   return {
     cells: [
       [plain(numberOf(option, dossier), 'small')],
-      [{ spans: [{ text: option.title, bold: true }], style: 'small' }],
+      [{ spans: [{ text: option.title, bold: true }], style: 'small' }, ...(beside ? [values] : [])],
       ...figures(option, dossier),
     ],
     below: {
       from: 1,
-      paragraphs: [plain(partsOf(option), 'small'), verdictLine(option, dossier), ...figuresBelow(option, dossier)],
+      paragraphs: [...(beside ? [] : [values]), verdictLine(option, dossier), ...figuresBelow(option, dossier)],
     },
     marked: option.id === dossier.chosen,
   };
@@ -130,9 +133,10 @@ function verdictLine(option: Option, { chosen, proposed }: Dossier): Paragraph {
 /** What is ordered and bears most; each load state's return loss; how far a fitted network stays below the ceiling. */
 function figuresBelow(option: Option, { ceiling, record }: Dossier): readonly Paragraph[] {
   const { states, worstState, method, ceilingGapDb, harmonicDb } = option;
-  const lines: string[] = record.build === null ? [] : realLines(option);
+  const lines: string[] = [];
   if (record.build !== null) {
-    lines.push(`Attenuation ${harmonic(harmonicDb, 2)} at 2f₀, ${harmonic(harmonicDb, 3)} at 3f₀ (exact values).`);
+    const attenuated = `Attenuation ${harmonic(harmonicDb, 2)} at 2f₀, ${harmonic(harmonicDb, 3)} at 3f₀ (exact values).`;
+    lines.push(...realLines(option), attenuated);
   }
   if (states.length > 1) {
     const each = states.map((state) => stateWords(state) + (state.name === worstState ? ', governs' : ''));
@@ -150,10 +154,8 @@ function figuresBelow(option: Option, { ceiling, record }: Dossier): readonly Pa
 function realLines({ built }: Option): string[] {
   if (built === null) return ['Real parts: not worked out.'];
   const stressed = mostStressed(built);
-  return [
-    ...(built.parts.length === 0 ? [] : [`To order: ${orderWords(built)}.`]),
-    ...(stressed === null ? [] : [`Most stressed: ${stressed}.`]),
-  ];
+  const ordered = built.parts.length === 0 ? '' : `To order: ${orderWords(built)}.`;
+  return [`${ordered}${stressed === null ? '' : ` Most stressed: ${stressed}.`}`].filter((line) => line !== '');
 }
 
 function stateWords({ name, worstReturnLossDb, worstAtHz, reflection }: StateFigures): string {

@@ -29,10 +29,9 @@ function partsList({ parts: ordered }: Built, build: Build): readonly Block[] {
     { title: 'Kind', share: 46 },
     { title: 'Value', share: 48, align: 'end' },
     { title: 'Tolerance', share: 46, align: 'end' },
-    { title: 'From', share: 80 },
+    { title: 'From', share: 72 },
     { title: 'Q at f₀', share: 34, align: 'end' },
-    ...(resonant ? [{ title: 'Self-resonance', share: 52, align: 'end' } as const] : []),
-    ...(rated ? [{ title: 'Rated', share: 60 } as const] : []),
+    ...(resonant ? [{ title: 'Self-resonance', share: 66, align: 'end' } as const] : []),
     ...(paired ? [{ title: 'Joined', share: 46 } as const] : []),
   ];
   const table: Block = {
@@ -50,19 +49,30 @@ function partsList({ parts: ordered }: Built, build: Build): readonly Block[] {
           originWords(part, build),
           formatFixed(part.q, part.q < 100 ? 1 : 0).replace(/\.0$/u, ''),
           ...(resonant ? [part.selfResonanceHz === null ? '–' : formatQuantity(part.selfResonanceHz, 'Hz', 3)] : []),
-          ...(rated ? [ratingWords(part, build) || 'not known'] : []),
           ...(paired ? [part.pair ?? 'alone'] : []),
         ].map((cell) => [plain(cell)]),
       ],
+      ...below(part, build, rated),
     })),
   };
   const [rating = ''] = ratings;
   return [table, ...(rated || rating === '' ? [] : [text(`Every part is rated ${rating}.`)])];
 }
 
+/** The line of the stock list, and a rating that isn't that of every part. */
+function below(part: BuiltPart, build: Build, rated: boolean): Pick<Row, 'below'> {
+  const words = [
+    build[part.part].origin === 'stock' ? part.from : '',
+    rated ? ratedWords(ratingWords(part, build)) : '',
+  ].filter((each) => each !== '');
+  return words.length === 0 ? {} : { below: { from: 1, paragraphs: [plain(words.join('; '), 'small')] } };
+}
+
+const ratedWords = (rating: string): string => (rating === '' ? 'rating not known' : `rated ${rating}`);
+
 function originWords({ part, from }: BuiltPart, build: Build): string {
   const { origin } = build[part];
-  if (origin === 'stock') return `${from}, stock list`;
+  if (origin === 'stock') return 'stock list';
   if (origin === 'wound') return `wound, part ${String(parts.winding)}`;
   return origin === 'exact' ? 'exact value' : `series ${from}`;
 }

@@ -1,4 +1,4 @@
-import type { Dossier, Response } from '../../dossier.ts';
+import type { Dossier, HalfPower, Option, Response } from '../../dossier.ts';
 import { returnLossWords } from '../../design/words.ts';
 import { chartSize } from '../../figures/chart-frame.ts';
 import { gainPlot } from '../../figures/gain-plot.ts';
@@ -18,7 +18,7 @@ export function response(dossier: Dossier): readonly Block[] {
   const [swept] = responses;
   if (option === undefined || swept === undefined) return [heading, text('Without a network there is no response.')];
   const { requirement } = record;
-  const real = percentilesBy(responses, option.built);
+  const real = option.arms.length === 0 ? null : percentilesBy(responses, option.built);
   const span = `${formatQuantity(swept.spanHz.low, 'Hz')} to ${formatQuantity(swept.spanHz.high, 'Hz')}`;
   const into = responses.length > 1 ? ` into each of ${String(responses.length)} load states` : '';
   const governing = responses.length > 1 ? ` of ${swept.state}` : '';
@@ -42,7 +42,7 @@ export function response(dossier: Dossier): readonly Block[] {
     },
     {
       kind: 'picture',
-      figure: gainPlot(responses, requirement, option.halfPower),
+      figure: gainPlot(responses, requirement, halfPowerOf(option, swept)),
       caption: `Figure 3. Transducer gain; the dashed line lies 3.01 dB below the peak${governing}, with the half-power edges on it.`,
       scale: 1.1,
     },
@@ -54,6 +54,10 @@ export function response(dossier: Dossier): readonly Block[] {
     },
   ];
 }
+
+/** Real parts may be worst in another state than exact ones: the edges are those of the state that is shown first. */
+const halfPowerOf = ({ states, halfPower }: Option, { state }: Response): HalfPower =>
+  states.find(({ name }) => name === state)?.halfPower ?? halfPower;
 
 function figuresAt(
   responses: readonly Response[],

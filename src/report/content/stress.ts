@@ -70,7 +70,7 @@ function stressed(found: Stress, derating: number): readonly Block[] {
               share: 50,
               align: 'end' as const,
             }))),
-        { title: 'Reaches its derated\u00a0rating', share: 90, align: 'end' },
+        { title: 'Derated rating reached\u00a0at', share: 90, align: 'end' },
       ],
       rows: found.parts.map((part) => row(part, found)),
     },
@@ -80,18 +80,14 @@ function stressed(found: Stress, derating: number): readonly Block[] {
 
 function row(part: PartStress, { vswr, powerW }: Stress): Row {
   const { designator, mismatched, limitBy, limitW } = part;
-  const limit =
-    limitBy === null || limitW === null
-      ? 'no rating known'
-      : `${limitBy}, at ${watts(limitW)}${limitW < powerW ? ': too early' : ''}`;
+  const limit = limitBy === null || limitW === null ? 'no rating known' : `${watts(limitW)}, by ${limitBy}`;
   return {
     cells: [
       [{ spans: [{ text: designator, bold: true }] }],
-      ...[
-        ...figures(part),
-        ...(vswr === null ? [] : mismatched === null ? ['–', '–', '–'] : figures(mismatched)),
-        limit,
-      ].map((cell) => [plain(cell)]),
+      ...[...figures(part), ...(vswr === null ? [] : mismatched === null ? ['–', '–', '–'] : figures(mismatched))].map(
+        (cell) => [plain(cell)],
+      ),
+      [{ spans: [{ text: limit, bold: limitW !== null && limitW < powerW }] }],
     ],
   };
 }

@@ -132,7 +132,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Response',
-    basis: always(['B10', 'B11', 'B12']),
+    basis: always(['B10', 'B11', 'B12', 'B33']),
     fields: responseFields,
     judge: (state) => {
       const chosen = chosenOf(state);
@@ -150,7 +150,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Build',
-    basis: always([]),
+    basis: always(['B26', 'B27', 'B31', 'B32', 'B34', 'B35', 'B38']),
     fields: buildFields,
     judge: (state) => {
       const chosen = chosenOf(state);

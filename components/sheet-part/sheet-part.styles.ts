@@ -101,8 +101,8 @@ export const styles = css`
     }
 
     .basis {
-      flex-direction: row;
-      gap: 1rem;
+      flex-flow: row wrap;
+      gap: 0 1rem;
       margin-top: 1rem;
     }
   }

@@ -200,6 +200,7 @@ describe('opening a file', () => {
 
   it('leaves the sheet as it is when the file holds no record', async () => {
     const page = await site.visit();
+    await page.getByText('All 4 networks worked out with real parts').first().waitFor({ timeout: 60_000 });
     const before = await outcomeOf(page);
     await drop(page, 'notes.json', '{"schema":"ferrule-record/1"');
     await page

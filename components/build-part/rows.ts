@@ -97,6 +97,8 @@ function change(db: number, now: number, before: number): string {
   return `${db > 0 ? '+' : ''}${formatFixed(db, 2)} dB`;
 }
 
+const signed = (db: number): string => `${db > 0 ? '+' : ''}${formatFixed(db, 2)} dB`;
+
 /** How much each part matters; the largest effect first. */
 export function sensitivityRows(sensitivity: readonly PartSensitivity[]): Rows {
   const halved = sensitivity.some(({ yieldIfHalved }) => yieldIfHalved !== null);
@@ -104,12 +106,14 @@ export function sensitivityRows(sensitivity: readonly PartSensitivity[]): Rows {
     columns: [
       column('Part'),
       figure('For +1 %'),
+      figure('For −1 %'),
       figure('At its tolerance'),
       ...(halved ? [figure('Yield, tolerance halved')] : []),
     ],
-    rows: sensitivity.map(({ designator, dbPerPercent, atToleranceDb, yieldIfHalved }) => [
+    rows: sensitivity.map(({ designator, dbPerPercent, dbPerMinusPercent, atToleranceDb, yieldIfHalved }) => [
       designator,
-      `${dbPerPercent > 0 ? '+' : ''}${formatFixed(dbPerPercent, 2)} dB`,
+      signed(dbPerPercent),
+      signed(dbPerMinusPercent),
       returnLossWords(atToleranceDb),
       ...(halved ? [yieldIfHalved === null ? '–' : percent(yieldIfHalved)] : []),
     ]),

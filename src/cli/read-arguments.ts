@@ -168,7 +168,15 @@ function fromFields({ behaviour, tolerance, ...fields }: Typed): DesignRecord {
     { ...nothingKept, stock: lists },
   );
   if (record !== null) return record;
-  throw new InputError(...problems.map((found) => ({ ...found, field: `--${found.field}` })));
+  // A problem is told of the option that was typed, once.
+  const typed = (field: string): string =>
+    tolerance !== undefined && field.startsWith('tolerance-')
+      ? '--tolerance'
+      : field === 'fit-seed' && fields['fit-seed'] === undefined
+        ? '--seed'
+        : `--${field}`;
+  const told = problems.map((found) => ({ ...found, field: typed(found.field) }));
+  throw new InputError(...told.filter(({ field }, k) => told.findIndex((each) => each.field === field) === k));
 }
 
 /** `NAME=FILE.s1p`, `FILE.s2p port 2`, `FILE.csv`: reads the file and leaves the name by which its data are known. */

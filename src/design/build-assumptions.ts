@@ -49,4 +49,4 @@ const distributionWords = {
 const spreadWords = (end: string, spread: number): string =>
   spread === 0
     ? ''
-    : ` The ${end} spreads too: R by ±${formatFixed(spread * 100, 1)} %, X by as much of |Z|, the same at every frequency.`;
+    : ` The ${end} spreads too: R by ±${String(Number((spread * 100).toPrecision(6)))} %, X by as much of |Z|, the same at every frequency.`;

@@ -6,21 +6,23 @@ import { stressOf } from '../evidence/stress.ts';
 import { returnLossDb } from '../network/figures-of-merit.ts';
 import type { RealArm, RealLadder } from '../network/real-arm.ts';
 import { terminationAt } from '../network/termination-at.ts';
-import { centreValues } from '../parts/centre-values.ts';
+import { centreValues, worstOf } from '../parts/centre-values.ts';
 import { chooseValues } from '../parts/choose-values.ts';
 import { chooseWithPairs } from '../parts/choose-with-pairs.ts';
 import { coil } from '../parts/coil.ts';
 import type { Span } from '../quantity/span.ts';
 import type { Build, DesignRecord, LoadState } from '../record/design-record.ts';
-import { candidatesFor, partOf, type Candidate } from './candidates.ts';
+import { candidatesFor, pairReach, partOf, type Candidate } from './candidates.ts';
 import { realWorst, type RealStates } from './real-worst.ts';
 import { searchWords } from './search-words.ts';
 import { percentilesOver, subjectOf, toleranceSteps, variedParts, yieldSteps } from './tolerance-steps.ts';
 import { valueWords } from './value-words.ts';
 
 /** How far from its exact value one that is centred anew may lie, as a ratio. */
-const widest = 2.5;
+const widest = 4;
 const kept = 3;
+/** Arms up to which values are centred from two starts. */
+const mostCentredTwice = 6;
 
 /** Where the spread over frequency is shown too. */
 export interface Shown {
@@ -44,13 +46,16 @@ export function* builtSteps(
   const exact = arms.map(({ value }) => value);
   const problem = { armFor, strayF: build.strayF, states: states.ends, f0, aim };
   const real = arms.map((_, k) => armFor(k, exact[k]!));
-  const centred = centreValues(
-    problem,
-    exact,
-    arms.map((arm) => limitsOf(record, build, arm)),
-  );
+  const limits = arms.map((arm) => limitsOf(record, build, arm));
+  const centred = centreValues(problem, exact, limits);
   yield;
   const { lists, sets } = yield* search(record, build, option, states, centred.values);
+  const best = sets[0]!.map((pick, k) => lists[k]![pick]!.arm.value);
+  // From the best set on sale too, where that doesn't take long or is better: what can be made is no worse than that.
+  const wanted = arms.length <= mostCentredTwice || worstOf(problem, best) < centred.gammaSquared;
+  const again = wanted ? centreValues(problem, best, limits) : centred;
+  const centre = again.gammaSquared < centred.gammaSquared ? again : centred;
+  yield;
   const taken = selection.option === option.id ? Math.min(selection.set, sets.length) : 1;
   const ladders = sets.map((picks) =>
     ladderOf(
@@ -83,8 +88,8 @@ export function* builtSteps(
   const centring: Centring = {
     idealDb: option.worstReturnLossDb ?? returnLossDb(option.reflection ** 2),
     realDb: realWorst(states, { arms: real, strayF: build.strayF }).returnLossDb,
-    values: centred.values,
-    centredDb: realWorst(states, { arms: arms.map((_, k) => armFor(k, centred.values[k]!)), strayF: build.strayF })
+    values: centre.values,
+    centredDb: realWorst(states, { arms: arms.map((_, k) => armFor(k, centre.values[k]!)), strayF: build.strayF })
       .returnLossDb,
     roundingDb: 0,
   };
@@ -152,15 +157,21 @@ function* search(
   };
   if (!build.pairs || alone[0]!.gammaSquared <= required) return single;
   const mayPair = arms.map(({ part }) => build[part].origin !== 'exact' && build[part].origin !== 'wound');
-  const { candidates, sets } = yield* chooseWithPairs({ ...choice, mayPair, required });
+  const wide = arms.map((arm, k) => candidatesFor(record, build, arm, centre[k]!, pairReach));
+  const { candidates, sets } = yield* chooseWithPairs({
+    ...choice,
+    candidates: wide.map((parts) => parts.map(({ arm }) => arm)),
+    mayPair,
+    required,
+  });
   if (sets.length === 0 || sets[0]!.gammaSquared >= alone[0]!.gammaSquared) return single;
   return {
     lists: candidates.map((list, k) =>
       list.map(({ arm, pair }, pick): Candidate => {
-        if (pair !== null) return { arm, parts: pair.of.map((of) => singles[k]![of]!), pair: pair.join };
+        if (pair !== null) return { arm, parts: pair.of.map((of) => wide[k]![of]!), pair: pair.join };
         // Singles keep their order among the pairs.
         const before = list.slice(0, pick).filter((other) => other.pair === null).length;
-        return { arm, parts: [singles[k]![before]!], pair: null };
+        return { arm, parts: [wide[k]![before]!], pair: null };
       }),
     ),
     sets: sets.map(({ picks }) => picks),

@@ -26,27 +26,44 @@ export interface Candidate {
 }
 
 /** How far from the value that would be best parts are considered, as a ratio. */
-const reach = 2.4;
-/** Lines of a stock list considered for an arm, the nearest by ratio. */
-const mostLines = 60;
+export const reach = 2.4;
+/** The same for the two parts of a pair: a small one trims a large one. */
+export const pairReach = 100;
+/** Lines of a stock list considered for an arm, the nearest by ratio; more of them where two may stand for one. */
+const mostLines = { single: 60, pair: 200 } as const;
 
 /** What one arm of a network could be made of, ascending by value; never empty. */
-export function candidatesFor(record: DesignRecord, build: Build, arm: Arm, centre: number): readonly SinglePart[] {
+export function candidatesFor(
+  record: DesignRecord,
+  build: Build,
+  arm: Arm,
+  centre: number,
+  within = reach,
+): readonly SinglePart[] {
   const { origin } = build[arm.part];
   const range = arm.part === 'inductor' ? record.requirement.inductorH : record.requirement.capacitorF;
-  const low = Math.max(range.low, centre / reach);
-  const high = Math.min(range.high, centre * reach);
+  const low = Math.max(range.low, centre / within);
+  const high = Math.min(range.high, centre * within);
   if (origin === 'exact') return [partOf(record, build, arm, arm.value, 'exact')];
   if (origin === 'stock') {
-    const lines = build.stock!.parts.filter(({ kind }) => kind === arm.part);
-    const near = lines.toSorted((a, b) => distance(a.value, centre) - distance(b.value, centre)).slice(0, mostLines);
+    const lines = usable(build, arm, record.requirement.frequencyHz);
+    const near = lines
+      .toSorted((a, b) => distance(a.value, centre) - distance(b.value, centre))
+      .slice(0, within > reach ? mostLines.pair : mostLines.single);
     return near.toSorted((a, b) => a.value - b.value).map((line) => partOfStock(record, build, arm, line));
   }
   // A coil's turns are spread or pressed to any value; so fine a series stands for them.
   const series = origin === 'wound' ? 'E192' : origin;
-  const within = low <= high ? preferredValues(series, low, high) : [];
-  const values = within.length > 0 ? within : [nearestOf(series, centre, range.low, range.high)];
+  const near = low <= high ? preferredValues(series, low, high) : [];
+  const values = near.length > 0 ? near : [nearestOf(series, centre, range.low, range.high)];
   return values.map((value) => partOf(record, build, arm, value, origin));
+}
+
+/** Lines of the kind; those that resonate by themselves below the design frequency are no such part there. */
+function usable({ stock }: Build, { part }: Arm, f0: number): readonly StockPart[] {
+  const lines = stock!.parts.filter(({ kind }) => kind === part);
+  const below = lines.filter(({ selfResonanceHz }) => selfResonanceHz === null || selfResonanceHz > f0);
+  return below.length > 0 ? below : lines;
 }
 
 const distance = (value: number, centre: number): number => Math.abs(Math.log(value / centre));

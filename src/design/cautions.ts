@@ -1,8 +1,8 @@
-import type { Caution, Option } from '../dossier.ts';
+import type { BuiltPart, Caution, Option } from '../dossier.ts';
 import { branchesOf } from '../evidence/branch.ts';
 import { solveNodal } from '../evidence/nodal.ts';
 import { terminationAt } from '../network/termination-at.ts';
-import { formatQuantity } from '../quantity/format.ts';
+import { formatFixed, formatQuantity } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 
 /** Heat in one part above which it is said to burn, W (common practice). */
@@ -19,6 +19,7 @@ export function cautionsOf(record: DesignRecord, chosen: Option | undefined): Ca
   return [
     ...safety.map((text): Caution => ({ kind: 'safety', text })),
     ...(chosen?.cautions ?? []).map((text): Caution => ({ kind: 'practice', text })),
+    ...(chosen?.built?.parts ?? []).flatMap((part) => nearResonance(part, record.requirement.frequencyHz)),
     ...(chosen?.built?.coils ?? [])
       .filter(({ caution }) => caution !== '' && record.build?.inductor.origin === 'wound')
       .map(({ designator, caution }): Caution => ({ kind: 'practice', text: `${designator}: ${caution}` })),
@@ -43,6 +44,19 @@ function voltage(record: DesignRecord, chosen: Option | undefined): string {
       ? `a mismatched load raises it, to ${formatQuantity(mismatched, 'V', 3)} peak across a part at the VSWR stated`
       : 'another load can raise it';
   return `With ${formatQuantity(powerW, 'W', 3)} available, a node of this network reaches ${formatQuantity(volts, 'V', 3)} peak to ground at the design frequency into the loads as given; ${raised}. RF voltage burns skin at contact: switch off before touching.`;
+}
+
+/** A part within three times the design frequency of its self-resonance isn't the value that it is sold as. */
+function nearResonance({ designator, part, selfResonanceHz }: BuiltPart, f0: number): readonly Caution[] {
+  if (selfResonanceHz === null || selfResonanceHz > 3 * f0) return [];
+  const resonance = formatQuantity(selfResonanceHz, 'Hz');
+  // Below resonance L/(1 − (f/f_SR)²), and C likewise, is what the part looks like.
+  const more = 100 / (1 - (f0 / selfResonanceHz) ** 2) - 100;
+  const text =
+    selfResonanceHz <= f0
+      ? `${designator} resonates by itself at ${resonance}, not above the design frequency: there it is no ${part}.`
+      : `${designator} resonates by itself at ${resonance}: at the design frequency it looks ${formatFixed(more, 0)} % larger than it is sold as, which the figures take in and its tolerance does not.`;
+  return [{ kind: 'practice', text }];
 }
 
 function heat(chosen: Option | undefined): readonly string[] {

@@ -1,6 +1,5 @@
 import type { Built, Check, Option } from '../dossier.ts';
 import type { Arm } from '../network/arm.ts';
-import { formatFixed } from '../quantity/format.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { checksOf, verdictOf } from './checks.ts';
 import { yieldWords } from './words.ts';
@@ -26,7 +25,7 @@ function yieldCheck({ build }: DesignRecord, { yield: found }: Built): readonly 
     {
       subject: 'yield',
       verdict: good ? 'meets' : 'falls short',
-      reason: `yield ${yieldWords(found)}, ${good ? 'at least' : 'below'} the ${formatFixed(least * 100, 1)} % required`,
+      reason: `yield ${yieldWords(found)}, ${good ? 'at least' : 'below'} the ${String(Number((least * 100).toPrecision(6)))} % required`,
     },
   ];
 }

@@ -1,4 +1,4 @@
-import type { Built, Dossier, Option } from '../dossier.ts';
+import type { AsBuiltFigures, Built, Dossier, Option } from '../dossier.ts';
 
 /** One figure of a report, under a name that the next version of it bears too. */
 export interface PrintedFigure {
@@ -10,7 +10,7 @@ export interface PrintedFigure {
 }
 
 /** Every figure of a report that a reviewer would challenge, in the order in which it is printed. */
-export function printedFigures({ ceiling, options, chosen, evidence }: Dossier): readonly PrintedFigure[] {
+export function printedFigures({ ceiling, options, chosen, evidence, asBuilt }: Dossier): readonly PrintedFigure[] {
   const network = options.find(({ id }) => id === chosen);
   return [
     figure('network chosen', chosen),
@@ -30,6 +30,7 @@ export function printedFigures({ ceiling, options, chosen, evidence }: Dossier):
           figure('evidence: passes', evidence.pass),
           ...evidence.checks.map(({ subject, spread }) => figure(`evidence: spread of ${subject}`, spread)),
         ]),
+    ...(asBuilt === null ? [] : ofBoard(asBuilt, network)),
   ];
 }
 
@@ -93,5 +94,36 @@ function ofStress(of: string, { parts, within }: NonNullable<Built['stress']>): 
       figure(`${of}: power that ${designator} bears`, limitW, 'W'),
     ]),
     figure(`${of}: within its ratings`, within),
+  ];
+}
+
+/** The one cause that explains the board best goes by its kind and its part, node or end. */
+function ofBoard(board: AsBuiltFigures, network: Option | undefined): readonly PrintedFigure[] {
+  const { attached, verdict, outside, distance, conclusion, explanations, remedy } = board;
+  const of = 'finished board';
+  const [best] = explanations;
+  const partOf = (designator: string) => network?.arms[network.designators.indexOf(designator)]?.part ?? 'capacitor';
+  return [
+    figure(`${of}: verdict`, verdict.verdict),
+    figure(`${of}: load state attached`, attached.state),
+    figure(`${of}: worst return loss measured`, verdict.worstReturnLossDb, 'dB'),
+    figure(`${of}: frequency of the worst return loss measured`, verdict.worstAtHz, 'Hz'),
+    figure(`${of}: worst return loss predicted`, verdict.predictedDb, 'dB'),
+    figure(`${of}: places outside the tolerance band`, outside?.length ?? null),
+    figure(`${of}: RMS distance in Γ`, distance),
+    figure(`${of}: conclusion`, conclusion),
+    ...(best === undefined
+      ? []
+      : [
+          figure(`${of}: nearest cause`, `${best.kind}, ${best.designator ?? String(best.at)}`),
+          figure(`${of}: RMS distance it leaves`, best.residual),
+        ]),
+    ...(remedy === null
+      ? []
+      : [
+          figure(`${of}: part to replace`, remedy.designator),
+          figure(`${of}: value instead`, remedy.to, unitOf(partOf(remedy.designator))),
+          figure(`${of}: worst return loss with it`, remedy.afterDb, 'dB'),
+        ]),
   ];
 }

@@ -58,11 +58,15 @@ function ofBuild({ inductor, capacitor, seed }: Build, yieldAssessed: boolean): 
 
 /** Standards and published methods really applied to this record, each with what it was applied for. */
 export function referencesOf(
-  { method, source, loads, build, requirement }: DesignRecord,
+  { method, source, loads, build, requirement, asBuilt }: DesignRecord,
   { ceiling, pairChecked, real }: { readonly ceiling: boolean; readonly pairChecked: boolean; readonly real: boolean },
 ): Reference[] {
   const measured = [source, ...loads.map(({ termination }) => termination)].filter(isMeasured);
-  const touchstone = measured.some(({ measured: { name } }) => /\.s\d+p\b/iu.test(name));
+  const files = [
+    ...measured.map((termination) => termination.measured),
+    ...(asBuilt === null ? [] : [asBuilt.measured]),
+  ];
+  const touchstone = files.some(({ name }) => /\.s\d+p\b/iu.test(name));
   return [
     ...ofMethod[method],
     ...(pairChecked && method !== 'resistive-pair' ? [qMethod] : []),
@@ -92,5 +96,7 @@ export function referencesOf(
     { title: 'ISO 7200', appliedFor: 'data fields of the title block' },
     { title: 'RFC 8785', appliedFor: 'canonical form of the record' },
     { title: 'FIPS 180-4', appliedFor: 'SHA-256 digest of the record' },
+    { title: 'ISO 32000-1:2008', appliedFor: 'PDF: attached files, signature fields, tagged structure' },
+    { title: 'ISO 16684-1', appliedFor: 'metadata of the PDF (XMP)' },
   ];
 }

@@ -3,8 +3,8 @@ import { withTolerance, type PreparedSubject } from './subject.ts';
 import type { PartSensitivity } from './tolerance-figures.ts';
 import { passedOf, worstReturnLosses } from './yield.ts';
 
-/** Step of the central difference, as a fraction of a part's value. */
-const step = 1e-3;
+/** Step up and down, as a fraction of a part's value: at its best a return loss falls to both sides. */
+const step = 0.01;
 
 /**
  * What each part does to the worst return loss, largest effect within its tolerance first.
@@ -29,7 +29,8 @@ export function sensitivityOf(subject: PreparedSubject, yieldsIfHalved: readonly
       effectDb: nominalDb - atToleranceDb,
       figures: {
         designator,
-        dbPerPercent: (found[0]! - found[1]!) / (2 * step * 100),
+        dbPerPercent: found[0]! - nominalDb,
+        dbPerMinusPercent: found[1]! - nominalDb,
         atToleranceDb,
         yieldIfHalved: yieldsIfHalved?.[k] ?? null,
       },

@@ -38,6 +38,8 @@ export interface PartSensitivity {
   readonly designator: string;
   /** Change of the worst return loss for +1 % of the part's value, dB. */
   readonly dbPerPercent: number;
+  /** The same for −1 %. */
+  readonly dbPerMinusPercent: number;
   /** Worst return loss with this part alone at the worse end of its tolerance, dB. */
   readonly atToleranceDb: number;
   /** Yield with this part's tolerance halved, the same networks drawn; null where no yield is assessed. */

@@ -14,9 +14,22 @@ const inchM = 0.0254;
 
 /**
  * Self-capacitance of a single-layer coil with one end grounded, pF per centimetre of diameter, by length over diameter
- * (R. G. Medhurst, Wireless Engineer 24, 1947).
+ * (R. G. Medhurst, Wireless Engineer 24, 1947; quoted from memory).
  */
 const medhurst = [
+  [0.1, 0.96],
+  [0.15, 0.79],
+  [0.2, 0.7],
+  [0.25, 0.64],
+  [0.3, 0.6],
+  [0.35, 0.57],
+  [0.4, 0.54],
+  [0.45, 0.52],
+  [0.5, 0.5],
+  [0.6, 0.48],
+  [0.7, 0.47],
+  [0.8, 0.46],
+  [0.9, 0.46],
   [1, 0.46],
   [1.5, 0.47],
   [2, 0.5],
@@ -26,6 +39,11 @@ const medhurst = [
   [4, 0.72],
   [4.5, 0.77],
   [5, 0.81],
+  [6, 0.92],
+  [7, 1.01],
+  [8, 1.12],
+  [9, 1.22],
+  [10, 1.32],
 ] as const;
 
 /** More turns than anyone winds evenly by hand. */
@@ -64,7 +82,7 @@ export function coil(designator: string, inductanceH: number, { wireM, formM, ga
 /**
  * F, straight between the values of Medhurst's table.
  *
- * @returns null outside of it, length over diameter below 1 or above 5
+ * @returns null outside of it, length over diameter below 0.1 or above 10
  */
 export function selfCapacitance(lengthM: number, diameterM: number): number | null {
   const ratio = lengthM / diameterM;
@@ -91,7 +109,7 @@ function cautionOf(turns: number, lengthM: number, diameterM: number): string {
   const ratio = lengthM / diameterM;
   if (ratio < 1 || ratio > 5) {
     cautions.push(
-      `Length over diameter, ${ratio.toPrecision(3)}, is outside 1 to 5: no figure for its self-capacitance and self-resonance.`,
+      `Length over diameter, ${ratio.toPrecision(3)}, is outside 0.1 to 10: no figure for its self-capacitance and self-resonance.`,
     );
   }
   if (turns > mostTurns) cautions.push(`More than ${String(mostTurns)} turns: thinner wire or a larger form would do.`);

@@ -1,10 +1,14 @@
 import { normalise } from './read-quantity.ts';
 import { read, refuse, type Reading } from './reading.ts';
 
-/** Reads `5%` or `5`, both five per cent, as a fraction; what range it may have is the caller's to say. */
+/**
+ * Reads `5%` as a fraction; what range it may have is the caller's to say. A bare number could be a fraction or per cent,
+ * and is refused.
+ */
 export function readPercent(text: string): Reading<number> {
-  const match = /^([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+))(?:e([+-]?\d+))?\s*%?$/iu.exec(normalise(text));
+  const match = /^([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+))(?:e([+-]?\d+))?\s*(%)?$/iu.exec(normalise(text));
   if (match === null) return refuse('not a percentage', 'write it as 5%');
+  if (match[3] === undefined) return refuse('the per cent is missing', `write ${normalise(text)}% if that is meant`);
   const [, digits = '', exponent = '0'] = match;
   // The exponent takes the per cent, so that nothing is rounded twice.
   const value = Number(`${digits.replace(',', '.')}e${String(Number(exponent) - 2)}`);

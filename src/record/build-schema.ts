@@ -99,7 +99,7 @@ export const buildSchema: v.GenericSchema<unknown, Build> = v.pipe(
       v.integer(`the number of networks drawn is not whole; give a whole number from 1 to ${String(limits.draws)}`),
     ),
     seed: v.pipe(
-      between('the seed', 0, 4294967295, 'a whole number from 0'),
+      between('the seed', 0, 4294967295, 'a whole number from 0 to 4294967295'),
       v.integer('the seed is not whole; give a whole number from 0'),
     ),
     leastYield: v.nullable(
@@ -127,14 +127,14 @@ export const buildSchema: v.GenericSchema<unknown, Build> = v.pipe(
   v.forward(
     v.check(
       ({ stock: list, inductor }) => inductor.origin !== 'stock' || (list?.parts.some(isKind('inductor')) ?? false),
-      'inductors are to come from a stock list and none is given with such; give a list that has them',
+      'inductors are to come from a stock list and none is given with such; give a list that has them, or a series such as E24',
     ),
     ['inductor', 'origin'],
   ),
   v.forward(
     v.check(
       ({ stock: list, capacitor }) => capacitor.origin !== 'stock' || (list?.parts.some(isKind('capacitor')) ?? false),
-      'capacitors are to come from a stock list and none is given with such; give a list that has them',
+      'capacitors are to come from a stock list and none is given with such; give a list that has them, or a series such as E24',
     ),
     ['capacitor', 'origin'],
   ),

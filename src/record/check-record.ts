@@ -20,6 +20,18 @@ function checkHistory({ previous, history }: DesignRecord): void {
   });
 }
 
+/** At or below the design frequency an inductor that resonates by itself is none. */
+function checkResonance({ build, requirement }: DesignRecord): void {
+  const resonance = build?.selfResonanceHz ?? null;
+  if (resonance === null || resonance > requirement.frequencyHz) return;
+  throw new InputError({
+    field: 'build.selfResonanceHz',
+    read: `${String(resonance)} Hz`,
+    why: 'at or below the design frequency: there it is no inductor',
+    would: 'give a higher one, as 900M, or leave it out',
+  });
+}
+
 /**
  * A value as a design record.
  *
@@ -31,6 +43,7 @@ export function checkRecord(value: unknown): DesignRecord {
   const result = v.safeParse(recordSchema, value, { abortPipeEarly: true });
   if (result.success) {
     checkHistory(result.output);
+    checkResonance(result.output);
     return result.output;
   }
   const issues = result.issues.length > mostProblems ? result.issues : issuesOf(value);

@@ -71,7 +71,7 @@ export function readDraft(given: Fields, attachments: Attachments = new Map(), k
   );
   // What number it may be is the record's to say.
   const whole = (name: FieldName): number | string =>
-    /^-?\d+(?:\.\d+)?$/u.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim();
+    /^[+-]?\d+(?:\.\d+)?(?:e[+-]?\d{1,2})?$/iu.test(fields[name].trim()) ? Number(fields[name]) : fields[name].trim();
   const plainNumber = (name: FieldName): number | string => {
     const value = Number(fields[name].trim().replace(',', '.'));
     return fields[name].trim() === '' || !Number.isFinite(value) ? fields[name] : value;

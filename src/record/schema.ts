@@ -184,7 +184,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       form: v.picklist(['any', 'low-pass', 'high-pass'], 'this form is unknown; give any, low-pass or high-pass'),
       shuntInductor: v.boolean('whether shunt inductors are allowed is not yes or no; give yes or no'),
       seed: v.pipe(
-        between('the seed', 0, 4294967295, 'a whole number from 0'),
+        between('the seed', 0, 4294967295, 'a whole number from 0 to 4294967295'),
         v.integer('the seed is not whole; give a whole number from 0'),
       ),
       steps: v.nullable(
@@ -263,7 +263,8 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
   ),
   v.forward(
     v.check(
-      ({ asBuilt, loads }) => asBuilt === null || asBuilt.state === null || loads.some(({ name }) => name === asBuilt.state),
+      ({ asBuilt, loads }) =>
+        asBuilt === null || asBuilt.state === null || loads.some(({ name }) => name === asBuilt.state),
       'the board was measured with a load state that there is not; name one of them, or none',
     ),
     ['asBuilt'],

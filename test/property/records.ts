@@ -66,7 +66,7 @@ const build: fc.Arbitrary<Build> = fc.record({
   capacitor: policy(1e-12, 'exact', 'E6', 'E24', 'E192'),
   stock: fc.constant(null),
   pairs: fc.boolean(),
-  selfResonanceHz: nullable(value(1e6, 1e11)),
+  selfResonanceHz: nullable(value(2e10, 1e12)),
   eslH: value(1e-11, 1e-8),
   strayF: value(1e-15, 1e-12),
   leadH: value(1e-11, 1e-9),

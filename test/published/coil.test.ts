@@ -18,8 +18,11 @@ describe('H. A. Wheeler, Proc. IRE 16, 1928, L(µH) = r²N²/(9r + 10l), r and l
   });
 });
 
-describe('R. G. Medhurst, Wireless Engineer 24, 1947, self-capacitance (pF) = K·D(cm), exact', () => {
+describe('R. G. Medhurst, Wireless Engineer 24, 1947, self-capacitance (pF) = K·D(cm), exact; outside 1 to 5 from memory', () => {
   it.each([
+    [0.1, 0.96],
+    [0.25, 0.64],
+    [0.5, 0.5],
     [1, 0.46],
     [1.5, 0.47],
     [2, 0.5],
@@ -29,6 +32,7 @@ describe('R. G. Medhurst, Wireless Engineer 24, 1947, self-capacitance (pF) = K�
     [4, 0.72],
     [4.5, 0.77],
     [5, 0.81],
+    [10, 1.32],
   ])('length/diameter %s: K = %s', (ratio, k) => {
     // A diameter of 2 cm.
     expect(selfCapacitance(ratio * 0.02, 0.02)! / (k * 2e-12)).toBeCloseTo(1, 9);

@@ -164,7 +164,7 @@ export const realFormulas: readonly Formula[] = [
     title: 'Self-capacitance of a coil',
     lines: ['C_own = K(l/D) D  ,  f_SR = frac(1; 2π sqrt(L C_own))'],
     text: [
-      'K in pF per centimetre of diameter from his table, 0.46 at l/D = 1 to 0.81 at 5, straight lines between; outside the table none is given. One end of the coil earthed.',
+      'K in pF per centimetre of diameter from his table, 0.96 at l/D = 0.1, 0.46 at 1, 1.32 at 10, straight lines between; outside the table none is given. One end of the coil earthed.',
     ],
     symbols: [['K', 'self-capacitance per diameter', 'pF/cm', '']],
     source: 'R. G. Medhurst, Wireless Engineer 24, 1947 (table quoted from memory).',

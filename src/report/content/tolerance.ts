@@ -14,13 +14,14 @@ export function tolerance(dossier: Dossier): readonly Block[] {
   const built = chosenBuilt(dossier);
   const { build, requirement } = dossier.record;
   if (built === null || build === null) return [heading, text(`Not assessed: ${whyNotBuilt(dossier)}.`)];
+  if (built.parts.length === 0 && build.sourceSpread === 0 && build.loadSpread === 0) {
+    return [heading, text('There is nothing whose value could vary.')];
+  }
   return [
     heading,
     { ...text(yieldSentence(built, requirement.returnLossDb)), keep: true },
     { kind: 'facts', columns: 4, entries: drawn(built, build) },
-    ...(built.parts.length === 0
-      ? [text('There is no part whose value could vary.')]
-      : [...corner(built, requirement.returnLossDb), ...sensitivity(built)]),
+    ...(built.parts.length === 0 ? [] : [...corner(built, requirement.returnLossDb), ...sensitivity(built)]),
   ];
 }
 
@@ -87,12 +88,12 @@ function sensitivity({
     const part = ordered.find((each) => each.designator === designator);
     return part === undefined ? '–' : `${orderedValue(part)} ${formatTolerance(part.tolerance, part.part)}`;
   };
-  const row = ({ designator, dbPerPercent, atToleranceDb, yieldIfHalved }: PartSensitivity) => ({
+  const row = ({ designator, dbPerPercent, dbPerMinusPercent, atToleranceDb, yieldIfHalved }: PartSensitivity) => ({
     cells: [
       [{ spans: [{ text: designator, bold: true }] }],
       ...[
         valueWords(designator),
-        `${dbPerPercent > 0 ? '+' : ''}${formatFixed(dbPerPercent, 2)} dB`,
+        ...[dbPerPercent, dbPerMinusPercent].map((db) => `${db > 0 ? '+' : ''}${formatFixed(db, 2)} dB`),
         returnLossWords(atToleranceDb),
         ...(halved ? [yieldIfHalved === null ? '–' : percent(yieldIfHalved)] : []),
       ].map((cell) => [plain(cell)]),
@@ -113,7 +114,8 @@ function sensitivity({
       columns: [
         { title: 'Part', share: 12 },
         { title: 'Value', share: 24 },
-        { title: 'Change for +1\u00a0%', share: 18, align: 'end' },
+        { title: 'For +1\u00a0%', share: 15, align: 'end' },
+        { title: 'For −1\u00a0%', share: 15, align: 'end' },
         { title: 'At the worse end of its\u00a0tolerance', share: 24, align: 'end' },
         ...(halved ? [{ title: 'Yield with its tolerance\u00a0halved', share: 22, align: 'end' as const }] : []),
       ],

@@ -50,8 +50,8 @@ export const built: Built = {
     meets: false,
   },
   sensitivity: [
-    { designator: 'L1', dbPerPercent: -2.48, atToleranceDb: 10.256, yieldIfHalved: 0.936 },
-    { designator: 'C1', dbPerPercent: 0.24, atToleranceDb: 16.256, yieldIfHalved: null },
+    { designator: 'L1', dbPerPercent: -2.48, dbPerMinusPercent: 2.2, atToleranceDb: 10.256, yieldIfHalved: 0.936 },
+    { designator: 'C1', dbPerPercent: 0.24, dbPerMinusPercent: -0.25, atToleranceDb: 16.256, yieldIfHalved: null },
   ],
   tighten: '',
   stress: {

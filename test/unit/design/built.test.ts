@@ -186,3 +186,37 @@ describe('design(record) with real parts', () => {
     expect(wound.coils.map(({ designator }) => designator)).toEqual(['L1', 'L2']);
   });
 });
+
+describe('design(record) where real parts meet their limits', () => {
+  // Against single E6 parts; computed apart from this project: 470 pF with 68 pF and 220 pF with 33 pF hold 34.2 dB.
+  it('trims a large part with a small one', () => {
+    const built = chosenBuilt(
+      design(
+        recordOf({
+          frequency: '3.6M',
+          source: '50',
+          load: '22+j60',
+          band: '3.58M..3.62M',
+          'return-loss': '25',
+          'series-inductor': 'E6',
+          'series-capacitor': 'E6',
+          pairs: 'yes',
+          choice: 'shunt-load-minus',
+        }),
+      ),
+    );
+    expect(built.worstReturnLossDb).toBeGreaterThan(25);
+    expect(built.centring.roundingDb).toBeGreaterThanOrEqual(0);
+  });
+
+  it('refuses an inductor that is none at the design frequency, and cautions of one that hardly is', () => {
+    const { problems } = readDraft({ date: '2026-01-31', ...whip, 'self-resonance': '100M' });
+    expect(problems.map(({ field, why }) => [field, why])).toEqual([
+      ['self-resonance', 'at or below the design frequency: there it is no inductor'],
+    ]);
+    const { cautions } = design(recordOf({ ...whip, 'self-resonance': '400M' }));
+    // 1/(1 − (151.25/400)²) = 1.167
+    expect(cautions.map(({ text }) => text).join(' ')).toContain('L1 resonates by itself at 400.0 MHz');
+    expect(cautions.map(({ text }) => text).join(' ')).toContain('it looks 17 % larger');
+  });
+});

@@ -28,7 +28,7 @@ describe('asBuiltWords(figures)', () => {
     expect(words).toContain("Any one of these explains it, and this measurement can't tell them apart: ");
     expect(words).toContain('L2 is 15 % high (64.4 nH instead of 56.0 nH)');
     expect(words).toMatch(
-      /With that in force, L2 of 51\.0 nH instead of 56\.0 nH brings .* from \d+\.\d\d dB to \d+\.\d\d dB, which holds the 12\.00 dB required\./u,
+      /With such a cause in force, L2 of 51\.0 nH instead of 56\.0 nH brings .* from \d+\.\d\d dB to \d+\.\d\d dB, which holds the 12\.00 dB required\./u,
     );
     expect(wordsOf(high(1.15, 3), { returnLossDb: 12 })).toContain(
       'No single part on sale brings it noticeably closer.',

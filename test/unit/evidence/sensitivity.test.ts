@@ -14,10 +14,10 @@ describe('sensitivityOf(subject, yieldsIfHalved)', () => {
     ]);
     expect(found[0]!.atToleranceDb).toBeCloseTo(db(41), 10);
     expect(found[1]!.atToleranceDb).toBeCloseTo(db(40.3), 10);
-    // d/dX of −10·log10(X²/(100² + X²)) is −(20/ln 10)·100²/(X·(100² + X²)) dB/Ω.
-    const perOhm = ((-20 / Math.LN10) * 1e4) / (40 * (1e4 + 1600));
-    expect(found[0]!.dbPerPercent).toBeCloseTo(perOhm * 0.1, 6);
-    expect(found[1]!.dbPerPercent).toBeCloseTo(perOhm * 0.3, 6);
+    // One per cent of 10 Ω is 0.1 Ω of the 40 Ω together, of 30 Ω it is 0.3 Ω.
+    expect(found[0]!.dbPerPercent).toBeCloseTo(db(40.1) - db(40), 10);
+    expect(found[0]!.dbPerMinusPercent).toBeCloseTo(db(39.9) - db(40), 10);
+    expect(found[1]!.dbPerPercent).toBeCloseTo(db(40.3) - db(40), 10);
   });
 });
 

@@ -5,7 +5,7 @@ import { varied } from './in-series.ts';
 describe('tighten(parts, sensitivity, found)', () => {
   const parts = [varied('L1', 0, 0.05), varied('C2', 1, 0.05)];
   const row = (designator: string, yieldIfHalved: number | null) => {
-    return { designator, dbPerPercent: 0, atToleranceDb: 20, yieldIfHalved };
+    return { designator, dbPerPercent: 0, dbPerMinusPercent: 0, atToleranceDb: 20, yieldIfHalved };
   };
 
   it('names the part that buys most', () => {

@@ -4,7 +4,6 @@ import { readPercent, writePercent } from '../../../src/quantity/read-percent.ts
 describe('readPercent(text)', () => {
   it.each([
     ['5%', 0.05],
-    ['5', 0.05],
     ['2,5 %', 0.025],
     ['100%', 1],
     ['1e-3%', 1e-5],
@@ -13,8 +12,12 @@ describe('readPercent(text)', () => {
     expect(readPercent(text)).toEqual({ ok: true, value });
   });
 
-  it.each(['', 'five', '5 %%', '1e400'])('refuses "%s"', (text) => {
+  it.each(['', 'five', '5 %%', '1e400%'])('refuses "%s"', (text) => {
     expect(readPercent(text)).toMatchObject({ ok: false, would: 'write it as 5%' });
+  });
+
+  it('refuses a bare number, which could be a fraction', () => {
+    expect(readPercent('0.5')).toMatchObject({ ok: false, would: 'write 0.5% if that is meant' });
   });
 });
 

@@ -121,11 +121,11 @@ describe('readDraft(fields) of bad input', () => {
     [{ method: 'fitted', band: '95M..105M', elements: 'many' }, /^elements "many": /u],
     [
       { method: 'fitted', band: '95M..105M', 'fit-seed': '-1' },
-      /^fit-seed "-1": the seed is out of range; give a whole number from 0$/u,
+      /^fit-seed "-1": the seed is out of range; give a whole number from 0 to 4294967295$/u,
     ],
     [
       { method: 'fitted', band: '95M..105M', 'fit-seed': '1.5' },
-      /^fit-seed "1\.5": the seed is not whole; give a whole number from 0$/u,
+      /^fit-seed "1\.5": the seed is not whole; give a whole number from 0 to 4294967295$/u,
     ],
     [{ method: 'fitted', band: '95M..105M', steps: '0' }, /^steps "0": .*whole number from 1$/u],
     [{ method: 'fitted' }, /^band: this method is for a band; give one$/u],

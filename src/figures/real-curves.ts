@@ -10,7 +10,8 @@ import { textWidth } from './text-width.ts';
 /** How real parts do, over the frequencies of the curves of exact ones; `awaited`: that is still being worked out. */
 export type RealCurves = Percentiles | 'awaited' | null;
 
-const nominal = { stroke: 'accent', width: stroke.heavy, dash: [4, 2] } as const;
+/** Of the curve of parts at their values. */
+export const nominal = { stroke: 'accent', width: stroke.heavy, dash: [4, 2] } as const;
 const shade = { fill: 'muted', fillOpacity: 0.2 } as const;
 const edge = { stroke: 'muted', width: stroke.thin } as const;
 /** Room around the letters of an edge, pt. */
@@ -40,13 +41,16 @@ export function realKeys(real: RealCurves, severalStates: boolean): readonly Key
     text: real === 'awaited' ? 'real parts: being worked out' : `real parts${of}: nominal, and ${betweenWords(real)}`,
     tone: 'ink',
     reach: 22,
-    sample: (x, y, X, Y) => [
-      rectangle(x, y, X - x, Y - y, { ...shade, ...edge }),
-      line(x, (y + Y) / 2, X, (y + Y) / 2, nominal),
-    ],
+    sample: bandSample,
   };
   return severalStates ? [parts] : [exact, parts];
 }
+
+/** The band with the nominal curve in it, for a key. */
+export const bandSample: Key['sample'] = (x, y, X, Y) => [
+  rectangle(x, y, X - x, Y - y, { ...shade, ...edge }),
+  line(x, (y + Y) / 2, X, (y + Y) / 2, nominal),
+];
 
 /** The band that most networks stay in, its edges named by the part of them below, and the nominal one. */
 export function realCurves(frame: Frame, real: RealCurves, drawn: Drawn): readonly Shape[] {
@@ -129,5 +133,5 @@ export function realWords(real: RealCurves): string {
 const percent = (fraction: number): string => `${formatFixed(fraction * 100, 0)} %`;
 
 /** "5 % to 95 % of networks" */
-const betweenWords = ({ fractions }: Percentiles): string =>
+export const betweenWords = ({ fractions }: Percentiles): string =>
   `${percent(fractions[0]!)} to ${percent(fractions.at(-1)!)} of networks`;

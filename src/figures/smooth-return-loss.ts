@@ -11,7 +11,12 @@ const parts = 16;
  *
  * @returns frequencies, Hz, and return losses, dB, of equal length
  */
-export function smoothReturnLoss({ frequencyHz, returnLossDb: sampled, gammaRe, gammaIm }: Response): {
+export function smoothReturnLoss({
+  frequencyHz,
+  returnLossDb: sampled,
+  gammaRe,
+  gammaIm,
+}: Pick<Response, 'frequencyHz' | 'returnLossDb' | 'gammaRe' | 'gammaIm'>): {
   readonly hertz: readonly number[];
   readonly decibels: readonly number[];
 } {

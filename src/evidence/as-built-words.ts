@@ -7,9 +7,9 @@ const spansTold = 4;
 
 /** What the finished board does and why, in sentences for page and report. */
 export function asBuiltWords(figures: AsBuiltFigures): readonly string[] {
-  const { name, samples, referenceOhm, measuredHz, overlay, verdict, outside, remedy } = figures;
+  const { name, samples, referenceOhm, measuredHz, overlay, verdict, outside } = figures;
   const compared = overlay.frequencyHz.length;
-  const sentences = [
+  return [
     `The finished board was measured from the source side with the load attached: ${name}, ${String(samples)} samples, ${frequencySpan(measuredHz)}, in ${formatQuantity(referenceOhm, 'Ω')}; told here against the source itself.`,
     compared === 0
       ? 'Nothing of it lies within the sweep shown, so it is compared with nothing.'
@@ -18,22 +18,24 @@ export function asBuiltWords(figures: AsBuiltFigures): readonly string[] {
     ...verdictWords(verdict),
     outside === null || compared === 0 ? '' : outsideWords(outside),
     ...causeWords(figures),
-  ];
-  if (remedy !== null) {
-    const { words, beforeDb, afterDb, meets } = remedy;
-    const required = verdict.requiredDb === null ? '' : `the ${decibelPair(afterDb, verdict.requiredDb)[1]} required`;
-    const judged = meets === null ? '' : meets ? `, which holds ${required}` : `, still below ${required}`;
-    const [before, after] = decibelPair(beforeDb, afterDb);
-    sentences.push(
-      `With that in force, ${words} brings the worst return loss over band and load states from ${before} to ${after}${judged}.`,
-    );
-  } else if (figures.alike > 0 && verdict.verdict !== 'meets') {
-    sentences.push('No single part on sale brings it noticeably closer.');
-  }
-  return sentences.filter((sentence) => sentence !== '');
+    remedyWords(figures),
+  ].filter((sentence) => sentence !== '');
 }
 
-function attachedWords({ attached: { state, by, distances } }: AsBuiltFigures): string {
+/** The part to replace and what that would do; '' where nothing is to be said. */
+export function remedyWords({ remedy, verdict, alike }: AsBuiltFigures): string {
+  if (remedy === null) {
+    return alike > 0 && verdict.verdict !== 'meets' ? 'No single part on sale brings it noticeably closer.' : '';
+  }
+  const { words, beforeDb, afterDb, meets } = remedy;
+  const required = verdict.requiredDb === null ? '' : `the ${decibelPair(afterDb, verdict.requiredDb)[1]} required`;
+  const judged = meets === null ? '' : meets ? `, which holds ${required}` : `, still below ${required}`;
+  const [before, after] = decibelPair(beforeDb, afterDb);
+  return `With such a cause in force, ${words} brings the worst return loss over band and load states from ${before} to ${after}${judged}.`;
+}
+
+/** How it is known which load state was attached; '' where there is only one. */
+export function attachedWords({ attached: { state, by, distances } }: AsBuiltFigures): string {
   if (by === 'only one') return '';
   if (by === 'engineer') return `The load state attached was “${state}”.`;
   if (distances.length === 0) return 'Which load state was attached is not said.';
@@ -41,7 +43,8 @@ function attachedWords({ attached: { state, by, distances } }: AsBuiltFigures): 
   return `Which load state was attached is not said; “${state}” is nearest and is taken (RMS distance in Γ: ${each}).`;
 }
 
-function verdictWords(of: AsBuiltVerdict): string[] {
+/** What was measured in the band, against what was required and predicted. */
+export function verdictWords(of: AsBuiltVerdict): readonly string[] {
   const { verdict, requiredDb, bandHz, coveredHz, worstReturnLossDb, worstAtHz, predictedDb } = of;
   const place = (span: typeof bandHz): string =>
     span.low === span.high ? `at ${formatQuantity(span.low, 'Hz', 5)}` : `over ${frequencySpan(span)}`;
@@ -79,7 +82,8 @@ function outsideWords(outside: readonly OutsideSpan[]): string {
   return `It lies outside the tolerance band: ${told}${more > 0 ? `; and in ${String(more)} smaller places` : ''}.`;
 }
 
-function causeWords({ conclusion, distance, explanations, alike }: AsBuiltFigures): string[] {
+/** How far measurement and prediction are apart, and which single causes would explain it. */
+export function causeWords({ conclusion, distance, explanations, alike }: AsBuiltFigures): readonly string[] {
   if (conclusion === 'not compared' || distance === null) return [];
   const whole = gamma(distance);
   if (conclusion === 'as predicted') {
@@ -106,4 +110,4 @@ const told = ({ words, residual, withinTolerance }: Explanation): string =>
   `${words}${withinTolerance === null ? '' : withinTolerance ? ', within its tolerance' : ', beyond its tolerance'}, which leaves ${gamma(residual)}`;
 
 /** A distance in Γ. */
-const gamma = (distance: number): string => (distance < 0.0005 ? 'under 0.001' : formatFixed(distance, 3));
+export const gamma = (distance: number): string => (distance < 0.0005 ? 'under 0.001' : formatFixed(distance, 3));

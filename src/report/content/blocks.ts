@@ -3,10 +3,12 @@ import type { Attachment } from '../attachments.ts';
 import type { Block } from '../page/block.ts';
 import { ceiling } from './ceiling.ts';
 import { cautions, references } from './closing.ts';
+import { changes } from './changes.ts';
 import { contents } from './contents.ts';
 import { dc } from './dc.ts';
 import { deviations } from './deviations.ts';
 import { files } from './files.ts';
+import { finishedBoard } from './finished-board.ts';
 import { history } from './history.ts';
 import { network } from './network.ts';
 import { options } from './options.ts';
@@ -36,6 +38,7 @@ const ofDesign = [
   stress,
   dc,
   winding,
+  finishedBoard,
   cautions,
   deviations,
   references,
@@ -46,6 +49,7 @@ export function blocks(dossier: Dossier, attached: readonly Attachment[]): reado
   const parts = [
     ...ofDesign.flatMap((part) => part(dossier)),
     ...files(attached),
+    ...changes(dossier),
     ...history(dossier),
     ...signOff(dossier),
   ];

@@ -1,15 +1,17 @@
+import { lacksForIssue } from '../../design/issuing.ts';
 import type { Dossier } from '../../dossier.ts';
 import type { Signature } from '../../record/design-record.ts';
 import { plain, text, type Block, type Row } from '../page/block.ts';
 import { parts } from './parts.ts';
 import { stateWords } from './state.ts';
-import { orNotStated } from './words.ts';
+import { orNotStated, sentence } from './words.ts';
 
 /** Room for a signature by hand, pt. */
 const room = 29;
 
 /** Name, role, date and remark of whoever signs, and room for the signature, by hand or by a program. */
-export function signOff({ record }: Dossier): readonly Block[] {
+export function signOff(dossier: Dossier): readonly Block[] {
+  const { record } = dossier;
   const { prepared, checked, approved, state } = record.signOff;
   return [
     { kind: 'heading', number: parts.signOff, text: 'Sign-off' },
@@ -19,6 +21,7 @@ export function signOff({ record }: Dossier): readonly Block[] {
       ),
       keep: true,
     },
+    ...lacking(dossier),
     {
       kind: 'table',
       columns: [
@@ -30,6 +33,19 @@ export function signOff({ record }: Dossier): readonly Block[] {
       ],
       rows: [row('Prepared', prepared), row('Checked', checked), row('Approved', approved)],
     },
+  ];
+}
+
+/** What is still to be done before it can be issued; a draft isn't asked. */
+function lacking(dossier: Dossier): readonly Block[] {
+  const { state } = dossier.record.signOff;
+  const lacks = state === 'draft' ? [] : lacksForIssue(dossier);
+  if (lacks.length === 0) return [];
+  return [
+    { kind: 'heading', text: 'What lacks before issue' },
+    ...(state === 'issued' ? [{ ...text('It is marked as issued all the same.'), keep: true }] : []),
+    { kind: 'list', entries: lacks.map((words) => ({ mark: '–', paragraph: plain(sentence(words)) })) },
+    { kind: 'heading', text: 'Signatures' },
   ];
 }
 

@@ -4,6 +4,7 @@ import { returnLossDb } from '../../network/figures-of-merit.ts';
 import { formatFixed, formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { plain, type Block } from '../page/block.ts';
 import { allAccepted } from './deviations.ts';
+import { boardBrief } from './finished-board.ts';
 import { parts } from './parts.ts';
 import { orderWords, percent, returnLossName, stressBrief, yieldBrief } from './real-words.ts';
 import { chosenOption, partsOf, reasonsOf } from './words.ts';
@@ -26,6 +27,7 @@ export function verdict(dossier: Dossier): readonly Block[] {
       `${option.title}: ${option.built === null ? partsOf(option) : orderWords(option.built)}.`,
       ...words,
       ...proof,
+      ...[boardBrief(dossier)].filter((brief) => brief !== ''),
     ]),
     { kind: 'facts', columns: 4, entries: [...realFigures(dossier, option), ...figures(dossier, option)] },
   ];

@@ -69,7 +69,12 @@ function parse(
     if (given.has(option) && option !== 'load')
       throw problem(`--${option}`, 'this option is given twice', 'keep the one that is meant');
     if (known.has(option)) given.add(option);
-    if (name === 'block-dc' && !['yes', 'no'].includes(args[k + 1] ?? '')) {
+    if (extra.includes('ticket-text') && name === 'ticket' && (args[k + 1]?.startsWith('--') ?? true)) {
+      // Without a value it isn't the number of the title block but the summary for it.
+      joined.push('--ticket-text=yes');
+    } else if (extra.includes('ticket-markdown') && name === 'ticket-markdown') {
+      joined.push('--ticket-markdown=yes');
+    } else if (name === 'block-dc' && !['yes', 'no'].includes(args[k + 1] ?? '')) {
       joined.push('--block-dc=yes');
     } else if (known.has(name)) {
       const next = args[k + 1];

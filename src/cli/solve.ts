@@ -10,24 +10,23 @@ import { boardOptions, withBoard } from './with-board.ts';
 import { writeFile } from './write-file.ts';
 
 /** What else is written, by the option that names its file; null: there is nothing to write. */
-const files: Readonly<Record<'s2p' | 'csv' | 'ticket', (dossier: Dossier, file: string) => string | null>> = {
+const files: Readonly<Record<'s2p' | 'csv', (dossier: Dossier) => string | null>> = {
   s2p: chosenTwoPort,
   csv: sweepCsv,
-  ticket: (dossier, file) => (/\.(?:md|markdown)$/iu.test(file) ? ticketMarkdown(dossier) : ticketText(dossier)),
 };
 
 /**
  * Two terminations, or a record, in; the dossier as JSON on standard output. `--s2p FILE` and `--csv FILE` write the
- * chosen network and its sweep too, `--ticket FILE` a summary for a change ticket: Markdown where the file's name ends
- * in .md, plain text otherwise.
+ * chosen network and its sweep too. `--ticket` prints a summary for a change ticket instead, `--ticket-markdown` the same
+ * in Markdown.
  */
 await run((args) => {
-  const { record, options } = readArguments(args, ['s2p', 'csv', 'ticket', ...boardOptions]);
+  const { record, options } = readArguments(args, ['s2p', 'csv', 'ticket-text', 'ticket-markdown', ...boardOptions]);
   const dossier = design(withBoard(record, options));
-  for (const option of ['s2p', 'csv', 'ticket'] as const) {
+  for (const option of ['s2p', 'csv'] as const) {
     const file = options[option];
     if (file === undefined) continue;
-    const text = files[option](dossier, file);
+    const text = files[option](dossier);
     if (text === null) {
       throw new InputError({
         field: `--${option}`,
@@ -38,5 +37,7 @@ await run((args) => {
     }
     writeFile(`--${option}`, file, text);
   }
+  if (options['ticket-markdown'] !== undefined) return ticketMarkdown(dossier);
+  if (options['ticket-text'] !== undefined) return ticketText(dossier);
   return `${JSON.stringify(flatOptions(dossier), null, 1)}\n`;
 });

@@ -38,8 +38,8 @@ const asJson = (value: unknown): unknown => JSON.parse(JSON.stringify(value)) as
 
 describe.concurrent('solve', { timeout: 30_000 }, () => {
   it('prints the dossier of a record file named from where one stands, and nothing else', async ({ expect }) => {
-    const text = demoText('power-stage');
-    const { code, out, err } = await solve(named('power-stage.json', text));
+    const text = demoText('crystal-filter');
+    const { code, out, err } = await solve(named('crystal-filter.json', text));
     expect([code, err]).toEqual([0, '']);
     expect(JSON.parse(out)).toEqual(asJson(flatOptions(design(readRecord(text)))));
   });
@@ -87,6 +87,27 @@ describe.concurrent('solve', { timeout: 30_000 }, () => {
     expect(JSON.parse(out).options).toHaveLength(2);
   });
 
+  it('prints of each option the parts on sale, their figures and their yield', async ({ expect }) => {
+    const asked = '--frequency 151.25M --source 50 --load 9.4-j61 --band 150.5M..152M --return-loss 14 --power 2';
+    const real = '--series-inductor E24 --series-capacitor E24 --tolerance 5% --q-inductor 40 --samples 200 --seed 3';
+    const { code, out } = await solve(...`${asked} ${real}`.split(' '));
+    expect(code).toBe(0);
+    for (const option of JSON.parse(out).options) {
+      expect(option.parts).toHaveLength(2);
+      expect(option.parts[0]).toMatchObject({ from: 'E24', tolerance: { kind: 'relative', value: 0.05 } });
+      expect(option.worstReturnLossDb).toBe(option.built.worstReturnLossDb);
+      expect(option.exact.worstReturnLossDb).toBeGreaterThan(option.worstReturnLossDb);
+      expect(option.yield).toMatchObject({ samples: 200, seed: 3, passed: option.yield.value * 200 });
+      expect(Object.keys(option.stress[0])).toEqual(expect.arrayContaining(['voltsPeak', 'ampsRms', 'watts']));
+      expect(option.sensitivity).toHaveLength(2);
+    }
+  });
+
+  it('prints a summary for a change ticket instead', async ({ expect }) => {
+    const { code, out } = await solve(named('tide-gauge.json', demoText('tide-gauge')), '--ticket');
+    expect([code, out.split('\n')[0]]).toEqual([0, 'Tide-gauge telemetry: transmitter to stub whip']);
+  });
+
   it.each<[string, () => string[], RegExp]>([
     ['zero resistance', () => ['--frequency', '1M', '--source', '0', '--load', '5'], /^--source "0": .*above zero/],
     [
@@ -98,6 +119,21 @@ describe.concurrent('solve', { timeout: 30_000 }, () => {
       'a choice that is not there',
       () => ['--frequency', '1M', '--source', '50', '--load', '5', '--choice', 'pi'],
       /^choice "pi": no such network.*choose one of shunt-source-plus, shunt-source-minus$/,
+    ],
+    [
+      'a tolerance of real parts that nobody asked for',
+      () => ['--frequency', '1M', '--source', '50', '--load', '5', '--tolerance', '5%'],
+      /^--tolerance "5%": it tells of real parts and none are asked for; give --series-inductor/,
+    ],
+    [
+      'a tolerance of all there is',
+      () => ['--frequency', '1M', '--source', '50', '--load', '5', '--series-inductor', 'E24', '--tolerance', '120%'],
+      /^--tolerance "120%": at 100 % or more a part could be nothing at all; write it as/,
+    ],
+    [
+      'no samples',
+      () => ['--frequency', '1M', '--source', '50', '--load', '5', '--series-inductor', 'E24', '--samples', '0'],
+      /^--samples "0": the number of networks drawn is out of range; give a whole number from 1 to/,
     ],
     ['a deeply nested file', () => [named('deep.json', '['.repeat(100_000))], /^record "\[+…": not JSON/],
     [

@@ -20,6 +20,7 @@ export function stress(dossier: Dossier): readonly Block[] {
       text(`Exact values with the stated Q lose ${exact} at ${f0}. Stress is not assessed: ${whyNotBuilt(dossier)}.`),
     ];
   }
+  if (built.parts.length === 0) return [heading, text('There is no part that could lose power or be stressed.')];
   return [
     heading,
     { kind: 'facts', columns: 4, entries: losses(built, exact, f0, record.loads.length > 1) },
@@ -42,7 +43,6 @@ const losses = (
 ];
 
 function stressed(found: Stress, derating: number): readonly Block[] {
-  if (found.parts.length === 0) return [text(found.words)];
   const { vswr, words, powerW } = found;
   const over =
     vswr === null

@@ -2,13 +2,13 @@ import { LitElement, html, nothing, type PropertyValues, type TemplateResult } f
 import { customElement, property, state } from 'lit/decorators.js';
 import { guard } from 'lit/directives/guard.js';
 import { isResistive } from '../../src/network/termination-at.ts';
-import type { DesignRecord, Method } from '../../src/record/design-record.ts';
+import type { AsBuilt, DesignRecord, Method } from '../../src/record/design-record.ts';
 import type { FitStep } from '../../src/design/fitted.ts';
 import type { Dossier } from '../../src/dossier.ts';
 import { fieldsOf, type FieldName, type Fields } from '../../src/record/fields.ts';
 import { keptOf } from '../../src/record/kept.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
-import { readRecord } from '../../src/record/read-record.ts';
+import { readDraft } from '../../src/record/draft.ts';
 import { attachmentsOf, type Attachments } from '../../src/record/read-termination.ts';
 import type { FromWorker } from '../../src/workers/messages.ts';
 import { base } from '../base/base.styles.ts';
@@ -27,6 +27,7 @@ import { pathOf, readAddress, writeAddress } from './address.ts';
 import { alongWith } from './along-with.ts';
 import { holdsData, recall, remember, tableName, withState } from './attachments.ts';
 import { styles } from './ferrule-sheet.styles.ts';
+import { changedFields, isFrozen, waitingFor, type Waiting } from './frozen.ts';
 import { keptFor, noneKept, recallKept, rememberKept, withStock, type KeptOf } from './kept.ts';
 import type { LongWork } from './long-work.ts';
 import { givenLine, outcome } from './outcome.ts';
@@ -44,6 +45,7 @@ import {
   withoutChoice,
   type Settled,
 } from './settle.ts';
+import { today } from './today.ts';
 import { isStockList, stockFields, stockProblems, stockWords } from './stock.ts';
 
 /**
@@ -58,6 +60,8 @@ const mostMeasured = 200_000_000;
 /** The heading of a stock list stands within so many bytes, after its comments. */
 const mostHeading = 20_000;
 const tooLarge = { field: 'list', read: '', why: 'it is larger than 50 MB', would: 'give the parts in question' };
+
+const waits = 'This revision is issued and frozen: what is changed waits for the next one, for which a reason is asked.';
 
 /**
  * A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. Longer than others
@@ -86,6 +90,12 @@ export class FerruleSheet extends LitElement {
   @state() private kept: KeptOf = noneKept;
   /** Outcome of reading a stock list: a line, or one for each problem. */
   @state() private stockSaid: readonly string[] = [];
+  /** Since the record was issued; null: nothing. */
+  @state() private waiting: Waiting | null = null;
+  /** Why the next revision can't be started, in one line. */
+  @state() private revisionSaid = '';
+  /** Outcome of reading what was measured on the finished board, in one line. */
+  @state() private boardSaid = '';
   /** A file of which a port is to be chosen. */
   @state() private twoPort: { readonly name: string; readonly text: string } | null = null;
   /** Fetched with the first record that takes long. */
@@ -155,6 +165,10 @@ export class FerruleSheet extends LitElement {
         @data-table=${(event: CustomEvent<string>) => this.addData(event.detail, tableName(this.attachments), 1)}
         @data-port=${this.answerPort}
         @stock-file=${(event: CustomEvent<File>) => this.addStock(event.detail)}
+        @board-file=${(event: CustomEvent<File>) => this.addBoard(event.detail)}
+        @board-change=${(event: CustomEvent<AsBuilt | null>) => this.setBoard(event.detail)}
+        @revision-start=${(event: CustomEvent<string>) => this.startRevision(event.detail)}
+        @revision-back=${this.putBack}
         @build-stop=${this.stopBuild}
         @build-on=${this.goOn}
       >
@@ -171,6 +185,7 @@ export class FerruleSheet extends LitElement {
           .basis=${parts[0]!.basis(this.settled.fields.method)}
           .realSource=${this.settled.dossier !== null && isResistive(this.settled.dossier.record.source)}
         ></given-part>
+        ${this.waiting === null ? nothing : this.renderWaiting(this.waiting)}
         <div class="document">
           ${guard([this.following, this.name, this.progress === null], () => this.renderTitle())}
           <search-progress
@@ -190,6 +205,18 @@ export class FerruleSheet extends LitElement {
         <p class="unseen" role="status">${this.said}</p>
       </div>
     `;
+  }
+
+  private renderWaiting({ issued, board }: Waiting): TemplateResult {
+    const { fields } = this.settled;
+    return html`<start-revision
+      class="waiting"
+      .issued=${issued.revision ?? ''}
+      .typed=${fields.revision ?? ''}
+      .entries=${changedFields(issued, fields).length}
+      ?board=${board !== undefined}
+      .said=${this.revisionSaid}
+    ></start-revision>`;
   }
 
   private renderTitle(): TemplateResult {
@@ -257,12 +284,25 @@ export class FerruleSheet extends LitElement {
           .stocked=${this.kept.stock}
           .said=${this.stockSaid}
         ></build-part>`;
+      case 'Finished board':
+        return html`<finished-board
+          .dossier=${dossier}
+          .board=${this.waiting?.board === undefined ? this.kept.asBuilt : this.waiting.board}
+          ?waiting=${this.waiting?.board !== undefined}
+          ?awaited=${shown.stale || shown.building !== null}
+          .said=${this.boardSaid}
+        ></finished-board>`;
       case 'Record and report':
         return html`<record-part
           .dossier=${dossier}
           .state=${shown}
           .stale=${shown.stale}
           .realParts=${shown.realParts}
+          ?awaited=${shown.building !== null}
+          .history=${this.kept.history}
+          ?frozen=${isFrozen(shown)}
+          ?waiting=${this.waiting !== null}
+          .revisionSaid=${this.revisionSaid}
           .opened=${this.opened}
           .link=${this.link}
           @open-file=${(event: CustomEvent<File>) => this.open(event.detail)}
@@ -281,6 +321,9 @@ export class FerruleSheet extends LitElement {
     // A sheet serves several methods; an address that asks for one of another sheet gets this sheet's own.
     const method = serves(this.method, fields.method) ? fields.method : this.method;
     this.keep(keptFor(this.kept, fields));
+    this.waiting = null;
+    this.boardSaid = '';
+    this.revisionSaid = '';
     this.settleTo(settle({ ...fields, method }, null, this.attachments, this.kept));
     this.following = this.settled;
   }
@@ -373,6 +416,10 @@ export class FerruleSheet extends LitElement {
   private changeAll(changed: Fields, name: FieldName, delay: number = pause.work) {
     this.opened = '';
     const fields = { ...this.settled.fields, ...changed };
+    if (isFrozen(this.settled)) {
+      this.wait({}, fields);
+      return;
+    }
     // A document that is numbered anew is the same document.
     if (name === 'number') this.keep({ ...this.kept, document: changed.number ?? '' });
     this.settleTo(settle(fields, this.settled, this.attachments, this.kept), delay);
@@ -383,9 +430,62 @@ export class FerruleSheet extends LitElement {
     this.voiceTimer = window.setTimeout(() => (this.said = this.voice(name)), pause.voice);
   }
 
+  /** An issued record stays as it is: what is typed stands in its field, and waits for the next revision. */
+  private wait(more: Partial<Waiting>, fields: Fields) {
+    this.waiting = waitingFor({ issued: this.settled.fields, ...this.waiting, ...more }, fields);
+    this.settled = { ...this.settled, fields };
+    this.revisionSaid = '';
+    clearTimeout(this.voiceTimer);
+    this.voiceTimer = window.setTimeout(() => (this.said = this.waiting === null ? '' : waits), pause.voice);
+  }
+
+  private putBack() {
+    if (this.waiting === null) return;
+    this.settled = { ...this.settled, fields: this.waiting.issued };
+    this.waiting = null;
+    this.boardSaid = '';
+    this.revisionSaid = '';
+  }
+
+  private async startRevision(change: string) {
+    const { startNext } = await import('./next.ts');
+    const typed = this.settled.fields;
+    const waiting = this.waiting ?? { issued: typed };
+    const draft = readDraft(waiting.issued, this.attachments, this.kept);
+    const next = startNext(draft, waiting, typed, change, today());
+    if ('problem' in next) {
+      this.revisionSaid = formatProblem(next.problem);
+      return;
+    }
+    const { stock } = this.kept;
+    this.keep({ ...next.kept, stock, document: next.fields.number ?? '' });
+    this.waiting = null;
+    this.revisionSaid = '';
+    this.settleTo(settle(next.fields, this.settled, this.attachments, this.kept));
+    this.writeHash();
+    this.said = `Revision ${next.fields.revision ?? ''} is started, as a draft.`;
+  }
+
+  private async addBoard(file: File) {
+    const { readBoard } = await import('./board.ts');
+    const { measured, words } = await readBoard(file);
+    this.boardSaid = words;
+    if (measured !== null) this.setBoard({ measured, state: null, note: '' });
+  }
+
+  private setBoard(board: AsBuilt | null) {
+    if (board === null) this.boardSaid = '';
+    if (isFrozen(this.settled)) {
+      this.wait({ board }, this.settled.fields);
+      return;
+    }
+    this.keep({ ...this.kept, asBuilt: board });
+    this.settleTo(settle(this.settled.fields, this.settled, this.attachments, this.kept), pause.work);
+  }
+
   private readonly writeHash = () => {
     clearTimeout(this.addressTimer);
-    history.replaceState(history.state, '', `#${writeAddress(this.settled.fields)}`);
+    history.replaceState(history.state, '', `#${writeAddress(this.waiting?.issued ?? this.settled.fields)}`);
   };
 
   private readonly link = () => {
@@ -503,6 +603,7 @@ export class FerruleSheet extends LitElement {
 
   /** Reads a record from a file; the sheet stays as it is when the file holds none. */
   private async open(file: File) {
+    const { readRecord } = await import('../../src/record/read-record.ts');
     try {
       const record = readRecord(await file.slice(0, mostRead).text());
       const fields = fieldsOf(record);

@@ -23,7 +23,7 @@ export function changes({ record, difference }: Dossier): readonly Block[] {
   if (difference === null) return [heading(name), text('Not told: they were not worked out.')];
   const before = history.at(-1);
   const digest = before === undefined ? '' : `, SHA-256 ${before.digest}`;
-  const compared = `Revision ${orNotStated(revision)} of ${orNotStated(date)}${digest}, worked out anew by the same version of Ferrule as this one. Sign-off begins anew with each revision and is left out.`;
+  const compared = `Before is revision ${orNotStated(revision)} of ${orNotStated(date)}${digest}, worked out anew by the same version of Ferrule as this one. Sign-off begins anew with each revision and is left out.`;
   const told = difference.filter(({ group }) => group !== 'sign-off');
   if (told.length === 0) return [heading(name), text(`${compared} Nothing changed.`)];
   return [

@@ -155,7 +155,7 @@ function causes(figures: AsBuiltFigures): readonly Block[] {
   if (conclusion === 'as predicted' || best === undefined) return [heading, text(causeWords(figures).join(' '))];
   const concluded = {
     explained: `One cause stands out: ${best.words}.`,
-    alike: `Any one of the first ${String(alike)} explains it, and this measurement can’t tell them apart.`,
+    alike: `Any one of the first ${String(alike)}, marked, explains it, and this measurement can’t tell them apart.`,
     unexplained: 'No single cause explains it: even the nearest takes too little away. Look for several.',
   }[conclusion];
   const shown = explanations.slice(0, Math.max(mostCauses, alike));
@@ -186,7 +186,7 @@ function causes(figures: AsBuiltFigures): readonly Block[] {
         marked: k < alike,
       })),
     },
-    ...(more > 0 ? [text(`Left out: ${String(more)} more that take something away, and leave more than these.`)] : []),
+    ...(more > 0 ? [text(`Left out: ${String(more)} that ${more === 1 ? 'leaves' : 'leave'} more than these.`)] : []),
   ];
 }
 

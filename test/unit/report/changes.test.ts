@@ -21,7 +21,7 @@ const inState = (dossier: Dossier, state: 'draft' | 'for review' | 'issued'): Do
 describe('changes of a revision', { timeout: 30_000 }, () => {
   it.each(['a4', 'letter'] as const)('stand in a part of their own on %s, before and after', async (paper) => {
     const { pages, text } = await read(revised, paper);
-    expect(text).toContain(`${parts.changes} Changes from revision A Revision A of 2026-11-30, SHA-256`);
+    expect(text).toContain(`${parts.changes} Changes from revision A Before is revision A of 2026-11-30, SHA-256`);
     expect(text).toContain('Requirement Band 150.5 MHz to 152 MHz 150 MHz to 153 MHz');
     expect(text).toContain('Identity Revision A B');
     const told = revised.difference!.filter(({ group }) => group !== 'sign-off');

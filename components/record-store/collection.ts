@@ -87,8 +87,10 @@ export function readCollection(text: string): Read {
       try {
         return [read(one)];
       } catch (error) {
-        if (!(error instanceof InputError)) throw error;
-        refused.push(`${what} ${k + 1}${nameOf(one)}: ${inOneLine(error.problems)}`);
+        // Lists within lists are followed as deep as the machine can go.
+        const problems = error instanceof RangeError ? [tooDeep] : error instanceof InputError ? error.problems : null;
+        if (problems === null) throw error;
+        refused.push(`${what} ${k + 1}${nameOf(one)}: ${inOneLine(problems)}`);
         return [];
       }
     });
@@ -113,6 +115,8 @@ const noCollection = (read: string): Problem => ({
   why: 'neither kept records nor a record',
   would: `give a file of schema ${schema} or a design record`,
 });
+
+const tooDeep: Problem = { field: 'record', read: '', why: 'nested too deep', would: 'give a design record' };
 
 /** What can't be used, in one line. */
 export function inOneLine([first, ...others]: readonly Problem[]): string {

@@ -11,9 +11,6 @@ import { tabSession, type Session } from './session.ts';
 import { joinTabs, type Change, type Tabs } from './tabs.ts';
 import { stillHere, whyNotKept } from './trouble.ts';
 
-/** After a keystroke; and at the latest after the first one that isn't kept yet, however fast more follow. ms */
-const pause = { keystroke: 150, longest: 1000 } as const;
-
 /** Where what is kept, and what other tabs do, comes from: the browser's own unless a test gives others. */
 export interface Surroundings {
   readonly store: RecordStore;
@@ -64,8 +61,8 @@ export class DraftKeeper {
   /** How it stands with what is kept of this document. */
   #standing: Keeping = keptNow;
   #timer: ReturnType<typeof setTimeout> | undefined;
-  /** When the oldest keystroke that isn't kept yet was made, ms. */
-  #since: number | null = null;
+  /** A write is under way; what is typed meanwhile is written after it, all at once. */
+  #busy = false;
   #writing: Promise<void> = Promise.resolve();
 
   /** @param tell how it stands with keeping, whenever that changes */
@@ -137,22 +134,21 @@ export class DraftKeeper {
     this.#writing = this.#writing.then(() => this.#forget());
   }
 
-  /** Keeps what is typed, exactly as typed. Call it at every change, and with the same objects where nothing else changed. */
+  /**
+   * Keeps what is typed, exactly as typed, once the keystroke is answered: a pause would be what a crash loses. Call it at
+   * every change, with the same `kept` and `attachments` where these didn't change: then the texts alone are written.
+   */
   keep(fields: Fields, kept: Kept, attachments: Attachments): void {
     this.#waiting = { fields, kept, attachments, document: this.#document };
-    const now = this.#around.now();
-    this.#since ??= now;
     clearTimeout(this.#timer);
-    const left = Math.max(0, this.#since + pause.longest - now);
-    this.#timer = setTimeout(() => void this.saveNow(), Math.min(pause.keystroke, left));
+    if (!this.#busy) this.#timer = setTimeout(() => void this.saveNow());
   }
 
-  /** Writes what waits, without a pause. Never rejects: what went wrong is told. */
+  /** Writes what waits. Never rejects: what went wrong is told. */
   saveNow(): Promise<void> {
     clearTimeout(this.#timer);
     const waiting = this.#waiting;
     this.#waiting = null;
-    this.#since = null;
     if (waiting !== null) this.#writing = this.#writing.then(() => this.#write(waiting));
     return this.#writing;
   }
@@ -221,9 +217,13 @@ export class DraftKeeper {
   }
 
   async #write(waiting: Waiting): Promise<void> {
+    this.#busy = true;
     try {
       this.#tell(await this.#put(waiting));
+      this.#busy = false;
+      if (this.#waiting !== null) void this.saveNow();
     } catch (error) {
+      this.#busy = false;
       // The next keystroke tries again, with all of it.
       if (waiting.document === this.#document) this.#waiting ??= waiting;
       this.#tell(notKept(`${whyNotKept(error)} ${stillHere}`));

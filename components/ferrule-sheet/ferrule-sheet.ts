@@ -18,7 +18,6 @@ import { count } from '../base/words.ts';
 import '../build-progress/build-progress.ts';
 import '../ceiling-part/ceiling-part.ts';
 import type { ContentsEntry } from '../contents-rule/contents-rule.ts';
-import '../contents-rule/contents-rule.ts';
 import '../given-part/given-part.ts';
 import '../options-part/options-part.ts';
 import '../sheet-part/sheet-part.ts';
@@ -46,7 +45,6 @@ import {
   type Settled,
 } from './settle.ts';
 import { today } from './today.ts';
-import { isStockList, stockFields, stockProblems, stockWords } from './stock.ts';
 
 /**
  * Pauses after the last keystroke, ms: before the address is written, before the outcome is said aloud, before work
@@ -61,7 +59,8 @@ const mostMeasured = 200_000_000;
 const mostHeading = 20_000;
 const tooLarge = { field: 'list', read: '', why: 'it is larger than 50 MB', would: 'give the parts in question' };
 
-const waits = 'This revision is issued and frozen: what is changed waits for the next one, for which a reason is asked.';
+const waits =
+  'This revision is issued and frozen: what is changed waits for the next one, for which a reason is asked.';
 
 /**
  * A whole calculation sheet. Holds what is typed, has it computed, and hands the result to the parts. Longer than others
@@ -533,6 +532,7 @@ export class FerruleSheet extends LitElement {
 
   /** A file of any kind that the sheet can use. */
   private async takeFile(file: File) {
+    const { isStockList } = await import('./stock.ts');
     if (!holdsData(file.name)) await this.open(file);
     else if (isStockList(await file.slice(0, mostHeading).text())) await this.addStock(file);
     else await this.addFile(file);
@@ -540,7 +540,7 @@ export class FerruleSheet extends LitElement {
 
   /** Reads a stock list and takes parts from it, of the kinds that it has; what is typed stays where it can't be read. */
   private async addStock(file: File) {
-    const { readStockList } = await import('../../src/parts/read-stock-list.ts');
+    const { readStockList, stockFields, stockProblems, stockWords } = await import('./stock.ts');
     try {
       if (file.size > mostRead) throw new InputError(tooLarge);
       const list = readStockList(await file.text(), file.name);

@@ -1,6 +1,8 @@
-/** Parts that no first result needs: they are fetched once the options stand on the screen. */
+/** What no first result needs: it is fetched once the options stand on the screen. */
 import '../build-part/build-part.ts';
+import '../contents-rule/contents-rule.ts';
 import '../evidence-part/evidence-part.ts';
+import '../measured-data/measured-data.ts';
 import '../network-part/network-part.ts';
 import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';

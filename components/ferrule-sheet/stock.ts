@@ -1,3 +1,4 @@
+export { readStockList } from '../../src/parts/read-stock-list.ts';
 import type { StockList } from '../../src/parts/stock.ts';
 import type { Problem } from '../../src/quantity/problem.ts';
 import { formatProblem } from '../../src/quantity/problem.ts';

@@ -97,6 +97,12 @@ export const styles = css`
     margin-bottom: 0.5rem;
   }
 
+  /* Until it is fetched it keeps the room that it will take. */
+  measured-data:not(:defined) {
+    display: block;
+    min-height: 4.125rem;
+  }
+
   .fold {
     display: none;
   }

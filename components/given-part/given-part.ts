@@ -12,7 +12,6 @@ import type { Choice } from '../base/choice.ts';
 import { emptyFieldState, type FieldState } from '../base/field-state.ts';
 import '../area-field/area-field.ts';
 import '../choice-field/choice-field.ts';
-import '../measured-data/measured-data.ts';
 import '../radio-field/radio-field.ts';
 import '../text-field/text-field.ts';
 import { verdictMark, verdictStyles, type Verdict } from '../verdict-mark/verdict-mark.ts';

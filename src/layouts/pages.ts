@@ -6,5 +6,6 @@ export const pages = [
   { path: 'resistive/', name: 'Resistive pair', method: 'resistive-pair' },
   { path: 'sections/', name: 'Several sections', method: 'cascade' },
   { path: 'records/', name: 'Kept records', method: null },
+  { path: 'recheck/', name: 'Recheck', method: null },
   { path: 'basis/', name: 'Basis of calculation', method: null },
 ] as const satisfies readonly { path: string; name: string; method: Method | null }[];

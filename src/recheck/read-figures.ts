@@ -37,6 +37,8 @@ const schema = v.strictObject({
 /** @throws InputError when it isn't such a file, or one of a later Ferrule */
 export function readFigures(text: string): PrintedFigures {
   let value: unknown;
+  // Lists within lists fill the memory before they can be judged.
+  if (/\[\s*\[|[:{]\s*\{/u.test(text) || text.split(/:\s*\[/u, 3).length > 2) throw notFigures();
   try {
     value = JSON.parse(text);
   } catch {
@@ -47,5 +49,7 @@ export function readFigures(text: string): PrintedFigures {
   if (/"schema":\s*"ferrule-figures\/(?!1")/u.test(text.slice(0, 200))) {
     throw refusal('a later Ferrule wrote it', 'recheck it with that one');
   }
-  throw notAsWritten("its figures.json doesn't hold what a report prints");
+  throw notFigures();
 }
+
+const notFigures = () => notAsWritten("its figures.json doesn't hold what a report prints");

@@ -47,11 +47,12 @@ function sealedPart(bytes: Uint8Array): Uint8Array {
   }
   if (seal.length > bytes.length) {
     throw refusal(
-      `${bytes.length} bytes of ${seal.length} are here: its end is cut off`,
+      `${bytes.length} bytes of ${seal.length} are here: its end is cut off, or another program saved it anew`,
       'fetch the report anew from where it is kept',
     );
   }
-  if (!seal.holds) throw notAsWritten('bytes in it were changed since it was written');
+  if (!seal.holds)
+    throw notAsWritten('it was changed since it was written: damaged, tampered with, or saved anew by another program');
   return bytes.subarray(0, seal.length);
 }
 

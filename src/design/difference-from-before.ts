@@ -11,11 +11,14 @@ export function* differenceFromBefore(
 ): Generator<DesignStep, readonly Change[] | null> {
   const { record } = dossier;
   if (record.previous === null) return null;
-  const work = steps(record.previous);
+  const before = record.previous;
+  // That the earlier one is now in the history, and carried along, is what a revision is.
+  const same = { ...before, history: record.history, previous: record.previous };
+  const work = steps(before);
   for (;;) {
     const step = work.next();
     if (step.done === true) {
-      return [...recordDifference(record.previous, record), ...dossierDifference(step.value, dossier)];
+      return [...recordDifference(same, record), ...dossierDifference(step.value, dossier)];
     }
     // What is found on the way is of the earlier revision: nothing to show.
     yield { kind: 'work' };

@@ -50,6 +50,6 @@ function ofSignatures({ signOff }: DesignRecord): readonly string[] {
   return (['prepared', 'checked', 'approved'] as const).flatMap((who) => {
     const { name, date } = signOff[who];
     const lacking = [...(name.trim() === '' ? ['name'] : []), ...(date === '' ? ['date'] : [])];
-    return lacking.length === 0 ? [] : [`no ${lacking.join(' and no ')} stands under ${who}`];
+    return lacking.length === 0 ? [] : [`“${who}” lacks its ${lacking.join(' and its ')}`];
   });
 }

@@ -49,10 +49,14 @@ function ofBuild({ inductor, capacitor, seed }: Build, yieldAssessed: boolean): 
     ...(yieldAssessed
       ? [{ title: 'C. J. Clopper and E. S. Pearson, Biometrika 26, 1934', appliedFor: 'interval of the yield' }]
       : []),
-    {
-      title: 'H. A. Wheeler, Proc. IRE 16, 1928; R. G. Medhurst, Wireless Engineer 24, 1947',
-      appliedFor: 'coils to be wound: turns and self-capacitance',
-    },
+    ...(inductor.origin === 'wound'
+      ? [
+          {
+            title: 'H. A. Wheeler, Proc. IRE 16, 1928; R. G. Medhurst, Wireless Engineer 24, 1947',
+            appliedFor: 'coils to be wound: turns and self-capacitance',
+          },
+        ]
+      : []),
   ];
 }
 

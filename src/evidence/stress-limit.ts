@@ -50,7 +50,7 @@ export function stressWords(
   }
   if (parts.length === 0) return { first, within: null, words: 'The network has no part.' };
   if (first === null) {
-    return { first, within: null, words: 'No rating is known: give one, or take parts from a stock list.' };
+    return { first, within: null, words: 'No rating is known, so that nothing is said of what fails first.' };
   }
   const within = first.powerW >= powerW;
   const rating = derating === 1 ? 'its rating' : `${percent(derating)} % of its rating`;

@@ -28,10 +28,10 @@ describe('lacksForIssue(dossier)', () => {
     const { signOff } = plainDossier.record;
     expect(
       lacksForIssue(withRecord({ signOff: { ...signOff, prepared: signed, checked: { ...signed, date: '' } } })),
-    ).toEqual(['no date stands under checked', 'no name and no date stands under approved']);
+    ).toEqual(['“checked” lacks its date', '“approved” lacks its name and its date']);
     expect(
       lacksForIssue(withRecord({ signOff: { ...ready.record.signOff, approved: { ...signed, name: ' ' } } })),
-    ).toEqual(['no name stands under approved']);
+    ).toEqual(['“approved” lacks its name']);
   });
 
   it('asks for what identifies the document', () => {

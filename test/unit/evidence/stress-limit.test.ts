@@ -56,7 +56,7 @@ describe('stressWords(parts, powerW, vswr, derating)', () => {
     expect(stressWords([part('C1', null)], 2, 3, 0.8)).toEqual({
       first: null,
       within: null,
-      words: 'No rating is known: give one, or take parts from a stock list.',
+      words: 'No rating is known, so that nothing is said of what fails first.',
     });
     expect(stressWords([], 2, 3, 0.8).words).toBe('The network has no part.');
   });

@@ -26,16 +26,16 @@ export const styles = css`
     font-size: var(--small);
   }
 
+  /* The same act stands below the same, where an issued revision has one less. */
   .acts {
-    display: flex;
-    flex-wrap: wrap;
+    display: grid;
+    grid-template-columns: 4rem 3.5rem 5.5rem 2.75rem;
     gap: 0 1.25rem;
   }
 
   .acts button {
     min-width: 2.75rem;
     min-height: 2.75rem;
-    justify-content: center;
     padding: 0;
     border: 0;
     background: none;
@@ -79,16 +79,23 @@ export const styles = css`
   }
 
   @container (max-width: 52rem) {
-    .line {
-      grid-template-columns: minmax(0, 1fr) auto auto;
-    }
-
-    .kept {
-      grid-column: 1 / -1;
-    }
-
+    .line,
     .acts {
-      grid-column: 1 / -1;
+      display: flex;
+      flex-wrap: wrap;
+    }
+
+    a {
+      flex: 1;
+    }
+
+    .kept,
+    .acts {
+      flex-basis: 100%;
+    }
+
+    span:empty {
+      display: none;
     }
   }
 
@@ -101,12 +108,6 @@ export const styles = css`
     form p {
       grid-column: 1 / -1;
       width: 100%;
-    }
-  }
-
-  @container (max-width: 22rem) {
-    .line {
-      grid-template-columns: minmax(0, 1fr);
     }
   }
 `;

@@ -46,7 +46,7 @@ export class KeptEntry extends LitElement {
         <span class="kept">${keptWords(entry)}</span>
         <span class="acts">
           ${this.button('Duplicate', name, () => this.act({ act: 'duplicate', entry }))}
-          ${kind === 'issued' ? nothing : this.button('Rename', name, this.rename, this.renaming)}
+          ${kind === 'issued' ? html`<span></span>` : this.button('Rename', name, this.rename, this.renaming)}
           ${this.button('Save as a file', name, () => this.act({ act: 'save', entry }))}
           ${this.button('Delete', name, () => this.act({ act: 'delete', entry }))}
         </span>

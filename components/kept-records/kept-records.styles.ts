@@ -48,6 +48,7 @@ export const styles = css`
   }
 
   .none {
+    max-width: none;
     padding-block: 1.5rem;
     border-block: 1px solid var(--hairline);
   }

@@ -50,7 +50,7 @@ function byAge(a: Entry, b: Entry): number {
   );
 }
 
-const searched = ['number', 'title', 'revision', 'date', 'ticket', 'owner', 'change', 'state'] as const;
+const searched = ['number', 'title', 'revision', 'date', 'ticket', 'owner', 'change'] as const;
 
 /** Whether each word of the search stands somewhere in what identifies the entry; capitals and accents don't count. */
 export function matches(entry: Entry, search: string): boolean {

@@ -26,6 +26,22 @@ export const styles = css`
     padding-inline: 4px;
   }
 
+  /* In view wherever something was changed; what stands lowest can still be scrolled out from behind it. */
+  .waiting {
+    position: fixed;
+    z-index: 2;
+    inset: auto 0 0;
+    max-height: 60vh;
+    overflow-y: auto;
+    padding: 0.75rem max(1rem, calc((100vw - 72rem) / 2));
+    border-top: 2px solid var(--ink);
+    background: var(--paper);
+  }
+
+  .waiting ~ .document {
+    padding-bottom: 12rem;
+  }
+
   title-block {
     margin-bottom: 2rem;
     padding-left: 3.25rem;

@@ -12,9 +12,11 @@ export interface KeptOf extends Kept {
 
 export const noneKept: KeptOf = { ...nothingKept, document: '' };
 
-/** What of it goes with these texts. */
-export const keptFor = (kept: KeptOf, { number = '' }: Fields): KeptOf =>
-  number === kept.document ? kept : { ...nothingKept, stock: kept.stock, document: number };
+/** What of it goes with these texts: an earlier revision of the document has a shorter history of its own. */
+export const keptFor = (kept: KeptOf, { number = '', revision = '' }: Fields): KeptOf =>
+  number === kept.document && kept.history.every((earlier) => earlier.revision.trim() !== revision.trim())
+    ? kept
+    : { ...nothingKept, stock: kept.stock, document: number };
 
 /** With a stock list more, or a newer one of the same name. */
 export const withStock = (kept: KeptOf, list: StockList): KeptOf => ({

@@ -2,7 +2,9 @@
 import '../build-part/build-part.ts';
 import '../contents-rule/contents-rule.ts';
 import '../evidence-part/evidence-part.ts';
+import '../finished-board/finished-board.ts';
 import '../measured-data/measured-data.ts';
 import '../network-part/network-part.ts';
 import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';
+import '../start-revision/start-revision.ts';

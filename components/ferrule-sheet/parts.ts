@@ -13,7 +13,16 @@ export interface Judged {
 
 /** A part of the document. Parts are numbered by their place in the list. */
 export interface Part {
-  readonly name: 'Given' | 'Ceiling' | 'Options' | 'Network' | 'Response' | 'Evidence' | 'Build' | 'Record and report';
+  readonly name:
+    | 'Given'
+    | 'Ceiling'
+    | 'Options'
+    | 'Network'
+    | 'Response'
+    | 'Evidence'
+    | 'Build'
+    | 'Finished board'
+    | 'Record and report';
   /** Numbers in the basis of calculation. */
   readonly basis: (method: string | undefined) => readonly string[];
   readonly judge: (state: Settled) => Judged;
@@ -66,7 +75,7 @@ const buildFields: readonly FieldName[] = [
   'q-capacitor',
   'set',
 ];
-const recordFields = fieldNames.filter((name) => /^(identity|signOff)\./u.test(pathOf[name]));
+const recordFields = fieldNames.filter((name) => name === 'deviations' || /^(identity|signOff)\./u.test(pathOf[name]));
 const elsewhere = [...optionsFields, ...responseFields, ...buildFields, ...recordFields];
 
 /** What is asked of real parts. */
@@ -163,6 +172,17 @@ export const parts: readonly Part[] = [
     },
   },
   {
+    name: 'Finished board',
+    basis: always([]),
+    fields: [],
+    judge: ({ dossier, building }) => {
+      if ((dossier?.record.asBuilt ?? null) === null) return { verdict: 'not assessed', words: 'not measured' };
+      const verdict = dossier?.asBuilt?.verdict.verdict;
+      if (verdict !== undefined) return { verdict, words: verdict };
+      return building === null ? unassessed : { verdict: 'not assessed', words: 'being compared' };
+    },
+  },
+  {
     name: 'Record and report',
     basis: always(['B17']),
     fields: recordFields,
@@ -173,6 +193,7 @@ export const parts: readonly Part[] = [
           ? 0
           : [signOff.prepared, signOff.checked, signOff.approved].filter(({ name, date }) => name !== '' && date !== '')
               .length;
+      if (signOff?.state === 'issued') return { verdict: 'meets', words: 'issued' };
       return signed === 3
         ? { verdict: 'meets', words: 'names and dates given' }
         : { verdict: 'not assessed', words: 'not signed off' };

@@ -1,4 +1,4 @@
-import { designAtOnce, takesLong } from '../../src/design.ts';
+import { designAtOnce, hasMore, takesLong } from '../../src/design.ts';
 import type { Dossier, Option } from '../../src/dossier.ts';
 import { formatProblem, InputError, type Problem } from '../../src/quantity/problem.ts';
 import { readDraft } from '../../src/record/draft.ts';
@@ -18,7 +18,7 @@ export interface Settled extends FieldState {
   readonly stale: boolean;
   /** Record that takes long: its dossier comes from the worker. */
   readonly pending: DesignRecord | null;
-  /** Record of the dossier shown, while real parts are still to be worked out: its whole dossier comes from the worker. */
+  /** Record of the dossier shown, while more of it is still to be worked out: its whole dossier comes from the worker. */
   readonly building: DesignRecord | null;
   readonly realParts: RealParts;
   /** Why the network chosen isn't the one shown; '' when it is. */
@@ -61,10 +61,10 @@ export function settle(
   return { ...old, ...shown, notice: lostNotice(shown.dossier) };
 }
 
-/** A record's dossier at once, with real parts still to come where they are asked for. */
+/** A record's dossier at once; real parts, the finished board and what changed are still to come where there are such. */
 function fresh(record: DesignRecord) {
-  const building = record.build === null ? null : record;
-  const realParts = building === null ? ('none' as const) : ('at work' as const);
+  const building = hasMore(record) ? record : null;
+  const realParts = record.build === null ? ('none' as const) : ('at work' as const);
   return { dossier: designAtOnce(record), stale: false, building, realParts };
 }
 

@@ -9,8 +9,7 @@ export const styles = css`
     margin: 1.25rem 0 0.375rem;
   }
 
-  .identity,
-  .signer {
+  .identity {
     display: grid;
     grid-template-columns: repeat(3, minmax(0, 1fr));
     gap: 0.25rem 1.25rem;
@@ -20,21 +19,23 @@ export const styles = css`
     grid-column: 1 / -1;
   }
 
-  .signer {
-    grid-template-columns: 5.5rem minmax(0, 1.4fr) minmax(0, 1.4fr) minmax(0, 1fr);
-    align-items: start;
-  }
-
-  .signer legend {
-    float: left;
-    padding: 1.375rem 0 0;
-  }
-
   .actions {
     display: flex;
     flex-wrap: wrap;
     align-items: center;
     gap: 0.625rem 1rem;
+    margin-top: 0.75rem;
+  }
+
+  difference-table {
+    margin-top: 1rem;
+  }
+
+  .ticket {
+    min-height: 1.75rem;
+  }
+
+  p.ticket {
     margin-top: 0.75rem;
   }
 
@@ -93,22 +94,10 @@ export const styles = css`
     .identity .wide {
       grid-column: 1 / -1;
     }
-
-    .signer {
-      grid-template-columns: minmax(0, 1fr) minmax(0, 1fr);
-      margin-bottom: 0.5rem;
-    }
-
-    .signer legend {
-      float: none;
-      padding: 0;
-      font-weight: 700;
-    }
   }
 
   @container (max-width: 20rem) {
-    .identity,
-    .signer {
+    .identity {
       grid-template-columns: minmax(0, 1fr);
     }
   }

@@ -67,7 +67,8 @@ export function verdictWords(of: AsBuiltVerdict): readonly string[] {
   return [said, `The data don't cover the band, ${frequencySpan(bandHz)}${rest}; nothing is extrapolated.`];
 }
 
-function outsideWords(outside: readonly OutsideSpan[]): string {
+/** Where the board lies outside the tolerance band, the farthest places first told. */
+export function outsideWords(outside: readonly OutsideSpan[]): string {
   if (outside.length === 0) return 'It lies within the tolerance band at every sample.';
   const told = outside
     .toSorted((a, b) => b.byDb - a.byDb)

@@ -107,5 +107,9 @@ export const styles = css`
     th {
       padding-right: 0.75rem;
     }
+
+    tbody th {
+      min-width: 8rem;
+    }
   }
 `;

@@ -2,6 +2,7 @@ import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, state } from 'lit/decorators.js';
 import { classMap } from 'lit/directives/class-map.js';
 import { formatProblem } from '../../src/quantity/problem.ts';
+import type { ComparedFigure } from '../../src/recheck/compare-figures.ts';
 import { facts, recheckText, verdictWords } from '../../src/recheck/recheck-words.ts';
 import type { Recheck } from '../../src/recheck/recheck.ts';
 import type { FromRecheck } from '../../src/workers/recheck-messages.ts';
@@ -94,10 +95,7 @@ export class RecheckPage extends LitElement {
 
   private outcome(recheck: Recheck): TemplateResult {
     const figures = recheck.report?.figures ?? [];
-    const other = figures.filter(({ outcome }) => outcome !== 'same');
-    const same = figures.filter(({ outcome }) => outcome === 'same');
-    // What differs comes first.
-    const ordered = other.toSorted((a, b) => a.outcome.localeCompare(b.outcome));
+    const of = (outcome: ComparedFigure['outcome']) => figures.filter((each) => each.outcome === outcome);
     return html`
       <h2>Outcome</h2>
       <p class="outcome">${verdictMark(marks[recheck.verdict], verdictWords(recheck))}</p>
@@ -110,21 +108,22 @@ export class RecheckPage extends LitElement {
         )}
       </dl>
       <p><copy-button label="Copy the outcome as text" .text=${() => recheckText(recheck)}></copy-button></p>
-      ${
-        figures.length === 0
-          ? nothing
-          : html`<h2>Figures</h2>
-              ${other.length === 0 ? html`<p>None differs.</p>` : dataTable('Figures that differ', rowsOf(ordered))}
-              ${
-                same.length === 0
-                  ? nothing
-                  : html`<details>
-                      <summary>${same.length} that are the same</summary>
-                      ${dataTable('Figures that are the same', rowsOf(same))}
-                    </details>`
-              }`
-      }
+      ${this.figures('Figures that differ', of('differs'))}
+      ${this.figures('Figures within rounding', of('within rounding'))}
+      ${this.figures('Figures that are the same', of('same'), true)}
     `;
+  }
+
+  private figures(title: string, figures: readonly ComparedFigure[], folded = false): TemplateResult | typeof nothing {
+    if (figures.length === 0) return nothing;
+    const shown = dataTable(title, rowsOf(figures));
+    return folded
+      ? html`<details>
+          <summary>${title}: ${figures.length}</summary>
+          ${shown}
+        </details>`
+      : html`<h2>${title}</h2>
+          ${shown}`;
   }
 
   private check(file: File) {

@@ -4,9 +4,9 @@ import { column, figure, type Rows } from '../base/rows.ts';
 
 /** Figures then and now, one a row. */
 export const rowsOf = (figures: readonly ComparedFigure[]): Rows => ({
-  columns: [column('Figure'), column('Outcome'), figure('Printed'), figure('Computed now')],
+  columns: [column('Figure'), figure('Printed'), figure('Computed now')],
   rows: figures.map((each) => {
     const { then, now } = figureWords(each);
-    return [each.name, each.outcome, then, now];
+    return [each.name, then, now];
   }),
 });

@@ -104,6 +104,7 @@ describe('judge(part, state)', () => {
       '1 entry to correct',
       'not assessed',
       'not assessed',
+      'not assessed',
       '1 entry to correct',
     ]);
   });

@@ -17,6 +17,7 @@ export interface ComparedFigure {
  * decibels of a ratio's size, for ohms of 1 Ω, because those may be what is left of a difference that should be nothing.
  */
 export const rounding = 1e-9;
+export const roundingWords = '1 in 10⁹';
 
 /** Every figure of either, in the order of now; those that are no longer computed come last. */
 export function compareFigures(

@@ -1,6 +1,6 @@
 import { version } from '../version.ts';
 import type { DesignRecord } from '../record/design-record.ts';
-import { rounding, type ComparedFigure } from './compare-figures.ts';
+import { roundingWords, type ComparedFigure } from './compare-figures.ts';
 import { figureWords } from './figure-words.ts';
 import type { Recheck, RecheckedReport } from './recheck.ts';
 
@@ -56,7 +56,7 @@ const ofReport = ({ figures, sameBytes, writtenBy, added }: RecheckedReport): re
 
 function countWords(figures: readonly ComparedFigure[]): string {
   const count = (outcome: ComparedFigure['outcome']) => figures.filter((figure) => figure.outcome === outcome).length;
-  return `${figures.length} compared: ${count('same')} the same, ${count('within rounding')} within rounding (${rounding}), ${count('differs')} different`;
+  return `${figures.length} compared: ${count('same')} the same, ${count('within rounding')} within rounding (${roundingWords}), ${count('differs')} different`;
 }
 
 function signOffWords({ signOff }: DesignRecord): string {

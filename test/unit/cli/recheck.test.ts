@@ -67,7 +67,7 @@ describe.concurrent('recheck FILE', { timeout: 30_000 }, () => {
     expect(out).toContain(`Digest: ${dossier.digest}\n`);
   });
 
-  it.each([
+  it.for<readonly [readonly string[], string]>([
     [['missing.pdf'], 'file "missing.pdf": no such file'],
     [['.'], 'file ".": this is a folder'],
     [[], 'one file is rechecked at a time'],
@@ -76,8 +76,7 @@ describe.concurrent('recheck FILE', { timeout: 30_000 }, () => {
     [[named('other.pdf', '%PDF-1.4\nnot ours')], 'file "other.pdf": this PDF is no report of Ferrule\'s'],
     [[named('words.txt', 'hello')], 'file "words.txt": neither a report (PDF) nor a record (JSON)'],
     [[named('large.pdf', new Uint8Array(20_000_001))], 'file "large.pdf": over 20 MB'],
-  ])('ends with 2 and one line for %j', async (args, line) => {
-    const { expect } = await import('vitest');
+  ])('ends with 2 and one line: %j', async ([args, line], { expect }) => {
     const { code, out, err } = await recheck(...args);
     expect([code, out]).toEqual([2, '']);
     expect(err).toContain(line);

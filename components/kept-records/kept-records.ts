@@ -10,20 +10,17 @@ import { save } from '../base/save.ts';
 import { pathOf } from '../ferrule-sheet/address.ts';
 import { inOneLine } from '../record-store/collection.ts';
 import { documentsOf, matches, noteOf, textOf, type KeptDocument } from '../record-store/documents.ts';
-import type { Entry } from '../record-store/entry.ts';
+import { sheets, type Entry } from '../record-store/entry.ts';
 import { openRecordStore } from '../record-store/record-store.ts';
 import { Shelf, type Removed } from '../record-store/shelf.ts';
 import { joinTabs, type Tabs } from '../record-store/tabs.ts';
 import { whyNotKept } from '../record-store/trouble.ts';
 import type { EntryAct } from './kept-entry.ts';
 import './kept-entry.ts';
+import { importFiles } from './import-files.ts';
 import { styles } from './kept-records.styles.ts';
-import { collectionName, importedWords, nameOf, numberWords, titleWords } from './words.ts';
+import { collectionName, nameOf, numberWords, titleWords } from './words.ts';
 
-/** A larger file isn't one of kept records, bytes. */
-const mostRead = 100_000_000;
-
-const sheets: readonly Method[] = ['two-element', 'resistive-pair', 'cascade'];
 const sheetOf = (method: Method): Method => sheets.find((sheet) => pathOf(sheet) === pathOf(method)) ?? 'two-element';
 
 /** Everything kept in this browser: found, opened, copied, renamed, deleted, taken elsewhere and back. */
@@ -223,24 +220,13 @@ export class KeptRecords extends LitElement {
   private pick(event: Event) {
     const input = event.target as HTMLInputElement;
     const files = [...(input.files ?? [])];
-    void this.attempt(() => this.import(files));
+    void this.attempt(async () => {
+      const { said, refused } = await importFiles(this.shelf, files);
+      this.said = said;
+      this.refused = refused;
+    });
     // The same file, corrected, can be picked again.
     input.value = '';
-  }
-
-  private async import(files: readonly File[]) {
-    for (const file of files) {
-      try {
-        if (file.size > mostRead) throw new InputError(tooLarge);
-        const imported = await this.shelf.take(await file.text());
-        this.said = `${this.said} ${importedWords(file.name, imported)}`.trim();
-        this.refused = [...this.refused, ...imported.refused.map((line) => `${file.name}, ${line}`)];
-      } catch (error) {
-        if (!(error instanceof InputError)) throw error;
-        this.refused = [...this.refused, `${file.name} can’t be imported. ${inOneLine(error.problems)}`];
-        this.said = `${this.said} Refused: ${file.name}.`.trim();
-      }
-    }
   }
 
   private hand(text: string, name: string) {
@@ -259,8 +245,6 @@ export class KeptRecords extends LitElement {
 }
 
 const gone = (entry: Entry): string => `${nameOf(entry)} was deleted in another tab meanwhile.`;
-
-const tooLarge = { field: 'file', read: '', why: 'it is larger than 100 MB', would: 'give a file of kept records' };
 
 declare global {
   interface HTMLElementTagNameMap {

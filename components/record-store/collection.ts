@@ -7,12 +7,12 @@
 import { formatProblem, InputError, type Problem } from '../../src/quantity/problem.ts';
 import { sha256Of } from '../../src/record/canonical.ts';
 import { checkRecord } from '../../src/record/check-record.ts';
-import { methods, type DesignRecord, type Method } from '../../src/record/design-record.ts';
+import type { DesignRecord, Method } from '../../src/record/design-record.ts';
 import { readDraft } from '../../src/record/draft.ts';
 import { defaults, fieldNames, type Fields } from '../../src/record/fields.ts';
 import { readRecord } from '../../src/record/read-record.ts';
 import { repeatedName } from '../../src/record/repeated-name.ts';
-import type { Carried } from './entry.ts';
+import { sheets, type Carried } from './entry.ts';
 
 const schema = 'ferrule-records/1';
 
@@ -135,8 +135,8 @@ function nameOf(value: unknown): string {
 function readTyped(value: unknown): TypedDraft {
   if (!isObject(value)) throw refusal('draft', '', 'not an object', 'give the draft as it was saved');
   const { sheet, fields, stock = [], history, previous, asBuilt, measured = [] } = value;
-  const method = methods.find((each) => each === sheet);
-  if (method === undefined) throw refusal('sheet', words(sheet), 'no sheet is called so', `give ${methods.join(', ')}`);
+  const known = sheets.find((each) => each === sheet);
+  if (known === undefined) throw refusal('sheet', words(sheet), 'no sheet is called so', `give ${sheets.join(', ')}`);
   if (!isObject(fields)) throw refusal('fields', '', 'not an object', 'give the draft as it was saved');
   if (!Array.isArray(stock)) throw refusal('stock', words(stock), 'not a list', 'give the draft as it was saved');
   if (!Array.isArray(measured))
@@ -162,7 +162,7 @@ function readTyped(value: unknown): TypedDraft {
   );
   const data = measured.map((each: unknown) => checkRecord({ ...frame, source: each }).source);
   return {
-    sheet: method,
+    sheet: known,
     fields: fields as Fields,
     kept: {
       stock: new Map(lists.map((list) => [list.name, list])),

@@ -6,25 +6,10 @@ import type { Attachments } from '../../src/record/read-termination.ts';
 import type { Problem } from '../../src/quantity/problem.ts';
 import { issuedEntry, newDraft, newId, opened, type Carried, type Entry, type Opened } from './entry.ts';
 import { changedElsewhere, goneElsewhere, keptApart, keptNow, notKept, nothingTyped, type Keeping } from './keeping.ts';
-import { openRecordStore, type RecordStore, type Written } from './record-store.ts';
-import { tabSession, type Session } from './session.ts';
-import { joinTabs, type Change, type Tabs } from './tabs.ts';
+import type { Written } from './record-store.ts';
+import { browser, type Surroundings } from './surroundings.ts';
+import type { Change, Tabs } from './tabs.ts';
 import { stillHere, whyNotKept } from './trouble.ts';
-
-/** Where what is kept, and what other tabs do, comes from: the browser's own unless a test gives others. */
-export interface Surroundings {
-  readonly store: RecordStore;
-  readonly session: Session;
-  readonly join: (hear: (change: Change) => void) => Tabs;
-  readonly now: () => number;
-}
-
-const browser = (sheet: Method): Surroundings => ({
-  store: openRecordStore(),
-  session: tabSession(sheet),
-  join: joinTabs,
-  now: Date.now,
-});
 
 interface Waiting extends Carried {
   readonly fields: Fields;
@@ -71,12 +56,10 @@ export class DraftKeeper {
     this.#tell = tell;
     this.#around = around;
     this.#tabs = around.join((change) => this.#hear(change));
-    if (typeof document !== 'undefined') document.addEventListener('visibilitychange', this.#leave);
   }
 
   /** Ends it; what waits is written. */
   close(): void {
-    if (typeof document !== 'undefined') document.removeEventListener('visibilitychange', this.#leave);
     void this.saveNow().finally(() => {
       this.#tabs.close();
       this.#around.store.close();
@@ -263,11 +246,6 @@ export class DraftKeeper {
     this.#other = elsewhere ? id : null;
     this.#tell(elsewhere ? changedElsewhere : this.#standing);
   }
-
-  /** The page may be closed without another word once it is out of sight. */
-  readonly #leave = () => {
-    if (document.visibilityState === 'hidden') void this.saveNow();
-  };
 }
 
 const sameTexts = (a: Fields, b: Fields): boolean =>

@@ -8,6 +8,9 @@ import { fieldsOf, type Fields } from '../../src/record/fields.ts';
 import { keptOf, nothingKept, type Kept } from '../../src/record/kept.ts';
 import { attachmentsOf, type Attachments } from '../../src/record/read-termination.ts';
 
+/** First methods of the sheets, by which these are known. */
+export const sheets = ['two-element', 'resistive-pair', 'cascade'] as const satisfies readonly Method[];
+
 /** What is shown of it in a list; small, however much it carries. */
 export interface Entry {
   readonly id: string;

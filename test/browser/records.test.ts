@@ -337,7 +337,7 @@ describe('export and import', () => {
       'deep.json': `{"schema":"ferrule-records/1","records":${'['.repeat(1e5)}${']'.repeat(1e5)}}`,
       'wrong.json': '{"schema":"ferrule-records/1","records":[{"schema":"ferrule-record/2"},7,null]}',
       'draft.json':
-        '{"schema":"ferrule-records/1","drafts":[{"sheet":"two-element","fields":{"load":7}},{"sheet":"two-element","fields":{"__proto__x":"1"}},{"sheet":"toString","fields":{}},{"sheet":"two-element","fields":{},"previous":{"a":1}}]}',
+        '{"schema":"ferrule-records/1","drafts":[{"sheet":"two-element","fields":{"load":7}},{"sheet":"two-element","fields":{"__proto__":"1"}},{"sheet":"toString","fields":{}},{"sheet":"two-element","fields":{},"previous":{"a":1}}]}',
     };
     for (const [name, text] of Object.entries(files)) {
       await imported(page, name, text);

@@ -42,6 +42,10 @@ export const styles = css`
     padding-bottom: 12rem;
   }
 
+  .sheet:has(.waiting) > :is(.given, .contents) {
+    max-height: calc(100vh - 9rem);
+  }
+
   title-block {
     margin-bottom: 2rem;
     padding-left: 3.25rem;

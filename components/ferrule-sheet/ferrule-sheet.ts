@@ -38,6 +38,7 @@ import {
   lostChoice,
   lostNotice,
   refused,
+  retyped,
   settle,
   stopped,
   withOption,
@@ -210,6 +211,7 @@ export class FerruleSheet extends LitElement {
     const { fields } = this.settled;
     return html`<start-revision
       class="waiting"
+      floating
       .issued=${issued.revision ?? ''}
       .typed=${fields.revision ?? ''}
       .entries=${changedFields(issued, fields).length}
@@ -299,7 +301,7 @@ export class FerruleSheet extends LitElement {
           .realParts=${shown.realParts}
           ?awaited=${shown.building !== null}
           .history=${this.kept.history}
-          ?frozen=${isFrozen(shown)}
+          ?frozen=${this.frozen}
           ?waiting=${this.waiting !== null}
           .revisionSaid=${this.revisionSaid}
           .opened=${this.opened}
@@ -415,7 +417,7 @@ export class FerruleSheet extends LitElement {
   private changeAll(changed: Fields, name: FieldName, delay: number = pause.work) {
     this.opened = '';
     const fields = { ...this.settled.fields, ...changed };
-    if (isFrozen(this.settled)) {
+    if (this.frozen) {
       this.wait({}, fields);
       return;
     }
@@ -429,10 +431,14 @@ export class FerruleSheet extends LitElement {
     this.voiceTimer = window.setTimeout(() => (this.said = this.voice(name)), pause.voice);
   }
 
+  private get frozen(): boolean {
+    return this.waiting !== null || isFrozen(this.settled);
+  }
+
   /** An issued record stays as it is: what is typed stands in its field, and waits for the next revision. */
   private wait(more: Partial<Waiting>, fields: Fields) {
     this.waiting = waitingFor({ issued: this.settled.fields, ...this.waiting, ...more }, fields);
-    this.settled = { ...this.settled, fields };
+    this.settled = retyped(this.settled, fields, this.attachments, this.kept);
     this.revisionSaid = '';
     clearTimeout(this.voiceTimer);
     this.voiceTimer = window.setTimeout(() => (this.said = this.waiting === null ? '' : waits), pause.voice);
@@ -440,7 +446,7 @@ export class FerruleSheet extends LitElement {
 
   private putBack() {
     if (this.waiting === null) return;
-    this.settled = { ...this.settled, fields: this.waiting.issued };
+    this.settled = retyped(this.settled, this.waiting.issued, this.attachments, this.kept);
     this.waiting = null;
     this.boardSaid = '';
     this.revisionSaid = '';
@@ -468,13 +474,14 @@ export class FerruleSheet extends LitElement {
   private async addBoard(file: File) {
     const { readBoard } = await import('./board.ts');
     const { measured, words } = await readBoard(file);
-    this.boardSaid = words;
+    this.boardSaid = measured === null ? words : '';
     if (measured !== null) this.setBoard({ measured, state: null, note: '' });
+    this.said = words;
   }
 
   private setBoard(board: AsBuilt | null) {
     if (board === null) this.boardSaid = '';
-    if (isFrozen(this.settled)) {
+    if (this.frozen) {
       this.wait({ board }, this.settled.fields);
       return;
     }

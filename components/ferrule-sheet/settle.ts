@@ -61,6 +61,12 @@ export function settle(
   return { ...old, ...shown, notice: lostNotice(shown.dossier) };
 }
 
+/** Other texts over the same figures, as those typed on a frozen record: what can be read of them is told. */
+export function retyped(before: Settled, fields: Fields, attachments: Attachments, kept: Kept): Settled {
+  const { problems, understood } = readDraft(fields, attachments, kept);
+  return { ...before, fields, understood, problems: lines(problems) };
+}
+
 /** A record's dossier at once; real parts, the finished board and what changed are still to come where there are such. */
 function fresh(record: DesignRecord) {
   const building = hasMore(record) ? record : null;

@@ -5,6 +5,15 @@ import { base } from '../base/base.styles.ts';
 import { field } from '../base/field.styles.ts';
 import { styles } from './start-revision.styles.ts';
 
+const root = document.documentElement;
+
+/** Where the keyboard's focus is, inside of elements too. */
+function focused(): Element | null {
+  let at = document.activeElement;
+  while (at?.shadowRoot?.activeElement) at = at.shadowRoot.activeElement;
+  return at;
+}
+
 /**
  * An issued record is frozen; this starts the revision after it, once its reason is given.
  * @fires revision-start  detail: what the revision changes, and why
@@ -22,11 +31,25 @@ export class StartRevision extends LitElement {
   @property({ type: Number }) entries = 0;
   /** So was the finished board. */
   @property({ type: Boolean }) board = false;
+  /** It lies over the page's lower end. */
+  @property({ type: Boolean, reflect: true }) floating = false;
   /** Why it can't be started, in one line. */
   @property() said = '';
 
   @state() private reason = '';
   @state() private asked = '';
+
+  override disconnectedCallback() {
+    super.disconnectedCallback();
+    if (this.floating) root.style.scrollPaddingBottom = '';
+  }
+
+  /** What was being typed in stays in view. */
+  protected override firstUpdated() {
+    if (!this.floating) return;
+    root.style.scrollPaddingBottom = `${String(this.offsetHeight)}px`;
+    focused()?.scrollIntoView({ block: 'nearest' });
+  }
 
   override render() {
     const next = this.typed === this.issued ? nextRevision(this.issued) : this.typed;

@@ -64,7 +64,12 @@ export const drawsWith = (
   count: number,
 ): Draws => ({
   count,
-  scale: scalesOf(parts, arms, deviation, count),
+  scale: scalesOf(
+    parts,
+    arms,
+    deviation.map((column) => column.slice()),
+    count,
+  ),
   loadR: null,
   loadX: null,
   sourceR: null,
@@ -84,30 +89,38 @@ function deviations(
   from: number,
   count: number,
 ): Float64Array[] {
-  const words = new Uint32Array(4 * count);
+  const low = new Uint32Array(count);
+  const high = new Uint32Array(count);
+  for (let d = 0; d < count; d += 1) {
+    low[d] = from + d;
+    high[d] = (from + d) / 2 ** 32;
+  }
+  const key = [seed, Math.floor(seed / 2 ** 32)] as const;
+  const words = [0, 1, 2, 3].map(() => new Uint32Array(count)) as unknown as Words;
   return Array.from({ length: Math.ceil(width / 4) }, (_, four) => {
-    fillWords(words, first + four, seed, from, count);
-    return Array.from({ length: Math.min(4, width - 4 * four) }, (_, k) => columnOf(words, k, distribution, count));
+    philox(low, high, [first + four, 0], key, words);
+    return words.slice(0, width - 4 * four).map((column) => columnOf(column, distribution));
   }).flat();
 }
 
-/** Four words of each network. */
-function fillWords(words: Uint32Array, which: number, seed: number, from: number, count: number): void {
-  const seedHigh = Math.floor(seed / 2 ** 32);
-  for (let d = 0; d < count; d += 1) {
-    const sample = from + d;
-    philox(sample, Math.floor(sample / 2 ** 32), which, 0, seed, seedHigh, words, 4 * d);
-  }
-}
+type Words = readonly [Uint32Array, Uint32Array, Uint32Array, Uint32Array];
 
-/** Deviations of the networks' `k`-th words. */
-function columnOf(words: Uint32Array, k: number, distribution: Distribution, count: number): Float64Array {
-  const column = new Float64Array(count);
-  for (let d = 0; d < count; d += 1) column[d] = deviate((words[4 * d + k]! + 0.5) * 2 ** -32, distribution);
+function columnOf(words: Uint32Array, distribution: Distribution): Float64Array {
+  const column = new Float64Array(words.length);
+  if (distribution === 'uniform') {
+    // deviate(u) is 2u − 1: written out, because most networks are drawn so.
+    for (let d = 0; d < words.length; d += 1) column[d] = (words[d]! + 0.5) * 2 ** -31 - 1;
+    return column;
+  }
+  for (let d = 0; d < words.length; d += 1) column[d] = deviate((words[d]! + 0.5) * 2 ** -32, distribution);
   return column;
 }
 
-/** Value of each arm over its nominal one: Σ w·s of its parts where values add, 1/Σ(w/s) where inverses do. */
+/**
+ * Value of each arm over its nominal one: Σ w·s of its parts where values add, 1/Σ(w/s) where inverses do.
+ *
+ * @param deviation one column a part; that of a part that stands alone is written over
+ */
 function scalesOf(
   parts: readonly VariedPart[],
   arms: number,
@@ -115,13 +128,21 @@ function scalesOf(
   count: number,
 ): Float64Array[] {
   return Array.from({ length: arms }, (_, armIndex) => {
-    const scale = new Float64Array(count);
     const here = parts.flatMap((part, k) => (part.armIndex === armIndex ? [{ ...part, column: deviation[k]! }] : []));
-    if (here.length === 0) return scale.fill(1);
-    const adds = here.length === 1 || here[0]!.adds;
+    const [first, second] = here;
+    if (first === undefined) return new Float64Array(count).fill(1);
+    if (second === undefined) return alone(first.tolerance, first.column);
+    const { adds } = first;
+    const scale = new Float64Array(count);
     for (const { weight, tolerance, column } of here) addTo(scale, adds, weight, tolerance, column);
     return adds ? scale : scale.map((inverse) => 1 / inverse);
   });
+}
+
+/** The part's own scale, in place of its deviations. */
+function alone(tolerance: number, column: Float64Array): Float64Array {
+  for (let d = 0; d < column.length; d += 1) column[d] = 1 + tolerance * column[d]!;
+  return column;
 }
 
 function addTo(sum: Float64Array, adds: boolean, weight: number, tolerance: number, column: Float64Array): void {

@@ -1,6 +1,6 @@
 /**
  * The few words of WebAssembly (W3C, WebAssembly Core Specification 2.0, chapter 5) that a numeric loop needs: two
- * doubles at a time, in one memory. Code is a list of bytes; what takes operands puts theirs first.
+ * doubles at a time, or four whole numbers, in one memory. Code is a list of bytes; what takes operands puts theirs first.
  */
 export type Code = readonly number[];
 
@@ -40,6 +40,26 @@ export const store = (local: number, offset: number, value: Code): Code => [
   ...simd(11),
   ...at(offset),
 ];
+
+/** Four whole numbers of 32 bits at a time: sum, exclusive or, and a constant. */
+export const addWords = (a: Code, b: Code): Code => [...a, ...b, ...simd(174)];
+export const exclusiveOr = (a: Code, b: Code): Code => [...a, ...b, ...simd(81)];
+export const words = (word: number): Code => [...simd(12), ...[0, 1, 2, 3].flatMap(() => bytesOf(word))];
+/** Products of 64 bits of the first two words, and of the last two. */
+export const productsOfFirst = (a: Code, b: Code): Code => [...a, ...b, ...simd(222)];
+export const productsOfLast = (a: Code, b: Code): Code => [...a, ...b, ...simd(223)];
+/** Lower and upper words of four such products. */
+export const lowerWords = (first: Code, last: Code): Code => shuffled(first, last, 0);
+export const upperWords = (first: Code, last: Code): Code => shuffled(first, last, 4);
+
+const shuffled = (a: Code, b: Code, from: number): Code => [
+  ...a,
+  ...b,
+  ...simd(13),
+  ...[0, 8, 16, 24].flatMap((product) => [0, 1, 2, 3].map((byte) => product + from + byte)),
+];
+
+const bytesOf = (word: number): number[] => [0, 8, 16, 24].map((shift) => (word >>> shift) & 0xff);
 
 /** Adds a constant to an address. */
 export const advance = (local: number, by: number): Code => set(local, [...get(local), 0x41, ...constant(by), 0x6a]);

@@ -16,7 +16,7 @@ export function flatRecheck({ verdict, schema, digest, dossier, report }: Rechec
         : {
             writtenBy: report.writtenBy,
             digestTrue: true,
-            sameBytes: report.sameBytes,
+            file: report.file,
             added: report.added,
             compared: report.figures.length,
             same: report.figures.filter(({ outcome }) => outcome === 'same').length,

@@ -36,16 +36,9 @@ export function facts(recheck: Recheck): readonly Fact[] {
   ];
 }
 
-const ofReport = ({ figures, sameBytes, writtenBy, added }: RecheckedReport): readonly Fact[] => [
+const ofReport = ({ figures, file, writtenBy, added }: RecheckedReport): readonly Fact[] => [
   ['Figures', countWords(figures)],
-  [
-    'File',
-    sameBytes === null
-      ? `whole; not compared byte for byte, as ${writtenBy === version ? 'figures differ' : 'another version wrote it'}`
-      : sameBytes
-        ? 'whole, byte for byte what this version writes'
-        : 'not byte for byte what this version writes',
-  ],
+  ['File', fileWords(file, writtenBy)],
   [
     'Added since',
     added === null
@@ -53,6 +46,14 @@ const ofReport = ({ figures, sameBytes, writtenBy, added }: RecheckedReport): re
       : `${added.bytes} bytes, with ${added.signatures} digital signature${added.signatures === 1 ? '' : 's'}; a PDF reader tells whether they hold`,
   ],
 ];
+
+function fileWords(file: RecheckedReport['file'], writtenBy: string): string {
+  if (file === 'same') return 'whole, byte for byte what this version writes';
+  if (file === 'same pages')
+    return 'whole, on every page what this version writes; attached tables differ in last digits';
+  if (file === 'other pages') return 'not what this version writes';
+  return `whole; not compared page for page, as ${writtenBy === version ? 'figures differ' : 'another version wrote it'}`;
+}
 
 function countWords(figures: readonly ComparedFigure[]): string {
   const count = (outcome: ComparedFigure['outcome']) => figures.filter((figure) => figure.outcome === outcome).length;

@@ -4,6 +4,9 @@ import { report, type ReportOptions } from '../report/report.ts';
 import { compareFigures, type ComparedFigure } from './compare-figures.ts';
 import type { Found } from './found.ts';
 import type { Additions } from './pdf/additions.ts';
+import { Inflater } from './pdf/inflate.ts';
+import { objectsOf } from './pdf/objects.ts';
+import { sameBytes, sameDrawing } from './pdf/same-drawing.ts';
 
 /** What a report or a record came to when it was computed anew. */
 export interface Recheck {
@@ -23,8 +26,11 @@ export interface RecheckedReport {
   /** Version of Ferrule that wrote it. */
   readonly writtenBy: string;
   readonly figures: readonly ComparedFigure[];
-  /** Whether this version writes the same bytes; null: not to be expected, because another wrote it or figures differ. */
-  readonly sameBytes: boolean | null;
+  /**
+   * The file beside the one that this version writes: every byte the same; the same on every page, with other last digits
+   * in attached tables; or other pages. null: not to be expected, because another version wrote it or figures differ.
+   */
+  readonly file: 'same' | 'same pages' | 'other pages' | null;
   readonly added: Additions | null;
 }
 
@@ -40,16 +46,22 @@ export async function recheck(found: Found, dossier: Dossier, fonts: ReportOptio
   const { printed, paper, written, added } = found.report;
   const figures = compareFigures(printed.figures, printedFigures(dossier));
   const all = (outcome: ComparedFigure['outcome']): boolean => figures.every((figure) => figure.outcome === outcome);
-  const comparable = printed.version === dossier.version && all('same');
-  const sameBytes = comparable ? sameAs(written, await report(dossier, { paper, fonts })) : null;
-  const differs = figures.some(({ outcome }) => outcome === 'differs') || sameBytes === false;
+  const agrees = figures.every(({ outcome }) => outcome !== 'differs');
+  const comparable = printed.version === dossier.version && agrees;
+  const file = comparable ? await compareFiles(written, await report(dossier, { paper, fonts })) : null;
+  const differs = !agrees || file === 'other pages';
   return {
     verdict: differs ? 'differs' : all('same') ? 'same' : 'within rounding',
     dossier,
     schema,
     digest,
-    report: { writtenBy: printed.version, figures, sameBytes, added },
+    report: { writtenBy: printed.version, figures, file, added },
   };
 }
 
-const sameAs = (a: Uint8Array, b: Uint8Array): boolean => a.length === b.length && a.every((byte, k) => byte === b[k]);
+async function compareFiles(written: Uint8Array, now: Uint8Array): Promise<'same' | 'same pages' | 'other pages'> {
+  if (sameBytes(written, now)) return 'same';
+  const inflater = new Inflater();
+  const [then, today] = [await objectsOf(written, inflater), await objectsOf(now, inflater)];
+  return sameDrawing(then, today) ? 'same pages' : 'other pages';
+}

@@ -1,6 +1,7 @@
 import { notAsWritten, refusal } from '../refusal.ts';
 import { Inflater } from './inflate.ts';
 import { objectAt, unpacked, type Objects } from './objects.ts';
+import { plain } from './same-drawing.ts';
 import { isDictionary, isRef, nameIn, typeOf, type Dictionary, type Value } from './value.ts';
 import { Allowance, ValueReader } from './value-reader.ts';
 
@@ -75,12 +76,10 @@ function mayReplace(number: number, now: Value, { byNumber, trailer }: Objects):
   const may = changing[nameIn(value.get('FT')) === 'Sig' ? 'signature field' : typeOf(value)];
   if (may === undefined) return false;
   const names = new Set([...value.keys(), ...now.keys()]);
-  return [...names].every((name) => may.includes(name) || plain(value.get(name)) === plain(now.get(name)));
+  return [...names].every(
+    (name) => may.includes(name) || plain(value.get(name), coarse) === plain(now.get(name), coarse),
+  );
 }
 
-/** A value as a text that is the same for the same value; of numbers, what tells on paper. */
-const plain = (value: Value | undefined): string =>
-  JSON.stringify(value ?? null, (_, part: unknown) => {
-    if (part instanceof Map) return [...(part as Dictionary)].sort(([a], [b]) => (a < b ? -1 : 1));
-    return typeof part === 'number' ? Math.round(part * 100) : part;
-  });
+/** Of a number, what tells on paper: another program writes fewer digits. */
+const coarse = (value: number): number => Math.round(value * 100);

@@ -33,7 +33,7 @@ describe('recheck(found, dossier, fonts)', { timeout: 30_000 }, () => {
   it('says same of a report, and that this version writes the same bytes', async () => {
     const outcome = await recheckOf(bytes);
     expect(outcome.verdict).toBe('same');
-    expect(outcome.report).toMatchObject({ writtenBy: dossier.version, sameBytes: true, added: null });
+    expect(outcome.report).toMatchObject({ writtenBy: dossier.version, file: 'same', added: null });
     expect(outcome.digest).toBe(dossier.digest);
     expect(outcome.report!.figures.length).toBeGreaterThan(50);
     expect(verdictWords(outcome)).toBe('Same: every figure is what was printed.');
@@ -42,7 +42,7 @@ describe('recheck(found, dossier, fonts)', { timeout: 30_000 }, () => {
   it('says which figures differ, then and now', async () => {
     const outcome = await recheckOf(bytes, better);
     expect(outcome.verdict).toBe('differs');
-    expect(outcome.report!.sameBytes).toBeNull();
+    expect(outcome.report!.file).toBeNull();
     const other = outcome.report!.figures.filter((figure) => figure.outcome !== 'same');
     expect(other.map(({ name }) => name)).toEqual(dossier.options.map(({ id }) => `${id}: worst return loss`));
     const lines = recheckText(outcome).split('\n');
@@ -61,15 +61,28 @@ describe('recheck(found, dossier, fonts)', { timeout: 30_000 }, () => {
   it('does not compare the bytes of another version, and says so', async () => {
     const files = [recordFile(dossier.record), figuresFile({ ...dossier, version: '0.0.1' }, printedFigures(dossier))];
     const outcome = await recheckOf(await container(files, dossier.digest));
-    expect([outcome.verdict, outcome.report!.writtenBy, outcome.report!.sameBytes]).toEqual(['same', '0.0.1', null]);
+    expect([outcome.verdict, outcome.report!.writtenBy, outcome.report!.file]).toEqual(['same', '0.0.1', null]);
     expect(new Map(facts(outcome)).get('File')).toContain('another version wrote it');
   });
 
   it('says differs where pages are not those of the record, though every figure is the same', async () => {
     const files = [recordFile(dossier.record), figuresFile(dossier, printedFigures(dossier))];
     const outcome = await recheckOf(await container(files, dossier.digest));
-    expect([outcome.verdict, outcome.report!.sameBytes]).toEqual(['differs', false]);
+    expect([outcome.verdict, outcome.report!.file]).toEqual(['differs', 'other pages']);
     expect(verdictWords(outcome)).toContain('its pages may have been changed');
+  });
+
+  it('says same where another engine rounds the last digits of attached tables otherwise', async () => {
+    const elsewhere: Dossier = {
+      ...dossier,
+      responses: dossier.responses.map((response) => ({
+        ...response,
+        returnLossDb: response.returnLossDb.map((value) => value * (1 + 1e-15)),
+      })),
+    };
+    const outcome = await recheckOf(await report(elsewhere, { paper: 'a4', fonts }));
+    expect([outcome.verdict, outcome.report!.file]).toEqual(['same', 'same pages']);
+    expect(new Map(facts(outcome)).get('File')).toContain('attached tables differ in last digits');
   });
 
   it('computes a record alone, and says that there is nothing to compare with', async () => {

@@ -5,6 +5,7 @@ import { live } from 'lit/directives/live.js';
 import type { AsBuiltFigures, Dossier } from '../../src/dossier.ts';
 import {
   asBuiltWords,
+  attachedWords,
   causeWords,
   outsideWords,
   remedyWords,
@@ -160,7 +161,7 @@ export class FinishedBoard extends LitElement {
         ${requiredDb === null ? 'No return loss is required of it.' : verdictMark(verdict, verdicts[verdict])}
       </p>
       ${verdictWords(figures.verdict).map((words) => html`<p>${unbroken(words)}</p>`)} ${this.plot(figures, dossier)}
-      <p>${unbroken(`${measured} ${compared}`)}</p>
+      <p>${unbroken(`${measured} ${compared} ${attachedWords(figures)}`)}</p>
       ${
         figures.outside === null || figures.overlay.frequencyHz.length === 0
           ? nothing

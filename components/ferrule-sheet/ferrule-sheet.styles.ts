@@ -43,7 +43,7 @@ export const styles = css`
   }
 
   .sheet:has(.waiting) > :is(.given, .contents) {
-    max-height: calc(100vh - 9rem);
+    max-height: calc(100vh - var(--covered, 9rem));
   }
 
   title-block {
@@ -119,6 +119,11 @@ export const styles = css`
 
   @media (max-width: 56.24rem) and (max-height: 30rem) {
     .given {
+      position: static;
+      max-height: none;
+    }
+
+    .waiting {
       position: static;
       max-height: none;
     }

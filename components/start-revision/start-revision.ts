@@ -5,7 +5,12 @@ import { base } from '../base/base.styles.ts';
 import { field } from '../base/field.styles.ts';
 import { styles } from './start-revision.styles.ts';
 
-const root = document.documentElement;
+/** Keeps the page's lower end free for what lies over it. */
+function reserve(height: string) {
+  const { style } = document.documentElement;
+  style.scrollPaddingBottom = height;
+  style.setProperty('--covered', height);
+}
 
 /** Where the keyboard's focus is, inside of elements too. */
 function focused(): Element | null {
@@ -41,13 +46,13 @@ export class StartRevision extends LitElement {
 
   override disconnectedCallback() {
     super.disconnectedCallback();
-    if (this.floating) root.style.scrollPaddingBottom = '';
+    if (this.floating) reserve('');
   }
 
   /** What was being typed in stays in view. */
   protected override firstUpdated() {
     if (!this.floating) return;
-    root.style.scrollPaddingBottom = `${String(this.offsetHeight)}px`;
+    reserve(`${String(this.offsetHeight)}px`);
     focused()?.scrollIntoView({ block: 'nearest' });
   }
 

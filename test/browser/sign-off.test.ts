@@ -203,7 +203,7 @@ describe('a finished board', () => {
     await shown
       .getByText(/^Measured over 150\.50\sMHz to 152\.00\sMHz, the return loss is 20\.00\sdB at worst/u)
       .waitFor();
-    expect(await shown.locator('svg').textContent()).toContain('measured on the finished board');
+    expect(await shown.locator('figure svg').textContent()).toContain('measured on the finished board');
     await page.locator('contents-rule', { hasText: /Finished board\s+meets/u }).waitFor();
     expect(await shown.getByRole('group', { name: 'Single causes' }).getByRole('row').count()).toBeGreaterThan(1);
     await shown.getByLabel('Note on the board measured').fill('On its bracket');

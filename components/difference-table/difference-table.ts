@@ -35,7 +35,7 @@ export class DifferenceTable extends LitElement {
       }
 
       table {
-        min-width: 26rem;
+        min-width: 21rem;
         table-layout: fixed;
       }
 

@@ -99,6 +99,14 @@ export const styles = css`
     margin-top: 0.5rem;
   }
 
+  .scroll th:first-child {
+    min-width: 9.5rem;
+  }
+
+  thead .number {
+    white-space: normal;
+  }
+
   @container (max-width: 30rem) {
     .of {
       grid-template-columns: minmax(0, 1fr);

@@ -50,6 +50,7 @@ async function issued(page: Page): Promise<void> {
   await signOff(page).getByText('Nothing: it may be issued.').waitFor();
   await issue(page).press('Enter');
   await signOff(page).getByText('Revision A is issued and frozen.').waitFor();
+  await page.waitForFunction(() => location.hash.includes('state=issued'));
 }
 
 async function recordOf(page: Page): Promise<DesignRecord> {
@@ -135,6 +136,26 @@ describe('an issued record', () => {
     await press(page, 'Leave revision A as issued');
     await page.locator('start-revision.waiting').waitFor({ state: 'detached' });
     expect(await page.getByLabel('Band to hold').inputValue()).toBe('150.5M..152M');
+  });
+
+  it('is told without colour and without sideways scrolling on a narrow dark screen', async () => {
+    const page = await site.visit(`${sheet}&state=issued`, {
+      viewport: { width: 320, height: 9000 },
+      colorScheme: 'dark',
+    });
+    await measure(page, 'board-7.s1p', board.join('\n'));
+    await page.getByText('The finished board waits for revision B.').waitFor();
+    await press(page, 'Start revision B');
+    await page.getByText('A revision needs its reason: say what it changes and why.').waitFor();
+    await expectUnbroken(page);
+    await page
+      .locator('start-revision.waiting')
+      .getByLabel(/^What revision B/u)
+      .fill('As built.');
+    await press(page, 'Start revision B');
+    await page.locator('difference-table').getByText('board-7.s1p').waitFor();
+    await expectUnbroken(page);
+    expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(320);
   });
 
   it('is revised with a reason, by what was typed; the new revision tells what changed', async () => {

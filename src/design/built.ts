@@ -17,6 +17,7 @@ import { realWorst, type RealStates } from './real-worst.ts';
 import { searchWords } from './search-words.ts';
 import { percentilesOver, subjectOf, toleranceSteps, variedParts, yieldSteps } from './tolerance-steps.ts';
 import { valueWords } from './value-words.ts';
+import { log10, power } from '../quantity/elementary.ts';
 
 /** How far from its exact value one that is centred anew may lie, as a ratio. */
 const widest = 4;
@@ -110,7 +111,7 @@ export function* builtSteps(
     worstAtHz: worst.atHz,
     worstState: worst.state,
     centring: { ...centring, roundingDb: centring.centredDb - worst.returnLossDb },
-    lossDb: Math.max(0, -10 * Math.log10(efficiency)),
+    lossDb: Math.max(0, -10 * log10(efficiency)),
     efficiency: Math.min(1, efficiency),
     yield: found,
     percentiles: shown === null ? null : percentilesOver(record, build, subject, shown.states, shown.frequencyHz),
@@ -150,7 +151,7 @@ function* search(
     keep: kept,
   };
   const alone = yield* chooseValues(choice);
-  const required = 10 ** (-(requirement.returnLossDb ?? Infinity) / 10);
+  const required = power(10, -(requirement.returnLossDb ?? Infinity) / 10);
   const single: Found = {
     lists: singles.map((parts) => parts.map((part): Candidate => ({ arm: part.arm, parts: [part], pair: null }))),
     sets: alone.map(({ picks }) => picks),

@@ -6,6 +6,7 @@ import { preferredValues } from '../parts/preferred-series.ts';
 import type { StockPart } from '../parts/stock.ts';
 import type { Tolerance } from '../parts/tolerance.ts';
 import type { Build, DesignRecord } from '../record/design-record.ts';
+import { log, power } from '../quantity/elementary.ts';
 
 /** One part that can be had. */
 export interface SinglePart {
@@ -66,7 +67,7 @@ function usable({ stock }: Build, { part }: Arm, f0: number): readonly StockPart
   return below.length > 0 ? below : lines;
 }
 
-const distance = (value: number, centre: number): number => Math.abs(Math.log(value / centre));
+const distance = (value: number, centre: number): number => Math.abs(log(value / centre));
 
 /** Of a series within the practicable range, the value nearest to one outside it; where it has none, of all. */
 function nearestOf(series: Parameters<typeof preferredValues>[0], centre: number, low: number, high: number): number {
@@ -104,7 +105,7 @@ function partOfStock(record: DesignRecord, build: Build, arm: Arm, line: StockPa
   const policy = build[arm.part];
   const f0 = record.requirement.frequencyHz;
   const asBought = partOf(record, build, arm, line.value, 'stock');
-  const q = line.q === null ? record.partQ[arm.part] : line.q * (f0 / (line.qAtHz ?? f0)) ** policy.qSlope;
+  const q = line.q === null ? record.partQ[arm.part] : line.q * power(f0 / (line.qAtHz ?? f0), policy.qSlope);
   const { selfResonanceHz } = line;
   const esl = line.eslH ?? (selfResonanceHz === null ? build.eslH : resonating(selfResonanceHz, line.value));
   return {

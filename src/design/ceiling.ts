@@ -10,6 +10,7 @@ import { formatFixed, formatQuantity } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { returnLossWords } from './words.ts';
+import { log10 } from '../quantity/elementary.ts';
 
 /** Resonators for which a ceiling is told. */
 const mostResonators = 6;
@@ -62,7 +63,7 @@ export function ceilingOf(record: DesignRecord): { readonly ceiling: Ceiling | n
   };
 }
 
-const decibels = (reflection: number): number => (reflection < 1e-10 ? 200 : -20 * Math.log10(reflection) + 0);
+const decibels = (reflection: number): number => (reflection < 1e-10 ? 200 : -20 * log10(reflection) + 0);
 
 function leastResonators(perResonators: readonly number[], askedDb: number): number | null {
   const index = perResonators.findIndex((reflection) => holds(decibels(reflection), askedDb));

@@ -4,6 +4,7 @@ import { fit } from '../synthesis/fit/fit.ts';
 import type { Fitted } from '../synthesis/fit/problem.ts';
 import { titleOf } from '../synthesis/title.ts';
 import type { FoundCandidate } from './method.ts';
+import { exp } from '../quantity/elementary.ts';
 
 /** What a caller may show while networks are fitted. */
 export interface FitStep {
@@ -73,7 +74,7 @@ export function* fittedNetworks(
       }
       best = step.value.best;
       steps += 1;
-      const bestDb = best === null ? null : returnLossDb(Math.exp(best.level));
+      const bestDb = best === null ? null : returnLossDb(exp(best.level));
       yield { done: (before + step.value.done * share(elements)) / whole, steps, elements, bestDb };
       if (control.stopped || steps === asked.steps) {
         results = best === null ? [] : [best];

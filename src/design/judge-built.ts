@@ -3,11 +3,12 @@ import type { Arm } from '../network/arm.ts';
 import type { DesignRecord } from '../record/design-record.ts';
 import { checksOf, verdictOf } from './checks.ts';
 import { yieldWords } from './words.ts';
+import { power } from '../quantity/elementary.ts';
 
 /** An option as it is with real parts: what is required is asked of those. */
 export function withBuilt(record: DesignRecord, option: Option, built: Built): Option {
   const arms = built.parts.map(({ arm, part, value }): Arm => ({ arm, part, value }));
-  const worst = { gammaSquared: 10 ** (-built.worstReturnLossDb / 10), atHz: built.worstAtHz };
+  const worst = { gammaSquared: power(10, -built.worstReturnLossDb / 10), atHz: built.worstAtHz };
   const designators = built.parts.map(({ designator }) => designator);
   const checks = [
     ...checksOf(record, arms, designators, worst, built.worstState, option.dc, 'with real parts '),

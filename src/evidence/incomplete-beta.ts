@@ -1,11 +1,13 @@
+import { exp, log, log1p } from '../quantity/elementary.ts';
+
 /** ln Γ(x) for x > 0: Stirling's series where it has settled, Γ(x + 1) = x·Γ(x) up to there. */
 function logGamma(x: number): number {
   let shift = 0;
   let at = x;
-  for (; at < 15; at += 1) shift += Math.log(at);
+  for (; at < 15; at += 1) shift += log(at);
   const s = 1 / (at * at);
   const series = (1 / 12 - s * (1 / 360 - s * (1 / 1260 - s * (1 / 1680 - s / 1188)))) / at;
-  return (at - 0.5) * Math.log(at) - at + Math.log(2 * Math.PI) / 2 + series - shift;
+  return (at - 0.5) * log(at) - at + log(2 * Math.PI) / 2 + series - shift;
 }
 
 /**
@@ -17,7 +19,7 @@ export function incompleteBeta(a: number, b: number, x: number): number {
   if (x >= 1) return 1;
   // The fraction settles fast on this side of the mean.
   if (x > (a + 1) / (a + b + 2)) return 1 - incompleteBeta(b, a, 1 - x);
-  const front = logGamma(a + b) - logGamma(a) - logGamma(b) + a * Math.log(x) + b * Math.log1p(-x);
+  const front = logGamma(a + b) - logGamma(a) - logGamma(b) + a * log(x) + b * log1p(-x);
   const tiny = 1e-300;
   const orTiny = (value: number): number => (Math.abs(value) < tiny ? tiny : value);
   let c = 1;
@@ -36,5 +38,5 @@ export function incompleteBeta(a: number, b: number, x: number): number {
     fraction *= d * c;
     if (Math.abs(d * c - 1) < 1e-15) break;
   }
-  return (Math.exp(front) * fraction) / a;
+  return (exp(front) * fraction) / a;
 }

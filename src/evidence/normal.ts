@@ -1,3 +1,5 @@
+import { log } from '../quantity/elementary.ts';
+
 /** Numerators and denominators, constant term first. */
 const centre = [
   [
@@ -42,6 +44,6 @@ const ratio = ([above, below]: readonly [readonly number[], readonly number[]], 
 export function normalQuantile(p: number): number {
   const q = p - 0.5;
   if (Math.abs(q) <= 0.425) return q * ratio(centre, 0.180625 - q * q);
-  const r = Math.sqrt(-Math.log(Math.min(p, 1 - p)));
+  const r = Math.sqrt(-log(Math.min(p, 1 - p)));
   return Math.sign(q) * (r <= 5 ? ratio(flank, r - 1.6) : ratio(tail, r - 5));
 }

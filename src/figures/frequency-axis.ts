@@ -1,6 +1,7 @@
 import { formatFixed } from '../quantity/format.ts';
 import type { Span } from '../quantity/span.ts';
 import { decadeTicks, ticks } from './ticks.ts';
+import { log, log10, power } from '../quantity/elementary.ts';
 
 const prefixes = [
   [1e9, 'GHz'],
@@ -27,14 +28,14 @@ export function frequencyAxis(span: Span, most: number): FrequencyAxis {
   const middle = Math.sqrt(span.low * span.high);
   const [size, unit] = prefixes.find(([value]) => middle >= value) ?? [1, 'Hz'];
   if (isLogarithmic(span)) {
-    const ratio = Math.log(span.high / span.low);
+    const ratio = log(span.high / span.low);
     const all = decadeTicks(span.low, span.high);
     const shown = all.length > most + 1 ? all.filter((hertz) => hertz.toExponential().startsWith('1e')) : all;
     return {
-      at: (hertz) => Math.log(hertz / span.low) / ratio,
+      at: (hertz) => log(hertz / span.low) / ratio,
       ticks: shown.map((hertz) => ({
         hertz,
-        text: formatFixed(hertz / size, Math.max(0, -Math.floor(Math.log10(hertz / size)))),
+        text: formatFixed(hertz / size, Math.max(0, -Math.floor(log10(hertz / size)))),
       })),
       unit,
     };
@@ -51,5 +52,7 @@ const isLogarithmic = ({ low, high }: Span): boolean => high > 8 * low;
 
 /** Frequency at a place of the axis, Hz: the inverse of `at`. */
 export function frequencyAt(span: Span, place: number): number {
-  return isLogarithmic(span) ? span.low * (span.high / span.low) ** place : span.low + place * (span.high - span.low);
+  return isLogarithmic(span)
+    ? span.low * power(span.high / span.low, place)
+    : span.low + place * (span.high - span.low);
 }

@@ -8,6 +8,7 @@ import { designMark } from './design-mark.ts';
 import { circle, line, path, stroke } from './draw.ts';
 import type { Figure, Shape } from './figure.ts';
 import { described, stateKeys, stateLetters, stateStroke } from './states.ts';
+import { log10 } from '../quantity/elementary.ts';
 
 /** 10 log10(1/2) */
 const halfPowerDb = -3.0103;
@@ -29,7 +30,7 @@ export function gainPlot(
 ): Figure {
   const { spanHz, state } = responses[0]!;
   const least = Math.min(...responses.flatMap(({ transducerGainDb }) => transducerGainDb));
-  const peakDb = halfPower.peakGain > 0 ? 10 * Math.log10(halfPower.peakGain) : 0;
+  const peakDb = halfPower.peakGain > 0 ? 10 * log10(halfPower.peakGain) : 0;
   const edgeDb = peakDb + halfPowerDb;
   const bottom = Math.max(peakDb - depth, Math.min(-6, least, edgeDb - 2));
   const low = bottom < -12 ? Math.floor(bottom / 10) * 10 : Math.floor(bottom / 2) * 2;

@@ -5,6 +5,7 @@ import { lettering } from './chart-frame.ts';
 import { circle, label, rectangle, stroke } from './draw.ts';
 import type { Shape } from './figure.ts';
 import { placeOf, type Plane } from './plane-trace.ts';
+import { atan2, cos, sin } from '../quantity/elementary.ts';
 
 type Symbol = 'square' | 'disc' | 'ring';
 
@@ -29,7 +30,7 @@ export function marksOf({ frequencyHz, gammaRe, gammaIm }: Response, f0: number,
     if (k < 0) return [];
     const [re, im] = [gammaRe[k]!, gammaIm[k]!];
     const magnitude = Math.hypot(re, im);
-    const angle = magnitude < 5e-4 ? '' : `∠${formatFixed((Math.atan2(im, re) * 180) / Math.PI, 1)}°`;
+    const angle = magnitude < 5e-4 ? '' : `∠${formatFixed((atan2(im, re) * 180) / Math.PI, 1)}°`;
     const words = `${formatRead(hertz, 'Hz')}: Γ = ${formatFixed(magnitude, 3)}${angle}`;
     return [{ symbol, hertz, re, im, words }];
   });
@@ -62,7 +63,7 @@ export function planeNumbers(plane: Plane, states: readonly (readonly Mark[])[])
     const [x, y] = placeOf(plane, last.re, last.im);
     for (let eighth = 0; eighth < 8; eighth += 1) {
       const angle = (eighth * Math.PI) / 4;
-      const [atX, atY] = [x + away * Math.cos(angle), y - away * Math.sin(angle)];
+      const [atX, atY] = [x + away * cos(angle), y - away * sin(angle)];
       if (taken.some(([otherX, otherY]) => Math.hypot(otherX - atX, otherY - atY) < apart)) continue;
       taken.push([atX, atY]);
       return [label(atX, atY + 2.9, String(k + 1), lettering, 'middle', 'ink', true)];

@@ -8,6 +8,7 @@ import type { Figure, Shape, Tone } from './figure.ts';
 import { drawMark, marksOf, planeNumbers, shows } from './plane-marks.ts';
 import { placeOf, planeTrace, type Plane } from './plane-trace.ts';
 import { stateName, stateStroke } from './states.ts';
+import { log10, power } from '../quantity/elementary.ts';
 
 const width = 480;
 const least = 172;
@@ -35,7 +36,7 @@ const thinnest = { stroke: 'muted', width: stroke.hair, dash: [1, 1.5] } as cons
 export function reflectionPlane(responses: readonly Response[], requirement: DesignRecord['requirement']): Figure {
   const { returnLossDb, bandHz, frequencyHz: f0 } = requirement;
   const several = responses.length > 1;
-  const allowed = returnLossDb === null ? null : 10 ** (-returnLossDb / 20);
+  const allowed = returnLossDb === null ? null : power(10, -returnLossDb / 20);
   const states = responses.map((response) => marksOf(response, f0, bandHz));
   const draw = (plane: Plane): readonly Shape[] => [
     ...grid(plane),
@@ -95,15 +96,15 @@ export function reflectionPlane(responses: readonly Response[], requirement: Des
 
 /** Next of 0.1, 0.2, 0.5 and so on. */
 function rimAbove(smallest: number): number {
-  const power = 10 ** Math.floor(Math.log10(smallest));
+  const power = 10 ** Math.floor(log10(smallest));
   return (([1, 2, 5] as const).find((lead) => lead * power >= smallest) ?? 10) * power;
 }
 
-const formatRim = (rim: number): string => formatFixed(rim, Math.max(0, -Math.floor(Math.log10(rim) + 1e-9)));
+const formatRim = (rim: number): string => formatFixed(rim, Math.max(0, -Math.floor(log10(rim) + 1e-9)));
 
 function grid({ x, radius, rim }: Plane): readonly Shape[] {
   // A rim that starts with a 5 divides into five rings, any other into four.
-  const rings = Math.abs(Math.log10(rim / 5) % 1) < 1e-9 ? 5 : 4;
+  const rings = Math.abs(log10(rim / 5) % 1) < 1e-9 ? 5 : 4;
   return [
     ...Array.from({ length: rings - 1 }, (_, k) => circle(x, middle, (radius * (k + 1)) / rings, faint)),
     line(x - radius, middle, x + radius, middle, faint),

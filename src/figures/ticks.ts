@@ -1,3 +1,5 @@
+import { log10 } from '../quantity/elementary.ts';
+
 /** Round values of an axis and the decimals that tell them apart. */
 export interface Ticks {
   readonly values: readonly number[];
@@ -12,7 +14,7 @@ export interface Ticks {
 export function ticks(low: number, high: number, most: number): Ticks {
   const least = (high - low) / most;
   if (!(least > 0)) return { values: [low], decimals: 0 };
-  const power = Math.floor(Math.log10(least));
+  const power = Math.floor(log10(least));
   const mantissa = least / 10 ** power;
   // Rounding in the division must not turn an exact 2 into 2.0000000000000004 and a step of 5.
   const [lead, raise] =
@@ -29,7 +31,7 @@ export function ticks(low: number, high: number, most: number): Ticks {
 /** 1, 2 and 5 times every power of ten within [low, high], both > 0. */
 export function decadeTicks(low: number, high: number): readonly number[] {
   const values: number[] = [];
-  for (let power = Math.floor(Math.log10(low)); power <= Math.ceil(Math.log10(high)); power += 1) {
+  for (let power = Math.floor(log10(low)); power <= Math.ceil(log10(high)); power += 1) {
     for (const lead of [1, 2, 5]) {
       const value = Number(`${lead}e${power}`);
       if (value >= low * (1 - 1e-9) && value <= high * (1 + 1e-9)) values.push(value);

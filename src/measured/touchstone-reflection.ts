@@ -1,6 +1,7 @@
 import { Complex } from 'complex.js';
 import { lineProblem } from './line-problem.ts';
 import type { Header } from './touchstone-header.ts';
+import { cos, sin } from '../quantity/elementary.ts';
 
 /**
  * Reflection coefficient of one port, in its own reference, from one line of data; the other port closed with its
@@ -59,5 +60,5 @@ function complexOf(a: number, b: number, format: 'MA' | 'DB' | 'RI'): Complex {
   if (format === 'RI') return new Complex(a, b);
   const size = format === 'MA' ? a : 10 ** (a / 20);
   const angle = (b * Math.PI) / 180;
-  return new Complex(size * Math.cos(angle), size * Math.sin(angle));
+  return new Complex(size * cos(angle), size * sin(angle));
 }

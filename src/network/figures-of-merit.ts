@@ -1,3 +1,5 @@
+import { log10 } from '../quantity/elementary.ts';
+
 /** Largest return loss or attenuation written, dB: beyond it rounding rules, and a perfect match has no number. */
 export const highestDb = 200;
 /** Largest VSWR written; a total reflection has no number. */
@@ -8,7 +10,7 @@ export const returnLossDb = (gammaSquared: number): number => attenuationDb(Math
 
 /** −10·log10 of a power ratio, dB, at most 200. */
 export const attenuationDb = (powerRatio: number): number =>
-  Math.min(highestDb, -10 * Math.log10(Math.max(powerRatio, 1e-20))) + 0;
+  Math.min(highestDb, -10 * log10(Math.max(powerRatio, 1e-20))) + 0;
 
 /** Voltage standing wave ratio (1 to 1e6) of |Γ|. */
 export function vswr(gamma: number): number {

@@ -1,5 +1,6 @@
 import type { Span } from '../quantity/span.ts';
 import { zeroBetween, goldenMaximum } from './search.ts';
+import { exp, log } from '../quantity/elementary.ts';
 
 /** Edges 3.0103 dB below the peak of transducer gain nearest the design frequency; null where there is none. */
 export interface HalfPowerEdges {
@@ -15,13 +16,13 @@ export interface HalfPowerEdges {
  */
 export function edgeGrid(f0: number, range: Span | null = null): Float64Array {
   const offsets: number[] = [];
-  for (let u = 1e-6; u < Math.log(1e6); u *= 1.03) offsets.push(u);
+  for (let u = 1e-6; u < log(1e6); u *= 1.03) offsets.push(u);
   const n = offsets.length;
   const grid = new Float64Array(2 * n + 1);
   grid[n] = f0;
   offsets.forEach((u, k) => {
-    grid[n + 1 + k] = f0 * Math.exp(u);
-    grid[n - 1 - k] = f0 * Math.exp(-u);
+    grid[n + 1 + k] = f0 * exp(u);
+    grid[n - 1 - k] = f0 * exp(-u);
   });
   if (range === null) return grid;
   // The ends of the data are samples too: an edge may lie between the last step and them.

@@ -1,5 +1,6 @@
 import { Complex } from 'complex.js';
 import type { Arm } from './arm.ts';
+import { power } from '../quantity/elementary.ts';
 
 /**
  * An arm as a real part has it. An inductor: L in series with ωL/Q, a capacitance across both. A capacitor: C in series
@@ -25,7 +26,7 @@ export interface RealLadder {
 
 /** Quality factor at a frequency; null: lossless. */
 export const qAt = ({ q, qSlope }: RealArm, f0: number, frequencyHz: number): number | null =>
-  q === null ? null : q * (frequencyHz / f0) ** qSlope;
+  q === null ? null : q * power(frequencyHz / f0, qSlope);
 
 /** Impedance of a real arm, Ω. */
 export function realImpedance(arm: RealArm, f0: number, frequencyHz: number): Complex {

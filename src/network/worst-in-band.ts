@@ -1,4 +1,5 @@
 import { goldenMaximum } from './search.ts';
+import { exp, log } from '../quantity/elementary.ts';
 
 /** Largest |Γ|² in a band, and where. Hz. */
 export interface Worst {
@@ -10,8 +11,8 @@ export interface Worst {
 export function logGrid(lowHz: number, highHz: number, points: number): Float64Array {
   if (lowHz === highHz) return Float64Array.of(lowHz);
   const grid = new Float64Array(points);
-  const step = Math.log(highHz / lowHz) / (points - 1);
-  for (let k = 0; k < points; k += 1) grid[k] = lowHz * Math.exp(k * step);
+  const step = log(highHz / lowHz) / (points - 1);
+  for (let k = 0; k < points; k += 1) grid[k] = lowHz * exp(k * step);
   grid[points - 1] = highHz;
   return grid;
 }

@@ -5,6 +5,7 @@ import type { Span } from '../quantity/span.ts';
 import { fromInside, toInside } from '../synthesis/fit/limits.ts';
 import { minimise } from '../synthesis/fit/minimise.ts';
 import { fillImmittance } from './immittance-of.ts';
+import { cos, exp, log } from '../quantity/elementary.ts';
 
 /** A network of real parts whose values may be any. */
 export interface CentreProblem {
@@ -35,7 +36,7 @@ const nudge = 1e-6;
 
 /** Largest |Γ|² over all frequencies and states. */
 export function worstOf(problem: CentreProblem, values: readonly number[]): number {
-  return Math.exp(new RealMismatch(problem, values.length).worst(values));
+  return exp(new RealMismatch(problem, values.length).worst(values));
 }
 
 /**
@@ -47,32 +48,32 @@ export function worstOf(problem: CentreProblem, values: readonly number[]): numb
  */
 export function centreValues(problem: CentreProblem, start: readonly number[], limits: readonly Span[]): Centred {
   const bounds = limits.map(({ low, high }) => ({
-    middle: Math.log(low * high) / 2,
-    half: Math.max(Math.log(high / low) / 2, 1e-12),
+    middle: log(low * high) / 2,
+    half: Math.max(log(high / low) / 2, 1e-12),
   }));
   const within = (value: number, k: number): number => Math.min(limits[k]!.high, Math.max(limits[k]!.low, value));
   const inside = start.map(within);
   const all = new RealMismatch(problem, start.length);
   const few = new RealMismatch({ ...problem, states: problem.states.map(thinned) }, start.length);
   let best = { values: inside, level: all.worst(inside) };
-  const x = Float64Array.from(inside, (value, k) => toInside(Math.log(value), bounds[k]!));
+  const x = Float64Array.from(inside, (value, k) => toInside(log(value), bounds[k]!));
   const logs = new Float64Array(x.length);
   for (const beta of betas) {
     minimise(
       (t, slope) => {
         for (let k = 0; k < t.length; k += 1) logs[k] = fromInside(t[k]!, bounds[k]!);
         const level = few.smooth(logs, beta, slope);
-        for (let k = 0; k < t.length; k += 1) slope[k]! *= bounds[k]!.half * Math.cos(t[k]!);
+        for (let k = 0; k < t.length; k += 1) slope[k]! *= bounds[k]!.half * cos(t[k]!);
         return level;
       },
       x,
       steps,
     );
-    const values = Array.from(x, (t, k) => within(Math.exp(fromInside(t, bounds[k]!)), k));
+    const values = Array.from(x, (t, k) => within(exp(fromInside(t, bounds[k]!)), k));
     const level = all.worst(values);
     if (level < best.level) best = { values, level };
   }
-  return { values: best.values, gammaSquared: Math.exp(best.level) };
+  return { values: best.values, gammaSquared: exp(best.level) };
 }
 
 function thinned(ends: Ends): Ends {
@@ -119,7 +120,7 @@ class RealMismatch {
 
   /** Largest ln|Γ|². */
   worst(values: readonly number[]): number {
-    this.#fill(Float64Array.from(values, Math.log));
+    this.#fill(Float64Array.from(values, log));
     this.#sweep();
     return this.#levels.reduce((top, level) => Math.max(top, level), -Infinity);
   }
@@ -133,13 +134,13 @@ class RealMismatch {
     let sum = 0;
     slope.fill(0);
     for (let p = 0; p < this.#levels.length; p += 1) {
-      const weight = Math.exp(beta * (this.#levels[p]! - top));
+      const weight = exp(beta * (this.#levels[p]! - top));
       if (weight < 1e-12) continue;
       sum += weight;
       for (let k = 0; k < m; k += 1) slope[k]! += weight * this.#gradients[p * m + k]!;
     }
     for (let k = 0; k < m; k += 1) slope[k]! /= sum;
-    return top + Math.log(sum) / beta;
+    return top + log(sum) / beta;
   }
 
   #fill(logs: Float64Array): void {
@@ -148,10 +149,10 @@ class RealMismatch {
     for (let k = 0; k < logs.length; k += 1) {
       const row = this.#rows[k]!;
       const slope = this.#slopes[k]!;
-      const arm = armFor(k, Math.exp(logs[k]!));
+      const arm = armFor(k, exp(logs[k]!));
       this.#series[k] = arm.arm === 'series';
       fillImmittance(arm, f0, frequencyHz, row);
-      fillImmittance(armFor(k, Math.exp(logs[k]! + nudge)), f0, frequencyHz, slope);
+      fillImmittance(armFor(k, exp(logs[k]! + nudge)), f0, frequencyHz, slope);
       for (let at = 0; at < row.length; at += 1) slope[at] = (slope[at]! - row[at]!) / nudge;
     }
   }
@@ -207,7 +208,7 @@ class RealMismatch {
     const d2 = Math.max(dr * dr + di * di, 1e-24 * s2);
     this.#forward(f, stray, zr, zi, sr / s2, si / s2, to, false);
     this.#forward(f, stray, -zr, wi, dr / d2, di / d2, to, true);
-    return Math.log(d2 / s2);
+    return log(d2 / s2);
   }
 
   /** Slopes of −ln|S|² written from `to` on, then those of ln|D|² added; each starts at the source as V + w·I. */

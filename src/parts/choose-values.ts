@@ -1,6 +1,7 @@
 import type { RealArm } from '../network/real-arm.ts';
 import { BoxSearch } from './box-search.ts';
 import type { ValueProblem, PickedSet } from './value-problem.ts';
+import { log } from '../quantity/elementary.ts';
 
 /** A choice of values and how many of the best sets are wanted. */
 export interface ValueChoice extends ValueProblem {
@@ -72,7 +73,7 @@ export function boxAbout(
 ): number[][] {
   const byDistance = lists
     .flatMap((list, arm) =>
-      list.map((pick) => ({ arm, pick, distance: Math.abs(Math.log(candidates[arm]![pick]!.value / centre[arm]!)) })),
+      list.map((pick) => ({ arm, pick, distance: Math.abs(log(candidates[arm]![pick]!.value / centre[arm]!)) })),
     )
     .sort((a, b) => a.distance - b.distance);
   const box: number[][] = lists.map(() => []);
@@ -143,6 +144,6 @@ function combinations(n: number, k: number): number[][] {
 
 /** Which candidate is nearest by ratio; of two the smaller. */
 function nearest(parts: readonly RealArm[], to: number): number {
-  const distances = parts.map(({ value }) => Math.abs(Math.log(value / to)));
+  const distances = parts.map(({ value }) => Math.abs(log(value / to)));
   return distances.indexOf(Math.min(...distances));
 }

@@ -1,10 +1,12 @@
+import { log10, power } from '../quantity/elementary.ts';
+
 export type PreferredSeries = 'E3' | 'E6' | 'E12' | 'E24' | 'E48' | 'E96' | 'E192';
 
 /** IEC 60063: E24 follows no formula, and E12, E6 and E3 are every second, fourth and eighth of it. */
 const e24 = [10, 11, 12, 13, 15, 16, 18, 20, 22, 24, 27, 30, 33, 36, 39, 43, 47, 51, 56, 62, 68, 75, 82, 91];
 
 /** E192 is 10^(i/192) to three digits, but 9.20 where that gives 9.19; E96 and E48 are every second and fourth. */
-const e192 = Array.from({ length: 192 }, (_, i) => (i === 185 ? 920 : Math.round(100 * 10 ** (i / 192))));
+const e192 = Array.from({ length: 192 }, (_, i) => (i === 185 ? 920 : Math.round(100 * power(10, i / 192))));
 
 /** Relative play of the ends: a limit that was computed may differ in its last bits from the one that was meant. */
 const play = 1e-9;
@@ -22,7 +24,7 @@ export function preferredValues(series: PreferredSeries, low: number, high: numb
   const digits = table === e24 ? 1 : 2;
   const mantissas = table.filter((_, i) => i % (table.length / perDecade) === 0);
   const values: number[] = [];
-  for (let decade = Math.floor(Math.log10(low)) - 1; decade <= Math.log10(high) + 1; decade += 1) {
+  for (let decade = Math.floor(log10(low)) - 1; decade <= log10(high) + 1; decade += 1) {
     for (const mantissa of mantissas) values.push(Number(`${String(mantissa)}e${String(decade - digits)}`));
   }
   return values.filter((value) => value >= low * (1 - play) && value <= high * (1 + play));

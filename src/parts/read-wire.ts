@@ -1,5 +1,6 @@
 import { normalise, readQuantity } from '../quantity/read-quantity.ts';
 import { read, refuse, type Reading } from '../quantity/reading.ts';
+import { power } from '../quantity/elementary.ts';
 
 const would = 'write it as 0.8 mm or AWG 20';
 
@@ -26,4 +27,4 @@ export function readWire(text: string): Reading<number> {
 }
 
 /** ASTM B258: 36 is 0.127 mm, 0000 is 92 times as thick, and every step between has the same ratio. */
-const gaugeDiameter = (gauge: number): number => 0.127e-3 * 92 ** ((36 - gauge) / 39);
+const gaugeDiameter = (gauge: number): number => 0.127e-3 * power(92, (36 - gauge) / 39);

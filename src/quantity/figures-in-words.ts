@@ -1,9 +1,10 @@
 import { formatFixed, formatQuantity } from './format.ts';
 import type { Span } from './span.ts';
+import { log10 } from './elementary.ts';
 
 /** "118.0 MHz to 137.0 MHz"; a narrow span with as many digits as show its width. */
 export function frequencySpan({ low, high }: Span): string {
-  const width = high > low ? Math.ceil(-Math.log10((high - low) / high)) : 0;
+  const width = high > low ? Math.ceil(-log10((high - low) / high)) : 0;
   const digits = Math.min(12, Math.max(4, width + 2));
   return `${formatQuantity(low, 'Hz', digits)} to ${formatQuantity(high, 'Hz', digits)}`;
 }

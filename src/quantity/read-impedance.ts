@@ -1,5 +1,6 @@
 import { normalise, readQuantity } from './read-quantity.ts';
 import { read, refuse, type Reading } from './reading.ts';
+import { cos, sin } from './elementary.ts';
 
 export interface Rectangular {
   /** Ω */
@@ -41,7 +42,7 @@ function readPolar(given: string): Reading<Rectangular> {
   if (magnitude.value < 0) return refuse('a magnitude is not negative', would);
   const angle = Number(angleText.replace(',', '.')) * (angleUnit.toLowerCase() === 'rad' ? 1 : Math.PI / 180);
   if (!Number.isFinite(angle)) return refuse('the angle is beyond the range of numbers', would);
-  return read({ r: magnitude.value * Math.cos(angle), x: magnitude.value * Math.sin(angle) });
+  return read({ r: magnitude.value * cos(angle), x: magnitude.value * sin(angle) });
 }
 
 function readTerms(given: string): Reading<Rectangular> {

@@ -10,6 +10,7 @@ import {
   type Fixed,
   type FixedComplex,
 } from './fixed-point.ts';
+import { acosh, asinh, cos, cosh, sin, sinh } from '../quantity/elementary.ts';
 
 /** Worst in-band |Γ| of the equal-ripple ladder between two resistances, in closed form. */
 export interface Ripple {
@@ -28,7 +29,7 @@ export interface Ripple {
  */
 export function ripple(r: number, low: number, high: number, sections: number): Ripple {
   const x0 = (low * low + high * high) / ((high - low) * (high + low));
-  const epsilon = (r - 1) / (2 * Math.sqrt(r)) / Math.cosh(sections * Math.acosh(x0));
+  const epsilon = (r - 1) / (2 * Math.sqrt(r)) / cosh(sections * acosh(x0));
   return { epsilon, reflection: epsilon / Math.sqrt(1 + epsilon * epsilon) };
 }
 
@@ -52,7 +53,7 @@ export function equalRippleElements(
   const width = high * high - low * low;
   const middle = high * high + low * low;
   const squares = Array.from({ length: sections }, (_, k) => {
-    const x = Math.cos(((2 * k + 1) * Math.PI) / (2 * sections));
+    const x = cos(((2 * k + 1) * Math.PI) / (2 * sections));
     return toFixedPoint((x * width + middle) / 2);
   });
   const k = 1 / (epsilon * 2 ** (sections - 1) * (2 / width) ** sections);
@@ -87,10 +88,10 @@ const product = (a: readonly Fixed[], b: readonly Fixed[]): Fixed[] => {
 
 /** Left-half-plane roots of 1 + ε²·T_n²(x(s)) in closed form, to double precision. */
 function roughPoles(n: number, epsilon: number, width: number, middle: number): Complex[] {
-  const eta = Math.asinh(1 / epsilon) / n;
+  const eta = asinh(1 / epsilon) / n;
   return Array.from({ length: 2 * n }, (_, k) => {
     const theta = ((2 * k + 1) * Math.PI) / (2 * n);
-    const x = new Complex(Math.cos(theta) * Math.cosh(eta), -Math.sin(theta) * Math.sinh(eta));
+    const x = new Complex(cos(theta) * cosh(eta), -sin(theta) * sinh(eta));
     const s = x.mul(width).add(middle).div(-2).sqrt();
     return s.re < 0 ? s : s.neg();
   });

@@ -6,6 +6,7 @@ import type { Span } from '../quantity/span.ts';
 import type { Absence, Candidate } from './candidate.ts';
 import { equalRippleElements, ripple } from './equal-ripple-elements.ts';
 import { parallelResistance, susceptance, type ShuntAt } from './resistance-chain.ts';
+import { log10, power } from '../quantity/elementary.ts';
 
 /** One end as the method sees it: its impedance at f0 and how its reactance varies. */
 export interface EqualRippleEnd {
@@ -70,7 +71,7 @@ export function equalRipple(
       let exists = false;
       for (const n of sections) {
         const form = `equal ripple, ${String(n)} section${n === 1 ? '' : 's'}, ${pass}, shunt arm at the ${shuntAt}`;
-        const closedFormDb = -20 * Math.log10(ripple(r, bandHz.low, bandHz.high, n).reflection);
+        const closedFormDb = -20 * log10(ripple(r, bandHz.low, bandHz.high, n).reflection);
         if (closedFormDb > mostDb) {
           refused.push({
             form,
@@ -90,7 +91,7 @@ export function equalRipple(
           title: form.charAt(0).toUpperCase() + form.slice(1),
           arms: (shuntAt === 'load' ? rising : rising.toReversed()).filter(({ value }) => value > 0),
           sections: n,
-          sectionQ: Math.sqrt(r ** (1 / n) - 1),
+          sectionQ: Math.sqrt(power(r, 1 / n) - 1),
           pass,
           shuntAt,
           closedFormDb,

@@ -1,3 +1,5 @@
+import { log2 } from '../quantity/elementary.ts';
+
 /**
  * Fixed-point numbers as BigInt with 192 fractional bits, and complex ones. Extracting a ladder from its polynomials
  * loses up to half of the digits at every few elements, which double precision can't carry for six sections.
@@ -9,7 +11,7 @@ export const unity: Fixed = 1n << bits;
 
 /** Exact for every finite double of ordinary size. */
 export function toFixedPoint(value: number): Fixed {
-  const exponent = value === 0 ? 0 : Math.floor(Math.log2(Math.abs(value))) - 53;
+  const exponent = value === 0 ? 0 : Math.floor(log2(Math.abs(value))) - 53;
   const mantissa = BigInt(Math.round(value / 2 ** exponent));
   const shift = bits + BigInt(exponent);
   return shift >= 0n ? mantissa << shift : mantissa >> -shift;

@@ -2,6 +2,7 @@ import type { Complex } from 'complex.js';
 import type { Arm } from '../network/arm.ts';
 import { partOf } from '../network/arm.ts';
 import { formatFixed, formatQuantity } from '../quantity/format.ts';
+import { expm1, log1p, power } from '../quantity/elementary.ts';
 
 /** Which end has the shunt arm, and so which end is the higher resistance. */
 export type ShuntAt = 'source' | 'load';
@@ -47,7 +48,7 @@ export const parallelResistance = (z: Complex): number => (z.im === 0 ? z.re : z
  */
 export function sectionQ({ excess }: Chain, sections: number): number | null {
   if (excess < 0) return null;
-  return Math.sqrt(sections === 1 ? excess : Math.expm1(Math.log1p(excess) / sections));
+  return Math.sqrt(sections === 1 ? excess : expm1(log1p(excess) / sections));
 }
 
 /**
@@ -70,11 +71,11 @@ export function chainArms(
   q: number,
   sign: 1 | -1,
 ): Arm[] {
-  const ratio = (chain.high / chain.low) ** (1 / sections);
+  const ratio = power(chain.high / chain.low, 1 / sections);
   const arms: (Arm | null)[] = [];
   // From the low end to the high end.
   for (let k = 0; k < sections; k += 1) {
-    const low = chain.low * ratio ** k;
+    const low = chain.low * power(ratio, k);
     const high = k === sections - 1 ? chain.high : low * ratio;
     const x = sign * q * low;
     const b = (sign * q) / high;

@@ -60,7 +60,7 @@ function below(d: number, distribution: Distribution): number {
 const distributions = ['uniform', 'triangular', 'normal'] as const;
 const requiredDb = 20;
 const limit = 10 ** (-requiredDb / 20);
-/** A reactance X left over between equal resistances R has |Γ|² = X²/(4R² + X²): the largest that holds, Ω. */
+/** A reactance X left over between equal resistances R has |Γ|² = X²/(4R² + X²): the largest that Ω. */
 const largest = (2 * r * limit) / Math.sqrt(1 - limit ** 2);
 
 const cases = distributions.flatMap((distribution) => {

@@ -2,6 +2,7 @@ import type { Option, Response } from '../../dossier.ts';
 import { formatFixed, formatQuantity, formatRead } from '../../quantity/format.ts';
 import type { Span } from '../../quantity/span.ts';
 import type { DesignRecord } from '../../record/design-record.ts';
+import { log10 } from '../../quantity/elementary.ts';
 
 /** What stands where nothing was given: an empty cell would look like a slip. */
 export const notStated = 'not stated';
@@ -26,7 +27,7 @@ export const attenuation = (value: number | null): string =>
 
 /** A number without a unit, to four digits: "0.03974", "6.501". */
 export function ratio(value: number): string {
-  const decimals = value >= 1e-4 && value < 1e6 ? Math.max(0, 3 - Math.floor(Math.log10(value))) : null;
+  const decimals = value >= 1e-4 && value < 1e6 ? Math.max(0, 3 - Math.floor(log10(value))) : null;
   return decimals === null ? powerOfTen(value) : formatFixed(value, decimals);
 }
 

@@ -1,3 +1,5 @@
+import { asin, atan2, cos, sin, tan } from '../../quantity/elementary.ts';
+
 const n = (value: number): string => String(Math.round(value * 100) / 100);
 
 /**
@@ -53,20 +55,20 @@ function arc(x1: number, y1: number, x2: number, y2: number, radius: number, clo
   const toCentre = Math.sqrt(Math.max(0, r * r - half * half)) / (half || 1);
   const turn = clockwise ? 1 : -1;
   const [cx, cy] = [x1 + halfX - turn * toCentre * halfY, y1 + halfY + turn * toCentre * halfX];
-  const start = Math.atan2(y1 - cy, x1 - cx);
-  const sweep = turn * 2 * Math.asin(Math.min(1, half / r));
+  const start = atan2(y1 - cy, x1 - cx);
+  const sweep = turn * 2 * asin(Math.min(1, half / r));
   const step = sweep / 2;
-  const k = (4 / 3) * Math.tan(step / 4) * r;
+  const k = (4 / 3) * tan(step / 4) * r;
   return [0, 1].map((part): Bezier => {
     const a = start + part * step;
     const b = a + step;
     return [
-      cx + r * Math.cos(a) - k * Math.sin(a),
-      cy + r * Math.sin(a) + k * Math.cos(a),
-      cx + r * Math.cos(b) + k * Math.sin(b),
-      cy + r * Math.sin(b) - k * Math.cos(b),
-      cx + r * Math.cos(b),
-      cy + r * Math.sin(b),
+      cx + r * cos(a) - k * sin(a),
+      cy + r * sin(a) + k * cos(a),
+      cx + r * cos(b) + k * sin(b),
+      cy + r * sin(b) - k * cos(b),
+      cx + r * cos(b),
+      cy + r * sin(b),
     ];
   });
 }

@@ -3,6 +3,7 @@ import { terminationAt } from '../../network/termination-at.ts';
 import type { Limits } from './limits.ts';
 import type { FitProblem, FitProgress } from './problem.ts';
 import { kept, leading, middle, samplePoints, Search, type Trial } from './search.ts';
+import { exp, log } from '../../quantity/elementary.ts';
 
 /** Narrower than this (ln of the edges' ratio), coupled resonances are rarely found from random starts. */
 const narrowest = 0.06;
@@ -15,7 +16,7 @@ const narrowing = 0.7;
  * or the load has no reactance to speak of.
  */
 export function resonanceOf({ loads, f0, bandHz }: FitProblem): OneResonance | null {
-  const width = Math.log(bandHz.high / bandHz.low);
+  const width = log(bandHz.high / bandHz.low);
   if (width >= narrowest || width === 0) return null;
   const hz = [...samplePoints(bandHz, 17)];
   const centre = Math.sqrt(bandHz.low * bandHz.high);
@@ -31,7 +32,7 @@ export function resonanceOf({ loads, f0, bandHz }: FitProblem): OneResonance | n
 function ofWidth(problem: FitProblem, model: OneResonance, width: number): FitProblem {
   const { bandHz } = problem;
   const centre = Math.sqrt(bandHz.low * bandHz.high);
-  const ratio = Math.log(bandHz.high / bandHz.low) / width;
+  const ratio = log(bandHz.high / bandHz.low) / width;
   const q = (model.growingQ >= model.fallingQ ? 1 : -1) * Math.max(model.growingQ, model.fallingQ) * ratio;
   // In parallel, the reactance of R/(1 + jQ) has the other sign and is smaller.
   const z =
@@ -42,7 +43,7 @@ function ofWidth(problem: FitProblem, model: OneResonance, width: number): FitPr
     ...problem,
     loads: [{ ...z, behaviour: model.arrangement }],
     f0: centre,
-    bandHz: { low: centre * Math.exp(-width / 2), high: centre * Math.exp(width / 2) },
+    bandHz: { low: centre * exp(-width / 2), high: centre * exp(width / 2) },
     starts: [],
   };
 }
@@ -67,7 +68,7 @@ export function* tracked(
     // The best of the wider problem is none of the true one.
     yield { done: step.value.done, best: search.best };
   }
-  const width = Math.log(problem.bandHz.high / problem.bandHz.low);
+  const width = log(problem.bandHz.high / problem.bandHz.low);
   const stages = stepsTo(width).map((w) => ({ width: w, search: new Search(ofWidth(problem, model, w)) }));
   const trials: Trial[] = [];
   for (const [k, { shape, x }] of found.entries()) {
@@ -103,7 +104,7 @@ interface Step {
 /** Values of coupled resonators are nearly powers of the width: a step starts from where the two before it lead. */
 function predict(trial: Trial, before: Step, last: Step, width: number, limits: Limits): void {
   if (before.width === last.width) return;
-  const along = Math.log(width / last.width) / Math.log(last.width / before.width);
+  const along = log(width / last.width) / log(last.width / before.width);
   const shift = last.x.map((value, k) => along * (value - before.x[k]!));
   // A natural logarithm or more is a jump, and leads nowhere.
   if (shift.some((by, k) => Math.abs(by) * limits[trial.shape[k]!.part].half > 1)) return;

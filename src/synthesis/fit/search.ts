@@ -11,6 +11,7 @@ import type { Fitted, FitProblem, FitProgress } from './problem.ts';
 import { seeded } from './random.ts';
 import { shapesOf, type Shape } from './shape.ts';
 import { WorstMismatch } from './worst-mismatch.ts';
+import { cos, exp, log } from '../../quantity/elementary.ts';
 
 /**
  * Random starts of every shape, and starts that two elements at the source match at the band's centre (a narrow band is
@@ -71,7 +72,7 @@ export class Search {
     const scale = reactanceScale(this.dense);
     const omega = 2 * Math.PI * Math.sqrt(problem.bandHz.low * problem.bandHz.high);
     const value = ({ part }: Shape[number]): number => {
-      const x = scale * Math.exp((2 * random() - 1) * spread);
+      const x = scale * exp((2 * random() - 1) * spread);
       return part === 'inductor' ? x / omega : 1 / (omega * x);
     };
     const trials: Trial[] = [];
@@ -86,7 +87,7 @@ export class Search {
       for (let count = 0; count < randomStarts; count += 1) {
         start(
           shape,
-          Float64Array.from(shape, (arm) => toInside(Math.log(value(arm)), this.limits[arm.part])),
+          Float64Array.from(shape, (arm) => toInside(log(value(arm)), this.limits[arm.part])),
         );
       }
       for (let count = 0; count < matchedStarts && problem.elements >= 3; count += 1) {
@@ -132,11 +133,11 @@ function samples({ source, loads, f0, bandHz }: FitProblem, points: number): End
 /** Frequencies crowded towards a band's edges; the centre alone where it has no width. Hz. */
 export function samplePoints(bandHz: Span, points: number): Float64Array {
   const centre = Math.sqrt(bandHz.low * bandHz.high);
-  const half = Math.log(bandHz.high / bandHz.low) / 2;
+  const half = log(bandHz.high / bandHz.low) / 2;
   if (half === 0) return Float64Array.of(centre);
   const frequencyHz = Float64Array.from(
     { length: points },
-    (_, k) => centre * Math.exp(-half * Math.cos((Math.PI * k) / (points - 1))),
+    (_, k) => centre * exp(-half * cos((Math.PI * k) / (points - 1))),
   );
   frequencyHz[0] = bandHz.low;
   frequencyHz[points - 1] = bandHz.high;
@@ -149,11 +150,11 @@ function reactanceScale(states: readonly Ends[]): number {
   let count = 0;
   for (const { rs, xs, rl, xl } of states) {
     for (let k = 0; k < rs.length; k += 1) {
-      sum += Math.log(Math.hypot(rs[k]!, xs[k]!)) + Math.log(Math.hypot(rl[k]!, xl[k]!));
+      sum += log(Math.hypot(rs[k]!, xs[k]!)) + log(Math.hypot(rl[k]!, xl[k]!));
       count += 2;
     }
   }
-  return Math.exp(sum / count);
+  return exp(sum / count);
 }
 
 function minimiseInside(
@@ -172,7 +173,7 @@ function minimiseInside(
     (y, slope) => {
       for (let k = 0; k < n; k += 1) logs[k] = fromInside(y[k]! / bounds[k]!.half, bounds[k]!);
       const level = mismatch.at(logs, beta, slope);
-      for (let k = 0; k < n; k += 1) slope[k]! *= Math.cos(y[k]! / bounds[k]!.half);
+      for (let k = 0; k < n; k += 1) slope[k]! *= cos(y[k]! / bounds[k]!.half);
       return level;
     },
     scaled,
@@ -186,9 +187,9 @@ const fits = (arms: readonly Arm[], shape: Shape): boolean =>
   arms.length === shape.length && arms.every(({ arm, part }, k) => arm === shape[k]!.arm && part === shape[k]!.part);
 
 const inside = (arms: readonly Arm[], limits: Limits): Float64Array =>
-  Float64Array.from(arms, ({ part, value }) => toInside(Math.log(value), limits[part]));
+  Float64Array.from(arms, ({ part, value }) => toInside(log(value), limits[part]));
 
 export const fitted = ({ shape, x, level }: Trial, limits: Limits): Fitted => ({
-  arms: shape.map((arm, k) => ({ ...arm, value: Math.exp(fromInside(x[k]!, limits[arm.part])) })),
+  arms: shape.map((arm, k) => ({ ...arm, value: exp(fromInside(x[k]!, limits[arm.part])) })),
   level,
 });

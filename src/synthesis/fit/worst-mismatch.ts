@@ -1,6 +1,7 @@
 import type { Ends } from '../../network/sweep.ts';
 import type { Aim } from '../../network/termination.ts';
 import type { Shape } from './shape.ts';
+import { exp, log } from '../../quantity/elementary.ts';
 
 /**
  * The figure that a fit lowers: a smooth maximum of ln|Γ|² over band and load states,
@@ -49,7 +50,7 @@ export class WorstMismatch {
   at(logs: Float64Array, beta: number, slope: Float64Array): number {
     const m = logs.length;
     const values = this.#values;
-    for (let k = 0; k < m; k += 1) values[k] = Math.exp(logs[k]!);
+    for (let k = 0; k < m; k += 1) values[k] = exp(logs[k]!);
     let row = 0;
     for (const ends of this.#states) {
       for (let f = 0; f < ends.frequencyHz.length; f += 1) {
@@ -62,13 +63,13 @@ export class WorstMismatch {
     let sum = 0;
     slope.fill(0);
     for (let k = 0; k < row; k += 1) {
-      const weight = Math.exp(beta * (this.#levels[k]! - top));
+      const weight = exp(beta * (this.#levels[k]! - top));
       if (weight < 1e-12) continue;
       sum += weight;
       for (let e = 0; e < m; e += 1) slope[e]! += weight * this.#rows[k * m + e]!;
     }
     for (let e = 0; e < m; e += 1) slope[e]! /= sum;
-    return top + Math.log(sum) / beta;
+    return top + log(sum) / beta;
   }
 
   /** ln|Γ|² at one frequency of one state, and its slopes into `rows`. Scalars throughout: this is the hot loop. */
@@ -150,6 +151,6 @@ export class WorstMismatch {
         daIm += bk * dbRe;
       }
     }
-    return Math.log(d2 / s2);
+    return log(d2 / s2);
   }
 }

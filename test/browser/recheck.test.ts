@@ -54,6 +54,7 @@ it('says same of a report, wherever it was written and wherever it is rechecked'
   const fromPage = await saved(page, 'Download the report (PDF)');
   const fromCommand = join(folder, 'command.pdf');
   await command('report', record, '--out', fromCommand);
+  expect((await readFile(fromPage)).equals(await readFile(fromCommand))).toBe(true);
 
   for (const report of [fromPage, fromCommand]) {
     await page.goto(`${site.url()}recheck/`);

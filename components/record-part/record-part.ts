@@ -61,7 +61,7 @@ export class RecordPart extends LitElement {
           class="wide"
           single
           name="change"
-          label="What this revision changes, and why"
+          label="What it changes of the one before, and why"
           .value=${this.state.fields.change ?? ''}
           .problem=${this.state.problems.change ?? ''}
         ></area-field>

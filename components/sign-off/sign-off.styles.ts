@@ -58,7 +58,7 @@ export const styles = css`
     margin-top: 0.75rem;
   }
 
-  .said {
+  .outcome {
     min-height: 1.5em;
     margin-top: 0.375rem;
   }

@@ -152,7 +152,7 @@ export class SignOff extends LitElement {
         ></radio-field>
         <button type="button" class="main" aria-disabled=${lacks.length > 0} @click=${this.issue}>Issue</button>
       </div>
-      <p class="said" role="status">${this.said}</p>`;
+      <p class="outcome" role="status">${this.said}</p>`;
   }
 
   private lacks(): readonly string[] {

@@ -53,7 +53,7 @@ describe('typing', () => {
     const before = await outcomeOf(page);
     const field = page.getByLabel('Load impedance');
     await field.fill('9.4-k61');
-    await page.locator('sheet-part[stale]', { hasText: 'Options' }).waitFor();
+    await page.locator('sheet-part[stale]', { hasText: 'Options' }).first().waitFor();
     expect(await page.getByText('Of the last entry that could be read.').first().isVisible()).toBe(true);
     expect(await outcomeOf(page)).toBe(before);
     expect(await field.inputValue()).toBe('9.4-k61');

@@ -32,9 +32,11 @@ import type { LongWork } from './long-work.ts';
 import { givenLine, outcome } from './outcome.ts';
 import { judge, parts, type Part } from './parts.ts';
 import {
+  type Settled,
   exact,
   finished,
   goingOn,
+  ground,
   lostChoice,
   lostNotice,
   refused,
@@ -43,7 +45,6 @@ import {
   stopped,
   withOption,
   withoutChoice,
-  type Settled,
 } from './settle.ts';
 import { today } from './today.ts';
 
@@ -147,7 +148,13 @@ export class FerruleSheet extends LitElement {
 
   /** What stands below is fetched once the first result is painted. */
   protected override firstUpdated() {
-    requestAnimationFrame(() => setTimeout(() => void import('./later.ts')));
+    requestAnimationFrame(() =>
+      setTimeout(() => {
+        void import('./later.ts').then(({ groundsOf }) => {
+          this.settled = ground(this.settled, groundsOf);
+        });
+      }),
+    );
   }
 
   protected override updated() {

@@ -8,3 +8,5 @@ import '../network-part/network-part.ts';
 import '../record-part/record-part.ts';
 import '../response-part/response-part.ts';
 import '../start-revision/start-revision.ts';
+
+export { groundsOf } from '../../src/design/grounds.ts';

@@ -1,4 +1,5 @@
-import { designAtOnce, hasMore, takesLong } from '../../src/design.ts';
+import { designAtOnce, hasMore, takesLong } from '../../src/design/pipeline.ts';
+import type { Grounds } from '../../src/design/grounds.ts';
 import type { Dossier, Option } from '../../src/dossier.ts';
 import { formatProblem, InputError, type Problem } from '../../src/quantity/problem.ts';
 import { readDraft } from '../../src/record/draft.ts';
@@ -10,6 +11,18 @@ import type { FieldState } from '../base/field-state.ts';
 
 /** How far the networks of a dossier are worked out with real parts; `none`: they aren't asked for. */
 export type RealParts = 'none' | 'at work' | 'stopped' | 'whole';
+
+/** How assumptions, evidence, cautions and references are worked out; null until that is fetched. */
+let grounds: Grounds | null = null;
+
+/** From now on dossiers have grounds; one that has none yet gets them. */
+export function ground(before: Settled, how: Grounds): Settled {
+  grounds = how;
+  const { dossier } = before;
+  if (dossier === null || dossier.evidence !== null || takesLong(dossier.record)) return before;
+  const { assumptions, evidence, cautions, references } = designAtOnce(dossier.record, how);
+  return { ...before, dossier: { ...dossier, assumptions, evidence, cautions, references } };
+}
 
 /** All that the sheet shows: the texts as typed, and the dossier of the last ones that could be read. */
 export interface Settled extends FieldState {
@@ -71,7 +84,7 @@ export function retyped(before: Settled, fields: Fields, attachments: Attachment
 function fresh(record: DesignRecord) {
   const building = hasMore(record) ? record : null;
   const realParts = record.build === null ? ('none' as const) : ('at work' as const);
-  return { dossier: designAtOnce(record), stale: false, building, realParts };
+  return { dossier: designAtOnce(record, grounds), stale: false, building, realParts };
 }
 
 /** What the worker came to with exact values, while it goes on to real parts. */

@@ -1,5 +1,7 @@
-import { dossierSteps, reviewMethods } from '../design.ts';
+import { dossierSteps } from '../design/pipeline.ts';
+import { reviewMethods } from '../design.ts';
 import type { FitControl } from '../design/fitted.ts';
+import { groundsOf } from '../design/grounds.ts';
 import { realSteps } from '../design/real-parts.ts';
 import { builtEvidence } from '../evidence/built-evidence.ts';
 import { InputError } from '../quantity/problem.ts';
@@ -32,6 +34,7 @@ async function work({ id, record }: Extract<ToWorker, { kind: 'design' }>): Prom
   current = { id, control };
   const steps = dossierSteps(record, {
     equalRipple,
+    grounds: groundsOf,
     search: rememberedSearch(record, control),
     real: { steps: realSteps, evidence: builtEvidence, control },
     review: reviewMethods(control),

@@ -1,4 +1,4 @@
-import type { Search } from '../design.ts';
+import type { Search } from '../design/pipeline.ts';
 import { fittedNetworks, type FitControl } from '../design/fitted.ts';
 import type { FoundCandidate } from '../design/method.ts';
 import type { DesignRecord } from '../record/design-record.ts';

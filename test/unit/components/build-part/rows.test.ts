@@ -73,8 +73,8 @@ describe('stepRows(built, option)', () => {
 describe('sensitivityRows(sensitivity)', () => {
   it('has a sign on what a change does', () => {
     expect(sensitivityRows(built.sensitivity).rows).toEqual([
-      ['L1', '−2.48 dB', '10.26 dB', '93.6 %'],
-      ['C1', '+0.24 dB', '16.26 dB', '–'],
+      ['L1', '−2.48 dB', '+2.20 dB', '10.26 dB', '93.6 %'],
+      ['C1', '+0.24 dB', '−0.25 dB', '16.26 dB', '–'],
     ]);
   });
 });

@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { alongWith } from '../../../../components/ferrule-sheet/along-with.ts';
-import { designAtOnce } from '../../../../src/design.ts';
+import { groundsOf } from '../../../../src/design/grounds.ts';
+import { designAtOnce } from '../../../../src/design/pipeline.ts';
 import { recordOf } from '../../record-of.ts';
 
-const dossier = designAtOnce(recordOf({ frequency: '10M', source: '50', load: '200' }));
+const dossier = designAtOnce(recordOf({ frequency: '10M', source: '50', load: '200' }), groundsOf);
 const other = dossier.options.find(({ id }) => id !== dossier.chosen)!.id;
 
 describe('alongWith(change, dossier)', () => {

@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { judge, parts } from '../../../../components/ferrule-sheet/parts.ts';
 import { exact, finished, goingOn, settle, stopped, withOption } from '../../../../components/ferrule-sheet/settle.ts';
-import { designAtOnce } from '../../../../src/design.ts';
+import { groundsOf } from '../../../../src/design/grounds.ts';
+import { designAtOnce } from '../../../../src/design/pipeline.ts';
 import { defaults } from '../../../../src/record/fields.ts';
 import { built } from '../fixture.ts';
 
@@ -88,7 +89,7 @@ describe('real parts', () => {
   it('follow exact values that the worker found', () => {
     const searched = settle({ ...asked, method: 'fitted' }, null);
     expect(searched.pending).not.toBeNull();
-    const dossier = designAtOnce({ ...searched.pending!, method: 'two-element' });
+    const dossier = designAtOnce({ ...searched.pending!, method: 'two-element' }, groundsOf);
     expect(exact(searched, dossier, '')).toMatchObject({ pending: null, realParts: 'at work', stale: false });
   });
 });

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { deviating, withDeviation } from '../../../../components/sign-off/deviations.ts';
-import { designAtOnce } from '../../../../src/design.ts';
+import { groundsOf } from '../../../../src/design/grounds.ts';
+import { designAtOnce } from '../../../../src/design/pipeline.ts';
 import { readDraft } from '../../../../src/record/draft.ts';
 import { readDeviations } from '../../../../src/record/draft-build.ts';
 
@@ -13,7 +14,7 @@ const { record } = readDraft({
   'return-loss': '60',
   date: '2026-01-02',
 });
-const short = designAtOnce(record!).options[0]!;
+const short = designAtOnce(record!, groundsOf).options[0]!;
 
 describe('deviating(text, option)', () => {
   it('lists what falls short, with the reason for which it is accepted', () => {

@@ -10,6 +10,9 @@ import { keptOf } from '../../src/record/kept.ts';
 import { InputError, formatProblem } from '../../src/quantity/problem.ts';
 import { readDraft } from '../../src/record/draft.ts';
 import { attachmentsOf, type Attachments } from '../../src/record/read-termination.ts';
+import type { DraftKeeper, Recalled } from '../record-store/draft-keeper.ts';
+import type { Opened } from '../record-store/entry.ts';
+import type { Keeping } from '../record-store/keeping.ts';
 import type { FromWorker } from '../../src/workers/messages.ts';
 import { base } from '../base/base.styles.ts';
 import type { FieldChange } from '../base/field-change.ts';
@@ -97,6 +100,14 @@ export class FerruleSheet extends LitElement {
   @state() private revisionSaid = '';
   /** Outcome of reading what was measured on the finished board, in one line. */
   @state() private boardSaid = '';
+  /** How it stands with keeping what is typed; null: nothing is kept yet. */
+  @state() private keeping: Keeping | null = null;
+  /** What was typed last time, to go on with; null: nothing is offered. */
+  @state() private offer: Recalled | null = null;
+  /** Fetched after the first result. */
+  private keeper: DraftKeeper | null = null;
+  /** Something was typed since the document was opened. */
+  private touched = false;
   /** A file of which a port is to be chosen. */
   @state() private twoPort: { readonly name: string; readonly text: string } | null = null;
   /** Fetched with the first record that takes long. */
@@ -128,6 +139,7 @@ export class FerruleSheet extends LitElement {
     clearTimeout(this.voiceTimer);
     clearTimeout(this.workTimer);
     this.work?.end();
+    this.keeper?.close();
     cancelAnimationFrame(this.frame);
   }
 
@@ -150,8 +162,10 @@ export class FerruleSheet extends LitElement {
   protected override firstUpdated() {
     requestAnimationFrame(() =>
       setTimeout(() => {
-        void import('./later.ts').then(({ groundsOf }) => {
+        void import('./later.ts').then(({ groundsOf, DraftKeeper, keptIdIn }) => {
           this.settled = ground(this.settled, groundsOf);
+          const keeper = new DraftKeeper(this.method, (keeping) => (this.keeping = keeping));
+          void this.recallWith(keeper, keptIdIn(location.hash));
         });
       }),
     );
@@ -195,6 +209,13 @@ export class FerruleSheet extends LitElement {
         ${this.waiting === null ? nothing : this.renderWaiting(this.waiting)}
         <div class="document">
           ${guard([this.following, this.name, this.progress === null], () => this.renderTitle())}
+          <kept-line
+            .keeping=${this.keeping}
+            .offer=${this.offer}
+            @kept-other=${this.showOther}
+            @kept-go-on=${this.goOnWithKept}
+            @kept-leave=${() => (this.offer = null)}
+          ></kept-line>
           <search-progress
             .step=${this.settled.pending === null ? null : this.progress}
             .stoppedAfter=${this.settled.dossier?.record.fit.steps === null ? '' : (this.settled.fields.steps ?? '')}
@@ -322,8 +343,71 @@ export class FerruleSheet extends LitElement {
     const fields = readAddress(location.hash);
     // An address that names a place in the page, and no sheet, must not take what is typed away.
     if (fields === null && location.hash !== '' && this.hasUpdated) this.writeHash();
-    else this.take(fields ?? this.demo);
+    else {
+      this.beginOther();
+      this.take(fields ?? this.demo);
+    }
   };
+
+  /** Another document is shown from now on. */
+  private beginOther() {
+    this.touched = false;
+    this.offer = null;
+    this.keeper?.begin();
+  }
+
+  /** What is typed is kept from now on; what was kept before is shown, or offered where the address holds another sheet. */
+  private async recallWith(keeper: DraftKeeper, id: string | null) {
+    this.keeper = keeper;
+    if (this.touched) {
+      this.keepTyped();
+      return;
+    }
+    const shown = this.settled.fields;
+    const found = id === null ? await keeper.recall(readAddress(location.hash)) : await keeper.open(id);
+    // Whoever was quicker goes on with what was typed.
+    if (this.settled.fields !== shown) return;
+    if (found === null) {
+      if (id !== null) this.opened = 'What this address opens isn’t kept in this browser any more.';
+    } else if ('own' in found && !found.own) this.offer = found as Recalled;
+    else this.showKept(found);
+  }
+
+  private showKept(found: Opened) {
+    this.attach(found.attachments);
+    this.keep({ ...found.kept, document: found.fields.number ?? '' });
+    this.take(found.fields);
+    this.touched = true;
+    this.offer = null;
+    this.writeHash();
+  }
+
+  private readonly goOnWithKept = async () => {
+    const found = this.offer === null ? null : await this.keeper?.open(this.offer.entry.id);
+    if (found === null || found === undefined) this.offer = null;
+    else this.showKept(found);
+  };
+
+  private readonly showOther = async () => {
+    const found = await this.keeper?.openOther();
+    if (found !== null && found !== undefined) this.showKept(found);
+  };
+
+  /** An issued record is kept as a frozen revision; any other as it is typed. */
+  private keepTyped() {
+    this.touched = true;
+    this.offer = null;
+    const { fields } = this.settled;
+    this.keeper?.keep(fields, this.kept, this.attachments);
+    if (fields.state !== 'issued') return;
+    const { record } = readDraft(fields, this.attachments, this.kept);
+    if (record !== null) void this.keepIssued(record);
+  }
+
+  private async keepIssued(record: DesignRecord) {
+    const problem = (await this.keeper?.saveIssued(record)) ?? null;
+    if (problem !== null) this.opened = this.said = formatProblem(problem);
+  }
 
   private take(fields: Fields) {
     // A sheet serves several methods; an address that asks for one of another sheet gets this sheet's own.
@@ -431,6 +515,7 @@ export class FerruleSheet extends LitElement {
     // A document that is numbered anew is the same document.
     if (name === 'number') this.keep({ ...this.kept, document: changed.number ?? '' });
     this.settleTo(settle(fields, this.settled, this.attachments, this.kept), delay);
+    this.keepTyped();
     clearTimeout(this.addressTimer);
     this.addressTimer = window.setTimeout(this.writeHash, pause.address);
     clearTimeout(this.voiceTimer);
@@ -474,6 +559,8 @@ export class FerruleSheet extends LitElement {
     this.waiting = null;
     this.revisionSaid = '';
     this.settleTo(settle(next.fields, this.settled, this.attachments, this.kept));
+    this.beginOther();
+    this.keepTyped();
     this.writeHash();
     this.said = `Revision ${next.fields.revision ?? ''} is started, as a draft.`;
   }
@@ -494,6 +581,7 @@ export class FerruleSheet extends LitElement {
     }
     this.keep({ ...this.kept, asBuilt: board });
     this.settleTo(settle(this.settled.fields, this.settled, this.attachments, this.kept), pause.work);
+    this.keepTyped();
   }
 
   private readonly writeHash = () => {
@@ -631,7 +719,9 @@ export class FerruleSheet extends LitElement {
         location.assign(`${import.meta.env.BASE_URL}${pathOf(record.method)}#${writeAddress(fields)}`);
         return;
       }
+      this.beginOther();
       this.take(fields);
+      this.keepTyped();
       this.writeHash();
       this.opened = `Opened ${file.name}: ${record.identity.title}, revision ${record.identity.revision}.`;
     } catch (error) {

@@ -107,7 +107,7 @@ function cautionOf(turns: number, lengthM: number, diameterM: number): string {
     );
   }
   const ratio = lengthM / diameterM;
-  if (ratio < 1 || ratio > 5) {
+  if (ratio < medhurst[0][0] || ratio > medhurst.at(-1)![0]) {
     cautions.push(
       `Length over diameter, ${ratio.toPrecision(3)}, is outside 0.1 to 10: no figure for its self-capacitance and self-resonance.`,
     );

@@ -3,7 +3,8 @@ import * as elementary from '../../../src/quantity/elementary.ts';
 
 /** Largest relative difference from the machine's own, which is itself good to a bit or so. */
 function furthest(name: keyof typeof elementary & keyof Math, values: readonly number[]): number {
-  const [ours, machine] = [elementary[name], Math[name]] as [(x: number) => number, (x: number) => number];
+  const ours = (x: number): number => elementary[name](x, 0);
+  const machine = (x: number): number => Math[name](x, 0);
   return Math.max(
     ...values.map((x) => {
       const expected = machine(x);

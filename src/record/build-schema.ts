@@ -100,7 +100,7 @@ export const buildSchema: v.GenericSchema<unknown, Build> = v.pipe(
     ),
     seed: v.pipe(
       between('the seed', 0, 4294967295, 'a whole number from 0 to 4294967295'),
-      v.integer('the seed is not whole; give a whole number from 0'),
+      v.integer('the seed is not whole; give a whole number from 0 to 4294967295'),
     ),
     leastYield: v.nullable(
       v.pipe(

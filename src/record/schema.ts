@@ -185,7 +185,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       shuntInductor: v.boolean('whether shunt inductors are allowed is not yes or no; give yes or no'),
       seed: v.pipe(
         between('the seed', 0, 4294967295, 'a whole number from 0 to 4294967295'),
-        v.integer('the seed is not whole; give a whole number from 0'),
+        v.integer('the seed is not whole; give a whole number from 0 to 4294967295'),
       ),
       steps: v.nullable(
         v.pipe(

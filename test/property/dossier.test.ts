@@ -6,7 +6,13 @@ import { anyRecord } from './records.ts';
 
 /** Where src/dossier.ts says that null may stand, besides inside the record. */
 const mayBeNull = [
-  /^\.(sections|proposed|chosen|ceiling|evidence)$/,
+  /^\.(sections|proposed|chosen|ceiling|evidence|asBuilt|difference)$/,
+  /^\.options\[\]\.built(\.(yield|percentiles|corners|stress))?$/,
+  /^\.options\[\]\.built\.ladder\.arms\[\]\.q$/,
+  /^\.options\[\]\.built\.parts\[\]\.(pair|selfResonanceHz|ratedVolts|ratedAmps)$/,
+  /^\.options\[\]\.built\.(sets\[\]\.yield|corners\.meets|sensitivity\[\]\.yieldIfHalved)$/,
+  /^\.options\[\]\.built\.stress\.(vswr|first|within|parts\[\]\.(mismatched|limitW|limitBy))$/,
+  /^\.options\[\]\.built\.coils\[\]\.(selfCapacitanceF|selfResonanceHz)$/,
   /^\.options\[\]\.(states\[\]\.)?(worstReturnLossDb|worstAtHz|loadedQ|bandwidthFromQHz|ceilingGapDb)$/,
   /\.halfPower\.(lowHz|highHz|bandwidthHz)$/,
   /^\.sections\.(smallest|bestReturnLossDb)$/,

@@ -173,7 +173,7 @@ export const parts: readonly Part[] = [
   },
   {
     name: 'Finished board',
-    basis: always([]),
+    basis: always(['B40']),
     fields: [],
     judge: ({ dossier, building }) => {
       if ((dossier?.record.asBuilt ?? null) === null) return { verdict: 'not assessed', words: 'not measured' };

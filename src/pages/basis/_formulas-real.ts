@@ -169,4 +169,17 @@ export const realFormulas: readonly Formula[] = [
     symbols: [['K', 'self-capacitance per diameter', 'pF/cm', '']],
     source: 'R. G. Medhurst, Wireless Engineer 24, 1947 (table quoted from memory).',
   },
+  {
+    number: 'B40',
+    title: 'Finished board',
+    lines: ['d = sqrt(frac(1; n) (|Γ_1 − Γ_pred|^2 + … + |Γ_n − Γ_pred|^2))'],
+    text: [
+      'What was measured, looking in from the source’s side with the load attached, as a reflection coefficient for the aim (B1), against the prediction with real parts at the same frequencies, 201 at most. Each single cause is fitted by itself to the least d: the value or the Q of one part, a capacitance at one node, an inductance in one shunt arm, a shift of the load. Causes whose residuals lie within 10 % of the least are told as alike; where more than half of the distance is left, none explains the board. The verdict is over all samples in the band and its ends, interpolated, never beyond the data.',
+    ],
+    symbols: [
+      ['d', 'distance between measurement and prediction', '1', '0 to 2'],
+      ['n', 'number of frequencies', '1', ''],
+    ],
+    source: 'Least squares; the list of causes is one of this work.',
+  },
 ];

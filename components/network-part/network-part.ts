@@ -1,5 +1,6 @@
 import { LitElement, html, nothing, type TemplateResult } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
+import { drawnArms } from '../../src/design/drawn-arms.ts';
 import { loadLabel, terminationLabel } from '../../src/record/read-termination.ts';
 import type { Built, Dossier, Option } from '../../src/dossier.ts';
 import { schematic } from '../../src/figures/schematic.ts';
@@ -25,7 +26,7 @@ export class NetworkPart extends LitElement {
     const { source, loads } = this.dossier.record;
     return html`
       <div class="drawing" tabindex="0" role="group" aria-label="Schematic">
-        ${drawing(schematic(option.arms, option.designators, terminationLabel(source), loadLabel(loads)))}
+        ${drawing(schematic(drawnArms(option), option.designators, terminationLabel(source), loadLabel(loads)))}
       </div>
       <div class="columns">
         <div>

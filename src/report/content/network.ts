@@ -1,8 +1,8 @@
 import type { Dossier, Option } from '../../dossier.ts';
 import { schematic } from '../../figures/schematic.ts';
-import type { Arm } from '../../network/arm.ts';
 import { formatImpedance, formatQuantity } from '../../quantity/format.ts';
 import { loadLabel, terminationLabel } from '../../record/read-termination.ts';
+import { drawnArms } from '../../design/drawn-arms.ts';
 import { plain, text, type Block } from '../page/block.ts';
 import { order } from './order.ts';
 import { parts } from './parts.ts';
@@ -31,10 +31,6 @@ export function network(dossier: Dossier): readonly Block[] {
     ...(built === null || build === null ? exactParts(dossier, option) : order(dossier, option, built, build)),
   ];
 }
-
-/** A drawing and a parts list that disagree would both be wrong: of real parts, the values are those to order. */
-const drawnArms = ({ arms, built }: Option): readonly Arm[] =>
-  built === null ? arms : arms.map((arm, k) => ({ ...arm, value: built.ladder.arms[k]?.value ?? arm.value }));
 
 function exactParts(dossier: Dossier, option: Option): readonly Block[] {
   return [

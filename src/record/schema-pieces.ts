@@ -73,3 +73,17 @@ function isDate(value: string): boolean {
   const parsed = new Date(`${value}T00:00:00Z`);
   return !Number.isNaN(parsed.getTime()) && parsed.toISOString().startsWith(value);
 }
+
+/** Letters that the report's typeface hasn't, and pictures. */
+const unprintable =
+  /[^\p{Script=Latin}\p{Script=Greek}\p{Script=Cyrillic}\p{Script=Common}\p{Script=Inherited}]|\p{Emoji_Presentation}/u;
+
+/** A text of the engineer's own, which the report prints: in letters that it has. */
+export const printed = (what: string, letters: number, refused = controls) =>
+  v.pipe(
+    text(what, letters, refused),
+    v.check(
+      (value) => !unprintable.test(value),
+      `${what} has letters that the report cannot print; write it in Latin, Greek or Cyrillic letters`,
+    ),
+  );

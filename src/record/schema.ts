@@ -6,7 +6,7 @@ import { mostSections } from '../synthesis/cascade.ts';
 import { buildSchema } from './build-schema.ts';
 import type { DesignRecord } from './design-record.ts';
 import { methods, requirements } from './design-record.ts';
-import { between, controlsButNewLine, date, frequency, limits, number, span, text } from './schema-pieces.ts';
+import { between, controlsButNewLine, date, frequency, limits, number, printed, span, text } from './schema-pieces.ts';
 
 /**
  * What a record may hold. The same schema reads records, checks the sheet's fields and writes the published JSON
@@ -96,10 +96,10 @@ function termination(what: string): v.GenericSchema<unknown, Termination> {
 
 const signature = (what: string) =>
   v.strictObject({
-    name: text(`the name under ${what}`, limits.nameLetters),
-    role: text(`the role under ${what}`, limits.nameLetters),
+    name: printed(`the name under ${what}`, limits.nameLetters),
+    role: printed(`the role under ${what}`, limits.nameLetters),
     date: date(`the date under ${what}`, true),
-    remark: text(`the remark under ${what}`, limits.remarkLetters, controlsButNewLine),
+    remark: printed(`the remark under ${what}`, limits.remarkLetters, controlsButNewLine),
   });
 
 /** One revision before: a whole record, itself without one before. */
@@ -117,13 +117,13 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
   v.strictObject({
     schema: v.literal('ferrule-record/2', 'this schema is unknown; give "ferrule-record/2"'),
     identity: v.strictObject({
-      title: text('the title', limits.nameLetters),
-      number: text('the document number', limits.nameLetters),
-      revision: text('the revision', limits.nameLetters),
+      title: printed('the title', limits.nameLetters),
+      number: printed('the document number', limits.nameLetters),
+      revision: printed('the revision', limits.nameLetters),
       date: date('the date of issue', false),
-      ticket: text('the change ticket', limits.nameLetters),
-      owner: text('the legal owner', limits.nameLetters),
-      change: text('the change', limits.reasonLetters, controlsButNewLine),
+      ticket: printed('the change ticket', limits.nameLetters),
+      owner: printed('the legal owner', limits.nameLetters),
+      change: printed('the change', limits.reasonLetters, controlsButNewLine),
     }),
     requirement: v.strictObject({
       frequencyHz: frequency('the design frequency'),
@@ -160,7 +160,10 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     source: termination('source'),
     loads: v.pipe(
       v.array(
-        v.strictObject({ name: text("the load state's name", limits.stateLetters), termination: termination('load') }),
+        v.strictObject({
+          name: printed("the load state's name", limits.stateLetters),
+          termination: termination('load'),
+        }),
       ),
       v.minLength(1, 'no load is given; give one state or more'),
       v.maxLength(limits.states, `there are too many load states; give at most ${String(limits.states)}`),
@@ -207,7 +210,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     ),
     selection: v.strictObject({
       option: v.nullable(text('the chosen network', limits.nameLetters)),
-      reason: text('the reason', limits.reasonLetters, controlsButNewLine),
+      reason: printed('the reason', limits.reasonLetters, controlsButNewLine),
       set: v.picklist([1, 2, 3], 'the set of values is unknown; give 1, 2 or 3'),
     }),
     deviations: v.pipe(
@@ -217,7 +220,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
             requirements,
             `a deviation is from what is required; begin it with one of ${requirements.join(', ')}, as in "return loss = accepted because …"`,
           ),
-          reason: text('the reason of a deviation', limits.reasonLetters),
+          reason: printed('the reason of a deviation', limits.reasonLetters),
         }),
       ),
       v.maxLength(limits.deviations, `there are too many deviations; give at most ${String(limits.deviations)}`),
@@ -225,9 +228,9 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
     history: v.pipe(
       v.array(
         v.strictObject({
-          revision: text('an earlier revision', limits.nameLetters),
+          revision: printed('an earlier revision', limits.nameLetters),
           date: date('the date of an earlier revision', false),
-          change: text('the change of an earlier revision', limits.reasonLetters, controlsButNewLine),
+          change: printed('the change of an earlier revision', limits.reasonLetters, controlsButNewLine),
           digest,
         }),
       ),
@@ -238,7 +241,7 @@ export const recordSchema: v.GenericSchema<unknown, DesignRecord> = v.pipe(
       v.strictObject({
         measured: measuredData('board'),
         state: v.nullable(text('the load state attached', limits.stateLetters)),
-        note: text('the note on the board', limits.reasonLetters, controlsButNewLine),
+        note: printed('the note on the board', limits.reasonLetters, controlsButNewLine),
       }),
     ),
     signOff: v.strictObject({

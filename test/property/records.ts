@@ -27,11 +27,17 @@ const around = (f0: number): fc.Arbitrary<Span> =>
     .tuple(value(1.001, 500), value(1.001, 500))
     .map(([below, above]) => ({ low: Math.max(1, f0 / below), high: Math.min(1e12, f0 * above) }));
 
-/** Printable text of any script; in a reason, lines too. */
+/** Text that the report can print; in a reason, lines too. */
 const text = (mostLetters: number, lines = false): fc.Arbitrary<string> =>
   fc
     .string({ unit: 'grapheme', maxLength: 12 })
-    .map((letters) => letters.replace(/[\p{Cc}\p{Zl}\p{Zp}]/gu, ''))
+    .map((letters) => letters.replace(/[\p{Cc}\p{Zl}\p{Zp}\p{Emoji_Presentation}]/gu, ''))
+    .map((letters) =>
+      letters.replace(
+        /[^\p{Script=Latin}\p{Script=Greek}\p{Script=Cyrillic}\p{Script=Common}\p{Script=Inherited}]/gu,
+        'x',
+      ),
+    )
     .map((letters) => (lines ? `${letters}\n${letters}` : letters))
     .filter((letters) => letters.length <= mostLetters);
 

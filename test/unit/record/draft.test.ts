@@ -191,6 +191,16 @@ describe('fieldsOf(record)', () => {
   });
 });
 
+describe('readDraft(fields) of other scripts', () => {
+  it.each(['Müller & Søn', 'Ωμέγα', 'Пётр', 'Nguyễn', '50 Ω → 75 Ω'])('takes "%s"', (title) => {
+    expect(readDraft({ ...sound, title }).problems).toEqual([]);
+  });
+
+  it.each(['整合回路', 'מעגל', 'دائرة', 'match 🙂'])('refuses "%s" at its field, as it can not be printed', (title) => {
+    expect(readDraft({ ...sound, title }).problems.map(({ field, read }) => [field, read])).toEqual([['title', title]]);
+  });
+});
+
 describe('pathOf', () => {
   it('leads every field to a place that the record has', () => {
     const record = recordOf({ ...sound, band: '150M..152M', 'series-inductor': 'E24' });

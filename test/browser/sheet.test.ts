@@ -93,7 +93,7 @@ describe('the address', () => {
     await page.getByLabel('Return loss over the band, at least').fill('fourteen & more');
     await page.getByLabel('Why this one').fill('Ω ≠ "0"\nsecond line');
     await page.getByLabel('Title').fill('');
-    await page.waitForFunction(() => location.hash.includes('second+line') && location.hash.includes('title='));
+    await page.waitForFunction(() => location.hash.includes('second+line') && /[#&]title=(&|$)/u.test(location.hash));
     const address = page.url().slice(site.url().length);
 
     const other = await site.visit(address);

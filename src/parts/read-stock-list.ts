@@ -3,10 +3,8 @@ import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
 import { InputError, type Problem } from '../quantity/problem.ts';
 import { readStockPart, stockColumns, type StockColumn } from './read-stock-part.ts';
 import { separatedValues, type Row } from './separated-values.ts';
-import type { StockList, StockPart } from './stock.ts';
+import { mostStockParts, type StockList, type StockPart } from './stock.ts';
 
-/** Most parts that a list may have: it travels in the record. */
-const mostParts = 10_000;
 /** Longest file: many times what so many parts fill. */
 const mostLetters = 10_000_000;
 /** Most problems told at once; the rest are counted. */
@@ -32,7 +30,7 @@ export function readStockList(text: string, fileName: string): StockList {
       'keep the parts of the values and kinds in question',
     );
   }
-  const { rows, more, brokenQuote } = separatedValues(text, mostParts + 1);
+  const { rows, more, brokenQuote } = separatedValues(text, mostStockParts + 1);
   if (brokenQuote !== null) {
     throw new InputError({
       field: lineName(brokenQuote),
@@ -48,7 +46,7 @@ export function readStockList(text: string, fileName: string): StockList {
   if (more > 0) {
     throw listProblem(
       `${String(lines.length + more)} parts are too many`,
-      `give at most ${String(mostParts)}, of the values and kinds in question`,
+      `give at most ${String(mostStockParts)}, of the values and kinds in question`,
     );
   }
   const { parts, problems } = partsOf(lines, columns);

@@ -19,6 +19,9 @@ export interface StockPart {
   readonly ratedAmps: number | null;
 }
 
+/** Most parts that a list may have: it travels in the record. */
+export const mostStockParts = 10_000;
+
 /** The parts that can be had, as read from the engineer's own list. */
 export interface StockList {
   /** File name. */

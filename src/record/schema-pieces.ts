@@ -1,4 +1,5 @@
 import * as v from 'valibot';
+import { mostStockParts } from '../parts/stock.ts';
 
 /** Pieces of the record's schema. Messages are the two later parts of a problem: why it won't do; what would. */
 
@@ -18,7 +19,7 @@ export const limits = {
   reasonLetters: 4000,
   remarkLetters: 1000,
   draws: 1_000_000,
-  stockParts: 10_000,
+  stockParts: mostStockParts,
   deviations: 20,
   revisions: 200,
 } as const;

@@ -3,6 +3,7 @@ import type { Reflections } from './aimed-reflection.ts';
 import { rmsDistance } from './board-sweep.ts';
 import { withFault, type Board } from './board.ts';
 import { faultOf, hypothesesOf, type Hypothesis, type Scale } from './hypotheses.ts';
+import { goldenMaximum } from '../../network/search.ts';
 
 /** Distance in Γ that calibration and repeatability of a good measurement leave; what lies below tells nothing. */
 export const measurementFloor = 0.002;
@@ -13,6 +14,8 @@ const leaves = 0.5;
 /** A cause that takes away less than this part of the distance takes nothing away. */
 const counts = 0.01;
 const scanned = 61;
+/** Golden sections that find a dip's bottom. */
+const refinements = 18;
 
 export interface Fitted {
   readonly fault: Fault;
@@ -62,33 +65,8 @@ function fit(hypothesis: Hypothesis, residualOf: (fault: Fault) => number): Fitt
     .filter(({ value }, k, [deepest]) => k < 2 && value <= 2 * deepest!.value);
   let best = { t: dips[0]!.t, value: dips[0]!.value };
   for (const { t } of dips) {
-    const refined = goldenMinimum(at, Math.max(hypothesis.from, t - step), Math.min(1, t + step));
-    if (refined.value < best.value) best = refined;
+    const dip = goldenMaximum((u) => -at(u), Math.max(hypothesis.from, t - step), Math.min(1, t + step), refinements);
+    if (-dip.value < best.value) best = { t: dip.at, value: -dip.value };
   }
   return { fault: faultOf(hypothesis, best.t), residual: best.value };
-}
-
-/** Least value of a function with one dip between two points (golden section, to 1e-4 of the interval). */
-function goldenMinimum(
-  f: (t: number) => number,
-  low: number,
-  high: number,
-): { readonly t: number; readonly value: number } {
-  const ratio = (Math.sqrt(5) - 1) / 2;
-  let [a, b] = [low, high];
-  let c = b - ratio * (b - a);
-  let d = a + ratio * (b - a);
-  let [fc, fd] = [f(c), f(d)];
-  for (let k = 0; k < 18; k += 1) {
-    if (fc < fd) {
-      [b, d, fd] = [d, c, fc];
-      c = b - ratio * (b - a);
-      fc = f(c);
-    } else {
-      [a, c, fc] = [c, d, fd];
-      d = a + ratio * (b - a);
-      fd = f(d);
-    }
-  }
-  return fc < fd ? { t: c, value: fc } : { t: d, value: fd };
 }
